@@ -1,5 +1,8 @@
 import { defineConfig } from 'vitest/config';
 
+// A zone with summer time, wherever the machine stands; TEST_TZ runs the same tests in another.
+process.env.TZ = process.env.TEST_TZ ?? 'Europe/London';
+
 // Pure floors run in plain Node; tests of screens say `// @vitest-environment happy-dom` at their head.
 export default defineConfig({
   test: {
@@ -7,5 +10,7 @@ export default defineConfig({
     exclude: ['test/browser/**', 'node_modules/**'],
     environment: 'node',
     maxWorkers: 2,
+    retry: 0,
+    allowOnly: false,
   },
 });

@@ -1,0 +1,4 @@
+import { check } from './run/runners.mjs';
+import { finish } from './run/summary.mjs';
+
+finish(await check());
