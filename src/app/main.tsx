@@ -1,0 +1,7 @@
+import { registerSW } from 'virtual:pwa-register';
+import { createRoot } from 'react-dom/client';
+
+registerSW({});
+
+const root = document.getElementById('root');
+if (root) createRoot(root).render(<main aria-label="Lookbell">Lookbell</main>);
