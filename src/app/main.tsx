@@ -4,4 +4,9 @@ import { createRoot } from 'react-dom/client';
 registerSW({});
 
 const root = document.getElementById('root');
-if (root) createRoot(root).render(<main aria-label="Lookbell">Lookbell</main>);
+if (root)
+  createRoot(root).render(
+    <main>
+      <h1>Lookbell</h1>
+    </main>,
+  );

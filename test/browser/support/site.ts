@@ -1,0 +1,59 @@
+import { cpSync, mkdtempSync, readFileSync, rmSync, writeFileSync } from 'node:fs';
+import { tmpdir } from 'node:os';
+import { join } from 'node:path';
+import { type Served, serve } from '../../../tools/serve.mjs';
+
+/** The host of the built app, which a test can stop, start again at the same address, and give a new version. */
+export class Site {
+  private served: Served | undefined;
+  private port = 0;
+  private dir = 'dist';
+  private versions: string[] = [];
+
+  /** @param base the folder under which the app is served, `/` or `/some/folder/` */
+  constructor(private readonly base = '/') {}
+
+  /** The app's address, also while the site is stopped. */
+  get url(): string {
+    return `http://127.0.0.1:${this.port}${this.base}`;
+  }
+
+  get origin(): string {
+    return new URL(this.url).origin;
+  }
+
+  async start(): Promise<void> {
+    if (this.served) return;
+    this.served = await serve({ dir: this.dir, port: this.port, base: this.base });
+    this.port = this.served.port;
+  }
+
+  async stop(): Promise<void> {
+    await this.served?.close();
+    this.served = undefined;
+  }
+
+  /**
+   * Puts a newer version on the site: the same app, whose page says `data-version` with the given text at its
+   * root element, and a service worker that knows the new page.
+   */
+  async publish(version: string): Promise<void> {
+    const dir = mkdtempSync(join(tmpdir(), 'site-'));
+    this.versions.push(dir);
+    cpSync('dist', dir, { recursive: true });
+    const page = readFileSync(join(dir, 'index.html'), 'utf8');
+    writeFileSync(join(dir, 'index.html'), page.replace('<html ', `<html data-version="${version}" `));
+    const worker = readFileSync(join(dir, 'sw.js'), 'utf8');
+    const renewed = worker.replace(/(url:\s*"index\.html",\s*revision:\s*")[^"]+/, `$1${version}`);
+    if (renewed === worker) throw new Error('the service worker does not list index.html');
+    writeFileSync(join(dir, 'sw.js'), renewed);
+    this.dir = dir;
+    await this.stop();
+    await this.start();
+  }
+
+  async remove(): Promise<void> {
+    await this.stop();
+    for (const dir of this.versions) rmSync(dir, { recursive: true });
+  }
+}
