@@ -1,0 +1,164 @@
+import * as z from 'zod/mini';
+import { id, longText, shortText, wallTime, whole } from '../model/common.ts';
+import { missingReason } from '../model/missing.ts';
+
+const interval = z.int().check(z.minimum(1));
+const at = z.int();
+/** The identity of an entry inside its session. */
+export const entryRef = z.object({ writer: id, seq: whole });
+export type EntryRef = z.infer<typeof entryRef>;
+
+/** Which cue: a momentary look, or the beginning of an observe or a record part. */
+export const cueKind = z.enum(['look', 'observe', 'record']);
+export type CueKind = z.infer<typeof cueKind>;
+
+export const cueCarrier = z.enum(['sound', 'screen', 'vibration']);
+export type CueCarrier = z.infer<typeof cueCarrier>;
+
+/** Why a stretch of the schedule ran without the tablet: closed (killed, battery), hidden, asleep, sound stuck, clock moved. */
+export const gapCause = z.enum(['closed', 'hidden', 'asleep', 'sound', 'clock']);
+export type GapCause = z.infer<typeof gapCause>;
+
+export const awayReason = z.enum(['left the room', 'with another adult', 'not taking part']);
+export type AwayReason = z.infer<typeof awayReason>;
+
+/** What each kind of entry says beside who wrote it and when. */
+const bodies = {
+  /** Recording began; `checks` are those that stood on hold, `anyway` says that the observer started all the same. */
+  started: z.object({
+    kind: z.literal('started'),
+    checks: z.array(shortText),
+    anyway: z.boolean(),
+    audioLatencyMs: z.optional(z.number()),
+  }),
+  /** A cue as planned and as delivered; `by` empty means that it was neither heard nor shown. */
+  cued: z.object({
+    kind: z.literal('cued'),
+    interval,
+    cue: cueKind,
+    planned: at,
+    delivered: z.nullable(at),
+    by: z.array(cueCarrier),
+  }),
+  /** A code touched for an interval; null = observed, none of the codes occurred. `late`: within the grace; `before`: by "child before". */
+  marked: z.object({
+    kind: z.literal('marked'),
+    interval,
+    code: z.nullable(shortText),
+    late: z.optional(z.boolean()),
+    before: z.optional(z.boolean()),
+    /** Headcount: children on-task and children present. */
+    counts: z.optional(z.object({ on: whole, present: whole })),
+  }),
+  missing: z.object({
+    kind: z.literal('missing'),
+    interval,
+    reason: missingReason,
+    late: z.optional(z.boolean()),
+    before: z.optional(z.boolean()),
+  }),
+  /** Undo: the named entry counts as not made. */
+  withdrawn: z.object({ kind: z.literal('withdrawn'), target: entryRef }),
+  interrupted: z.object({ kind: z.literal('interrupted') }),
+  continued: z.object({ kind: z.literal('continued') }),
+  paused: z.object({ kind: z.literal('paused') }),
+  resumed: z.object({ kind: z.literal('resumed') }),
+  left: z.object({ kind: z.literal('left'), child: id, reason: awayReason }),
+  returned: z.object({ kind: z.literal('returned'), child: id }),
+  moved: z.object({ kind: z.literal('moved'), child: id, seat: id }),
+  lessonPart: z.object({ kind: z.literal('lessonPart'), lessonPart: z.nullable(shortText) }),
+  /** A phase opens: part `part` of the schedule begins at session time `origin`. */
+  phaseStarted: z.object({ kind: z.literal('phaseStarted'), phase: shortText, part: whole, origin: at }),
+  breakStarted: z.object({ kind: z.literal('breakStarted') }),
+  breakEnded: z.object({
+    kind: z.literal('breakEnded'),
+    what: z.optional(longText),
+    ledBy: z.optional(longText),
+  }),
+  flagged: z.object({ kind: z.literal('flagged'), interval: z.nullable(interval) }),
+  noted: z.object({ kind: z.literal('noted'), text: longText, about: z.optional(entryRef) }),
+  clockNudged: z.object({ kind: z.literal('clockNudged'), by: at }),
+  /** Sound switched: by hand (silence) or because the output changed (earpiece pulled out). */
+  outputChanged: z.object({
+    kind: z.literal('outputChanged'),
+    sound: z.boolean(),
+    cause: z.enum(['hand', 'device']),
+    output: z.optional(z.string()),
+  }),
+  gap: z.object({ kind: z.literal('gap'), from: at, to: at, cause: gapCause, estimated: z.boolean() }),
+  ended: z.object({
+    kind: z.literal('ended'),
+    reason: z.enum(['complete', 'early']),
+    words: z.optional(longText),
+  }),
+  /** A correction after the session: `codes` or a missing reason, with why and by whom. */
+  amended: z.object({
+    kind: z.literal('amended'),
+    interval,
+    codes: z.nullable(z.array(shortText)),
+    missing: z.nullable(missingReason),
+    why: longText,
+    by: shortText,
+  }),
+  /** An agreed code after review; it never replaces the mark. */
+  settled: z.object({
+    kind: z.literal('settled'),
+    interval,
+    codes: z.array(shortText),
+    why: longText,
+    by: shortText,
+  }),
+};
+
+const body = z.discriminatedUnion('kind', [
+  bodies.started,
+  bodies.cued,
+  bodies.marked,
+  bodies.missing,
+  bodies.withdrawn,
+  bodies.interrupted,
+  bodies.continued,
+  bodies.paused,
+  bodies.resumed,
+  bodies.left,
+  bodies.returned,
+  bodies.moved,
+  bodies.lessonPart,
+  bodies.phaseStarted,
+  bodies.breakStarted,
+  bodies.breakEnded,
+  bodies.flagged,
+  bodies.noted,
+  bodies.clockNudged,
+  bodies.outputChanged,
+  bodies.gap,
+  bodies.ended,
+  bodies.amended,
+  bodies.settled,
+]);
+
+export const entryKinds: readonly string[] = Object.keys(bodies);
+
+/** What an entry says. */
+export type EntryBody = z.infer<typeof body>;
+export type EntryKind = EntryBody['kind'];
+
+/**
+ * Who wrote an entry and when: (session, writer, seq) is its identity; `at` is session time in integer
+ * milliseconds; `wall` is the wall clock with offset, which measures nothing.
+ */
+export const entryStamp = z.object({ session: id, writer: id, seq: whole, at, wall: wallTime });
+export type EntryStamp = z.infer<typeof entryStamp>;
+
+export const knownEntry = z.intersection(entryStamp, body);
+export type KnownEntry = EntryStamp & EntryBody;
+
+/** An entry of a kind that this version does not know: kept as it is and passed on. */
+export type UnknownEntry = EntryStamp & { readonly kind: string } & Readonly<Record<string, unknown>>;
+
+export type JournalEntry = KnownEntry | UnknownEntry;
+
+/** True for kinds that this version understands. */
+export function isKnown(entry: JournalEntry): entry is KnownEntry {
+  return entryKinds.includes(entry.kind);
+}

@@ -1,0 +1,154 @@
+import type { SessionHeader } from '../model/session.ts';
+import { isKnown, type JournalEntry, type KnownEntry } from './entry.ts';
+import { inOrder } from './order.ts';
+import { type Cover, emptyState, type JournalState } from './state.ts';
+
+/** Reads one more entry. Total: an entry that makes no sense where it stands changes nothing but the count. */
+export function step(state: JournalState, entry: JournalEntry): JournalState {
+  const counted = { ...state, read: state.read + 1, at: Math.max(state.at, entry.at) };
+  if (!isKnown(entry)) return counted;
+  if (entry.kind === 'withdrawn') {
+    const { writer, seq } = entry.target;
+    const entries = state.entries.filter((other) => other.writer !== writer || other.seq !== seq);
+    if (entries.length === state.entries.length) return counted;
+    // Undo reads everything anew: rare, and so there is only one truth about what an entry does.
+    return { ...build(state.header, entries), read: counted.read, at: counted.at };
+  }
+  const draft = { ...copied(counted), entries: [...state.entries, entry] };
+  apply(draft, entry);
+  return draft;
+}
+
+/** Reads a whole journal, in whatever order it was stored. The same as one `step` after the other, in linear time. */
+export function fold(header: SessionHeader, entries: readonly JournalEntry[]): JournalState {
+  const ordered = inOrder(entries);
+  const counting: KnownEntry[] = [];
+  const positions = new Map<string, number[]>();
+  const gone = new Set<number>();
+  for (const entry of ordered) {
+    if (!isKnown(entry)) continue;
+    if (entry.kind === 'withdrawn') {
+      for (const at of positions.get(`${entry.target.writer} ${entry.target.seq}`) ?? []) gone.add(at);
+      continue;
+    }
+    const key = `${entry.writer} ${entry.seq}`;
+    positions.set(key, [...(positions.get(key) ?? []), counting.length]);
+    counting.push(entry);
+  }
+  const state = build(
+    header,
+    counting.filter((_, i) => !gone.has(i)),
+  );
+  return {
+    ...state,
+    read: ordered.length,
+    at: ordered.reduce((latest, entry) => Math.max(latest, entry.at), state.at),
+  };
+}
+
+type Draft = { -readonly [Key in keyof JournalState]: JournalState[Key] } & {
+  sayings: Map<number, JournalState['sayings'] extends ReadonlyMap<number, infer V> ? V : never>;
+  settled: Map<number, readonly string[]>;
+  cues: Map<number, JournalState['cues'] extends ReadonlyMap<number, infer V> ? V : never>;
+  seats: Map<string, string>;
+};
+
+function copied(state: JournalState): Draft {
+  return {
+    ...state,
+    sayings: new Map(state.sayings),
+    settled: new Map(state.settled),
+    cues: new Map(state.cues),
+    seats: new Map(state.seats),
+  };
+}
+
+function build(header: SessionHeader, entries: readonly KnownEntry[]): JournalState {
+  const draft = copied({ ...emptyState(header), entries });
+  for (const entry of entries) apply(draft, entry);
+  return draft;
+}
+
+function apply(draft: Draft, entry: KnownEntry): void {
+  switch (entry.kind) {
+    case 'marked':
+    case 'missing':
+    case 'amended':
+      draft.sayings.set(entry.interval, [...(draft.sayings.get(entry.interval) ?? []), entry]);
+      break;
+    case 'settled':
+      draft.settled.set(entry.interval, entry.codes);
+      break;
+    case 'cued':
+      draft.cues.set(entry.interval, [...(draft.cues.get(entry.interval) ?? []), entry]);
+      break;
+    case 'interrupted':
+      open(draft, { from: entry.at, to: null, reason: 'class interrupted', child: null });
+      break;
+    case 'continued':
+      close(draft, entry.at, (cover) => cover.reason === 'class interrupted');
+      break;
+    case 'paused':
+      open(draft, { from: entry.at, to: null, reason: 'paused', child: null });
+      break;
+    case 'resumed':
+      close(draft, entry.at, (cover) => cover.reason === 'paused');
+      break;
+    case 'left':
+      open(draft, { from: entry.at, to: null, reason: entry.reason, child: entry.child });
+      break;
+    case 'returned':
+      close(draft, entry.at, (cover) => cover.child === entry.child);
+      break;
+    case 'moved':
+      draft.seats.set(entry.child, entry.seat);
+      break;
+    case 'lessonPart':
+      draft.lessonParts = [...draft.lessonParts, { at: entry.at, lessonPart: entry.lessonPart }];
+      break;
+    case 'phaseStarted':
+      draft.origins = draft.origins.map((origin, part) => (part === entry.part ? entry.origin : origin));
+      break;
+    case 'breakStarted':
+      draft.breakStartedAt = entry.at;
+      draft.closed = draft.closed.map((at, part) =>
+        at === null && draft.origins[part] !== null ? entry.at : at,
+      );
+      break;
+    case 'breakEnded':
+      draft.breakEndedAt = entry.at;
+      break;
+    case 'gap':
+      draft.at = Math.max(draft.at, entry.to);
+      draft.gaps = [
+        ...draft.gaps,
+        { from: entry.from, to: entry.to, cause: entry.cause, estimated: entry.estimated },
+      ];
+      // A moved wall clock loses nothing: it is written down and covers no interval.
+      if (entry.cause !== 'clock' && entry.to > entry.from) {
+        draft.covers = [
+          ...draft.covers,
+          { from: entry.from, to: entry.to, reason: 'prompt failed', child: null },
+        ];
+      }
+      break;
+    case 'ended':
+      draft.ended = { at: entry.at, reason: entry.reason };
+      break;
+    default:
+      break;
+  }
+}
+
+/** Opens a cover unless the same one is open already (a second tap changes nothing); a child has one reason at a time. */
+function open(draft: Draft, cover: Cover): void {
+  if (draft.covers.some((c) => c.to === null && c.child === cover.child && c.reason === cover.reason)) return;
+  if (cover.child !== null) close(draft, cover.from, (c) => c.child === cover.child);
+  draft.covers = [...draft.covers, cover];
+}
+
+function close(draft: Draft, at: number, which: (cover: Cover) => boolean): void {
+  draft.covers = draft.covers.map((c) =>
+    c.to === null && which(c) ? { ...c, to: Math.max(at, c.from) } : c,
+  );
+}
