@@ -23,7 +23,7 @@ const types = {
 
 /**
  * @typedef {object} ServeOptions
- * @property {string} [dir] the built app
+ * @property {string | (() => string)} [dir] the built app; a function is asked at every request
  * @property {number} [port] 0: any free one
  * @property {boolean} [orNext] when the port is taken, take any free one instead of failing
  * @property {string} [base] the folder under which the app is served, `/` or `/some/folder/`
@@ -72,7 +72,10 @@ export function serve({ dir = 'dist', port = 0, orNext = false, base = '/', extr
     const extra = extraDir !== undefined && path.startsWith('/__test__/');
     if (!extra && !path.startsWith(base)) return refuse(404, 'Not here.');
     const inside = path.slice(extra ? '/__test__/'.length : base.length);
-    const found = fileIn(extra ? String(extraDir) : dir, inside === '' ? 'index.html' : inside);
+    const found = fileIn(
+      extra ? String(extraDir) : typeof dir === 'string' ? dir : dir(),
+      inside === '' ? 'index.html' : inside,
+    );
     if (!found) return refuse(404, 'Not here.');
     const all = {
       ...headers,

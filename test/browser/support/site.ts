@@ -24,7 +24,7 @@ export class Site {
 
   async start(): Promise<void> {
     if (this.served) return;
-    this.served = await serve({ dir: this.dir, port: this.port, base: this.base });
+    this.served = await serve({ dir: () => this.dir, port: this.port, base: this.base });
     this.port = this.served.port;
   }
 
@@ -37,7 +37,7 @@ export class Site {
    * Puts a newer version on the site: the same app, whose page says `data-version` with the given text at its
    * root element, and a service worker that knows the new page.
    */
-  async publish(version: string): Promise<void> {
+  publish(version: string): void {
     const dir = mkdtempSync(join(tmpdir(), 'site-'));
     this.versions.push(dir);
     cpSync('dist', dir, { recursive: true });
@@ -48,8 +48,6 @@ export class Site {
     if (renewed === worker) throw new Error('the service worker does not list index.html');
     writeFileSync(join(dir, 'sw.js'), renewed);
     this.dir = dir;
-    await this.stop();
-    await this.start();
   }
 
   async remove(): Promise<void> {
