@@ -43,7 +43,7 @@ function fileIn(dir, path) {
   if (!file.startsWith(root + sep)) return undefined;
   const stat = statSync(file, { throwIfNoEntry: false });
   return stat?.isFile()
-    ? { file, tag: `"${stat.size.toString(36)}-${stat.mtimeMs.toString(36)}"` }
+    ? { file, size: stat.size, tag: `"${stat.size.toString(36)}-${stat.mtimeMs.toString(36)}"` }
     : undefined;
 }
 
@@ -87,7 +87,7 @@ export function serve({ dir = 'dist', port = 0, orNext = false, base = '/', extr
       response.writeHead(304, all).end();
       return;
     }
-    response.writeHead(200, all);
+    response.writeHead(200, { ...all, 'Content-Length': found.size });
     if (request.method === 'HEAD') response.end();
     else createReadStream(found.file).pipe(response);
   });
