@@ -1,0 +1,1 @@
+export const before = {} as const;

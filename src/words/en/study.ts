@@ -1,0 +1,1 @@
+export const study = {} as const;
