@@ -43,7 +43,7 @@ function sourceFiles(root) {
  *
  * @param {import('dependency-cruiser').ICruiseResult} result @param {number} expected @param {string} tree
  */
-function unread(result, expected, tree) {
+export function unread(result, expected, tree) {
   const read = result.modules.filter(
     ({ source }) => /^src\/.*\.tsx?$/.test(source) && !source.endsWith('.d.ts'),
   );
