@@ -1,6 +1,7 @@
 import { cpSync, mkdtempSync, readFileSync, rmSync, writeFileSync } from 'node:fs';
 import { tmpdir } from 'node:os';
 import { join } from 'node:path';
+import { build } from 'vite';
 import { type Served, serve } from '../../../tools/serve.mjs';
 
 /** The host of the built app, which a test can stop, start again at the same address, and give a new version. */
@@ -9,6 +10,7 @@ export class Site {
   private port = 0;
   private dir = 'dist';
   private versions: string[] = [];
+  private extraDir: string | undefined;
 
   /** @param base the folder under which the app is served, `/` or `/some/folder/` */
   constructor(private readonly base = '/') {}
@@ -24,7 +26,12 @@ export class Site {
 
   async start(): Promise<void> {
     if (this.served) return;
-    this.served = await serve({ dir: () => this.dir, port: this.port, base: this.base });
+    this.served = await serve({
+      dir: () => this.dir,
+      port: this.port,
+      base: this.base,
+      extraDir: this.extra,
+    });
     this.port = this.served.port;
   }
 
@@ -50,8 +57,44 @@ export class Site {
     this.dir = dir;
   }
 
+  /** A folder served beside the app as /__test__/, with an empty page in it. */
+  private get extra(): string {
+    if (this.extraDir === undefined) {
+      this.extraDir = mkdtempSync(join(tmpdir(), 'extra-'));
+      writeFileSync(join(this.extraDir, 'empty.html'), '<!doctype html><title>empty</title>');
+    }
+    return this.extraDir;
+  }
+
+  /**
+   * Bundles a module of the project, with all that it imports, for pages of this site.
+   *
+   * @param entry its path from the project's root
+   * @returns the address to `import()` in a page
+   */
+  async bundle(entry: string): Promise<string> {
+    const name = entry.replaceAll(/[^\w]+/g, '-');
+    await build({
+      configFile: false,
+      logLevel: 'warn',
+      publicDir: false,
+      build: {
+        outDir: this.extra,
+        emptyOutDir: false,
+        lib: { entry, formats: ['es'], fileName: () => `${name}.js` },
+      },
+    });
+    return `${this.origin}/__test__/${name}.js`;
+  }
+
+  /** The address of an empty page on the app's origin, without the app: for adapters on their own. */
+  get emptyPage(): string {
+    return `${this.origin}/__test__/empty.html`;
+  }
+
   async remove(): Promise<void> {
     await this.stop();
+    if (this.extraDir !== undefined) rmSync(this.extraDir, { recursive: true });
     for (const dir of this.versions) rmSync(dir, { recursive: true });
   }
 }
