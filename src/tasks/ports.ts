@@ -9,6 +9,7 @@ import type { Observer } from '../model/observer.ts';
 import type { Method, Protocol } from '../model/protocol.ts';
 import type { Role, SessionHeader } from '../model/session.ts';
 import type { Study } from '../model/study.ts';
+import type { VisitPlan } from '../model/visitPlan.ts';
 
 /** What a use case is handed: the store, the wall clock, chance, and who and what writes. */
 export interface Deps {
@@ -92,6 +93,8 @@ export interface Settings {
   readonly installation: string | null;
   /** When a study file last left the tablet. */
   readonly lastBackup: string | null;
+  /** The visit that was prepared (or taken over from a file) and has not been recorded yet. */
+  readonly prepared: VisitPlan | null;
 }
 
 export interface StoreReader {
