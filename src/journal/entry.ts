@@ -22,6 +22,9 @@ export type GapCause = z.infer<typeof gapCause>;
 export const awayReason = z.enum(['left the room', 'with another adult', 'not taking part']);
 export type AwayReason = z.infer<typeof awayReason>;
 
+/** Only where a table uses one interval number for several children: whose interval is meant. */
+const ofChild = z.optional(id);
+
 /** What each kind of entry says beside who wrote it and when. */
 const bodies = {
   /** Recording began; `checks` are those that stood on hold, `anyway` says that the observer started all the same. */
@@ -44,6 +47,7 @@ const bodies = {
   marked: z.object({
     kind: z.literal('marked'),
     interval,
+    child: ofChild,
     code: z.nullable(shortText),
     late: z.optional(z.boolean()),
     before: z.optional(z.boolean()),
@@ -53,6 +57,7 @@ const bodies = {
   missing: z.object({
     kind: z.literal('missing'),
     interval,
+    child: ofChild,
     reason: missingReason,
     late: z.optional(z.boolean()),
     before: z.optional(z.boolean()),
@@ -95,6 +100,7 @@ const bodies = {
   amended: z.object({
     kind: z.literal('amended'),
     interval,
+    child: ofChild,
     codes: z.nullable(z.array(shortText)),
     missing: z.nullable(missingReason),
     why: longText,

@@ -83,7 +83,9 @@ type Outcome = Pick<IntervalRecord, 'status'> & Partial<IntervalRecord>;
 
 /** What the observer said of the interval, if anything. In partial recording codes add up; otherwise the last word counts. */
 function spoken(state: JournalState, line: PlannedInterval): Outcome | null {
-  const sayings = state.sayings.get(line.number);
+  const sayings = state.sayings
+    .get(line.number)
+    ?.filter(({ child }) => child === undefined || child === line.child);
   const last = sayings?.at(-1);
   if (sayings === undefined || last === undefined) return null;
   if (last.kind === 'amended') {

@@ -22,3 +22,6 @@ export const codeSet = z.object({
   codes: z.array(code).check(z.minLength(1), z.maxLength(200)),
 });
 export type CodeSet = z.infer<typeof codeSet>;
+
+/** Name of a code set that holds no more than the labels that a table used; a team's own set never has it. */
+export const labelsOfTable = '(labels of a table)';

@@ -55,6 +55,9 @@ export const sessionHeader = z.object({
   visit: id,
   /** What a table called the visit; null for visits made here. */
   visitLabel: z.nullable(z.string()),
+  /** What a table called the session and the study; absent for sessions made here. */
+  sessionLabel: z.optional(z.string()),
+  studyLabel: z.optional(z.string()),
   observer: z.object({ id, name: shortText }),
   role: z.nullable(role),
   practice: z.boolean(),
