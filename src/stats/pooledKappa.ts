@@ -15,7 +15,7 @@ export interface PooledKappa {
  *
  * Source: De Vries, Elliott, Kanouse & Teleki 2008, Field Methods 20:272-282.
  *
- * @example pooledKappa([[[40, 9], [6, 45]], [[80, 10], [5, 5]]]).kappa // → 0.5828
+ * @example pooledKappa([[[40, 9], [6, 45]], [[80, 10], [5, 5]]]).kappa // → 0.5829
  */
 export function pooledKappa(tables: readonly CountTable[]): PooledKappa {
   const used = tables.map((table) => margins(table, 'tables')).filter(({ n }) => n > 0);

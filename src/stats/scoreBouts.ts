@@ -15,7 +15,8 @@ export interface ScoringOptions {
  * What a perfect observer would score in each whole interval of a lesson: partial = any behaviour in the watched
  * part, whole = behaviour throughout it, momentary = behaviour at its end (a bout that ends at the very instant of
  * the look counts, one that begins there does not). So whole implies momentary, and momentary implies partial,
- * in every interval. Linear in bouts and intervals.
+ * in every interval. Where nothing is watched (observed 0), all three are the state at the opening.
+ * Linear in bouts and intervals.
  *
  * `bouts` are sorted by time and do not overlap; a last interval that the lesson cuts short is not scored.
  *
@@ -30,7 +31,7 @@ export function scoreBouts(
 ): boolean[] {
   requireMethod(method);
   requireThat(interval > 0 && Number.isFinite(interval), 'interval', 'must be positive');
-  requireThat(observed > 0 && observed <= interval, 'observed', 'must be positive and at most the interval');
+  requireThat(observed >= 0 && observed <= interval, 'observed', 'must lie between 0 and the interval');
   requireThat(seconds >= 0 && Number.isFinite(seconds), 'seconds', 'must not be negative');
   let last = Number.NEGATIVE_INFINITY;
   for (const { on, off } of bouts) {
@@ -57,6 +58,7 @@ function scoreOne(
   closes: number,
   method: SamplingMethod,
 ): boolean {
+  if (closes === opens) return (bouts[first]?.on ?? Number.POSITIVE_INFINITY) <= opens;
   let reached = opens;
   for (let b = first; b < bouts.length; b++) {
     const { on, off } = bouts[b] as Bout;
