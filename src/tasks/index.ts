@@ -9,7 +9,7 @@ import type { Role, SessionHeader } from '../model/session.ts';
 import type { StarterTexts } from '../model/starterCodeSets.ts';
 import type { Study } from '../model/study.ts';
 import type { VisitPlan } from '../model/visitPlan.ts';
-import type { Deps, HandOver, SessionSummary } from './ports.ts';
+import type { Deps, ExportedFile, HandOver, SessionSummary } from './ports.ts';
 
 export type * from './ports.ts';
 
@@ -67,13 +67,6 @@ export interface SessionWish {
   readonly observer: string;
   readonly role: Role | null;
   readonly practice: boolean;
-}
-export interface ExportedFile {
-  readonly name: string;
-  readonly type: string;
-  readonly bytes: Uint8Array;
-  /** Given to `markHandedOver` once the file has left. */
-  readonly covers: readonly HandOver[];
 }
 export interface Counts {
   readonly new: number;

@@ -85,6 +85,14 @@ export interface HandOver {
   readonly own: number;
 }
 
+/** A file ready to leave the tablet; `covers` is given to `markHandedOver` once it has left. */
+export interface ExportedFile {
+  readonly name: string;
+  readonly type: string;
+  readonly bytes: Uint8Array<ArrayBuffer>;
+  readonly covers: readonly HandOver[];
+}
+
 export interface Settings {
   readonly theme: 'light' | 'dim' | 'system';
   /** The study that the screens show. */

@@ -1,0 +1,3 @@
+export { memoryStore } from './memoryStore.ts';
+export { databaseName, openStore } from './openStore.ts';
+export type { Seal } from './seal.ts';
