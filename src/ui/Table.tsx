@@ -23,13 +23,11 @@ interface Props<Row> {
 /** A table of figures; it scrolls sideways by itself on narrow glass. */
 export function Table<Row>({ caption, captionHidden = false, columns, rows, rowKey }: Props<Row>) {
   return (
-    // A region that scrolls must be reachable by keyboard.
-    // biome-ignore lint/a11y/noNoninteractiveTabindex: scrolling region
-    <div
+    <section
       className="table-frame"
-      role="group"
-      tabIndex={0}
       aria-label={typeof caption === 'string' ? caption : undefined}
+      // biome-ignore lint/a11y/noNoninteractiveTabindex: a region that scrolls must be reachable by keyboard
+      tabIndex={0}
     >
       <table className="table">
         <caption className={captionHidden ? 'visually-hidden' : ''}>{caption}</caption>
@@ -60,6 +58,6 @@ export function Table<Row>({ caption, captionHidden = false, columns, rows, rowK
           ))}
         </tbody>
       </table>
-    </div>
+    </section>
   );
 }

@@ -1,1 +1,165 @@
-export const before = {} as const;
+import type { Format } from '../format.ts';
+
+type F = Format;
+
+/** Before the visit: choosing class, protocol and children, and the checks at the classroom door. */
+export const before = {
+  // choosing
+  chooseTitle: 'What will you observe?',
+  noStudyTitle: 'First, a study.',
+  noStudyText:
+    'A study holds your classes, children, observers and protocols. Begin one, or open the demo study and look around.',
+  toStudy: 'Go to The study',
+  preparedAbout: ({ klass, children }: { klass: string; children: number }, f: F) =>
+    `${klass} is prepared, with ${f.whole(children)} ${f.plural(children, { one: 'child', other: 'children' })}.`,
+  preparedGo: 'Go on to the checks',
+  preparedForget: 'Put it away',
+  unfinished: ({ klass, time }: { klass: string; time: string }) =>
+    `A recording of ${klass}, begun at ${time}, was not ended.`,
+  unfinishedGo: 'Look at it',
+  noClasses: 'The study has no class yet. Add one with its children first.',
+  noObservers: 'The study has no observer yet.',
+  addObserver: 'Name of the observer',
+  addObserverHint: 'Initials or a working name, as the team knows you.',
+  klass: 'Class',
+  klassHint: ({ n }: { n: number }, f: F) =>
+    `${f.whole(n)} ${f.plural(n, { one: 'child', other: 'children' })}`,
+  protocol: 'Protocol',
+  protocolHint: (
+    {
+      method,
+      seconds,
+    }: { method: 'momentary' | 'partial' | 'whole' | 'headcount' | 'duration'; seconds: number },
+    f: F,
+  ) =>
+    `${{ momentary: 'momentary', partial: 'partial interval', whole: 'whole interval', headcount: 'headcount', duration: 'duration' }[method]}, ${f.fixed(seconds, seconds % 1 === 0 ? 0 : 1)} s`,
+  phases: 'Phases of this lesson',
+  phasesAll: ({ phases }: { phases: readonly string[] }) => phases.join(', break, '),
+  phasesAllHint: 'One sitting: the break lies between, the children stay the same.',
+  phasesOne: ({ phase }: { phase: string }) => `only ${phase}`,
+  children: 'Children watched today',
+  childrenHint: 'Take the tick away from a child who is not there. A reserve steps in, in drawn order.',
+  notDrawn: ({ klass }: { klass: string }) =>
+    `The children of ${klass} to be watched have not been drawn yet.`,
+  drawNow: ({ n }: { n: number }, f: F) => `Draw ${f.whole(n)} at random`,
+  tooFew: 'The class has no children yet. Add those with consent first.',
+  toClass: 'Open the class',
+  stepsIn: ({ by, absent }: { by: string; absent: string }) => `${by} steps in for ${absent}.`,
+  nobodyStepsIn: ({ absent }: { absent: string }) =>
+    `No reserve is left for ${absent}: one child fewer is watched.`,
+  start: 'Agreed start (may stay empty)',
+  startHint: 'Only written down. You start by hand, on a shared count.',
+  prepare: 'Prepare the visit',
+  meaning: (
+    { looks, minutes, children, parts }: { looks: number; minutes: number; children: number; parts: number },
+    f: F,
+  ) =>
+    `${f.whole(looks)} ${f.plural(looks, { one: 'look', other: 'looks' })} a child in ${f.fixed(minutes, minutes % 1 === 0 ? 0 : 1)} minutes${parts > 1 ? ' in each phase' : ''}, ${f.whole(children)} ${f.plural(children, { one: 'child', other: 'children' })}.`,
+  secondTitle: 'You are the second observer?',
+  secondText:
+    'Take the visit file of the first tablet: the same children, order and prompts, under your own name.',
+  secondTake: 'Take over a visit file',
+  cautions:
+    'Consent and assent come first, under the rules of the school and the ethics board. A worry about a child goes to the school’s designated person, not into the record.',
+
+  // the checks
+  readyAbout: (
+    {
+      klass,
+      protocol,
+      seconds,
+      phases,
+    }: { klass: string; protocol: string; seconds: number; phases: readonly string[] },
+    f: F,
+  ) =>
+    `${klass} · ${protocol} · every ${f.fixed(seconds, seconds % 1 === 0 ? 0 : 1)} s · ${phases.join(', break, ')}`,
+  readyTitle: ({ n }: { n: number }, f: F) =>
+    n === 0
+      ? 'Everything is ready. Go in.'
+      : `${n === 1 ? 'One thing' : n === 2 ? 'Two things' : n === 3 ? 'Three things' : `${f.whole(n)} things`} before you go in.`,
+  ready: 'ready',
+  hold: 'on hold',
+  unknown: 'not known',
+  nothingPrepared: 'No visit is prepared.',
+  toPrepare: 'Prepare one',
+
+  observer: 'Observer',
+  observerWho: ({ name, role, practice }: { name: string; role: string; practice: boolean }) =>
+    `${name}, ${role}${practice ? '; this one is practice' : ''}.`,
+  observerNobody: 'Say who records.',
+  observerChoose: 'Choose',
+  observerDialog: 'Who records on this tablet?',
+  role: 'Who else records this lesson?',
+  roleAlone: 'nobody',
+  roleAloneHint: 'You may pause the schedule.',
+  rolePrimary: 'a second observer checks mine',
+  rolePrimaryHint: 'Your record counts.',
+  roleSecond: 'I check the first observer',
+  roleSecondHint: 'Your record checks theirs.',
+  roleShortAlone: 'alone',
+  roleShortPrimary: 'primary: this record counts',
+  roleShortSecond: 'second: this record checks',
+  practice: 'Practice',
+  practiceHint: 'Kept and marked as practice; left out of all results.',
+
+  sound: 'Earpiece',
+  soundAsk: 'Play the tone and say where you heard it. Nothing may come from the loudspeaker.',
+  soundPlayed: 'Did you hear it, and only in your ear?',
+  soundHeard: ({ output }: { output: string }) =>
+    output === '' ? 'You heard the tone in your ear.' : `You heard the tone through ${output}.`,
+  soundNotHeard:
+    'You did not hear it. Look at the silent switch, the volume and the plug; the screen cue goes on without sound.',
+  soundLoud: 'The class could hear it. Plug the earpiece in, or silence the prompts: the screen cue goes on.',
+  soundStuck: 'The tablet gave no sound. The screen cue goes on without it.',
+  soundBlind:
+    'This browser cannot tell when the earpiece is pulled out: keep the volume low and the silence button in mind.',
+  soundLate: ({ ms }: { ms: number }, f: F) =>
+    `Sound comes about ${f.whole(ms)} ms late here. A wired earpiece is quicker.`,
+  soundPlay: 'Play tone',
+  soundAgain: 'Play again',
+  soundYes: 'In my ear',
+  soundNo: 'Not at all',
+  soundAll: 'Out loud',
+
+  present: 'Children',
+  presentList: ({ children }: { children: readonly string[] }, f: F) => `${f.list(children)}.`,
+  presentAsk: 'Are they all here?',
+  presentYes: 'All are here',
+  presentNo: 'Somebody is away',
+  awake: 'Kept awake',
+  awakeHeld: 'The screen stays on while you record.',
+  awakeRefused:
+    'The tablet refuses to keep the screen on. Switch battery saving off, or touch the screen now and then.',
+  awakeMissing: 'This browser cannot keep the screen on. Set the tablet’s own screen time to the longest.',
+  room: 'Room',
+  roomFree: ({ lessons }: { lessons: number }, f: F) => `Space for about ${f.whole(lessons)} lessons.`,
+  roomNotKept: ({ lessons }: { lessons: number }, f: F) =>
+    `Space for about ${f.whole(lessons)} lessons. The browser does not promise to keep it: install the app, and hand over the same day.`,
+  roomLow: 'The disk is nearly full. Make room before you record.',
+  roomUnknown: 'The browser does not tell how much room is left.',
+  battery: 'Battery',
+  batteryFull: ({ percent, charging }: { percent: number; charging: boolean }, f: F) =>
+    `${f.percent(percent)}${charging ? ', charging' : ''}.`,
+  batteryLow: ({ percent }: { percent: number }, f: F) =>
+    `${f.percent(percent)} left. Charge it, or bring a cable.`,
+  batteryUnknown: 'The browser does not tell. Look at the tablet’s own sign.',
+  offline: 'Offline',
+  offlineReady: 'Everything needed is on this tablet.',
+  offlineNot: 'The app is not on this tablet yet. Stay online a moment and open it once more.',
+  clock: 'Clock',
+  clockText: ({ time, zone }: { time: string; zone: string }) =>
+    `${time}, ${zone}. The schedule does not depend on it.`,
+  onlyHere: 'Only here',
+  onlyHereYes: 'No other window is recording.',
+  onlyHereNo: 'Another window of this tablet is recording. End it there first.',
+
+  goIn: 'Go in',
+  goInAnyway: 'Go in anyway',
+  anywayNote: 'The journal will say what was on hold.',
+  secondTablet: 'Second tablet',
+  secondTabletText:
+    'Hand the visit file over, so that both tablets watch the same children at the same prompts.',
+  handVisit: 'Hand over the visit file',
+  handed: 'The visit file has left this tablet.',
+  again: 'Look again',
+} as const;

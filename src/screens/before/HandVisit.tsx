@@ -1,0 +1,43 @@
+import { useEffect, useState } from 'react';
+import type { VisitPlan } from '../../model/visitPlan.ts';
+import { type ExportedFile, exportVisit } from '../../tasks/index.ts';
+import { Button } from '../../ui/Button.tsx';
+import { say } from '../../words/say.ts';
+import { useServices } from '../services.ts';
+import { CheckRow } from './CheckRow.tsx';
+
+/** The frozen schedule goes to the second tablet as a file. The bytes are ready before the tap: share sheets ask for that. */
+export function HandVisit({ plan }: { readonly plan: VisitPlan }) {
+  const { words, deps, device } = useServices();
+  const [file, setFile] = useState<ExportedFile | null>(null);
+  const [said, setSaid] = useState<string | null>(null);
+  useEffect(() => {
+    let here = true;
+    void exportVisit(deps, plan).then((made) => {
+      if (!here) return;
+      if (made.ok) setFile(made.value);
+      else setSaid(say(words.problems, made.problem));
+    });
+    return () => {
+      here = false;
+    };
+  }, [deps, plan, words]);
+  const hand = async () => {
+    if (file === null) return;
+    const how = await device.handOver(file);
+    if (how !== 'cancelled') setSaid(words.before.handed);
+  };
+  return (
+    <CheckRow
+      name={words.before.secondTablet}
+      state={said === words.before.handed ? 'ready' : 'hold'}
+      actions={
+        <Button disabled={file === null} onClick={hand}>
+          {words.before.handVisit}
+        </Button>
+      }
+    >
+      {said ?? words.before.secondTabletText}
+    </CheckRow>
+  );
+}

@@ -1,0 +1,117 @@
+import { useState } from 'react';
+import { useLocation } from 'wouter';
+import type { VisitPlan } from '../../model/visitPlan.ts';
+import { startSession } from '../../tasks/index.ts';
+import { Button } from '../../ui/Button.tsx';
+import { Notice } from '../../ui/Notice.tsx';
+import { PageHead } from '../../ui/PageHead.tsx';
+import { Sheet } from '../../ui/Sheet.tsx';
+import { say } from '../../words/say.ts';
+import { useServices } from '../services.ts';
+import { useSettings } from '../useCurrentStudy.ts';
+import { CheckRow } from './CheckRow.tsx';
+import { useTabletFacts } from './checks.ts';
+import { HandVisit } from './HandVisit.tsx';
+import { ObserverCheck, type Who } from './ObserverCheck.tsx';
+import { type Heard, SoundCheck } from './SoundCheck.tsx';
+import { TabletChecks, useTabletLines } from './TabletChecks.tsx';
+
+/** The last page before the classroom door: what would spoil the visit. */
+export function Ready() {
+  const { words } = useServices();
+  const settings = useSettings();
+  if (settings === undefined) return <p className="second">{words.common.loading}</p>;
+  if (settings.prepared === null) {
+    return (
+      <>
+        <PageHead>{words.before.nothingPrepared}</PageHead>
+        <a className="button" href="#/before">
+          {words.before.toPrepare}
+        </a>
+      </>
+    );
+  }
+  return <Checks key={settings.prepared.visit} plan={settings.prepared} />;
+}
+
+function Checks({ plan }: { readonly plan: VisitPlan }) {
+  const { words, deps, store, recorder, useStored } = useServices();
+  const [, go] = useLocation();
+  const answer = useStored((reader) => reader.observers(plan.study.id), [plan.study.id]);
+  const observers = answer?.ok ? answer.value : [];
+  const [who, setWho] = useState<Who>({ observer: null, role: null, practice: false });
+  const [heard, setHeard] = useState<Heard>('not asked');
+  const [present, setPresent] = useState(false);
+  const [problem, setProblem] = useState<string | null>(null);
+  const { facts, again } = useTabletFacts();
+  const lines = useTabletLines(facts);
+  const { protocol } = plan.schedule;
+
+  const onHold = [
+    ...(who.observer === null ? ['observer'] : []),
+    ...(heard === 'ear' ? [] : ['sound']),
+    ...(present ? [] : ['children']),
+    ...lines.filter((line) => line.state === 'hold').map((line) => line.check),
+  ];
+
+  const goIn = async (practice: boolean) => {
+    if (who.observer === null) return;
+    setProblem(null);
+    const header = await startSession(deps, plan, { observer: who.observer, role: who.role, practice });
+    if (!header.ok) return setProblem(say(words.problems, header.problem));
+    const opened = await recorder.open(header.value, { checks: onHold, anyway: onHold.length > 0 });
+    if (!opened.ok) return setProblem(say(words.problems, opened.problem));
+    await store.saveSettings({ prepared: null });
+    go(`/room/${header.value.id}`);
+  };
+
+  return (
+    <div className="stack">
+      <PageHead
+        about={words.before.readyAbout({
+          klass: plan.classroom.name,
+          protocol: protocol.name,
+          seconds: protocol.intervalMs / 1000,
+          phases: plan.schedule.phases,
+        })}
+      >
+        {words.before.readyTitle({ n: onHold.length })}
+      </PageHead>
+      <Sheet flush>
+        <ul>
+          <ObserverCheck study={plan.study.id} observers={observers} who={who} onChange={setWho} />
+          <SoundCheck cues={protocol.cues} heard={heard} onHeard={setHeard} />
+          <CheckRow
+            name={words.before.present}
+            state={present ? 'ready' : 'hold'}
+            actions={
+              present ? undefined : (
+                <>
+                  <Button onClick={() => setPresent(true)}>{words.before.presentYes}</Button>
+                  <a className="button" href="#/before">
+                    {words.before.presentNo}
+                  </a>
+                </>
+              )
+            }
+          >
+            {words.before.presentList({ children: plan.children.map((child) => child.pseudonym) })}
+            {!present && ` ${words.before.presentAsk}`}
+          </CheckRow>
+          <TabletChecks lines={lines} />
+          {who.role === 'primary' && <HandVisit plan={plan} />}
+        </ul>
+      </Sheet>
+      {problem !== null && <Notice kind="hold">{problem}</Notice>}
+      <div className="row">
+        <Button look="main" disabled={who.observer === null} onClick={() => goIn(who.practice)}>
+          {onHold.length === 0 ? words.before.goIn : words.before.goInAnyway}
+        </Button>
+        <Button look="quiet" onClick={again}>
+          {words.before.again}
+        </Button>
+        {onHold.length > 0 && <p className="second small">{words.before.anywayNote}</p>}
+      </div>
+    </div>
+  );
+}
