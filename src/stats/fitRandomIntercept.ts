@@ -1,5 +1,8 @@
 import {
   type Child,
+  type Design,
+  designOf,
+  gradientOf,
   type RandomInterceptFit,
   randomInterceptLikelihood,
 } from './randomInterceptLikelihood.ts';
@@ -23,18 +26,19 @@ export function fitRandomIntercept(children: readonly Child[]): RandomIntercept 
   const n = children.reduce((sum, { scores }) => sum + scores.length, 0);
   const size = children[0]?.rows[0]?.length ?? 0;
   if (n <= size || children.every(({ scores }) => scores.length < 2)) return undefined;
-  const profile = (ratio: number): Profile | undefined => profileAt(children, ratio, n - size);
+  const design = designOf(children);
+  const profile = (ratio: number): Profile | undefined => profileAt(design, ratio, n - size);
   const ratio = bestRatio(profile);
   const best = profile(ratio);
   if (!best || !(best.residual > 1e-20 * largestSquare(children))) return undefined;
   const residualVariance = best.residual;
   const childVariance = ratio * residualVariance;
-  const fit = randomInterceptLikelihood(children, childVariance, residualVariance);
+  const fit = randomInterceptLikelihood(design, childVariance, residualVariance);
   if (!fit) return undefined;
   return {
     coefficients: fit.coefficients,
     covariance: fit.covariance,
-    df: satterthwaite(children, fit, childVariance, residualVariance, n - size),
+    df: satterthwaite(design, fit, childVariance, residualVariance, n - size),
     childVariance,
     residualVariance,
     logLikelihood: fit.logLikelihood,
@@ -48,21 +52,25 @@ interface Profile {
   readonly slope: number;
 }
 
-function profileAt(children: readonly Child[], ratio: number, freedom: number): Profile | undefined {
-  const unscaled = randomInterceptLikelihood(children, ratio, 1);
-  if (!unscaled) return undefined;
-  const residual = unscaled.squares / freedom;
-  const scaled = randomInterceptLikelihood(children, ratio * residual, residual);
-  return scaled && { residual, logLikelihood: scaled.logLikelihood, slope: scaled.gradient[0] * residual };
+function profileAt(design: Design, ratio: number, freedom: number): Profile | undefined {
+  const fit = randomInterceptLikelihood(design, ratio, 1);
+  if (!fit) return undefined;
+  const residual = fit.squares / freedom;
+  return {
+    residual,
+    logLikelihood: -0.5 * (fit.determinants + freedom * (Math.log(residual) + 1)),
+    slope: fit.pull[0] / residual - fit.expected[0],
+  };
 }
 
 function bestRatio(profile: (ratio: number) => Profile | undefined): number {
   let best = 0;
-  let height = profile(0)?.logLikelihood ?? Number.NEGATIVE_INFINITY;
+  const atZero = profile(0);
+  let height = atZero?.logLikelihood ?? Number.NEGATIVE_INFINITY;
   let low = 0;
-  let slopeAtLow = profile(0)?.slope ?? 0;
-  for (let step = -60; step <= 60; step++) {
-    const high = 10 ** (step / 10);
+  let slopeAtLow = atZero?.slope ?? 0;
+  for (let step = -24; step <= 24; step++) {
+    const high = 10 ** (step / 4);
     const there = profile(high);
     if (!there) break;
     if (slopeAtLow > 0 && there.slope <= 0) {
@@ -96,14 +104,14 @@ function largestSquare(children: readonly Child[]): number {
 
 /** Satterthwaite's degrees of freedom of each coefficient. */
 function satterthwaite(
-  children: readonly Child[],
+  design: Design,
   fit: RandomInterceptFit,
   childVariance: number,
   residual: number,
   freedom: number,
 ): number[] {
   if (childVariance === 0) return fit.coefficients.map(() => freedom);
-  const [[a, b], [, d]] = information(children, childVariance, residual);
+  const [[a, b], [, d]] = information(design, childVariance, residual);
   const determinant = a * d - b * b;
   return fit.coefficients.map((_, i) => {
     const column = fit.covariance[i] as number[];
@@ -116,15 +124,16 @@ function satterthwaite(
 
 /** Observed information about the two variances: differences of the derivatives, to the fourth order. */
 function information(
-  children: readonly Child[],
+  design: Design,
   childVariance: number,
   residual: number,
 ): [[number, number], [number, number]] {
   const step = 1e-3;
   const along = (child: number, rest: number): [number, number] => {
-    const slopes = (times: number): [number, number] =>
-      randomInterceptLikelihood(children, childVariance + times * child, residual + times * rest)
-        ?.gradient ?? [Number.NaN, Number.NaN];
+    const slopes = (times: number): [number, number] => {
+      const there = randomInterceptLikelihood(design, childVariance + times * child, residual + times * rest);
+      return there ? gradientOf(there) : [Number.NaN, Number.NaN];
+    };
     const [m2, m1, p1, p2] = [slopes(-2), slopes(-1), slopes(1), slopes(2)];
     const size = child + rest;
     return [0, 1].map(

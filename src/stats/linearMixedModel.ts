@@ -1,6 +1,7 @@
 import type { About } from './about.ts';
 import { tTwoSided, twoSidedT } from './distributions.ts';
 import { fitRandomIntercept } from './fitRandomIntercept.ts';
+import { mean } from './moments.ts';
 import type { Child } from './randomInterceptLikelihood.ts';
 import { requireConfidence, requireFinite, requireSameLength } from './requireThat.ts';
 
@@ -65,11 +66,13 @@ export function linearMixedModel({
   requireFinite(phase, 'phase');
   requireFinite(group, 'group');
   requireConfidence(confidence);
+  // Centred scores lose no digits to a high level; the intercept gets it back.
+  const level = mean(score);
   const children = new Map<string | number, Child>();
   for (let i = 0; i < score.length; i++) {
     const key = child[i] as string | number;
     const one = children.get(key) ?? { scores: [], rows: [] };
-    one.scores.push(score[i] as number);
+    one.scores.push((score[i] as number) - level);
     const [p, g] = [phase[i] as number, group[i] as number];
     one.rows.push([1, p, g, p * g]);
     children.set(key, one);
@@ -77,7 +80,7 @@ export function linearMixedModel({
   const fit = fitRandomIntercept([...children.values()]);
   return {
     fixed: names.map((name, i): FixedEffect => {
-      const estimate = fit?.coefficients[i] ?? Number.NaN;
+      const estimate = (fit?.coefficients[i] ?? Number.NaN) + (name === 'intercept' ? level : 0);
       const standardError = Math.sqrt(fit?.covariance[i]?.[i] ?? Number.NaN);
       const df = fit?.df[i] ?? Number.NaN;
       const half = twoSidedT(confidence, df) * standardError;

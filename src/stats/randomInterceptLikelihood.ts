@@ -1,4 +1,13 @@
-import { addOuter, dot, invert, type Matrix, times, traceOfProduct, zeros } from './smallMatrix.ts';
+import {
+  addOuter,
+  addScaled,
+  dot,
+  invert,
+  type Matrix,
+  times,
+  traceOfProduct,
+  zeros,
+} from './smallMatrix.ts';
 
 /** One child's scores and their rows of the design. */
 export interface Child {
@@ -6,17 +15,49 @@ export interface Child {
   readonly rows: number[][];
 }
 
+/** What the likelihood needs of the data, summed up once. */
+export interface Design {
+  readonly children: readonly { count: number; columnSums: number[]; scoreSum: number }[];
+  readonly scores: readonly number[];
+  readonly rows: readonly number[][];
+  /** X′X and X′y over all rows. */
+  readonly cross: Matrix;
+  readonly crossScores: number[];
+}
+
 export interface RandomInterceptFit {
   readonly coefficients: number[];
   /** Covariance of the coefficients. */
   readonly covariance: Matrix;
   readonly logLikelihood: number;
-  /** Derivatives of the log-likelihood in the variance between children and the residual variance. */
-  readonly gradient: [child: number, residual: number];
-  /** Derivatives of the inverse covariance of the coefficients in the same two, with the sign turned. */
-  readonly change: [child: Matrix, residual: Matrix];
+  /** ln of the determinants of V and X′V⁻¹X, and the constant: −2 log-likelihood less `squares`. */
+  readonly determinants: number;
   /** r′V⁻¹r of the residuals. */
   readonly squares: number;
+  /** In the variance between children and the residual variance: derivative = ½ (pull − expected). */
+  readonly expected: [child: number, residual: number];
+  readonly pull: [child: number, residual: number];
+  /** Derivatives of X′V⁻¹X in the same two, with the sign turned. */
+  readonly change: [child: Matrix, residual: Matrix];
+}
+
+export function designOf(children: readonly Child[]): Design {
+  const size = children[0]?.rows[0]?.length ?? 0;
+  const cross = zeros(size);
+  const crossScores = new Array<number>(size).fill(0);
+  const summed = children.map(({ scores, rows }) => {
+    const columnSums = new Array<number>(size).fill(0);
+    rows.forEach((row, r) => {
+      addOuter(cross, row, 1);
+      row.forEach((x, j) => {
+        columnSums[j] = (columnSums[j] as number) + x;
+        crossScores[j] = (crossScores[j] as number) + x * (scores[r] as number);
+      });
+    });
+    return { count: scores.length, columnSums, scoreSum: scores.reduce((sum, score) => sum + score, 0) };
+  });
+  const scores = children.flatMap((child) => child.scores);
+  return { children: summed, scores, rows: children.flatMap(({ rows }) => rows), cross, crossScores };
 }
 
 /**
@@ -25,75 +66,71 @@ export interface RandomInterceptFit {
  * Undefined where the design cannot tell its columns apart. The log-likelihood carries no ½ ln|X'X|.
  */
 export function randomInterceptLikelihood(
-  children: readonly Child[],
+  { children, scores, rows, cross, crossScores }: Design,
   childVariance: number,
   residual: number,
 ): RandomInterceptFit | undefined {
-  const size = children[0]?.rows[0]?.length ?? 0;
+  const size = cross.length;
   const information = zeros(size);
-  const right = new Array<number>(size).fill(0);
-  let logDeterminant = 0;
-  let n = 0;
-  const totals = children.map(({ scores, rows }) => {
-    const count = scores.length;
+  addScaled(information, cross, 1 / residual);
+  const right = crossScores.map((sum) => sum / residual);
+  let determinants = (scores.length - size) * Math.log(2 * Math.PI);
+  for (const { count, columnSums, scoreSum } of children) {
     const inflated = residual + childVariance * count;
-    const columnSums = new Array<number>(size).fill(0);
-    rows.forEach((row, r) => {
-      addOuter(information, row, 1 / residual);
-      row.forEach((x, j) => {
-        columnSums[j] = (columnSums[j] as number) + x;
-        right[j] = (right[j] as number) + (x * (scores[r] as number)) / residual;
-      });
-    });
-    const scoreSum = scores.reduce((sum, score) => sum + score, 0);
     const shrink = childVariance / (residual * inflated);
     addOuter(information, columnSums, -shrink);
     columnSums.forEach((x, j) => {
       right[j] = (right[j] as number) - shrink * x * scoreSum;
     });
-    logDeterminant += (count - 1) * Math.log(residual) + Math.log(inflated);
-    n += count;
-    return { count, inflated, columnSums, scoreSum };
-  });
+    determinants += (count - 1) * Math.log(residual) + Math.log(inflated);
+  }
   const inverted = invert(information);
   if (!inverted) return undefined;
-  const { inverse: covariance, logDeterminant: logInformation } = inverted;
+  const { inverse: covariance, logDeterminant } = inverted;
+  determinants += logDeterminant;
   const coefficients = times(covariance, right);
-  const changeChild = zeros(size);
-  const changeResidual = zeros(size);
-  let squares = 0;
+  let rest = 0;
+  rows.forEach((row, r) => {
+    rest += ((scores[r] as number) - dot(row, coefficients)) ** 2;
+  });
+  let squares = rest / residual;
+  let pullResidual = rest / residual ** 2;
+  let pullChild = 0;
   let traceChild = 0;
   let traceResidual = 0;
-  let pullChild = 0;
-  let pullResidual = 0;
-  children.forEach(({ scores, rows }, c) => {
-    const { count, inflated, columnSums, scoreSum } = totals[c] as (typeof totals)[number];
+  const changeChild = zeros(size);
+  const changeResidual = zeros(size);
+  addScaled(changeResidual, cross, 1 / residual ** 2);
+  for (const { count, columnSums, scoreSum } of children) {
+    const inflated = residual + childVariance * count;
     const ratio = childVariance / inflated;
-    const pull = (scoreSum - dot(columnSums, coefficients)) / inflated;
+    const sum = scoreSum - dot(columnSums, coefficients);
+    // V⁻¹ of a column v is (v − ratio · its sum)/residual; its square loses this much to the child's sum.
+    const lost = (2 * ratio - count * ratio ** 2) / residual ** 2;
+    squares -= (ratio * sum ** 2) / residual;
+    pullResidual -= lost * sum ** 2;
+    pullChild += (sum / inflated) ** 2;
     traceChild += count / inflated;
     traceResidual += (count - count * ratio) / residual;
-    pullChild += pull * pull;
     addOuter(changeChild, columnSums, 1 / inflated ** 2);
-    rows.forEach((row, r) => {
-      // V⁻¹ of a column is (column − ratio · its sum)/residual, row by row.
-      const left = (scores[r] as number) - dot(row, coefficients);
-      const weighted = (left - childVariance * pull) / residual;
-      pullResidual += weighted * weighted;
-      squares += left * weighted;
-      const cleared = row.map((x, j) => (x - ratio * (columnSums[j] as number)) / residual);
-      addOuter(changeResidual, cleared, 1);
-    });
-  });
-  const constant = (n - size) * Math.log(2 * Math.PI);
+    addOuter(changeResidual, columnSums, -lost);
+  }
   return {
     coefficients,
     covariance,
-    logLikelihood: -0.5 * (constant + logDeterminant + logInformation + squares),
-    gradient: [
-      -0.5 * (traceChild - traceOfProduct(covariance, changeChild) - pullChild),
-      -0.5 * (traceResidual - traceOfProduct(covariance, changeResidual) - pullResidual),
-    ],
-    change: [changeChild, changeResidual],
+    logLikelihood: -0.5 * (determinants + squares),
+    determinants,
     squares,
+    expected: [
+      traceChild - traceOfProduct(covariance, changeChild),
+      traceResidual - traceOfProduct(covariance, changeResidual),
+    ],
+    pull: [pullChild, pullResidual],
+    change: [changeChild, changeResidual],
   };
+}
+
+/** Derivatives of the log-likelihood in the variance between children and the residual variance. */
+export function gradientOf({ expected, pull }: RandomInterceptFit): [child: number, residual: number] {
+  return [0.5 * (pull[0] - expected[0]), 0.5 * (pull[1] - expected[1])];
 }

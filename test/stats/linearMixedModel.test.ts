@@ -1,6 +1,12 @@
 import { describe, expect, test } from 'vitest';
 import { linearMixedModel, pairedChange, welchDifference } from '../../src/stats/index.ts';
-import { type Child, randomInterceptLikelihood } from '../../src/stats/randomInterceptLikelihood.ts';
+import {
+  type Child,
+  designOf,
+  gradientOf,
+  type RandomInterceptFit,
+  randomInterceptLikelihood,
+} from '../../src/stats/randomInterceptLikelihood.ts';
 import { expectNear } from './near.ts';
 import { referenceTests } from './referenceCases.ts';
 import { testRandom } from './testRandom.ts';
@@ -94,13 +100,14 @@ describe('linearMixedModel', () => {
         const own = rows.filter(([child]) => child === name);
         return { scores: own.map(([, , , score]) => score), rows: own.map(([, p, g]) => [1, p, g, p * g]) };
       });
-      const at = (c: number, e: number) => randomInterceptLikelihood(children, c, e);
+      const design = designOf(children);
+      const at = (c: number, e: number) => randomInterceptLikelihood(design, c, e) as RandomInterceptFit;
       const top = at(childVariance, residualVariance);
-      expectNear(top?.logLikelihood as number, logLikelihood);
-      if (childVariance > 0) expect(Math.abs(top?.gradient[0] as number)).toBeLessThan(1e-9);
-      expect(Math.abs(top?.gradient[1] as number)).toBeLessThan(1e-9);
-      const height = (c: number, e: number): number => at(c, e)?.logLikelihood as number;
-      const slopes = at(50, 40)?.gradient as [number, number];
+      expectNear(top.logLikelihood, logLikelihood);
+      if (childVariance > 0) expect(Math.abs(gradientOf(top)[0])).toBeLessThan(1e-9);
+      expect(Math.abs(gradientOf(top)[1])).toBeLessThan(1e-9);
+      const height = (c: number, e: number): number => at(c, e).logLikelihood;
+      const slopes = gradientOf(at(50, 40));
       expect(slopes[0]).toBeCloseTo((height(50.01, 40) - height(49.99, 40)) / 0.02, 6);
       expect(slopes[1]).toBeCloseTo((height(50, 40.01) - height(50, 39.99)) / 0.02, 6);
     }
