@@ -1,0 +1,70 @@
+import type { AwayReason, EntryRef, JournalEntry } from '../journal/entry.ts';
+import type { Id } from '../kernel/ids.ts';
+import type { Result } from '../kernel/result.ts';
+import type { PageMs } from '../kernel/units.ts';
+import type { SessionHeader } from '../model/session.ts';
+import type { RecorderPorts, Stop } from './ports.ts';
+import type { RoomSnapshot } from './roomSnapshot.ts';
+
+/**
+ * A session while it is recorded. It lives outside React and survives a broken screen. Times of touches are the
+ * `event.timeStamp` of the touch going down.
+ */
+export interface LiveSession {
+  subscribe(listener: () => void): Stop;
+  snapshot(): RoomSnapshot;
+  /**
+   * Called in the tap: unlocks the sound, counts in (3, 2, 1), then session time 0. Goes on without sound where the
+   * browser gives none (`sound` false). Fails when another tab records.
+   */
+  begin(): Promise<Result<{ readonly sound: boolean }>>;
+  /** A code; null = observed, none of the codes occurred. */
+  touch(code: string | null, at: PageMs): void;
+  /** Headcount: children on-task and children present. */
+  count(on: number, present: number, at: PageMs): void;
+  cannotSee(at: PageMs): void;
+  /** The next touch (within 5 s) marks the interval before; a second call takes that back. */
+  childBefore(): void;
+  undo(): void;
+  childLeft(child: Id, reason: AwayReason): void;
+  childReturned(child: Id): void;
+  childMoved(child: Id, seat: Id): void;
+  interruptClass(): void;
+  continueClass(): void;
+  /** True pause; nothing happens unless the observer records alone (`mayPause`). */
+  pause(): void;
+  resume(): void;
+  flag(): void;
+  note(text: string, about?: EntryRef): void;
+  lessonPart(lessonPart: string | null): void;
+  /** Closes the running part; its last look stays open for its time. */
+  breakStarted(): void;
+  /** Opens the next part after the count-in. */
+  firstTaskGiven(): void;
+  /** true = silent. Turning the sound on again is also the answer to "the output changed". */
+  silence(silent: boolean): void;
+  /** Ends the session early. */
+  end(words?: string): void;
+  /** Resolves when everything queued is durable, or false after one more refusal. */
+  flush(): Promise<boolean>;
+  /** Lets go of every port. What is not kept yet goes on being tried until it is. */
+  dispose(): void;
+}
+
+export interface LiveOptions {
+  /** Checks that stood on hold when the observer went in. */
+  readonly checks: readonly string[];
+  readonly anyway: boolean;
+  /** The journal of a session that was cut off: it goes on at the right interval of its grid. */
+  readonly resumeFrom?: readonly JournalEntry[];
+  /** True when that journal comes from another tablet: a new writer then goes on with it. */
+  readonly elsewhere?: boolean;
+}
+
+export function createLiveSession(
+  _header: SessionHeader,
+  _ports: RecorderPorts,
+  _options: LiveOptions,
+): LiveSession {
+  throw new Error('not written yet');
+}
