@@ -1,0 +1,39 @@
+import { useEffect } from 'react';
+import { Router } from 'wouter';
+import { useHashLocation } from 'wouter/use-hash-location';
+import { Routes } from '../screens/routes.tsx';
+import { type Services, ServicesContext } from '../screens/services.ts';
+import { useSettings } from '../screens/useCurrentStudy.ts';
+import type { Settings } from '../tasks/ports.ts';
+import { ErrorBoundary } from './ErrorBoundary.tsx';
+import { UpdateNotice } from './UpdateNotice.tsx';
+import type { Updates } from './updates.ts';
+
+interface Props {
+  readonly services: Services;
+  readonly updates: Updates;
+  readonly onTheme: (theme: Settings['theme']) => void;
+}
+
+/** The whole program: what screens are given, which address shows what, and what happens when one breaks. */
+export function App({ services, updates, onTheme }: Props) {
+  return (
+    <ServicesContext value={services}>
+      <Router hook={useHashLocation}>
+        <Theme onTheme={onTheme} />
+        <UpdateNotice updates={updates} />
+        <ErrorBoundary words={services.words}>
+          <Routes />
+        </ErrorBoundary>
+      </Router>
+    </ServicesContext>
+  );
+}
+
+function Theme({ onTheme }: Pick<Props, 'onTheme'>) {
+  const theme = useSettings()?.theme;
+  useEffect(() => {
+    if (theme !== undefined) onTheme(theme);
+  }, [theme, onTheme]);
+  return null;
+}

@@ -1,0 +1,13 @@
+import { useLiveQuery } from 'dexie-react-hooks';
+import type { Result } from '../kernel/result.ts';
+import { useServices } from '../screens/services.ts';
+import type { StoreReader } from '../tasks/ports.ts';
+
+/** A stored answer that is asked again whenever something that it read has changed. */
+export function useStored<T>(
+  query: (reader: StoreReader) => Promise<Result<T>>,
+  dependencies: readonly unknown[],
+): Result<T> | undefined {
+  const { store } = useServices();
+  return useLiveQuery(() => query(store), [store, ...dependencies]);
+}
