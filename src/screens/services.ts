@@ -28,8 +28,10 @@ export interface Device {
   readyOffline(): Promise<boolean>;
   now(): { readonly wall: WallTime; readonly timeZone: string | null };
   readonly vibrates: boolean;
-  /** Share sheet where it takes the file, else download. Called in a tap with the bytes ready. */
-  handOver(file: Pick<ExportedFile, 'name' | 'type' | 'bytes'>): Promise<'shared' | 'saved' | 'cancelled'>;
+  /** Share sheet where it takes the file, else download. Called in a tap with the bytes ready; `again`: the browser wants another tap. */
+  handOver(
+    file: Pick<ExportedFile, 'name' | 'type' | 'bytes'>,
+  ): Promise<'shared' | 'saved' | 'cancelled' | 'again'>;
   print(): void;
 }
 
@@ -43,6 +45,8 @@ export interface OpenOptions {
 export interface RecorderDesk {
   /** The running session, or null. */
   current(): LiveSession | null;
+  /** Whose session it is. */
+  currentId(): string | null;
   /** Opens a new session or resumes an unfinished one; fails when another tab records. */
   open(header: SessionHeader, options: OpenOptions): Promise<Result<LiveSession>>;
   /** Resumes an unfinished session from its journal. */

@@ -1,0 +1,56 @@
+import { ok, problem, type Result } from '../kernel/result.ts';
+import type { SessionHeader } from '../model/session.ts';
+import { createLiveSession, type LiveOptions, type LiveSession } from '../recorder/liveSession.ts';
+import type { RecorderPorts } from '../recorder/ports.ts';
+import type { OpenOptions, RecorderDesk } from '../screens/services.ts';
+import type { Store } from '../tasks/ports.ts';
+
+/**
+ * The one recorder of this tab, outside React. `makePorts` gives everything but where the session's journal is kept,
+ * freshly for each session (an audio context is not used twice).
+ */
+export function recorderDesk(store: Store, makePorts: () => Omit<RecorderPorts, 'store'>): RecorderDesk {
+  let live: { readonly session: LiveSession; readonly id: string } | null = null;
+  const listeners = new Set<() => void>();
+  const tell = (): void => {
+    for (const listener of listeners) listener();
+  };
+
+  const begin = (header: SessionHeader, options: LiveOptions): Result<LiveSession> => {
+    live?.session.dispose();
+    const ports: RecorderPorts = {
+      ...makePorts(),
+      store: {
+        append: (entries) => store.appendEntries(header.id, entries),
+        pack: () => store.pack(header.id),
+      },
+    };
+    live = { session: createLiveSession(header, ports, options), id: header.id };
+    tell();
+    return ok(live.session);
+  };
+
+  return {
+    current: () => live?.session ?? null,
+    currentId: () => live?.id ?? null,
+    open: async (header: SessionHeader, { checks, anyway }: OpenOptions) => begin(header, { checks, anyway }),
+    resume: async (session) => {
+      if (live?.id === session) return ok(live.session);
+      const read = await store.readSession(session);
+      if (!read.ok) return read;
+      if (read.value === null) return problem('session.notThere');
+      const { header, journal } = read.value;
+      if (journal.some((entry) => entry.kind === 'ended')) return problem('session.ended');
+      return begin(header, { checks: [], anyway: false, resumeFrom: journal });
+    },
+    close: () => {
+      live?.session.dispose();
+      live = null;
+      tell();
+    },
+    subscribe: (listener) => {
+      listeners.add(listener);
+      return () => listeners.delete(listener);
+    },
+  };
+}
