@@ -1,10 +1,10 @@
 import { mkdirSync, writeFileSync } from 'node:fs';
 import { join } from 'node:path';
 import type { Bundle } from '../src/exchange/types.ts';
-import { writeIntervalTable } from '../src/exchange/writeIntervalTable.ts';
 import { writeStudyFile } from '../src/exchange/writeStudyFile.ts';
 import type { StoredSession } from '../src/journal/stored.ts';
 import type { WallTime } from '../src/kernel/units.ts';
+import { paperTable } from './demo/paperTable.ts';
 import { classrooms, observers, protocol, study } from './demo/school.ts';
 import { recordings } from './demo/visits.ts';
 
@@ -24,4 +24,4 @@ mkdirSync(folder, { recursive: true });
 const { quill, marsh, paper } = recordings();
 writeFileSync(join(folder, 'tablet-of-quill.lookbell.json'), await writeStudyFile(bundle(quill), options));
 writeFileSync(join(folder, 'tablet-of-marsh.lookbell.json'), await writeStudyFile(bundle(marsh), options));
-writeFileSync(join(folder, 'newt-on-paper.csv'), writeIntervalTable(paper));
+writeFileSync(join(folder, 'newt-on-paper.csv'), paper.map(paperTable).join(''));

@@ -33,7 +33,10 @@ export function recorderDesk(store: Store, makePorts: () => Omit<RecorderPorts, 
   return {
     current: () => live?.session ?? null,
     currentId: () => live?.id ?? null,
-    open: async (header: SessionHeader, { checks, anyway }: OpenOptions) => begin(header, { checks, anyway }),
+    open: async (header: SessionHeader, { checks, anyway }: OpenOptions) => {
+      if (live !== null && live.session.snapshot().phase !== 'ended') return problem('session.running');
+      return begin(header, { checks, anyway });
+    },
     resume: async (session) => {
       if (live?.id === session) return ok(live.session);
       const read = await store.readSession(session);

@@ -25,7 +25,8 @@ export function HandVisit({ plan }: { readonly plan: VisitPlan }) {
   const hand = async () => {
     if (file === null) return;
     const how = await device.handOver(file);
-    if (how !== 'cancelled') setSaid(words.before.handed);
+    if (how === 'again') setSaid(words.before.handAgain);
+    else if (how !== 'cancelled') setSaid(words.before.handed);
   };
   return (
     <CheckRow

@@ -160,6 +160,7 @@ export const before = {
   secondTabletText:
     'Hand the visit file over, so that both tablets watch the same children at the same prompts.',
   handVisit: 'Hand over the visit file',
+  handAgain: 'The tablet asks for a second tap. Tap once more.',
   handed: 'The visit file has left this tablet.',
   again: 'Look again',
 } as const;
