@@ -7,6 +7,7 @@ export const noSettings: Settings = {
   installation: null,
   lastBackup: null,
   prepared: null,
+  frozenProtocols: [],
 };
 
 /** Settings that name people; the others are needed before anything is unlocked. */

@@ -103,6 +103,8 @@ export interface Settings {
   readonly lastBackup: string | null;
   /** The visit that was prepared (or taken over from a file) and has not been recorded yet. */
   readonly prepared: VisitPlan | null;
+  /** Protocol versions (`id version`) that were prepared for a visit or have left the tablet: they stand. */
+  readonly frozenProtocols: readonly string[];
 }
 
 export interface StoreReader {
