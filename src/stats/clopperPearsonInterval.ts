@@ -7,7 +7,7 @@ import { type Interval, requireSuccesses } from './wilsonInterval.ts';
  * The exact interval for a share, from the binomial distribution itself: never covers less often than it says, and
  * is for that mostly wider than Wilson's. Each tail gets half of what the confidence leaves over, also at 0 of n and n of n.
  *
- * Undefined (NaN) for n = 0. Relative error 1e-9 (beta quantiles).
+ * Undefined (NaN) for n = 0. Relative error 1e-10 (beta quantiles).
  *
  * Source: Clopper & Pearson 1934, Biometrika 26:404-413.
  *

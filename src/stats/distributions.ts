@@ -66,10 +66,12 @@ export function twoSidedT(confidence: number, df: number): number {
   return df > 0 ? -tQuantile((1 - confidence) / 2, df) : Number.NaN;
 }
 
+/** Share of chi-square below x. */
 export function chiSquareCdf(x: number, df: number): number {
   return df > 0 ? incompleteGamma(df / 2, x / 2).lower : Number.NaN;
 }
 
+/** Share of chi-square above x, to its own digits far out. */
 export function chiSquareUpper(x: number, df: number): number {
   return df > 0 ? incompleteGamma(df / 2, x / 2).upper : Number.NaN;
 }
@@ -87,10 +89,12 @@ export function fCdf(x: number, df1: number, df2: number): number {
   return x <= 0 ? 0 : betaCdf((df1 * x) / (df2 + df1 * x), df1 / 2, df2 / 2);
 }
 
+/** Share of F above x. */
 export function fUpper(x: number, df1: number, df2: number): number {
   return x <= 0 ? 1 : betaCdf(df2 / (df2 + df1 * x), df2 / 2, df1 / 2);
 }
 
+/** Quantile of F, its lower tail mended where the library stops (5 and 15 degrees, p = 1e-100). */
 export function fQuantile(p: number, df1: number, df2: number): number {
   const start = fQuantileOf(p, df1, df2);
   return p < 0.5
@@ -103,6 +107,7 @@ export function betaCdf(x: number, a: number, b: number): number {
   return betaCdfOf(x, a, b);
 }
 
+/** Quantile of the beta distribution, its lower half checked against the distribution and mended. */
 export function betaQuantile(p: number, a: number, b: number): number {
   const start = betaQuantileOf(p, a, b);
   return p < 0.5 ? mendQuantile(start, p, (x) => betaCdf(x, a, b)) : start;

@@ -25,7 +25,7 @@ export function requireMethod(method: string): void {
 
 /**
  * The share of intervals that a perfect observer would score, for behaviour with exponential bouts and gaps;
- * `observed` = length of the watched part of each interval. Momentary: the true share of time φ; partial interval
+ * `observed` = length of the watched part of each interval (a look needs none). Momentary: the true share of time φ; partial interval
  * is above it, whole interval below. Relative error 1e-12. Never undefined for valid arguments.
  *
  * Sources: Rogosa & Ghandour 1991, J Educ Stat 16:157-252; Pustejovsky & Swan 2015, Multivar Behav Res 50:365-380.
@@ -35,12 +35,17 @@ export function requireMethod(method: string): void {
  */
 export function expectedProportion(
   method: SamplingMethod,
-  { meanBout, meanGap, observed }: BehaviourInBouts & { readonly observed: number },
+  { meanBout, meanGap, observed }: BehaviourInBouts & { readonly observed?: number },
 ): number {
   requireMethod(method);
   requireBouts({ meanBout, meanGap });
-  requireThat(observed >= 0 && Number.isFinite(observed), 'observed', 'must not be negative');
   const share = meanBout / (meanBout + meanGap);
+  if (method === 'momentary' && observed === undefined) return share;
+  requireThat(
+    observed !== undefined && observed >= 0 && Number.isFinite(observed),
+    'observed',
+    'must not be negative',
+  );
   if (method === 'momentary') return share;
   if (method === 'whole') return share * Math.exp(-observed / meanBout);
   return share - (1 - share) * Math.expm1(-observed / meanGap);

@@ -40,6 +40,7 @@ export function krippendorffAlphaInterval(
   units: ArrayLike<CodeSeries>,
   { random, draws = 1000, confidence = 0.95 }: AlphaIntervalOptions,
 ): AlphaInterval {
+  requireThat(typeof random === 'function', 'random', 'must be a generator of numbers in [0, 1)');
   requireThat(Number.isInteger(draws) && draws > 0, 'draws', 'must be a whole number above 0');
   requireConfidence(confidence);
   const alpha = krippendorffAlpha(units);

@@ -34,7 +34,7 @@ export interface PooledEffect {
  * typical variance; the prediction interval uses t(k − 1) with Knapp–Hartung and z with normal inference.
  *
  * One effect: the estimate is that effect, and normal inference gives its own interval; everything about
- * differences between effects is undefined (NaN), and so is Knapp–Hartung. No effect, or a variance of 0: all NaN.
+ * differences between effects is undefined (NaN) but Q, which is 0, and so is Knapp–Hartung. No effect, or a variance of 0: all NaN.
  * DL to 1e-10; REML's tau² to 1e-8 (the highest maximum; iterated).
  *
  * Sources: DerSimonian & Laird 1986, Control Clin Trials 7:177-188; Viechtbauer 2005, J Educ Behav Stat 30:261-293;
@@ -83,7 +83,7 @@ export function poolRandomEffects(
     lower: random.estimate - half,
     upper: random.estimate + half,
     tau2,
-    q: several ? fixed.q : Number.NaN,
+    q: fixed.q,
     qP: several ? chiSquareUpper(fixed.q, k - 1) : Number.NaN,
     i2: several ? (100 * tau2) / (tau2 + typical) : Number.NaN,
     h2: several ? tau2 / typical + 1 : Number.NaN,

@@ -37,6 +37,7 @@ export function signFlipTest(differences: ArrayLike<number>, sampling?: Sampling
     `is needed beyond ${signFlipLimit} differences: { random, draws }`,
   );
   const { random, draws } = sampling;
+  requireThat(typeof random === 'function', 'random', 'must be a generator of numbers in [0, 1)');
   requireThat(Number.isInteger(draws) && draws > 0, 'draws', 'must be a whole number above 0');
   let asExtreme = 0;
   for (let d = 0; d < draws; d++) {

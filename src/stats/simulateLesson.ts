@@ -24,6 +24,7 @@ export interface LessonOptions extends BehaviourInBouts {
  */
 export function simulateLesson({ meanBout, meanGap, seconds, random }: LessonOptions): Bout[] {
   requireBouts({ meanBout, meanGap });
+  requireThat(typeof random === 'function', 'random', 'must be a generator of numbers in [0, 1)');
   requireThat(seconds >= 0 && Number.isFinite(seconds), 'seconds', 'must not be negative');
   const bouts: Bout[] = [];
   let isOn = random() < meanBout / (meanBout + meanGap);

@@ -78,6 +78,8 @@ describe('expectedProportion', () => {
     expect(() => expectedProportion('partial', { ...behaviour, meanBout: 0 })).toThrow(/^meanBout/);
     expect(() => expectedProportion('partial', { ...behaviour, meanGap: -1 })).toThrow(/^meanGap/);
     expect(() => expectedProportion('partial', { ...behaviour, observed: -1 })).toThrow(/^observed/);
+    expect(() => expectedProportion('whole', { meanBout: 1, meanGap: 1 })).toThrow(/^observed/);
+    expect(expectedProportion('momentary', { meanBout: 3, meanGap: 1 })).toBe(0.75);
     expect(() => expectedProportion('half' as 'whole', behaviour)).toThrow(/^method/);
     expect(() => expectedProportion('whole', { ...behaviour, meanGap: Number.NaN })).toThrow(RangeError);
   });

@@ -71,6 +71,8 @@ describe('krippendorffAlphaInterval', () => {
   test('nonsense throws and names the argument', () => {
     const random = testRandom(1);
     expect(() => krippendorffAlphaInterval([[1, 2]], { random, draws: 0 })).toThrow(/^draws/);
+    const noRandom = { draws: 9 } as unknown as { random: () => number };
+    expect(() => krippendorffAlphaInterval([[1, 2]], noRandom)).toThrow(/^random/);
     expect(() => krippendorffAlphaInterval([[1, 2]], { random, confidence: 1 })).toThrow(/^confidence/);
     expect(() => krippendorffAlphaInterval([[1, 2], [1]], { random })).toThrow(RangeError);
   });

@@ -46,6 +46,17 @@ describe('scoreBouts', () => {
     ).toEqual([true, false, false]);
   });
 
+  test('where nothing is watched, all three are the state at the opening', () => {
+    for (const method of ['partial', 'momentary', 'whole'] as const) {
+      expect(scoreBouts([{ on: 10, off: 15 }], method, { ...ten, observed: 0 })).toEqual([
+        false,
+        true,
+        false,
+      ]);
+      expect(scoreBouts([{ on: 0, off: 10 }], method, { ...ten, observed: 0 })).toEqual([true, false, false]);
+    }
+  });
+
   test('a last interval that is cut short is left out; tenths of seconds are counted right', () => {
     expect(scoreBouts([], 'partial', { interval: 10, observed: 10, seconds: 29.9 })).toHaveLength(2);
     expect(scoreBouts([], 'partial', { interval: 0.1, observed: 0.1, seconds: 3 })).toHaveLength(30);

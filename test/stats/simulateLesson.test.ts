@@ -57,6 +57,9 @@ describe('simulateLesson', () => {
     expect(() => simulateLesson({ ...options, meanBout: 0 })).toThrow(/^meanBout/);
     expect(() => simulateLesson({ ...options, meanGap: Number.POSITIVE_INFINITY })).toThrow(/^meanGap/);
     expect(() => simulateLesson({ ...options, seconds: -1 })).toThrow(RangeError);
+    expect(() => simulateLesson({ ...options, random: undefined as unknown as () => number })).toThrow(
+      /^random/,
+    );
     expect(simulateLesson({ ...options, seconds: 0 })).toEqual([]);
   });
 });
