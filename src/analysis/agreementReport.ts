@@ -1,6 +1,6 @@
 import { krippendorffAlpha, pooledKappa } from '../stats/index.ts';
 import { type PairAgreement, type PairData, pairAgreement } from './pairAgreement.ts';
-import { valueOf } from './pairedLooks.ts';
+import { scoredAs } from './pairedLooks.ts';
 import type { Analysed, Remark } from './remark.ts';
 import type { Look, SessionRecord } from './sessionRecord.ts';
 import type { Visit } from './visits.ts';
@@ -101,7 +101,8 @@ export function agreementOverall(visits: readonly Visit[], pairs: readonly Compa
 }
 
 function agreed({ lines }: PairData): number {
-  return lines.filter((line) => line.compared && valueOf(line.a as Look) === valueOf(line.b as Look)).length;
+  return lines.filter((line) => line.compared && scoredAs(line.a as Look) === scoredAs(line.b as Look))
+    .length;
 }
 
 /** One unit for every interval that at least two observers scored with one code: a code for each observer of the visit. */
@@ -113,7 +114,7 @@ function alphaUnits(pairs: readonly ComparedPair[]): (string | null)[][] {
       if (!line.compared) continue;
       const key = JSON.stringify([visit.key, line.child, line.number]);
       const unit = units.get(key) ?? new Map<string, string>();
-      unit.set(a.observer, valueOf(line.a as Look)).set(b.observer, valueOf(line.b as Look));
+      unit.set(a.observer, scoredAs(line.a as Look)).set(b.observer, scoredAs(line.b as Look));
       units.set(key, unit);
     }
   }

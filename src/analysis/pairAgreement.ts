@@ -1,7 +1,7 @@
 import { byCodePoint } from '../kernel/compare.ts';
 import { labelsOfTable } from '../model/codeSet.ts';
 import { cohenKappa, confusionTable, gwetAC1, intervalAgreement } from '../stats/index.ts';
-import { type Comparable, comparableAs, type PairedLook, pairedLooks, valueOf } from './pairedLooks.ts';
+import { type Comparable, comparableAs, type PairedLook, pairedLooks, scoredAs } from './pairedLooks.ts';
 import type { Look, SessionRecord } from './sessionRecord.ts';
 import { type Settled, settle, type Why, type WhyCode } from './why.ts';
 
@@ -66,7 +66,7 @@ export function pairAgreement(a: SessionRecord, b: SessionRecord): PairData {
   const codes = kind === 'codes' || kind === 'sets' ? codesOf(a, b, [...firsts, ...seconds]) : [];
   const oneCode = kind === 'codes';
   const counts = oneCode ? confusionTable(firsts.map(codeOf), seconds.map(codeOf), codes) : null;
-  const same = compared.filter((_, i) => valueOf(firsts[i] as Look) === valueOf(seconds[i] as Look)).length;
+  const same = compared.filter((_, i) => scoredAs(firsts[i] as Look) === scoredAs(seconds[i] as Look)).length;
   const kappa = counts === null ? null : cohenKappa(counts);
   const onTask =
     oneCode || kind === 'sets' ? intervalAgreement(firsts.map(isOn), seconds.map(isOn), 1) : null;

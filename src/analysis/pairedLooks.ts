@@ -51,7 +51,7 @@ export function comparableAs(a: SessionRecord, b: SessionRecord): Comparable {
 }
 
 /** One text for what an observer scored, equal exactly when two observers scored the same: code, set of codes, or counts. */
-export function valueOf(look: Look): string {
+export function scoredAs(look: Look): string {
   if (look.counts !== null) return JSON.stringify([look.counts.on, look.counts.present]);
   return JSON.stringify([...(look.labels ?? [])].sort());
 }

@@ -1,0 +1,71 @@
+import type { Problem } from '../kernel/result.ts';
+import type { SessionRecord } from './sessionRecord.ts';
+
+/** What should be said beside a figure; it never blocks. Sentences: `words/en/why.ts`. */
+export type WarningCode =
+  | 'fewLooksForChild'
+  | 'manyMissing'
+  | 'underFortyPercent'
+  | 'allOnTask'
+  | 'longMomentary'
+  | 'longInterval'
+  | 'partialOverestimates'
+  | 'wholeUnderestimates'
+  | 'neverEnded'
+  | 'fewPairedIntervals'
+  | 'nearlyAlwaysOnTask'
+  | 'nearlyNeverOnTask'
+  | 'underCriterion'
+  | 'oftenOutOfStep'
+  | 'underDoubleCoded';
+
+export type Warning = Problem<WarningCode>;
+
+export function warning(code: WarningCode, values: Warning['values'] = {}): Warning {
+  return { code, values };
+}
+
+/** Limits of the warnings: defaults of the program (common practice, no source, but for interval lengths: Zakszeski et al. 2017). */
+export const limits = {
+  looksOfChild: 10,
+  missingPercent: 15,
+  classLow: 40,
+  momentarySeconds: 30,
+  observedSeconds: 10,
+  pairedIntervals: 50,
+  prevalentPercent: 85,
+  outOfStepSeconds: 2,
+  doubleCodedPercent: 20,
+} as const;
+
+/** Warnings about how a session was recorded, whatever came out. */
+export function methodWarnings({ method, facts }: SessionRecord): Warning[] {
+  const seconds = (facts.intervalMs ?? 0) / 1000;
+  const observed = (facts.observeMs ?? facts.intervalMs ?? 0) / 1000;
+  const warnings: Warning[] = [];
+  if (method === 'momentary' && seconds > limits.momentarySeconds)
+    warnings.push(warning('longMomentary', { seconds }));
+  if (method !== 'partial' && method !== 'whole') return warnings;
+  warnings.push(warning(method === 'partial' ? 'partialOverestimates' : 'wholeUnderestimates'));
+  if (observed > limits.observedSeconds) warnings.push(warning('longInterval', { seconds: observed }));
+  return warnings;
+}
+
+/** Warnings about a share of looks (0–100) of a whole class. */
+export function shareWarnings(share: {
+  readonly scored: number | null;
+  readonly missing: number | null;
+  readonly percentOnTask: number | null;
+}): Warning[] {
+  const { scored, missing, percentOnTask } = share;
+  const warnings: Warning[] = [];
+  if (scored !== null && missing !== null && scored + missing > 0) {
+    const percent = (100 * missing) / (scored + missing);
+    if (percent > limits.missingPercent) warnings.push(warning('manyMissing', { percent, missing }));
+  }
+  if (percentOnTask !== null && percentOnTask < limits.classLow) {
+    warnings.push(warning('underFortyPercent', { percent: percentOnTask }));
+  }
+  if (percentOnTask === 100) warnings.push(warning('allOnTask'));
+  return warnings;
+}
