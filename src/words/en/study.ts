@@ -1,1 +1,15 @@
-export const study = {} as const;
+import type { Format } from '../format.ts';
+
+type F = Format;
+
+/** The study: classes, children, seats, protocols, observers, settings. */
+export const study = {
+  // the plan of seats
+  planYou: 'you',
+  seatOf: ({ name, row, column }: { name: string; row: number; column: number }, f: F) =>
+    `${name}, row ${f.whole(row)}, place ${f.whole(column)}`,
+  seatFree: ({ row, column }: { row: number; column: number }, f: F) =>
+    `Free seat, row ${f.whole(row)}, place ${f.whole(column)}`,
+  seatPlace: ({ row, column }: { row: number; column: number }, f: F) =>
+    `Put a seat in row ${f.whole(row)}, place ${f.whole(column)}`,
+} as const;
