@@ -1,0 +1,112 @@
+import * as z from 'zod/mini';
+import { isoDate, wallTime } from '../model/common.ts';
+import { unguarded } from './csvCell.ts';
+import { excerpt, type Fault, fault, type ProblemCode, type ProblemValues } from './problemValues.ts';
+import type { TableColumn } from './tableColumns.ts';
+
+const longestText = 200;
+
+/**
+ * Takes the cells of one row as what they should be, and keeps the first fault. An empty cell, or one whose column
+ * is not there, is null.
+ */
+export class RowReader {
+  fault: Fault | null = null;
+
+  constructor(
+    private readonly cells: readonly string[],
+    private readonly places: ReadonlyMap<TableColumn, number>,
+    /** Whether a comma can be the decimal sign (it cannot where it separates the cells). */
+    private readonly decimalComma: boolean,
+  ) {}
+
+  private raw(column: TableColumn): string {
+    const place = this.places.get(column);
+    return place === undefined ? '' : (this.cells[place] ?? '').trim();
+  }
+
+  refuse<Code extends ProblemCode>(code: Code, values: ProblemValues[Code]): null {
+    this.fault ??= fault(code, values);
+    return null;
+  }
+
+  text(column: TableColumn): string | null {
+    const text = unguarded(this.raw(column)).trim();
+    if (text.length > longestText)
+      return this.refuse('table.textTooLong', { column, length: text.length, most: longestText });
+    return text === '' ? null : text;
+  }
+
+  needed(column: TableColumn): string {
+    return this.text(column) ?? this.refuse('table.needed', { column }) ?? '';
+  }
+
+  /** One of a fixed list of words, in whatever case. */
+  word<Word extends string>(column: TableColumn, words: readonly Word[]): Word | null {
+    const raw = this.raw(column);
+    if (raw === '') return null;
+    const lower = raw.toLowerCase();
+    const word = words.find((known) => known === lower);
+    return word ?? this.refuse('table.word', { column, found: excerpt(raw), expected: words.join(', ') });
+  }
+
+  number(column: TableColumn): number | null {
+    const raw = this.raw(column);
+    if (raw === '') return null;
+    const plain = this.decimalComma ? raw.replace(',', '.') : raw;
+    const value = /^[+-]?\d+(?:\.\d+)?(?:[eE][+-]?\d+)?$/.test(plain) ? Number(plain) : Number.NaN;
+    if (!Number.isFinite(value)) return this.refuse('table.number', { column, found: excerpt(raw) });
+    // −0 is written as 0.
+    return value === 0 ? 0 : value;
+  }
+
+  notNegative(column: TableColumn): number | null {
+    const value = this.number(column);
+    if (value === null || value >= 0) return value;
+    return this.refuse('table.notNegative', { column, found: excerpt(this.raw(column)) });
+  }
+
+  positive(column: TableColumn): number | null {
+    const value = this.number(column);
+    if (value === null || value > 0) return value;
+    return this.refuse('table.positive', { column, found: excerpt(this.raw(column)) });
+  }
+
+  /** A whole number, 0 or more. */
+  whole(column: TableColumn): number | null {
+    const raw = this.raw(column);
+    if (raw === '') return null;
+    if (/^\d{1,9}$/.test(raw)) return Number(raw);
+    return this.refuse('table.whole', { column, found: excerpt(raw) });
+  }
+
+  interval(): number {
+    const raw = this.raw('interval');
+    const value = /^\d{1,9}$/.test(raw) ? Number(raw) : 0;
+    return value > 0 ? value : (this.refuse('table.interval', { found: excerpt(raw) }) ?? 0);
+  }
+
+  date(): string | null {
+    const raw = this.raw('date');
+    if (raw === '') return null;
+    if (z.safeParse(isoDate, raw).success && isCalendarDate(raw)) return raw;
+    return this.refuse('table.date', { column: 'date', found: excerpt(raw) });
+  }
+
+  /** Date and time with offset. */
+  start(): string | null {
+    const raw = this.raw('start');
+    if (raw === '') return null;
+    const valid =
+      z.safeParse(wallTime, raw).success &&
+      isCalendarDate(raw.slice(0, 10)) &&
+      !Number.isNaN(Date.parse(raw));
+    return valid ? raw : this.refuse('table.start', { found: excerpt(raw) });
+  }
+}
+
+/** True for a day that the calendar has: engines read 30 February as 2 March. */
+function isCalendarDate(text: string): boolean {
+  const epoch = Date.parse(`${text}T00:00:00Z`);
+  return !Number.isNaN(epoch) && new Date(epoch).toISOString().slice(0, 10) === text;
+}

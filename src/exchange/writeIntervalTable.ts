@@ -1,0 +1,97 @@
+import { recordingFacts } from '../journal/headerFacts.ts';
+import { type IntervalRecord, readOut } from '../journal/readOut.ts';
+import { fold } from '../journal/step.ts';
+import type { StoredSession } from '../journal/stored.ts';
+import { guarded, quotedCell } from './csvCell.ts';
+import { type TableColumn, tableColumns } from './tableColumns.ts';
+import type { TableOptions } from './types.ts';
+
+type Cell = string | number | null;
+
+/** What is text in a table: a spreadsheet must not run it. The other columns are numbers, dates and fixed words. */
+const textColumns: ReadonlySet<TableColumn> = new Set([
+  'session',
+  'observer',
+  'child',
+  'code',
+  'class',
+  'condition',
+  'phase',
+  'visit',
+  'study',
+  'lesson_part',
+] as const);
+
+/**
+ * Sessions as an interval table (RFC 4180, lines end in CR LF), one row an interval, as they stand after
+ * corrections; one that never ended is read as if it had ended where its journal stops.
+ */
+export function writeIntervalTable(sessions: readonly StoredSession[], options: TableOptions = {}): string {
+  const delimiter = options.delimiter ?? ',';
+  const decimal = delimiter === ',' ? '.' : (options.decimal ?? (delimiter === ';' ? ',' : '.'));
+  const lines = [tableColumns.join(delimiter)];
+  for (const session of sessions) {
+    for (const row of rowsOf(session)) {
+      const cells = tableColumns.map((column) => {
+        const value = row[column] ?? '';
+        if (typeof value === 'number') return Number.isNaN(value) ? '' : String(value).replace('.', decimal);
+        return quotedCell(textColumns.has(column) ? guarded(value) : value, delimiter);
+      });
+      lines.push(cells.join(delimiter));
+    }
+  }
+  return `${lines.join('\r\n')}\r\n`;
+}
+
+function rowsOf({ header, journal }: StoredSession): Partial<Record<TableColumn, Cell>>[] {
+  const state = fold(header, journal);
+  const facts = recordingFacts(header);
+  const listed = header.schedule.kind === 'listed' ? header.schedule.intervals : null;
+  const pseudonyms = new Map(header.children.map(({ id, pseudonym }) => [id, pseudonym]));
+  const labels = new Map(facts.codeSet.codes.map(({ id, label }) => [id, label]));
+  const started = state.entries.find((entry) => entry.kind === 'started');
+  const common = {
+    session: header.sessionLabel ?? header.id,
+    observer: header.observer.name,
+    role: header.role,
+    class: header.classroom.name,
+    condition: header.condition,
+    // A table that named no visit gets none; a visit made here is its identifier, which reading knows again.
+    visit: header.visitLabel ?? (listed === null ? header.visit : null),
+    date: header.date,
+    start: listed === null ? (started?.wall ?? header.plannedStart) : header.plannedStart,
+    study: header.studyLabel ?? (listed === null ? header.study : null),
+    method: facts.method,
+    interval_s: seconds(facts.intervalMs),
+    observe_s: seconds(facts.observeMs),
+  };
+  return readOut(state, { final: true }).map((record, i) => ({
+    ...common,
+    child: record.child === null ? null : (pseudonyms.get(record.child) ?? record.child),
+    interval: record.number,
+    code: codeCell(record, labels),
+    missing: record.missing,
+    phase: record.phase,
+    round: record.round,
+    start_s: seconds(record.openAt),
+    end_s:
+      listed === null
+        ? facts.method === 'duration'
+          ? seconds(record.closeAt)
+          : null
+        : seconds(listed[i]?.endMs ?? null),
+    lesson_part: record.lessonPart,
+    minutes_from_break: record.minutesFromBreak,
+    on_count: record.counts?.on ?? null,
+    present_count: record.counts?.present ?? null,
+  }));
+}
+
+/** Labels joined by `|`, which therefore cannot be part of one. */
+function codeCell({ codes }: IntervalRecord, labels: ReadonlyMap<string, string>): string | null {
+  return codes?.map((code) => (labels.get(code) ?? code).replaceAll('|', '/')).join('|') ?? null;
+}
+
+function seconds(ms: number | null): number | null {
+  return ms === null ? null : Math.round(ms * 1000) / 1e6;
+}
