@@ -6,6 +6,18 @@ import type { Seal } from './seal.ts';
 export interface Core {
   readonly rows: RowStore;
   readonly seal: Seal;
+  /** Changes of this tab go one after the other; stamps guard against those of other tabs. */
+  readonly inTurn: <R>(work: () => Promise<R>) => Promise<R>;
+}
+
+/** A queue in which a failure does not hold up what comes after it. */
+export function queue(): Core['inTurn'] {
+  let last: Promise<unknown> = Promise.resolve();
+  return (work) => {
+    const turn = last.then(work);
+    last = turn.catch(() => undefined);
+    return turn;
+  };
 }
 
 /** Thrown inside a write when what was read before the transaction has changed since: read again, prepare again. */
@@ -18,20 +30,22 @@ export class ChangedMeanwhile extends Error {
  * then write if nothing has changed in between, else the same again.
  * @param prepare gives the write, which throws `ChangedMeanwhile` when it finds other stamps than were read
  */
-export async function changeRows<Seen>(
+export function changeRows<Seen>(
   core: Core,
   tables: readonly TableName[],
   look: (rows: RowReader) => Promise<Seen>,
   prepare: (seen: Seen) => Promise<((rows: RowWriter) => Promise<void>) | null>,
 ): Promise<void> {
-  for (let attempt = 0; attempt < 8; attempt++) {
-    const write = await prepare(await core.rows.read(tables, look));
-    if (write === null) return;
-    try {
-      return await core.rows.write(tables, write);
-    } catch (error) {
-      if (!(error instanceof ChangedMeanwhile)) throw error;
+  return core.inTurn(async () => {
+    for (let attempt = 0; attempt < 8; attempt++) {
+      const write = await prepare(await core.rows.read(tables, look));
+      if (write === null) return;
+      try {
+        return await core.rows.write(tables, write);
+      } catch (error) {
+        if (!(error instanceof ChangedMeanwhile)) throw error;
+      }
     }
-  }
-  throw new StoreFailure('store.busy');
+    throw new StoreFailure('store.busy');
+  });
 }

@@ -80,7 +80,8 @@ export async function openDexieRows(options: DexieOptions): Promise<RowStore> {
         }),
       ),
     watch: (query, callback) => {
-      const watching = liveQuery(query).subscribe({ next: callback, error: report });
+      // Dexie follows awaits only in a function that it can see to be asynchronous.
+      const watching = liveQuery(async () => await query()).subscribe({ next: callback, error: report });
       return () => watching.unsubscribe();
     },
     close: () => {

@@ -3,7 +3,7 @@ import type { Observer } from '../model/observer.ts';
 import type { Protocol } from '../model/protocol.ts';
 import type { Store, StoreReader, StudyBundle } from '../tasks/ports.ts';
 import { applyBundles } from './applyBundles.ts';
-import type { Core } from './core.ts';
+import { type Core, queue } from './core.ts';
 import { answer } from './problems.ts';
 import {
   listProtocols,
@@ -34,7 +34,7 @@ const done = (work: () => Promise<void>) => answer(async () => work().then(() =>
 
 /** The store of the use cases over any rows: real ones or those in memory. */
 export function storeOver(rows: RowStore, seal: Seal = identitySeal): Store {
-  const core: Core = { rows, seal };
+  const core: Core = { rows, seal, inTurn: queue() };
   const reader: StoreReader = {
     study: (id) => answer(() => readRecord(core, 'study', id)),
     studies: () => answer(() => listStudies(core)),
