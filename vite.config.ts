@@ -1,12 +1,18 @@
+import { readFileSync } from 'node:fs';
 import react from '@vitejs/plugin-react';
 import { defineConfig } from 'vite';
 import { VitePWA } from 'vite-plugin-pwa';
 import { broughtAlong } from './tools/vite/broughtAlong.ts';
 import { contentPolicy } from './tools/vite/contentPolicy.ts';
 
+const { version } = JSON.parse(readFileSync(new URL('./package.json', import.meta.url), 'utf8')) as {
+  version: string;
+};
+
 export default defineConfig({
   // Relative, so that the built files work under any folder of any host.
   base: './',
+  define: { __APP_VERSION__: JSON.stringify(version) },
   build: {
     target: ['chrome111', 'firefox115', 'safari16.4'],
     // Nothing inlined: the content security policy knows files only.

@@ -1,12 +1,8 @@
-import { registerSW } from 'virtual:pwa-register';
+import '@fontsource-variable/atkinson-hyperlegible-next/wght.css';
+import '../ui/tokens.css';
+import '../ui/base.css';
 import { createRoot } from 'react-dom/client';
-
-registerSW({});
+import { openLookbell } from './openLookbell.tsx';
 
 const root = document.getElementById('root');
-if (root)
-  createRoot(root).render(
-    <main>
-      <h1>Lookbell</h1>
-    </main>,
-  );
+if (root !== null) void openLookbell(createRoot(root));

@@ -92,8 +92,9 @@ export function audio(): AudioPort {
   const moves = (context: AudioContext): Promise<boolean> =>
     new Promise((resolve) => {
       const begun = performance.now();
+      const from = context.currentTime;
       const ask = (): void => {
-        if (context.currentTime > 0) resolve(true);
+        if (context.currentTime > from) resolve(true);
         else if (performance.now() - begun > unlockPatience) resolve(false);
         else setTimeout(ask, 20);
       };

@@ -1,0 +1,62 @@
+import { audio } from '../devices/audio.ts';
+import { battery } from '../devices/battery.ts';
+import { disk } from '../devices/disk.ts';
+import { tellsOutputChanges } from '../devices/outputChanges.ts';
+import { recordingLock } from '../devices/recordingLock.ts';
+import { share } from '../devices/share.ts';
+import { vibration } from '../devices/vibration.ts';
+import { wakeLock } from '../devices/wakeLock.ts';
+import { wallClock } from '../devices/wallClock.ts';
+import { toWallTime } from '../kernel/wallTime.ts';
+import { cuePattern } from '../recorder/cuePatterns.ts';
+import type { Device } from '../screens/services.ts';
+
+/** What screens ask of the tablet, from the adapters. */
+export function device(): Device {
+  const testSound = audio();
+  return {
+    playTestTone: async (cues) => {
+      testSound.settle(cues);
+      const unlocked = await testSound.unlock();
+      if (!unlocked.ok) return { played: false, output: null, latencyMs: null };
+      testSound.play(cuePattern('look'));
+      return { played: true, output: unlocked.value.output, latencyMs: unlocked.value.latencyMs };
+    },
+    tellsOutputChanges: tellsOutputChanges(),
+    wakeLock: tryWakeLock,
+    room: async () => ({ free: await disk.free(), kept: await disk.askToKeep() }),
+    battery: () => battery.read(),
+    otherTabRecords: () => recordingLock.heldElsewhere(),
+    readyOffline,
+    now: () => {
+      const now = wallClock.now();
+      return { wall: toWallTime(now, wallClock.offsetMinutes(now)), timeZone: wallClock.timeZone() };
+    },
+    vibrates: vibration.available,
+    handOver: ({ name, type, bytes }) => share.handOver({ name, type, bytes: new Uint8Array(bytes) }),
+    print: () => window.print(),
+  };
+}
+
+/** Asks for the lock for a moment: whether it is given is known only by asking. */
+function tryWakeLock(): Promise<'held' | 'refused' | 'missing'> {
+  const lock = wakeLock();
+  return new Promise((resolve) => {
+    const told = (): void => {
+      const state = lock.state();
+      if (state === 'idle') return;
+      resolve(state);
+      stop();
+      lock.letGo();
+    };
+    const stop = lock.subscribe(told);
+    lock.hold();
+    told();
+  });
+}
+
+/** True when the service worker has everything: it is active and no version is still being fetched for the first time. */
+async function readyOffline(): Promise<boolean> {
+  const registration = await navigator.serviceWorker?.getRegistration();
+  return registration?.active !== null && registration?.active !== undefined;
+}

@@ -1,0 +1,78 @@
+import type { Root } from 'react-dom/client';
+import { audio } from '../devices/audio.ts';
+import { chance } from '../devices/chance.ts';
+import { pageClock } from '../devices/pageClock.ts';
+import { recordingLock } from '../devices/recordingLock.ts';
+import { timer } from '../devices/timer.ts';
+import { vibration } from '../devices/vibration.ts';
+import { visibility } from '../devices/visibility.ts';
+import { wakeLock } from '../devices/wakeLock.ts';
+import { wallClock } from '../devices/wallClock.ts';
+import type { Services } from '../screens/services.ts';
+import { openStore } from '../storage/index.ts';
+import { ensureInstallation } from '../tasks/index.ts';
+import type { Deps } from '../tasks/ports.ts';
+import { PageHead } from '../ui/PageHead.tsx';
+import { say } from '../words/say.ts';
+import { wordsFor } from '../words/words.ts';
+import { createAsker } from '../worker/client.ts';
+import { App } from './App.tsx';
+import { demoFiles } from './demoFiles.ts';
+import { device } from './device.ts';
+import { recorderDesk } from './recorderDesk.ts';
+import { applyTheme } from './theme.ts';
+import { watchForUpdates } from './updates.ts';
+import { useStored } from './useStored.ts';
+
+declare const __APP_VERSION__: string;
+
+/** Opens the store, fills every port with its adapter, and shows the program; or says in one sentence why it cannot. */
+export async function openLookbell(root: Root): Promise<void> {
+  const words = wordsFor();
+  const onTheme = applyTheme(document.documentElement, window.matchMedia('(prefers-color-scheme: dark)'));
+  const updates = watchForUpdates();
+  const opened = await openStore();
+  if (!opened.ok) {
+    root.render(
+      <main className="page">
+        <PageHead>{say(words.problems, opened.problem)}</PageHead>
+      </main>,
+    );
+    return;
+  }
+  const store = opened.value;
+  const tablet = device();
+  const base: Omit<Deps, 'writer'> = {
+    store,
+    clock: { wall: () => tablet.now().wall },
+    random: chance,
+    app: __APP_VERSION__,
+    device: navigator.userAgent,
+    timeZone: wallClock.timeZone(),
+  };
+  const writer = await ensureInstallation(base);
+  const deps: Deps = { ...base, writer: writer.ok ? writer.value : '' };
+  const worker = new Worker(new URL('../worker/worker.ts', import.meta.url), { type: 'module' });
+
+  const services: Services = {
+    words,
+    store,
+    deps,
+    ask: createAsker(worker),
+    device: tablet,
+    recorder: recorderDesk(store, () => ({
+      page: pageClock,
+      wall: wallClock,
+      timer,
+      audio: audio(),
+      visibility,
+      wakeLock: wakeLock(),
+      vibration,
+      lock: recordingLock,
+      random: chance,
+    })),
+    useStored,
+    demoFiles,
+  };
+  root.render(<App services={services} updates={updates} onTheme={onTheme} />);
+}
