@@ -28,7 +28,7 @@ export function mergeRecords<Item>(
     const states = groups.get(idOf(item)) ?? new Map<string, Item>();
     groups.set(idOf(item), states);
     const joined = [...states].find(([, state]) => join(state, item) !== null);
-    const state = joined === undefined ? item : (join(joined[1], item) ?? item);
+    const state = join(joined?.[1] ?? item, item) ?? item;
     if (joined !== undefined) states.delete(joined[0]);
     states.set(canonicalJson(state), state);
   }

@@ -27,6 +27,14 @@ export async function openEnvelope(document: unknown): Promise<OpenedEnvelope | 
   const isObject = document !== null && typeof document === 'object' && !Array.isArray(document);
   const envelope = (isObject ? document : {}) as Envelope;
   const form = envelope.format === studyFormat ? 'study' : envelope.format === visitFormat ? 'visit' : null;
+  if (isObject && envelope.format === undefined) {
+    const detail = `${studyFormat}, ${visitFormat}`;
+    return {
+      ok: false,
+      path: '$.format',
+      fault: fault('json.absent', { path: '$.format', expected: 'oneOf', detail }),
+    };
+  }
   if (form === null) {
     const found = isObject
       ? excerpt(JSON.stringify(envelope.format ?? null))

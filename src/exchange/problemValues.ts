@@ -11,7 +11,7 @@ export interface ProblemValues {
   'file.html': None;
   'file.zip': None;
   'file.cutOffCompressed': None;
-  'file.tooLarge': { megabytes: number; most: number };
+  'file.tooLarge': { most: number };
   'file.nul': None;
   'json.cutOff': None;
   'json.notJson': { found: string };

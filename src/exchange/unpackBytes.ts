@@ -1,7 +1,9 @@
-import { gunzipSync, gzipSync } from 'fflate';
+import { Gunzip, gzipSync } from 'fflate';
 import { type Fault, fault } from './problemValues.ts';
 
-const mostMegabytes = 512;
+/** Bytes that a file may have when unpacked. */
+const most = 512e6;
+const piece = 65_536;
 
 /** Takes gzip off where it is on; other bytes pass through. A zip is not one of our forms. */
 export function unpackBytes(
@@ -12,22 +14,31 @@ export function unpackBytes(
     return { ok: false, fault: fault('file.zip', {}) };
   if (first !== 0x1f || second !== 0x8b) return { ok: true, bytes };
   if (bytes.length < 18) return { ok: false, fault: fault('file.cutOffCompressed', {}) };
-  // gzip says at its end how long the content is: what would not fit is refused before it is unpacked.
-  const length = new DataView(bytes.buffer, bytes.byteOffset).getUint32(bytes.length - 4, true);
-  if (length > mostMegabytes * 1e6 || length > bytes.length * 1100) {
-    const megabytes = Math.round(length / 1e6);
-    return megabytes > mostMegabytes
-      ? { ok: false, fault: fault('file.tooLarge', { megabytes, most: mostMegabytes }) }
-      : { ok: false, fault: fault('file.cutOffCompressed', {}) };
-  }
+  const chunks: Uint8Array[] = [];
+  let length = 0;
+  const unpacking = new Gunzip((chunk) => {
+    length += chunk.length;
+    chunks.push(chunk);
+  });
   try {
-    const unpacked = gunzipSync(bytes, { out: new Uint8Array(length) });
-    return unpacked.length === length
-      ? { ok: true, bytes: unpacked }
-      : { ok: false, fault: fault('file.cutOffCompressed', {}) };
+    // Piece by piece, so that a small file that unpacks without end is stopped.
+    for (let at = 0; at < bytes.length; at += piece) {
+      unpacking.push(bytes.subarray(at, at + piece), at + piece >= bytes.length);
+      if (length > most) return { ok: false, fault: fault('file.tooLarge', { most: most / 1e6 }) };
+    }
   } catch {
     return { ok: false, fault: fault('file.cutOffCompressed', {}) };
   }
+  // gzip ends by saying how long the content is (RFC 1952).
+  const stated = new DataView(bytes.buffer, bytes.byteOffset).getUint32(bytes.length - 4, true);
+  if (stated !== length) return { ok: false, fault: fault('file.cutOffCompressed', {}) };
+  const whole = new Uint8Array(length);
+  let at = 0;
+  for (const chunk of chunks) {
+    whole.set(chunk, at);
+    at += chunk.length;
+  }
+  return { ok: true, bytes: whole };
 }
 
 /** gzip without a time stamp, so that the same content gives the same bytes. */

@@ -29,8 +29,6 @@ const nouns: Record<string, string> = {
   visit: 'planned visit',
 };
 
-const notIn = 'expected at most';
-
 interface Plural {
   plural(n: number, forms: { one: string; other: string }): string;
 }
@@ -45,13 +43,13 @@ export const problems = {
     'This is a zip archive or a spreadsheet workbook; expected a study file, a visit file or an interval table saved as CSV.',
   'file.cutOffCompressed':
     'The compressed file is damaged or cut off; expected a whole one: hand it over again.',
-  'file.tooLarge': (v: { megabytes: number; most: number }) =>
-    `Unpacked the file would have ${v.megabytes} megabytes; ${notIn} ${v.most}.`,
+  'file.tooLarge': (v: { most: number }) =>
+    `The compressed file is too large when unpacked; expected at most ${v.most} megabytes.`,
   'file.nul': 'There is a NUL character here; expected plain text.',
   'json.cutOff': 'The file ends in the middle; expected the rest of its JSON: hand it over again.',
   'json.notJson': (v: { found: string }) => `This is not JSON from “${v.found}” on; expected valid JSON.`,
   'json.tooDeep': (v: { path: string; most: number }) =>
-    `${v.path} nests too deep; ${notIn} ${v.most} levels.`,
+    `${v.path} nests too deep; expected at most ${v.most} levels.`,
   'json.nul': (v: { path: string }) => `${v.path} holds a NUL character; expected plain text.`,
   'json.otherForm': (v: { found: string }) =>
     `This is not a file of Lookbell: its format is ${v.found}; expected "lookbell-study" or "lookbell-visit".`,
@@ -83,7 +81,7 @@ export const problems = {
     `The checksum does not match: the file was changed or damaged after it was written. What can still be read: one visit with ${v.children} ${f.plural(v.children, { one: 'child', other: 'children' })}.`,
   'table.noRows': 'There are no rows below the column names; expected at least one interval.',
   'table.columns': (v: { absent: string; found: string }) =>
-    `The column names lack ${v.absent}; expected session, observer, child, interval and code, found: ${v.found}.`,
+    `The column names lack ${v.absent}; expected session, observer, child, interval and code, found “${v.found}”.`,
   'table.columnTwice': (v: { column: string }) =>
     `The column ${v.column} is there twice; expected each column once.`,
   'table.columnsDropped': (v: { columns: string; n: number }, f: Plural) =>
@@ -94,9 +92,9 @@ export const problems = {
   'table.quoteAfter': (v: { found: string }) =>
     `After a quoted cell stands “${v.found}”; expected a delimiter or the end of the row.`,
   'table.cellTooLong': (v: { length: number; most: number }) =>
-    `A cell has ${v.length} characters; ${notIn} ${v.most}.`,
+    `A cell has ${v.length} characters; expected at most ${v.most}.`,
   'table.textTooLong': (v: { column: string; length: number; most: number }) =>
-    `${v.column} has ${v.length} characters; ${notIn} ${v.most}.`,
+    `${v.column} has ${v.length} characters; expected at most ${v.most}.`,
   'table.needed': (v: { column: string }) => `${v.column} is empty; expected a text in every row.`,
   'table.noChild': 'child is empty; expected a pseudonym (only headcount rows go without).',
   'table.interval': (v: { found: string }) => `interval is “${v.found}”; expected a positive whole number.`,
@@ -142,7 +140,7 @@ export const problems = {
   'classList.noRows': (v: { line: number }) =>
     `Line ${v.line}: no child is listed; expected at least one line with a pseudonym.`,
   'classList.columns': (v: { absent: string; found: string; line: number }) =>
-    `Line ${v.line}: the column names lack ${v.absent}; expected child and consent (stratum and seat if wanted), found: ${v.found}.`,
+    `Line ${v.line}: the column names lack ${v.absent}; expected child and consent (stratum and seat if wanted), found “${v.found}”.`,
   'classList.noChild': (v: { line: number }) => `Line ${v.line}: child is empty; expected a pseudonym.`,
   'classList.consent': (v: { found: string; line: number }) =>
     `Line ${v.line}: consent is “${v.found}”; expected yes or no.`,
@@ -151,7 +149,7 @@ export const problems = {
   'classList.cells': (v: { cells: number; columns: number; line: number }, f: Plural) =>
     `Line ${v.line}: ${v.cells} ${f.plural(v.cells, { one: 'cell', other: 'cells' })}; expected ${v.columns}, as in the first line.`,
   'classList.text': (v: { column: string; most: number; line: number }) =>
-    `Line ${v.line}: ${v.column} is too long or damaged; ${notIn} ${v.most} plain characters.`,
+    `Line ${v.line}: ${v.column} is too long or damaged; expected at most ${v.most} plain characters.`,
   'classList.broken': (v: { line: number }) =>
     `Line ${v.line}: the cells cannot be told apart; expected quotation marks that are closed and cells of at most 10,000 characters.`,
   'merge.session': (v: { session: string; observer: string; n: number }) =>
