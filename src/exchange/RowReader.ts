@@ -7,18 +7,26 @@ import type { TableColumn } from './tableColumns.ts';
 const longestText = 200;
 
 /**
- * Takes the cells of one row as what they should be, and keeps the first fault. An empty cell, or one whose column
- * is not there, is null.
+ * Takes the cells of one row after the other as what they should be, and keeps the first fault of a row. An empty
+ * cell, or one whose column is not there, is null.
  */
 export class RowReader {
   fault: Fault | null = null;
+  private cells: readonly string[] = [];
+  /** Dates and starts that were found right: the rows of a session all have the same. */
+  private readonly right = new Set<string>();
 
   constructor(
-    private readonly cells: readonly string[],
     private readonly places: ReadonlyMap<TableColumn, number>,
     /** Whether a comma can be the decimal sign (it cannot where it separates the cells). */
     private readonly decimalComma: boolean,
   ) {}
+
+  /** Goes on to the next row. */
+  begin(cells: readonly string[]): void {
+    this.cells = cells;
+    this.fault = null;
+  }
 
   private raw(column: TableColumn): string {
     const place = this.places.get(column);
@@ -88,20 +96,22 @@ export class RowReader {
 
   date(): string | null {
     const raw = this.raw('date');
-    if (raw === '') return null;
-    if (z.safeParse(isoDate, raw).success && isCalendarDate(raw)) return raw;
-    return this.refuse('table.date', { column: 'date', found: excerpt(raw) });
+    if (raw === '' || this.right.has(raw)) return raw === '' ? null : raw;
+    if (!z.safeParse(isoDate, raw).success || !isCalendarDate(raw))
+      return this.refuse('table.date', { column: 'date', found: excerpt(raw) });
+    this.right.add(raw);
+    return raw;
   }
 
   /** Date and time with offset. */
   start(): string | null {
     const raw = this.raw('start');
-    if (raw === '') return null;
-    const valid =
-      z.safeParse(wallTime, raw).success &&
-      isCalendarDate(raw.slice(0, 10)) &&
-      !Number.isNaN(Date.parse(raw));
-    return valid ? raw : this.refuse('table.start', { found: excerpt(raw) });
+    // A date alone is no start, even where the same text was right as a date.
+    if (raw === '' || (raw.length > 10 && this.right.has(raw))) return raw === '' ? null : raw;
+    const inForm = z.safeParse(wallTime, raw).success && isCalendarDate(raw.slice(0, 10));
+    if (!inForm || Number.isNaN(Date.parse(raw))) return this.refuse('table.start', { found: excerpt(raw) });
+    this.right.add(raw);
+    return raw;
   }
 }
 

@@ -11,7 +11,9 @@ export function unguarded(text: string): string {
   return text.startsWith("'") ? text.slice(1) : text;
 }
 
+const needsQuotes = /["\r\n]|^\s|\s$/;
+
 /** A cell as RFC 4180 writes it: in quotes where it holds the delimiter, a quote, a line break or outer blanks. */
 export function quotedCell(text: string, delimiter: string): string {
-  return text.includes(delimiter) || /["\r\n]|^\s|\s$/.test(text) ? `"${text.replaceAll('"', '""')}"` : text;
+  return text.includes(delimiter) || needsQuotes.test(text) ? `"${text.replaceAll('"', '""')}"` : text;
 }

@@ -22,6 +22,7 @@ export function readTable(text: string, options: ReadOptions = {}): TableOutcome
   const delimiter = detectDelimiter(text, knownNames);
   const sessions = new Map<string, SessionRows>();
   let header: HeaderRow | null = null;
+  let reader: RowReader | null = null;
   let headerLine = 1;
   const keep: number[] = [];
   const stop = scanCsv(text, delimiter, (cells, line) => {
@@ -37,7 +38,8 @@ export function readTable(text: string, options: ReadOptions = {}): TableOutcome
     if (cells.every((cell) => cell.trim() === '')) return null;
     if (cells.length !== header.width)
       return { line, fault: fault('table.ragged', { cells: cells.length, columns: header.width }) };
-    const reader = new RowReader(cells, header.places, delimiter !== ',');
+    reader ??= new RowReader(header.places, delimiter !== ',');
+    reader.begin(cells);
     const row = readTableRow(
       reader,
       line,

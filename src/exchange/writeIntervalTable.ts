@@ -29,21 +29,48 @@ const textColumns: ReadonlySet<TableColumn> = new Set([
 export function writeIntervalTable(sessions: readonly StoredSession[], options: TableOptions = {}): string {
   const delimiter = options.delimiter ?? ',';
   const decimal = delimiter === ',' ? '.' : (options.decimal ?? (delimiter === ';' ? ',' : '.'));
+  const cellOf = (column: TableColumn, value: Cell): string => {
+    if (value === null) return '';
+    if (typeof value === 'number') return Number.isNaN(value) ? '' : String(value).replace('.', decimal);
+    return quotedCell(textColumns.has(column) ? guarded(value) : value, delimiter);
+  };
   const lines = [tableColumns.join(delimiter)];
   for (const session of sessions) {
-    for (const row of rowsOf(session)) {
-      const cells = tableColumns.map((column) => {
-        const value = row[column] ?? '';
-        if (typeof value === 'number') return Number.isNaN(value) ? '' : String(value).replace('.', decimal);
-        return quotedCell(textColumns.has(column) ? guarded(value) : value, delimiter);
-      });
+    const { common, rows } = cellsOf(session);
+    // What all rows share is written out once: a table may have hundreds of thousands of rows.
+    const shared = tableColumns.map((column) => cellOf(column, common[column] ?? null));
+    for (const row of rows) {
+      const cells = [...shared];
+      for (const [place, column, value] of row) cells[place] = cellOf(column, value);
       lines.push(cells.join(delimiter));
     }
   }
   return `${lines.join('\r\n')}\r\n`;
 }
 
-function rowsOf({ header, journal }: StoredSession): Partial<Record<TableColumn, Cell>>[] {
+type Placed = readonly [place: number, column: TableColumn, value: Cell];
+
+const placed = (column: TableColumn): ((value: Cell) => Placed) => {
+  const place = tableColumns.indexOf(column);
+  return (value) => [place, column, value];
+};
+const child = placed('child');
+const interval = placed('interval');
+const code = placed('code');
+const missing = placed('missing');
+const phase = placed('phase');
+const round = placed('round');
+const startS = placed('start_s');
+const endS = placed('end_s');
+const lessonPart = placed('lesson_part');
+const minutesFromBreak = placed('minutes_from_break');
+const onCount = placed('on_count');
+const presentCount = placed('present_count');
+
+function cellsOf({ header, journal }: StoredSession): {
+  common: Partial<Record<TableColumn, Cell>>;
+  rows: Placed[][];
+} {
   const state = fold(header, journal);
   const facts = recordingFacts(header);
   const listed = header.schedule.kind === 'listed' ? header.schedule.intervals : null;
@@ -65,31 +92,28 @@ function rowsOf({ header, journal }: StoredSession): Partial<Record<TableColumn,
     interval_s: seconds(facts.intervalMs),
     observe_s: seconds(facts.observeMs),
   };
-  return readOut(state, { final: true }).map((record, i) => ({
-    ...common,
-    child: record.child === null ? null : (pseudonyms.get(record.child) ?? record.child),
-    interval: record.number,
-    code: codeCell(record, labels),
-    missing: record.missing,
-    phase: record.phase,
-    round: record.round,
-    start_s: seconds(record.openAt),
-    end_s:
-      listed === null
-        ? facts.method === 'duration'
-          ? seconds(record.closeAt)
-          : null
-        : seconds(listed[i]?.endMs ?? null),
-    lesson_part: record.lessonPart,
-    minutes_from_break: record.minutesFromBreak,
-    on_count: record.counts?.on ?? null,
-    present_count: record.counts?.present ?? null,
-  }));
+  const endOf = (record: IntervalRecord, i: number): number | null =>
+    listed !== null ? (listed[i]?.endMs ?? null) : facts.method === 'duration' ? record.closeAt : null;
+  const rows = readOut(state, { final: true }).map((record, i) => [
+    child(record.child === null ? null : (pseudonyms.get(record.child) ?? record.child)),
+    interval(record.number),
+    code(codeCell(record, labels)),
+    missing(record.missing),
+    phase(record.phase),
+    round(record.round),
+    startS(seconds(record.openAt)),
+    endS(seconds(endOf(record, i))),
+    lessonPart(record.lessonPart),
+    minutesFromBreak(record.minutesFromBreak),
+    onCount(record.counts?.on ?? null),
+    presentCount(record.counts?.present ?? null),
+  ]);
+  return { common, rows };
 }
 
 /** Labels joined by `|`, which therefore cannot be part of one. */
 function codeCell({ codes }: IntervalRecord, labels: ReadonlyMap<string, string>): string | null {
-  return codes?.map((code) => (labels.get(code) ?? code).replaceAll('|', '/')).join('|') ?? null;
+  return codes?.map((id) => (labels.get(id) ?? id).replaceAll('|', '/')).join('|') ?? null;
 }
 
 function seconds(ms: number | null): number | null {
