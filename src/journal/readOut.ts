@@ -86,7 +86,8 @@ function spoken(state: JournalState, line: PlannedInterval): Outcome | null {
   const sayings = state.sayings
     .get(line.number)
     ?.filter(({ child }) => child === undefined || child === line.child);
-  const last = sayings?.at(-1);
+  // A correction outranks every mark, also one that was made by a clock that stood behind the recorder's.
+  const last = sayings?.findLast((saying) => saying.kind === 'amended') ?? sayings?.at(-1);
   if (sayings === undefined || last === undefined) return null;
   if (last.kind === 'amended') {
     return last.missing !== null

@@ -1,0 +1,97 @@
+import { expect, it } from 'vitest';
+import { readOut } from '../../src/journal/readOut.ts';
+import { fold } from '../../src/journal/step.ts';
+import { type Amendment, amendInterval, pairVisit, settleInterval } from '../../src/tasks/index.ts';
+import { codeOf, given } from '../storage/samples.ts';
+import { type Bench, bench, recorded, school } from './bench.ts';
+
+async function interval(on: Bench, session: string, number: number) {
+  const stored = given(await on.deps.store.readSession(session));
+  if (stored === null) throw new Error('no session');
+  return readOut(fold(stored.header, stored.journal)).find((one) => one.number === number);
+}
+
+const wish: Amendment = { interval: 2, codes: ['off'], missing: null, why: 'wrong tap', by: 'Quill' };
+
+it('corrects an interval by a new entry with why and by whom; the mark stays', async () => {
+  // The clock of this bench stands an hour behind the recorder's: a correction counts all the same.
+  const on = await bench();
+  const { id } = await recorded(on, await school(on));
+  given(await on.deps.store.pack(id));
+  expect(await interval(on, id, 2)).toMatchObject({ codes: ['on'], amended: false });
+  given(await amendInterval(on.deps, id, wish));
+  expect(await interval(on, id, 2)).toMatchObject({ codes: ['off'], amended: true });
+  given(await amendInterval(on.deps, id, { ...wish, codes: null, missing: 'out of view' }));
+  expect(await interval(on, id, 2)).toMatchObject({ status: 'missing', missing: 'out of view' });
+  const journal = given(await on.deps.store.readSession(id))?.journal ?? [];
+  expect(journal.filter((entry) => entry.kind === 'marked')).toHaveLength(3);
+  const amended = journal.filter((entry) => entry.kind === 'amended');
+  expect(amended).toMatchObject([
+    { writer: 'tablet-a', seq: 0, why: 'wrong tap', by: 'Quill' },
+    { writer: 'tablet-a', seq: 1 },
+  ]);
+});
+
+it('takes two corrections at once, one after the other', async () => {
+  const on = await bench();
+  const { id } = await recorded(on, await school(on));
+  const both = await Promise.all([
+    amendInterval(on.deps, id, wish),
+    amendInterval(on.deps, id, { ...wish, interval: 3 }),
+  ]);
+  expect(both.map(codeOf)).toEqual(['ok', 'ok']);
+  const seqs = given(await on.deps.store.readSession(id))?.journal.filter(({ kind }) => kind === 'amended');
+  expect(seqs?.map(({ seq }) => seq)).toEqual([0, 1]);
+});
+
+it('settles a code after review without replacing the mark', async () => {
+  const on = await bench();
+  const { id } = await recorded(on, await school(on));
+  given(await settleInterval(on.deps, id, { interval: 1, codes: ['off'], why: 'talked over', by: 'Marsh' }));
+  expect(await interval(on, id, 1)).toMatchObject({ codes: ['on'], settled: ['off'], amended: false });
+});
+
+it('refuses a correction that makes no sense, and one while the session runs', async () => {
+  const on = await bench();
+  const made = await school(on);
+  const { id } = await recorded(on, made);
+  const running = await recorded(on, made, { ended: false });
+  const before = await on.dump();
+  const refused = async (changes: Partial<Amendment>) =>
+    codeOf(await amendInterval(on.deps, id, { ...wish, ...changes }));
+  expect(await refused({ interval: 9999 })).toBe('task.noSuchInterval');
+  expect(await refused({ codes: ['sings'] })).toBe('task.noSuchCode');
+  expect(await refused({ codes: ['on', 'off'] })).toBe('task.oneCode');
+  expect(await refused({ codes: [] })).toBe('task.oneCode');
+  expect(await refused({ missing: 'other' })).toBe('task.codesOrReason');
+  expect(await refused({ codes: null })).toBe('task.codesOrReason');
+  expect(await refused({ why: ' ' })).toBe('task.noReason');
+  expect(await refused({ by: '' })).toBe('task.nameMissing');
+  expect(codeOf(await amendInterval(on.deps, running.id, wish))).toBe('task.sessionRuns');
+  expect(codeOf(await amendInterval(on.deps, 'nothing', wish))).toBe('task.noSession');
+  expect(await on.dump()).toBe(before);
+});
+
+it('makes a corrected session one that has to be handed over again', async () => {
+  const on = await bench();
+  const { id } = await recorded(on, await school(on));
+  given(await on.deps.store.markHandedOver([{ session: id, own: 5 }]));
+  expect(given(await on.deps.store.session(id))?.handedOver).toBe(true);
+  given(await amendInterval(on.deps, id, wish));
+  expect(given(await on.deps.store.session(id))?.handedOver).toBe(false);
+});
+
+it('pairs a session with a visit by hand, and lets it go again', async () => {
+  const on = await bench();
+  const made = await school(on);
+  const [one, other] = [await recorded(on, made), await recorded(on, made)];
+  expect(given(await pairVisit(on.deps, one.id, other.visit)).pairings).toEqual([
+    { session: one.id, visit: other.visit },
+  ]);
+  expect(given(await pairVisit(on.deps, one.id, one.visit)).pairings).toHaveLength(1);
+  const before = await on.dump();
+  expect(codeOf(await pairVisit(on.deps, one.id, 'no visit'))).toBe('task.noVisit');
+  expect(codeOf(await pairVisit(on.deps, 'nothing', other.visit))).toBe('task.noSession');
+  expect(await on.dump()).toBe(before);
+  expect(given(await pairVisit(on.deps, one.id, null)).pairings).toEqual([]);
+});
