@@ -15,9 +15,7 @@ export type RemarkCode =
   | 'methodsJoined'
   | 'methodsJoinedOverall'
   | 'phasesByName'
-  | 'leftOutOfPooling'
-  | 'tooFewPhases'
-  | 'perhapsOneVisit';
+  | 'leftOutOfPooling';
 
 /** A report, with what stands in its way (`problems`: figures are incomplete) and what is worth knowing (`notices`). */
 export interface Analysed<Report> {

@@ -72,11 +72,8 @@ export interface Share {
 
 export function shareOf(tally: Tally, method: Method): Share {
   const { scored, missing, onTask, base } = tally;
-  const timesUnknown = [scored, missing, onTask].some(Number.isNaN);
   const limits =
-    method === 'duration' || timesUnknown
-      ? { lower: Number.NaN, upper: Number.NaN }
-      : wilsonInterval(onTask, base);
+    method === 'duration' ? { lower: Number.NaN, upper: Number.NaN } : wilsonInterval(onTask, base);
   const { figures, why } = settle(
     {
       scored,
@@ -87,10 +84,9 @@ export function shareOf(tally: Tally, method: Method): Share {
       upper: 100 * limits.upper,
     },
     (field): WhyCode => {
-      if (timesUnknown) return 'timesUnknown';
+      if (field === 'missing' || Number.isNaN(scored)) return 'timesUnknown';
       if (scored === 0) return 'nothingScored';
-      if (base === 0) return 'neitherOnNorOff';
-      return field === 'lower' || field === 'upper' ? 'durationHasNoLooks' : 'nothingScored';
+      return base === 0 ? 'neitherOnNorOff' : 'durationHasNoLooks';
     },
   );
   return { ...figures, why };

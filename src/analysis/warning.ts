@@ -16,8 +16,7 @@ export type WarningCode =
   | 'nearlyAlwaysOnTask'
   | 'nearlyNeverOnTask'
   | 'underCriterion'
-  | 'oftenOutOfStep'
-  | 'underDoubleCoded';
+  | 'oftenOutOfStep';
 
 export type Warning = Problem<WarningCode>;
 

@@ -1,0 +1,93 @@
+import {
+  type Analysed,
+  agreementReport,
+  changeReport,
+  emptyChange,
+  onTaskReport,
+  recordsOf,
+  visits,
+} from '../analysis/index.ts';
+import type { IncomingFile } from '../exchange/types.ts';
+import { say } from '../words/say.ts';
+import type { Words } from '../words/words.ts';
+import { checkReport, textOfCheck } from './checkReport.ts';
+import { type Gathered, gather } from './gather.ts';
+import { jsonDocument } from './jsonDocument.ts';
+import type { Request } from './parseArguments.ts';
+import { fileProblemLine, remarkLine } from './problemLines.ts';
+import { textOfAgreement } from './textOfAgreement.ts';
+import { textOfChange } from './textOfChange.ts';
+import { textOfOnTask } from './textOfOnTask.ts';
+
+/** What goes to standard output and standard error, and the exit status. */
+export interface Outcome {
+  readonly out: string;
+  readonly err: readonly string[];
+  readonly status: 0 | 1 | 2;
+}
+
+/** Runs one command over files that are read already: the same figures as on screens, from the same functions. */
+export async function runCommand(
+  request: Request,
+  files: readonly IncomingFile[],
+  words: Words,
+): Promise<Outcome> {
+  const { on, off } = request;
+  const gathered = await gather(files, { on, off });
+  const { err, failed } = toldOfFiles(gathered, words);
+  const answer = answerTo(request, gathered, words);
+  return {
+    out: answer.out,
+    err: [...err, ...answer.err],
+    status: answer.status !== 0 ? answer.status : failed ? 1 : 0,
+  };
+}
+
+function toldOfFiles({ outcomes, merged }: Gathered, words: Words): { err: string[]; failed: boolean } {
+  const err = outcomes.flatMap((one) =>
+    (one.ok ? one.notices : one.problems).map((found) => fileProblemLine(found, words)),
+  );
+  for (const one of outcomes) {
+    if (one.ok && one.form === 'visit')
+      err.push(words.batch.atFile({ file: one.file, sentence: words.batch.visitFile }));
+  }
+  for (const notice of merged.notices)
+    err.push(words.batch.general({ sentence: say(words.problems, notice) }));
+  const contradicted = merged.conflicts.some(({ kind }) => kind !== 'record');
+  return { err, failed: contradicted || outcomes.some((one) => !one.ok) };
+}
+
+function answerTo(request: Request, gathered: Gathered, words: Words): Outcome {
+  const { bundle } = gathered.merged;
+  const records = recordsOf(bundle.sessions, { practice: request.practice });
+  const print = <Report>(report: Report, text: (report: Report, words: Words) => string): string =>
+    request.json ? jsonDocument(report, words) : `${text(report, words)}\n`;
+  const told = <Report>(
+    { report, problems, notices }: Analysed<Report>,
+    text: (report: Report, words: Words) => string,
+  ): Outcome => ({
+    out: print(report, text),
+    err: [...problems, ...notices].map((remark) => remarkLine(remark, gathered.filesOf, words)),
+    status: problems.length > 0 ? 1 : 0,
+  });
+  const pairings = bundle.study?.pairings ?? [];
+  switch (request.command) {
+    case 'ontask':
+      return told(onTaskReport(records), textOfOnTask);
+    case 'agreement':
+      return told(agreementReport(visits(records, pairings)), textOfAgreement);
+    case 'check':
+      return { out: print(checkReport(gathered, request.practice, words), textOfCheck), err: [], status: 0 };
+    case 'change': {
+      if (records.length === 0) return { out: print(emptyChange, textOfChange), err: [], status: 0 };
+      const { before, after, control, observer } = request;
+      const studyControl = bundle.study?.control ?? null;
+      const asked = { before, after, control, observer, studyControl };
+      const answer = changeReport(visits(records, pairings), asked);
+      if (answer.ok) return told(answer.value, textOfChange);
+      const sentence = words.batch.general({ sentence: say(words.batch, answer.problem) });
+      if (answer.problem.code !== 'tooFewPhases') return { out: '', err: [sentence], status: 2 };
+      return { out: print(emptyChange, textOfChange), err: [sentence], status: 1 };
+    }
+  }
+}
