@@ -32,7 +32,7 @@ export const withOthers = 0.6;
 
 /** Chance that an observer marks the other thing, by how many visits she has behind her. Marsh drifts. */
 export function errorOf(observer: 'Quill' | 'Marsh', visitsSoFar: number): number {
-  return observer === 'Quill' ? 0.02 : Math.min(0.18, 0.03 + 0.05 * visitsSoFar);
+  return observer === 'Quill' ? 0.02 : Math.min(0.3, 0.02 + 0.09 * visitsSoFar);
 }
 
 /** A child's true share of time on-task in a phase. `place` is −1 … 1 within the class. */
