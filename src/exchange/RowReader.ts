@@ -4,7 +4,10 @@ import { unguarded } from './csvCell.ts';
 import { excerpt, type Fault, fault, type ProblemCode, type ProblemValues } from './problemValues.ts';
 import type { TableColumn } from './tableColumns.ts';
 
+/** Characters of a name or a label. */
 const longestText = 200;
+/** Seconds or minutes beyond this are damage, and no clock could be counted from them. */
+const largest = 1e7;
 
 /**
  * Takes the cells of one row after the other as what they should be, and keeps the first fault of a row. An empty
@@ -40,9 +43,23 @@ export class RowReader {
 
   text(column: TableColumn): string | null {
     const text = unguarded(this.raw(column)).trim();
-    if (text.length > longestText)
-      return this.refuse('table.textTooLong', { column, length: text.length, most: longestText });
+    this.checkLength(column, text);
     return text === '' ? null : text;
+  }
+
+  private checkLength(column: TableColumn, text: string): void {
+    const { length } = text;
+    if (length > longestText) this.refuse('table.textTooLong', { column, length, most: longestText });
+  }
+
+  /** Labels joined by `|`, each once. */
+  labels(): string[] {
+    const text = unguarded(this.raw('code'));
+    if (!text.includes('|') && text.length <= longestText) return text === '' ? [] : [text.trim()];
+    const labels = new Set(text.split('|').map((label) => label.trim()));
+    labels.delete('');
+    for (const label of labels) this.checkLength('code', label);
+    return [...labels];
   }
 
   needed(column: TableColumn): string {
@@ -63,7 +80,7 @@ export class RowReader {
     if (raw === '') return null;
     const plain = this.decimalComma ? raw.replace(',', '.') : raw;
     const value = /^[+-]?\d+(?:\.\d+)?(?:[eE][+-]?\d+)?$/.test(plain) ? Number(plain) : Number.NaN;
-    if (!Number.isFinite(value)) return this.refuse('table.number', { column, found: excerpt(raw) });
+    if (!(Math.abs(value) <= largest)) return this.refuse('table.number', { column, found: excerpt(raw) });
     // −0 is written as 0.
     return value === 0 ? 0 : value;
   }
@@ -118,5 +135,6 @@ export class RowReader {
 /** True for a day that the calendar has: engines read 30 February as 2 March. */
 function isCalendarDate(text: string): boolean {
   const epoch = Date.parse(`${text}T00:00:00Z`);
+  if (text < '1900' || text > '2999') return false;
   return !Number.isNaN(epoch) && new Date(epoch).toISOString().slice(0, 10) === text;
 }

@@ -39,15 +39,13 @@ export interface TableRow {
 
 /** Takes a row as what its columns should hold; the first thing that is not so is the reader's fault. */
 export function readTableRow(cells: RowReader, line: number, kept: readonly string[]): TableRow {
-  const code = cells.text('code');
-  const labels = code === null ? [] : code.split('|').map((label) => label.trim());
   const row: TableRow = {
     line,
     session: cells.needed('session'),
     observer: cells.needed('observer'),
     child: cells.text('child'),
     interval: cells.interval(),
-    labels: [...new Set(labels.filter((label) => label !== ''))],
+    labels: cells.labels(),
     missing: cells.word('missing', missingReasons),
     role: cells.word('role', ['primary', 'second']),
     class: cells.text('class'),

@@ -96,8 +96,8 @@ function journalOf(
   const wall = wallClockOf(header);
   const journal: KnownEntry[] = [];
   const say = (saying: Saying): void => {
-    const stamp = { session: header.id, writer, seq: journal.length, wall: wall(saying.at) };
-    journal.push({ ...stamp, ...saying } as KnownEntry);
+    const seq = journal.length;
+    journal.push({ session: header.id, writer, seq, wall: wall(saying.at), ...saying } as KnownEntry);
   };
   const sharing = new Map<number, number>();
   for (const { interval } of rows) sharing.set(interval, (sharing.get(interval) ?? 0) + 1);
@@ -123,7 +123,12 @@ function journalOf(
       for (const label of row.labels) say({ kind: 'marked', ...about, code: codes.idOf.get(label) ?? label });
     for (const [i, text] of row.kept.entries())
       if (text !== '')
-        say({ kind: 'noted', at, text: `${options.keepColumns?.[i] ?? ''}: ${text}`, about: mark });
+        say({
+          kind: 'noted',
+          at,
+          text: `${options.keepColumns?.[i] ?? ''}: ${text}`.slice(0, 10_000),
+          about: mark,
+        });
   }
   say({ kind: 'ended', at: end, reason: 'complete' });
   return journal;

@@ -37,7 +37,7 @@ const head = 'session,observer,child,interval,code';
 
 test('a million characters in one cell, quoted or not, are one short sentence', async () => {
   const long = 'x'.repeat(1_000_000);
-  const expected = ['big.csv:3: A cell has 1000000 characters; expected at most 10000.'];
+  const expected = ['big.csv:3: A cell has 1,000,000 characters; expected at most 10,000.'];
   const good = 's,Quill,Otter-07,1,on';
   expect(await said('big.csv', bytesOf(`${head}\n${good}\ns,Quill,${long},2,on\n`))).toEqual(expected);
   expect(await said('big.csv', bytesOf(`${head}\n${good}\ns,Quill,"${long}",2,on\n`))).toEqual(expected);

@@ -3,8 +3,9 @@ import { expect, test } from 'vitest';
 import { readIncoming } from '../../src/exchange/readIncoming.ts';
 import type { ReadFile, TableDelimiter } from '../../src/exchange/types.ts';
 import { writeIntervalTable } from '../../src/exchange/writeIntervalTable.ts';
+import { writeStudyFile } from '../../src/exchange/writeStudyFile.ts';
 import { missingReasons } from '../../src/model/missing.ts';
-import { bytesOf } from './sampleStudy.ts';
+import { bytesOf, writing } from './sampleStudy.ts';
 import { sentence } from './sentence.ts';
 import { rowsOf, tableOf } from './tableText.ts';
 
@@ -149,5 +150,52 @@ test('the order of rows and columns, the delimiter and a second reading change n
       },
     ),
     { numRuns: 100 },
+  );
+});
+
+test('sessions from a table can be handed on in a study file', async () => {
+  await fc.assert(
+    fc.asyncProperty(tableArbitrary, async (rows) => {
+      const { bundle } = await take(tableOf(rows));
+      const outcome = await readIncoming({ name: 'a.json', bytes: await writeStudyFile(bundle, writing) });
+      expect(outcome.ok ? [] : outcome.problems.map(sentence)).toEqual([]);
+      expect(outcome).toMatchObject({ bundle, notices: [] });
+    }),
+    { numRuns: 100 },
+  );
+});
+
+test('a table with anything at all in its cells is read or refused in one sentence, never thrown', async () => {
+  const junk = fc.oneof(
+    fc.string({ unit: 'binary', maxLength: 6 }),
+    fc.constantFrom(
+      '',
+      '1e308',
+      '9999999',
+      '-0',
+      '9999-12-31',
+      '9999-12-31T23:59Z',
+      '2026-11-03T10:42Z',
+      "'",
+      '|',
+      'NaN',
+    ),
+  );
+  await fc.assert(
+    fc.asyncProperty(tableArbitrary, junk, fc.nat(), fc.nat(), async (rows, value, r, c) => {
+      const columns = Object.keys(rows[0] ?? {});
+      const changed = rows.map((row, i) =>
+        i === r % rows.length ? { ...row, [columns[c % columns.length] ?? '']: value } : row,
+      );
+      const outcome = await readIncoming({ name: 'a.csv', bytes: bytesOf(tableOf(changed)) });
+      if (outcome.ok) {
+        const handedOn = await readIncoming({
+          name: 'b',
+          bytes: await writeStudyFile(outcome.bundle, writing),
+        });
+        expect(handedOn.ok ? [] : handedOn.problems.map(sentence)).toEqual([]);
+      } else expect(outcome.problems.map(sentence)).toEqual([expect.stringContaining('; expected ')]);
+    }),
+    { numRuns: 500 },
   );
 });

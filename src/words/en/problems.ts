@@ -29,7 +29,8 @@ const nouns: Record<string, string> = {
   visit: 'planned visit',
 };
 
-interface Plural {
+interface Numbers {
+  whole(n: number): string;
   plural(n: number, forms: { one: string; other: string }): string;
 }
 
@@ -59,8 +60,8 @@ export const problems = {
     `${v.path} is absent; expected ${expectedJson(v.expected, v.detail)}.`,
   'json.wrong': (v: { path: string; expected: string; detail: string; found: string }) =>
     `${v.path} is ${v.found}; expected ${expectedJson(v.expected, v.detail)}.`,
-  'study.checksum': (v: { classes: number; sessions: number; entries: number }, f: Plural) =>
-    `The checksum does not match: the file was changed or damaged after it was written. What can still be read: ${v.classes} ${f.plural(v.classes, { one: 'class', other: 'classes' })}, ${v.sessions} ${f.plural(v.sessions, { one: 'session', other: 'sessions' })} with ${v.entries} ${f.plural(v.entries, { one: 'entry', other: 'entries' })}.`,
+  'study.checksum': (v: { classes: number; sessions: number; entries: number }, f: Numbers) =>
+    `The checksum does not match: the file was changed or damaged after it was written. What can still be read: ${v.classes} ${f.plural(v.classes, { one: 'class', other: 'classes' })}, ${v.sessions} ${f.plural(v.sessions, { one: 'session', other: 'sessions' })} with ${f.whole(v.entries)} ${f.plural(v.entries, { one: 'entry', other: 'entries' })}.`,
   'study.twice': (v: { path: string; id: string }) =>
     `${v.path} has the identifier ${v.id} of one before it; expected each only once.`,
   'study.otherSession': (v: { path: string; found: string; expected: string }) =>
@@ -71,28 +72,28 @@ export const problems = {
     `${v.path} is ${v.interval}; expected an interval of the session, whose last one is ${v.most}.`,
   'study.noCode': (v: { path: string; code: string; codes: string }) =>
     `${v.path} is the unknown code ${v.code}; expected one of the session's codes: ${v.codes}.`,
-  'study.gap': (v: { path: string; n: number; first: number }, f: Plural) =>
+  'study.gap': (v: { path: string; n: number; first: number }, f: Numbers) =>
     `${v.path}: ${v.n} ${f.plural(v.n, { one: 'entry of a writer is', other: 'entries of a writer are' })} absent, the first with number ${v.first}; what is there is read.`,
   'study.entryConflict': (v: { path: string; seq: number }) =>
     `${v.path}: entry number ${v.seq} of its writer stands here with two contents; both are kept, to be looked at.`,
-  'study.newKinds': (v: { kinds: string; n: number }, f: Plural) =>
+  'study.newKinds': (v: { kinds: string; n: number }, f: Numbers) =>
     `${v.n} ${f.plural(v.n, { one: 'entry is', other: 'entries are' })} of a kind that only a newer Lookbell knows (${v.kinds}); they are kept and passed on.`,
-  'visit.checksum': (v: { children: number }, f: Plural) =>
+  'visit.checksum': (v: { children: number }, f: Numbers) =>
     `The checksum does not match: the file was changed or damaged after it was written. What can still be read: one visit with ${v.children} ${f.plural(v.children, { one: 'child', other: 'children' })}.`,
   'table.noRows': 'There are no rows below the column names; expected at least one interval.',
   'table.columns': (v: { absent: string; found: string }) =>
     `The column names lack ${v.absent}; expected session, observer, child, interval and code, found “${v.found}”.`,
   'table.columnTwice': (v: { column: string }) =>
     `The column ${v.column} is there twice; expected each column once.`,
-  'table.columnsDropped': (v: { columns: string; n: number }, f: Plural) =>
+  'table.columnsDropped': (v: { columns: string; n: number }, f: Numbers) =>
     `${f.plural(v.n, { one: 'Unknown column, not taken over', other: 'Unknown columns, not taken over' })}: ${v.columns}.`,
-  'table.ragged': (v: { cells: number; columns: number }, f: Plural) =>
+  'table.ragged': (v: { cells: number; columns: number }, f: Numbers) =>
     `The row has ${v.cells} ${f.plural(v.cells, { one: 'cell', other: 'cells' })}; expected ${v.columns}, as many as there are column names.`,
   'table.quoteOpen': 'A quoted cell begins here and is never closed; expected a closing quotation mark.',
   'table.quoteAfter': (v: { found: string }) =>
     `After a quoted cell stands “${v.found}”; expected a delimiter or the end of the row.`,
-  'table.cellTooLong': (v: { length: number; most: number }) =>
-    `A cell has ${v.length} characters; expected at most ${v.most}.`,
+  'table.cellTooLong': (v: { length: number; most: number }, f: Numbers) =>
+    `A cell has ${f.whole(v.length)} characters; expected at most ${f.whole(v.most)}.`,
   'table.textTooLong': (v: { column: string; length: number; most: number }) =>
     `${v.column} has ${v.length} characters; expected at most ${v.most}.`,
   'table.needed': (v: { column: string }) => `${v.column} is empty; expected a text in every row.`,
@@ -135,7 +136,7 @@ export const problems = {
     `Session ${v.session} has the observers ${v.first} and ${v.found}; expected one observer a session.`,
   'table.varies': (v: { column: string; session: string; first: string; found: string }) =>
     `${v.column} is “${v.found}”, and “${v.first}” in the first row of session ${v.session}; expected the same in all its rows.`,
-  'table.roleUnknown': (v: { labels: string; n: number }, f: Plural) =>
+  'table.roleUnknown': (v: { labels: string; n: number }, f: Numbers) =>
     `The ${f.plural(v.n, { one: 'code', other: 'codes' })} ${v.labels} may be on-task or off-task; expected labels that begin with “on-task” or “off-task”, or to be told which is which.`,
   'classList.noRows': (v: { line: number }) =>
     `Line ${v.line}: no child is listed; expected at least one line with a pseudonym.`,
@@ -146,7 +147,7 @@ export const problems = {
     `Line ${v.line}: consent is “${v.found}”; expected yes or no.`,
   'classList.twice': (v: { pseudonym: string; firstLine: number; line: number }) =>
     `Line ${v.line}: ${v.pseudonym} is already in line ${v.firstLine}; expected each child once.`,
-  'classList.cells': (v: { cells: number; columns: number; line: number }, f: Plural) =>
+  'classList.cells': (v: { cells: number; columns: number; line: number }, f: Numbers) =>
     `Line ${v.line}: ${v.cells} ${f.plural(v.cells, { one: 'cell', other: 'cells' })}; expected ${v.columns}, as in the first line.`,
   'classList.text': (v: { column: string; most: number; line: number }) =>
     `Line ${v.line}: ${v.column} is too long or damaged; expected at most ${v.most} plain characters.`,
