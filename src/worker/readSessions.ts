@@ -4,7 +4,8 @@ import type { SessionSummary, StoreReader } from '../tasks/ports.ts';
 
 export interface Along {
   readonly stopped: () => boolean;
-  readonly progress: (share: number) => void;
+  /** Awaited, so that a stop which comes in the meantime is heard before the next session is read. */
+  readonly progress: (share: number) => void | Promise<void>;
 }
 
 /** The sessions of a study that `which` wants, one after the other, telling how far it is. */
@@ -23,7 +24,7 @@ export async function readSessions(
     const session = await store.readSession(id);
     if (!session.ok) return session;
     if (session.value !== null) sessions.push(session.value);
-    progress((i + 1) / (wanted.length + 1));
+    await progress((i + 1) / (wanted.length + 1));
   }
   return ok(sessions);
 }

@@ -9,7 +9,7 @@ export interface Desk {
   ask(
     number: number,
     question: Question,
-    progress: ((share: number) => void) | null,
+    progress: ((share: number) => void | Promise<void>) | null,
   ): Promise<Answer<QuestionKind>>;
   stop(number: number): void;
 }
@@ -28,7 +28,9 @@ export function serveQuestions(open: () => Promise<Result<StoreReader>>, endpoin
       }
       const answer = await answerFrom(store.value, question, {
         stopped: () => stopped.has(number),
-        progress: (share) => progress?.(share),
+        progress: async (share) => {
+          await progress?.(share);
+        },
       });
       stopped.delete(number);
       if (!answer.ok && answer.problem.code === 'store.closed') opened = null;
