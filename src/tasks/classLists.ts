@@ -11,6 +11,8 @@ import type { Deps } from './ports.ts';
 import { sameName } from './text.ts';
 
 export interface ClassListSource {
+  /** What the list is called, where it came as a file; it is not kept. */
+  readonly name?: string;
   /** Typed or pasted text, or the bytes of a CSV file. */
   readonly content: string | Uint8Array;
   /** For lists that do not speak of consent: whoever gives them says that every child on them has it. */
