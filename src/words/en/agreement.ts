@@ -1,0 +1,166 @@
+import type { Format } from '../format.ts';
+
+type F = Format;
+
+/** Agreement of two observers, and of all pairs. */
+export const agreement = {
+  about: (
+    {
+      klass,
+      date,
+      phases,
+      observers,
+    }: { klass: string; date: string | null; phases: readonly string[]; observers: readonly string[] },
+    f: F,
+  ) =>
+    [klass, date === null ? '' : f.day(date), f.list(phases), f.list(observers)]
+      .filter((s) => s !== '')
+      .join(' · '),
+  title: (
+    {
+      agreed,
+      compared,
+      looks,
+      kappas,
+    }: {
+      agreed: number;
+      compared: number;
+      looks: boolean;
+      kappas: readonly { phase: string | null; kappa: number; lower: number | null; upper: number | null }[];
+    },
+    f: F,
+  ) => {
+    const unit = looks
+      ? f.plural(compared, { one: 'look', other: 'looks' })
+      : f.plural(compared, { one: 'interval', other: 'intervals' });
+    const each = kappas.map(
+      ({ phase, kappa, lower, upper }) =>
+        `${f.kappa(kappa)}${kappas.length > 1 && phase !== null ? ` ${phase}` : ''}${
+          lower === null || upper === null ? '' : `, between ${f.kappa(lower)} and ${f.kappa(upper)}`
+        }`,
+    );
+    const kappa = each.length === 0 ? '' : ` Kappa ${each.join('; ')}.`;
+    return `They agree on ${f.whole(agreed)} of ${f.whole(compared)} ${unit}.${kappa}`;
+  },
+  nothingTitle: 'The two records have no look in common.',
+  aloneTitle: 'Only one observer was here.',
+  aloneText:
+    'Agreement needs two records of one visit. Bring in the other tablet’s file, or say by hand which visit a record belongs to.',
+  prevalence: ({ percent, chance }: { percent: number; chance: number }, f: F) => {
+    const often = percent >= 60 ? 'common' : percent <= 40 ? 'rare' : 'about as common as not';
+    return `On-task was ${often} (${f.percent(percent)}), so two people guessing would agree on ${f.percent(chance)}; kappa takes that luck out.`;
+  },
+  prevalenceOnly: ({ percent }: { percent: number }, f: F) =>
+    `On-task in ${f.percent(percent)} of these intervals.`,
+  inStep: ({ seconds }: { seconds: number }, f: F) =>
+    `In step: their schedules ran ${f.fixed(seconds, 1)} s apart.`,
+  outOfStep: ({ seconds, later }: { seconds: number; later: string }, f: F) =>
+    `Out of step: the schedule of ${later} ran ${f.fixed(seconds, 1)} s behind, by the tablets’ clocks; some of the differences may come from that.`,
+  stepUnknown: 'How far apart their schedules ran is not known: at least one record has no prompt times.',
+  kappaUndefined: ({ phase, reason }: { phase: string | null; reason: string }) =>
+    `Kappa is not defined${phase === null ? '' : ` ${phase}`}: ${reason}.`,
+  sheet: 'Round sheet of the two',
+  keyDiffers: ({ first, second }: { first: string; second: string }) =>
+    `they differ (${first} upper left, ${second} lower right)`,
+  keyMissing: 'one of them has no mark',
+  figuresOf: ({ phase }: { phase: string | null }) => (phase === null ? 'Figures' : `Figures, ${phase}`),
+  intervalByInterval: 'interval by interval',
+  onTaskAgreed: 'on-task agreed',
+  offTaskAgreed: 'off-task agreed',
+  kappa: 'kappa',
+  highestKappa: 'kappa, the highest it could be',
+  ac1: 'AC1',
+  notDefined: 'not defined',
+  because: ({ figure, reason }: { figure: string; reason: string }) => `${figure}: ${reason}.`,
+  criterion: 'criterion',
+  meets: 'meets it',
+  below: 'below it',
+  unknown: 'cannot be told',
+  criterionIs: ({ agreement: share, kappa }: { agreement: number; kappa: number }, f: F) =>
+    `The study asks for ${f.percent(100 * share)} agreement and kappa ${f.kappa(kappa)}.`,
+  tableTitle: 'What each of them said',
+  tableCaption: ({ first, second }: { first: string; second: string }) =>
+    `Rows: ${first}. Columns: ${second}.`,
+  tableNone: ({ reason }: { reason: string }) => `There is no table of codes: ${reason}.`,
+  codesCaption: 'Each code against all others',
+  code: 'code',
+  occurrence: 'agreed where either said it',
+  nonOccurrence: 'agreed where either did not',
+  excludedTitle: 'Left out',
+  excludedNone: 'Both scored every look.',
+  excluded: (
+    { observer, reasons }: { observer: string; reasons: readonly { reason: string | null; n: number }[] },
+    f: F,
+  ) => `${observer}: ${f.list(reasons.map((r) => `${f.whole(r.n)} ${r.reason ?? 'not in the record'}`))}.`,
+  differencesTitle: ({ n }: { n: number }, f: F) =>
+    n === 0
+      ? 'They differ nowhere'
+      : `The ${f.plural(n, { one: 'difference', other: `${f.whole(n)} differences` })}`,
+  differencesOpen: ({ n }: { n: number }, f: F) =>
+    `Go through the ${f.plural(n, { one: 'difference', other: `${f.whole(n)} differences` })}`,
+  differencesCaption: 'Every look on which they differ',
+  phase: 'phase',
+  at: 'at',
+  child: 'child',
+  interval: 'interval',
+  counts: ({ on, present }: { on: number; present: number }, f: F) => `${f.whole(on)} of ${f.whole(present)}`,
+  none: 'none',
+  how: ({ method, compared, excluded }: { method: string; compared: number; excluded: number }, f: F) =>
+    `${method}; the same child at the same interval, both scored: ${f.whole(compared)}, left out ${f.whole(excluded)}. Kappa after Cohen (1960) with the large-sample interval of Fleiss, Cohen and Everitt (1969); looks of one child follow one another, so it is rather too narrow.`,
+  methodNames: ({ method }: { method: string }) =>
+    ({
+      momentary: 'Momentary time sampling',
+      partial: 'Partial interval',
+      whole: 'Whole interval',
+      headcount: 'Headcount',
+      duration: 'Continuous duration',
+    })[method] ?? method,
+
+  // all pairs
+  allTitle: (
+    {
+      pairs,
+      percent,
+      compared,
+      kappa,
+    }: { pairs: number; percent: number | null; compared: number; kappa: number | null },
+    f: F,
+  ) => {
+    const who = `${f.whole(pairs)} ${f.plural(pairs, { one: 'pair agrees', other: 'pairs agree' })}`;
+    if (percent === null)
+      return `${f.whole(pairs)} ${f.plural(pairs, { one: 'pair', other: 'pairs' })}, nothing to compare.`;
+    return `${who} on ${f.percent(percent)} of ${f.whole(compared)} intervals${kappa === null ? '' : `; kappa over all ${f.kappa(kappa)}`}.`;
+  },
+  noPairsTitle: 'No visit has two observers yet.',
+  noPairsText:
+    'A second observer takes the visit file and records the same children at the same moments. Their file, brought in here, finds its visit by itself.',
+  practiceTitle: 'practice sessions',
+  forTheRecord: 'for the record',
+  practice: 'practice',
+  whichSessions: 'Sessions',
+  sharesTitle: 'How much was double-coded',
+  share: (
+    {
+      phase,
+      doubleCoded,
+      visits,
+      percent,
+    }: { phase: string | null; doubleCoded: number; visits: number; percent: number },
+    f: F,
+  ) =>
+    `${phase === null ? '' : `${phase}: `}${f.whole(doubleCoded)} of ${f.whole(visits)} ${f.plural(visits, { one: 'visit', other: 'visits' })}, ${f.percent(percent)}`,
+  enough: 'enough (20 % or more)',
+  tooLittle: 'under 20 %',
+  pairsTitle: 'Every pair',
+  pairsCaption: 'Agreement of every pair, phase by phase',
+  visit: 'visit',
+  observers: 'observers',
+  compared: 'compared',
+  agreed: 'agreed',
+  between: 'between',
+  betweenFigures: ({ lower, upper }: { lower: number; upper: number }, f: F) =>
+    `${f.kappa(lower)} and ${f.kappa(upper)}`,
+  alpha: ({ alpha }: { alpha: number }, f: F) => `Krippendorff’s alpha ${f.kappa(alpha)}.`,
+  overallHow:
+    'Kappa over all pairs is pooled after De Vries, Elliott, Kanouse and Teleki (2008); the share double-coded follows Kratochwill et al. (2010): at least 20 % in each phase.',
+} as const;
