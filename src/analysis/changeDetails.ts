@@ -2,6 +2,7 @@ import type { Problem } from '../kernel/result.ts';
 import type { ChangeAnalysis } from './changeReport.ts';
 import type { ChildLine } from './childChanges.ts';
 import type { ClassChange } from './classChange.ts';
+import { type Prediction, predictions } from './predictions.ts';
 
 /**
  * What the design allows to be said. `describesOnly`: one class, no comparison; `classesDescribe`: several classes, no
@@ -32,6 +33,7 @@ export interface ChangeDetails {
   readonly stretchMinutes: number;
   readonly classes: readonly ClassChangeDetails[];
   readonly report: ChangeAnalysis['report'];
+  readonly predictions: readonly Prediction[];
   /** What may be said of all classes together. */
   readonly sentence: ChangeSentence;
   readonly problems: ChangeAnalysis['problems'];
@@ -54,6 +56,7 @@ export function changeDetails(analysis: ChangeAnalysis): ChangeDetails {
     stretchMinutes,
     classes,
     report,
+    predictions: predictions(report.classes),
     sentence: wholeSentence(analysis),
     problems,
     notices,

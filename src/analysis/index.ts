@@ -38,6 +38,7 @@ export {
   pairDetails,
 } from './pairDetails.ts';
 export type { PooledChange } from './pooledChange.ts';
+export type { Prediction } from './predictions.ts';
 export { type Choice, primaryRecord } from './primaryRecord.ts';
 export type { Analysed, Remark, RemarkCode } from './remark.ts';
 export { type CellMark, type RoundSheet, roundSheet, type SheetCell, type SheetRow } from './roundSheet.ts';

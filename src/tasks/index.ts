@@ -15,6 +15,7 @@ export {
   importFiles,
 } from './imports.ts';
 export { ensureInstallation } from './installation.ts';
+export { addNote, type NoteWish } from './notes.ts';
 export { addObserver, removeObserver, saveObserver } from './observers.ts';
 export type { PlanPreset } from './planPresets.ts';
 export type * from './ports.ts';
