@@ -110,5 +110,9 @@ function visitLine(visit: Visit): VisitLine {
     date: visit.date,
     observers: visit.records.map((record) => record.observer),
     sessions: visit.records.map((record) => record.session),
+    counts: visit.records.map(({ looks }) => {
+      const scored = looks.filter(({ status }) => status === 'scored').length;
+      return { scored, missing: looks.length - scored };
+    }),
   };
 }

@@ -29,6 +29,8 @@ export interface VisitLine {
   readonly observers: readonly string[];
   /** Header ids, in the order of the observers. */
   readonly sessions: readonly string[];
+  /** Intervals scored and missing, in the order of the sessions. */
+  readonly counts: readonly { readonly scored: number; readonly missing: number }[];
 }
 
 export interface StudyAnswer {
