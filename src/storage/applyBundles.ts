@@ -90,11 +90,13 @@ export function applyBundles(
   );
 }
 
-/** One bundle a study, joined with itself: a join also puts a bundle in order. */
+/** One bundle a study. */
 function joinedByStudy(bundles: readonly StudyBundle[], join: Join): StudyBundle[] {
   const byStudy = new Map<string, StudyBundle>();
-  for (const bundle of bundles)
-    byStudy.set(bundle.study.id, join(byStudy.get(bundle.study.id) ?? bundle, bundle));
+  for (const bundle of bundles) {
+    const before = byStudy.get(bundle.study.id);
+    byStudy.set(bundle.study.id, before === undefined ? bundle : join(before, bundle));
+  }
   return [...byStudy.values()];
 }
 
@@ -197,7 +199,12 @@ async function planSession(
   rows: SessionRows | undefined,
   plan: Plan,
 ): Promise<void> {
-  if (old !== undefined && canonicalJson(old) === canonicalJson(session)) return;
+  // A join is a union: a journal that has not grown has not changed.
+  if (
+    old?.journal.length === session.journal.length &&
+    canonicalJson(old.header) === canonicalJson(session.header)
+  )
+    return;
   const local = rows?.row ?? { here: false, own: 0, handed: null };
   plan.headers.push(await headerRow(core, session.header));
   plan.packs.push(await packRow(core, session.header, session.journal));

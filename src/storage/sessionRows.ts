@@ -51,7 +51,8 @@ export async function openSession(core: Core, seen: SessionRows): Promise<Stored
       : upcast<JournalEntry[]>('journal', pack.v, await core.seal.open(pack.sealed), pack.key);
   return {
     header: upcast<SessionHeader>('header', header.v, await core.seal.open(header.sealed), header.key),
-    journal: unionOfJournals(packed, single).entries,
+    // A pack is its own union; only rows beside it have to be put in.
+    journal: single.length === 0 ? packed : unionOfJournals(packed, single).entries,
   };
 }
 

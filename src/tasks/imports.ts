@@ -175,6 +175,8 @@ async function weighed(
         before?.sessions,
         after.sessions,
         (one) => one.header.id,
+        // Journals are joined by union: one that has not grown has not changed.
+        (one) => canonicalJson({ header: one?.header, entries: one?.journal.length }),
       ),
       classes: plus(preview.classes, bundle.classes, before?.classes, after.classes, (one) => one.id),
       observers: plus(
@@ -203,6 +205,7 @@ function plus<Item>(
   before: readonly Item[] = [],
   after: readonly Item[],
   idOf: (item: Item) => string,
+  textOf: (item: Item | undefined) => string = canonicalJson,
 ): Counts {
   const old = new Map(before.map((item) => [idOf(item), item]));
   const next = new Map(after.map((item) => [idOf(item), item]));
@@ -210,7 +213,7 @@ function plus<Item>(
   for (const id of new Set(brought.map(idOf))) {
     const was = old.get(id);
     if (was === undefined) fresh += 1;
-    else if (canonicalJson(was) === canonicalJson(next.get(id))) known += 1;
+    else if (textOf(was) === textOf(next.get(id))) known += 1;
     else changed += 1;
   }
   return { new: fresh, known, changed };

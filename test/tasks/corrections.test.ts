@@ -1,7 +1,7 @@
 import { expect, it } from 'vitest';
 import { readOut } from '../../src/journal/readOut.ts';
 import { fold } from '../../src/journal/step.ts';
-import { type Amendment, amendInterval, pairVisit, settleInterval } from '../../src/tasks/index.ts';
+import { type Amendment, addNote, amendInterval, pairVisit, settleInterval } from '../../src/tasks/index.ts';
 import { codeOf, given } from '../storage/samples.ts';
 import { type Bench, bench, recorded, school } from './bench.ts';
 
@@ -94,4 +94,23 @@ it('pairs a session with a visit by hand, and lets it go again', async () => {
   expect(codeOf(await pairVisit(on.deps, 'nothing', other.visit))).toBe('task.noSession');
   expect(await on.dump()).toBe(before);
   expect(given(await pairVisit(on.deps, one.id, null)).pairings).toEqual([]);
+});
+
+it('adds words to a flag after the session, and nothing while it runs', async () => {
+  const on = await bench();
+  const made = await school(on);
+  const { id } = await recorded(on, made);
+  const running = await recorded(on, made, { ended: false });
+  const about = { writer: 'run-1', seq: 2 };
+  given(await addNote(on.deps, id, { text: ' the fire  bell ', about }));
+  const journal = given(await on.deps.store.readSession(id))?.journal;
+  expect(journal?.find(({ kind }) => kind === 'noted')).toMatchObject({
+    text: 'the fire bell',
+    about,
+    seq: 0,
+  });
+  const before = await on.dump();
+  expect(codeOf(await addNote(on.deps, id, { text: ' ' }))).toBe('task.noWords');
+  expect(codeOf(await addNote(on.deps, running.id, { text: 'x' }))).toBe('task.sessionRuns');
+  expect(await on.dump()).toBe(before);
 });

@@ -79,6 +79,7 @@ export const refusals = {
   'task.noSuchCode': 'This code is not in the session’s set.',
   'task.noSuchInterval': (v: { interval: number }, f: Numbers) =>
     `The session has no interval ${f.whole(v.interval)}.`,
+  'task.noWords': 'Write something first.',
   'task.noReason': 'Write down why: the reason stays with the change.',
   'task.noVisitFile': 'This is not a visit file. Ask the first tablet for the file of today’s visit.',
   'task.studyRemoved': (v: { name: string }) =>
