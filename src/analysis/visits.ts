@@ -19,7 +19,7 @@ export interface Visit {
 const sameStartMs = 30 * 60_000;
 
 /**
- * Brings records together to visits: by what a table or a visit file called the visit; without that by class, phase and
+ * Brings records together to visits: by what a table or a visit file called the visit (within one class); without that by class, phase and
  * date, with starts within 30 minutes where both are known; with neither each session is a visit of its own. A
  * pairing by hand goes before all that. One observer twice under one key: the k-th session (by start, then name)
  * belongs with the other's k-th. The order of rows and files decides nothing.
@@ -71,7 +71,7 @@ function visitOf(key: string, visit: string | null, records: readonly SessionRec
   return {
     key,
     visit,
-    className: first?.className ?? null,
+    className: records.find((record) => record.className !== null)?.className ?? null,
     condition: records.find((record) => record.condition !== null)?.condition ?? null,
     phase: first?.phase ?? null,
     date: records.find((record) => record.date !== null)?.date ?? null,
@@ -94,9 +94,16 @@ function inTurns(records: readonly SessionRecord[]): SessionRecord[][] {
 function automaticKeys(sorted: readonly SessionRecord[]): Map<SessionRecord, string> {
   const keys = new Map<SessionRecord, string>();
   const byTime = new Map<string, SessionRecord[]>();
+  const classesOf = new Map<string, Set<string>>();
+  for (const { visit, className } of sorted) {
+    if (visit === null || className === null) continue;
+    classesOf.set(visit, (classesOf.get(visit) ?? new Set()).add(className));
+  }
   for (const record of sorted) {
     const { visit, className, phase, date, session } = record;
-    if (visit !== null) keys.set(record, JSON.stringify(['visit', visit, className, phase]));
+    // The same name in several classes ("visit 1" in each) means several visits; a class left out means none of them.
+    const several = visit !== null && (classesOf.get(visit)?.size ?? 0) > 1;
+    if (visit !== null) keys.set(record, JSON.stringify(['visit', visit, several ? className : null, phase]));
     else if (date === null) keys.set(record, JSON.stringify(['alone', session, phase]));
     else {
       const key = JSON.stringify(['time', className, phase, date]);

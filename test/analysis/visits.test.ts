@@ -24,6 +24,22 @@ describe('visits', () => {
     ).toEqual(['m+q', 'm2']);
   });
 
+  test('the same name in two classes means two visits; a table that leaves the class out joins the only one', async () => {
+    const herons = { ...quill, class: 'Herons' };
+    expect(
+      await grouped([
+        { ...marsh, session: 'm', visit: '1' },
+        { ...herons, session: 'h', visit: '1' },
+      ]),
+    ).toEqual(['h', 'm']);
+    expect(
+      await grouped([
+        { ...marsh, session: 'm', visit: '1' },
+        { ...quill, class: '', session: 'q', visit: '1' },
+      ]),
+    ).toEqual(['m+q']);
+  });
+
   test('without a name: class, phase, date, and starts within 30 minutes', async () => {
     const at = (time: string) => `2026-11-03T${time}:00+00:00`;
     expect(
