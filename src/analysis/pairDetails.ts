@@ -38,6 +38,7 @@ export interface PairDetails {
   /** Header ids, in the order of `row.observers`. */
   readonly sessionIds: readonly [string, string];
   readonly method: string;
+  readonly date: string | null;
   readonly row: AgreementPair;
   /** An interval that both missed is counted with both observers. */
   readonly excludedBy: readonly ExcludedBy[];
@@ -62,6 +63,7 @@ export function pairDetails(pair: ComparedPair, criterion: Criterion): PairDetai
     key: `${visit.key} ${a.session} ${b.session}`,
     sessionIds: [a.session, b.session],
     method: a.method,
+    date: visit.date,
     row,
     excludedBy: [...excludedBy(pair, 'a'), ...excludedBy(pair, 'b')],
     differences: data.lines.flatMap((line): Difference[] => {
