@@ -22,30 +22,40 @@ interface Found {
 function find(paths: readonly string[]): Found {
   const files = new Map<string, IncomingFile>();
   const missing: string[] = [];
-  for (const path of paths) {
-    const sentence = take(path, files);
-    if (sentence !== null) missing.push(batch.atFile({ file: path, sentence }));
-  }
+  for (const path of paths) take(path, { files, missing });
   return { files: [...files.values()], missing };
 }
 
-/** Puts a file or a folder's files to the others; says what keeps it from being read. */
-function take(path: string, files: Map<string, IncomingFile>): string | null {
-  const about = statSync(path, { throwIfNoEntry: false });
-  if (about === undefined) return batch.noSuchFile;
-  if (!about.isDirectory()) {
-    files.set(path, { name: path, bytes: new Uint8Array(readFileSync(path)) });
-    return null;
+/** Puts a file or a folder's files to the others; says what keeps one from being read. */
+function take(
+  path: string,
+  { files, missing }: { files: Map<string, IncomingFile>; missing: string[] },
+): void {
+  const tell = (file: string, sentence: string): void => {
+    missing.push(batch.atFile({ file, sentence }));
+  };
+  const read = (file: string): void => {
+    try {
+      files.set(file, { name: file, bytes: new Uint8Array(readFileSync(file)) });
+    } catch {
+      tell(file, batch.unreadable);
+    }
+  };
+  try {
+    if (!statSync(path).isDirectory()) {
+      read(path);
+      return;
+    }
+    const names = readdirSync(path, { withFileTypes: true })
+      .filter((entry) => !entry.isDirectory() && readable.test(entry.name) && !entry.name.startsWith('.'))
+      .map(({ name }) => name)
+      .sort(byCodePoint);
+    for (const name of names) read(join(path, name));
+    if (names.length === 0) tell(path, batch.emptyFolder);
+  } catch (thrown) {
+    const gone = thrown instanceof Error && 'code' in thrown && thrown.code === 'ENOENT';
+    tell(path, gone ? batch.noSuchFile : batch.unreadable);
   }
-  const names = readdirSync(path, { withFileTypes: true })
-    .filter((entry) => !entry.isDirectory() && readable.test(entry.name) && !entry.name.startsWith('.'))
-    .map(({ name }) => name)
-    .sort(byCodePoint);
-  for (const name of names) {
-    const file = join(path, name);
-    files.set(file, { name: file, bytes: new Uint8Array(readFileSync(file)) });
-  }
-  return names.length === 0 ? batch.emptyFolder : null;
 }
 
 async function run(): Promise<number> {

@@ -8,9 +8,11 @@ import {
   visits,
 } from '../analysis/index.ts';
 import type { IncomingFile } from '../exchange/types.ts';
+import type { StoredSession } from '../journal/stored.ts';
 import { say } from '../words/say.ts';
 import type { Words } from '../words/words.ts';
 import { checkReport, textOfCheck } from './checkReport.ts';
+import { contradictions } from './contradictions.ts';
 import { type Gathered, gather } from './gather.ts';
 import { jsonDocument } from './jsonDocument.ts';
 import type { Request } from './parseArguments.ts';
@@ -34,32 +36,34 @@ export async function runCommand(
 ): Promise<Outcome> {
   const { on, off } = request;
   const gathered = await gather(files, { on, off });
-  const { err, failed } = toldOfFiles(gathered, words);
-  const answer = answerTo(request, gathered, words);
+  const against = contradictions(gathered, words);
+  const answer = answerTo(request, gathered, against.sessions, words);
+  const failed = against.failed || gathered.outcomes.some((one) => !one.ok);
   return {
     out: answer.out,
-    err: [...err, ...answer.err],
+    err: [...linesOfFiles(gathered, words), ...against.lines, ...answer.err],
     status: answer.status !== 0 ? answer.status : failed ? 1 : 0,
   };
 }
 
-function toldOfFiles({ outcomes, merged }: Gathered, words: Words): { err: string[]; failed: boolean } {
-  const err = outcomes.flatMap((one) =>
-    (one.ok ? one.notices : one.problems).map((found) => fileProblemLine(found, words)),
-  );
-  for (const one of outcomes) {
-    if (one.ok && one.form === 'visit')
-      err.push(words.batch.atFile({ file: one.file, sentence: words.batch.visitFile }));
-  }
-  for (const notice of merged.notices)
-    err.push(words.batch.general({ sentence: say(words.problems, notice) }));
-  const contradicted = merged.conflicts.some(({ kind }) => kind !== 'record');
-  return { err, failed: contradicted || outcomes.some((one) => !one.ok) };
+function linesOfFiles({ outcomes }: Gathered, words: Words): string[] {
+  return outcomes.flatMap((one) => {
+    const lines = (one.ok ? one.notices : one.problems).map((found) => fileProblemLine(found, words));
+    const visit = one.ok && one.form === 'visit';
+    return visit
+      ? [...lines, words.batch.atFile({ file: one.file, sentence: words.batch.visitFile })]
+      : lines;
+  });
 }
 
-function answerTo(request: Request, gathered: Gathered, words: Words): Outcome {
+function answerTo(
+  request: Request,
+  gathered: Gathered,
+  sessions: readonly StoredSession[],
+  words: Words,
+): Outcome {
   const { bundle } = gathered.merged;
-  const records = recordsOf(bundle.sessions, { practice: request.practice });
+  const records = recordsOf(sessions, { practice: request.practice });
   const print = <Report>(report: Report, text: (report: Report, words: Words) => string): string =>
     request.json ? jsonDocument(report, words) : `${text(report, words)}\n`;
   const told = <Report>(

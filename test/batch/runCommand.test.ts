@@ -85,6 +85,24 @@ describe('ontask', () => {
     });
     expect(both).toEqual(once);
   });
+
+  test('a session with different contents in two tables is told and left out, whatever the order of the files', async () => {
+    const other = workedClass.map((row) =>
+      row.session === 's1' && row.interval === 1 ? { ...row, code: 'off-task' } : row,
+    );
+    const told = async (first: string, second: string) => {
+      const { document, err, status } = await documentOf(['ontask'], { 'a.csv': first, 'b.csv': second });
+      const sessions = document.sessions.map((row: { session: string }) => row.session);
+      return { sessions, err, status };
+    };
+    const expected = {
+      sessions: ['s2'],
+      err: [expect.stringMatching(/^a\.csv: session s1 .*a\.csv, b\.csv/)],
+      status: 1,
+    };
+    expect(await told(csvOf(workedClass), csvOf(other))).toEqual(expected);
+    expect(await told(csvOf(other), csvOf(workedClass))).toEqual(expected);
+  });
 });
 
 describe('agreement', () => {

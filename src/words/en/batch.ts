@@ -55,6 +55,8 @@ Exit status: 0 done, 1 a file has problems, 2 wrong usage.
     `There is no observer "${observer}" in the files; there are: ${observers}.`,
   noSuchFile: 'there is no such file or folder; expected a study file, an interval table or a folder of them',
   unreadable: 'could not be read; expected a file that may be opened',
+  contradicted: ({ session, files }: { session: string; files: string }) =>
+    `session ${session} stands with different contents in ${files}, and is left out; expected the same contents, or another name of the session`,
   emptyFolder: 'the folder holds no .csv, .json or .gz file',
   visitFile: 'is a visit file, which holds nobody’s marks; nothing to report from it',
   wentWrong: ({ what }: { what: string }) =>
