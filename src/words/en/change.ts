@@ -83,6 +83,7 @@ export const change = {
   after: 'After',
   control: 'Comparison',
   controlNone: 'as the study says',
+  asRecorded: 'as recorded',
   klass: 'Class',
   phasesToChoose: 'Choose which phase comes before and which after.',
   tooFewPhases: 'Change needs two phases, and the visits have only one so far.',

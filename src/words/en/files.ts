@@ -47,6 +47,7 @@ export const files = {
   ready: ({ name, bytes }: { name: string; bytes: number }, f: F) =>
     `${name}, ${bytes < 100_000 ? `${f.whole(Math.max(1, bytes / 1000))} kB` : `${f.fixed(bytes / 1_000_000, 1)} MB`}`,
   give: 'Share or save it',
+  againTap: 'The browser asks for one more tap.',
   shared: 'The file was shared.',
   saved: 'The file was saved to the downloads.',
   cancelled: 'Nothing has left the tablet.',

@@ -1,0 +1,138 @@
+import type { PhaseDetails, Share, Why } from '../../analysis/index.ts';
+import { Composition } from '../../charts/Composition.tsx';
+import { screenPalette } from '../../charts/palette.ts';
+import { Sheet } from '../../ui/Sheet.tsx';
+import { Table } from '../../ui/Table.tsx';
+import { say } from '../../words/say.ts';
+import { useWords } from '../services.ts';
+import { Chart } from './Chart.tsx';
+
+type Shown = Pick<Share, 'scored' | 'missing' | 'percentOnTask' | 'lower' | 'upper'> & { readonly why: Why };
+
+/** The figures of one phase: child by child, part by part, and what off-task was made of. */
+export function PhaseFigures({ phase, alone }: { readonly phase: PhaseDetails; readonly alone: boolean }) {
+  const words = useWords();
+  const { row, children, lessonParts, offTask } = phase;
+  const name = alone ? null : row.phase;
+  const why = (figures: Shown): string =>
+    figures.why.percentOnTask === undefined
+      ? words.afterwards.undefinedHere
+      : say(words.why, { code: figures.why.percentOnTask, values: {} });
+  const shares = [
+    {
+      key: 'scored',
+      head: words.afterwards.scored,
+      number: true,
+      cell: (one: Shown) => (one.scored === null ? '' : words.f.whole(one.scored)),
+    },
+    {
+      key: 'missing',
+      head: words.afterwards.missing,
+      number: true,
+      cell: (one: Shown) => (one.missing === null ? '' : words.f.whole(one.missing)),
+    },
+    {
+      key: 'percent',
+      head: words.afterwards.percentOnTask,
+      number: true,
+      cell: (one: Shown) =>
+        one.percentOnTask === null ? (
+          <span className="second">{why(one)}</span>
+        ) : (
+          words.f.percentFine(one.percentOnTask)
+        ),
+    },
+    {
+      key: 'between',
+      head: words.afterwards.between,
+      number: true,
+      cell: (one: Shown) =>
+        one.lower === null || one.upper === null
+          ? ''
+          : words.afterwards.betweenFigures({ lower: one.lower, upper: one.upper }),
+    },
+  ];
+  const parts = lessonParts.filter(({ lessonPart }) => lessonPart !== null);
+  const off = offTask.reduce((sum, { n }) => sum + n, 0);
+  return (
+    <>
+      {children.length > 0 && (
+        <Sheet title={words.afterwards.perChild({ phase: name })}>
+          <Table
+            caption={words.afterwards.perChild({ phase: row.phase })}
+            captionHidden
+            rows={children}
+            rowKey={(child) => child.id}
+            columns={[
+              { key: 'child', head: words.afterwards.child, rowHead: true, cell: (child) => child.child },
+              ...shares,
+              ...(row.method === 'momentary'
+                ? [
+                    {
+                      key: 'worth',
+                      head: words.afterwards.worth,
+                      number: true,
+                      cell: (child: (typeof children)[number]) =>
+                        child.effectiveLooks === null ? '' : words.f.decimal(child.effectiveLooks),
+                    },
+                  ]
+                : []),
+              {
+                key: 'beside',
+                head: '',
+                cell: (child) => (
+                  <span className="second small">
+                    {child.warnings.map((one) => say(words.warnings, one)).join(' ')}
+                  </span>
+                ),
+              },
+            ]}
+          />
+          {row.classPercent !== null && (
+            <p className="second small">{words.afterwards.classMean({ percent: row.classPercent })}</p>
+          )}
+        </Sheet>
+      )}
+      {offTask.length > 1 && (
+        <Sheet title={words.afterwards.makeUp({ phase: name })}>
+          {off === 0 ? (
+            <p className="second">{words.afterwards.makeUpNone}</p>
+          ) : (
+            <Chart>
+              {(width) => (
+                <Composition
+                  width={width}
+                  palette={screenPalette}
+                  label={words.afterwards.makeUp({ phase: row.phase })}
+                  shares={offTask.map(({ code, n }) => ({
+                    label: words.afterwards.makeUpShare({ code, count: n, of: off }),
+                    size: n,
+                  }))}
+                />
+              )}
+            </Chart>
+          )}
+        </Sheet>
+      )}
+      {parts.length > 0 && (
+        <Sheet title={words.afterwards.perPart({ phase: name })}>
+          <Table
+            caption={words.afterwards.perPart({ phase: row.phase })}
+            captionHidden
+            rows={lessonParts}
+            rowKey={(part) => part.lessonPart ?? ''}
+            columns={[
+              {
+                key: 'part',
+                head: words.afterwards.lessonPart,
+                rowHead: true,
+                cell: (part) => part.lessonPart ?? words.afterwards.noPart,
+              },
+              ...shares,
+            ]}
+          />
+        </Sheet>
+      )}
+    </>
+  );
+}
