@@ -30,17 +30,21 @@ export function Composition({ width, palette, label, shares }: Props) {
     return part;
   });
   const shown = parts.filter((part) => part.w > 0);
-  // A label stands under the left end of its part, or further left where it would not fit, on the first free line.
-  const ends: number[] = [];
-  const placed = shown.map((part) => {
-    const w = textWidth(part.label, size) + 16;
-    const left = Math.max(0, Math.min(part.x, width - w));
-    let line = ends.findIndex((end) => end <= left);
-    if (line === -1) line = ends.length;
-    ends[line] = left + w;
-    return { ...part, left, line };
-  });
-  const height = 44 + ends.length * 26 + 8;
+  // A label stands under the left end of its part, or further left where it would not fit. They are laid from the
+  // right, each on the first line that is free, so that no label is crossed by another's leader.
+  const starts: number[] = [];
+  const placed = shown
+    .toReversed()
+    .map((part) => {
+      const w = textWidth(part.label, size) + 16;
+      const left = Math.max(0, Math.min(part.x, width - w));
+      let line = starts.findIndex((start) => left + w <= start);
+      if (line === -1) line = starts.length;
+      starts[line] = left;
+      return { ...part, left, line };
+    })
+    .toReversed();
+  const height = 44 + starts.length * 26 + 8;
   return (
     <svg
       xmlns="http://www.w3.org/2000/svg"

@@ -67,7 +67,7 @@ function AllPairs({ answer, study }: { readonly answer: AgreementAnswer; readonl
       {answer.doubleCoded.length > 0 && (
         <Sheet title={words.agreement.sharesTitle}>
           <ul className="stack-tight">
-            {answer.doubleCoded.map((share) => (
+            {inOrder(answer.doubleCoded, study.phases).map((share) => (
               <li key={share.phase ?? ''} className="row">
                 {share.enough ? <Tick /> : <Hold />}
                 <span>
@@ -93,6 +93,18 @@ function AllPairs({ answer, study }: { readonly answer: AgreementAnswer; readonl
       )}
     </>
   );
+}
+
+/** Phases in the order in which they happen; what the study does not name comes last. */
+function inOrder<T extends { readonly phase: string | null }>(
+  shares: readonly T[],
+  phases: readonly string[],
+): T[] {
+  const place = ({ phase }: T): number => {
+    const at = phases.indexOf(phase ?? '');
+    return at === -1 ? phases.length : at;
+  };
+  return [...shares].sort((a, b) => place(a) - place(b));
 }
 
 function Pairs({ pairs }: { readonly pairs: readonly PairDetails[] }) {

@@ -7,6 +7,7 @@ import { PageHead } from '../../ui/PageHead.tsx';
 import { Sheet } from '../../ui/Sheet.tsx';
 import { say } from '../../words/say.ts';
 import { useWords } from '../services.ts';
+import { AnalystTable } from './AnalystTable.tsx';
 import { ChangeTable } from './ChangeTable.tsx';
 import { Chart } from './Chart.tsx';
 import { PooledTable } from './PooledTable.tsx';
@@ -79,7 +80,8 @@ export function AllChange({ details }: { readonly details: ChangeDetails }) {
       {report.classes.length > 0 && (
         <Sheet title={words.change.tableTitle}>
           <div className="stack-tight">
-            <ChangeTable rows={report.classes} before={before} after={after} analyst={analyst} linked />
+            <ChangeTable rows={report.classes} before={before} after={after} linked />
+            {analyst && <AnalystTable rows={report.classes} />}
             {analyst && report.pooled.length > 0 && <PooledTable rows={report.pooled} />}
             <div className="not-in-print">
               <Check

@@ -7,13 +7,11 @@ interface Props {
   readonly rows: readonly ClassChange[];
   readonly before: string;
   readonly after: string;
-  /** With errors and the paired t; never on a page for one class. */
-  readonly analyst: boolean;
   readonly linked?: boolean;
 }
 
 /** Means and change class by class; an undefined figure says why below. */
-export function ChangeTable({ rows, before, after, analyst, linked = false }: Props) {
+export function ChangeTable({ rows, before, after, linked = false }: Props) {
   const words = useWords();
   const several = new Set(rows.map(({ condition }) => condition)).size > 1;
   const nameOf = (row: ClassChange): string => row.class ?? words.change.withoutName;
@@ -75,20 +73,6 @@ export function ChangeTable({ rows, before, after, analyst, linked = false }: Pr
     },
     { key: 'g', head: words.change.g, number: true, cell: fixed('g', 2) },
     { key: 'gVariance', head: words.change.gVariance, number: true, cell: fixed('gVariance', 3) },
-    ...(analyst
-      ? [
-          { key: 'sd', head: words.change.sd, number: true, cell: fixed('sdChange', 2) },
-          { key: 'error', head: words.change.standardError, number: true, cell: fixed('standardError', 2) },
-          { key: 't', head: words.change.t, number: true, cell: fixed('t', 2) },
-          { key: 'df', head: words.change.df, number: true, cell: fixed('df', 0) },
-          {
-            key: 'p',
-            head: words.change.p,
-            number: true,
-            cell: (row: ClassChange) => (row.p === null ? words.change.notDefined : words.f.p(row.p)),
-          },
-        ]
-      : []),
   ];
   const shown = ['change', 'lower', 'g', 'gVariance'] as const;
   const reasons = rows.flatMap((row) => {

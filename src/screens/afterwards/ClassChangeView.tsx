@@ -7,6 +7,7 @@ import { Sheet } from '../../ui/Sheet.tsx';
 import { useWords } from '../services.ts';
 import { ChangeTable } from './ChangeTable.tsx';
 import { Chart } from './Chart.tsx';
+import { ChildTable } from './ChildTable.tsx';
 import { useChangeSentence } from './useChangeSentence.ts';
 import { WarningLines } from './WarningLines.tsx';
 
@@ -43,7 +44,7 @@ export function ClassChangeView({ details, own }: Props) {
         </Fragment>
       ))}
       <Sheet title={words.change.tableTitle}>
-        <ChangeTable rows={own.map(({ row }) => row)} before={before} after={after} analyst={false} />
+        <ChangeTable rows={own.map(({ row }) => row)} before={before} after={after} />
       </Sheet>
       <p className="second small how">{words.change.how({ before, after })}</p>
     </>
@@ -73,7 +74,7 @@ function Lines({
   if (both.length === 0 && mean === null) return <p className="second">{words.change.noLines}</p>;
   const leftOut = words.change.leftOut({ n: lines.length - both.length });
   return (
-    <>
+    <div className="columns">
       <Chart>
         {(width) => (
           <ChildLines
@@ -92,7 +93,10 @@ function Lines({
           />
         )}
       </Chart>
-      {leftOut !== '' && <p className="second small">{leftOut}</p>}
-    </>
+      <div className="stack-tight">
+        <ChildTable lines={lines} before={before} after={after} />
+        {leftOut !== '' && <p className="second small">{leftOut}</p>}
+      </div>
+    </div>
   );
 }

@@ -26,7 +26,7 @@ export function CodeTables({
           : `${words.agreement.tableTitle}, ${row.phase}`
       }
     >
-      <div className="columns">
+      <div className="stack">
         {counts === null ? (
           <p className="second">
             {words.agreement.tableNone({

@@ -3,30 +3,28 @@ import { Sheet } from '../../ui/Sheet.tsx';
 import { Table } from '../../ui/Table.tsx';
 import { useWords } from '../services.ts';
 
+type Counted = Pick<SessionDetails['phases'][number]['children'][number], 'scored' | 'missing' | 'missingBy'>;
+
 /** What was recorded and what is missing, child by child; nothing of what the children did. */
 export function Completeness({ details }: { readonly details: SessionDetails }) {
   const words = useWords();
-  const lines = details.phases.flatMap(({ row, children, missingBy }) =>
-    children.length === 0
-      ? [
-          {
-            key: `${row.phase}`,
-            who: words.afterwards.wholeClass,
-            phase: row.phase,
-            scored: row.scored,
-            missing: row.missing,
-            missingBy,
-          },
-        ]
-      : children.map((child) => ({
-          key: `${row.phase} ${child.id}`,
-          who: child.child,
-          phase: row.phase,
-          scored: child.scored,
-          missing: child.missing,
-          missingBy: child.missingBy,
-        })),
-  );
+  const names = [
+    ...new Set(
+      details.phases.flatMap(({ children }) =>
+        children.length === 0 ? [words.afterwards.wholeClass] : children.map(({ child }) => child),
+      ),
+    ),
+  ];
+  // One entry a phase; null where the child had no look in it.
+  const lines = names.map((who) => ({
+    who,
+    of: details.phases.map(({ children, row, missingBy }): Counted | null => {
+      if (children.length === 0) return { scored: row.scored, missing: row.missing, missingBy };
+      return children.find(({ child }) => child === who) ?? null;
+    }),
+  }));
+  const count = (value: number | null | undefined): string =>
+    value === null || value === undefined ? '' : words.f.whole(value);
   return (
     <Sheet title={words.afterwards.completeness}>
       <div className="stack-tight">
@@ -35,29 +33,38 @@ export function Completeness({ details }: { readonly details: SessionDetails }) 
           caption={words.afterwards.completeness}
           captionHidden
           rows={lines}
-          rowKey={(line) => line.key}
+          rowKey={(line) => line.who}
           columns={[
             { key: 'who', head: words.afterwards.child, rowHead: true, cell: (line) => line.who },
-            { key: 'phase', head: words.agreement.phase, cell: (line) => line.phase },
-            {
-              key: 'scored',
-              head: words.afterwards.scored,
-              number: true,
-              cell: (line) => (line.scored === null ? '' : words.f.whole(line.scored)),
-            },
-            {
-              key: 'missing',
-              head: words.afterwards.missing,
-              number: true,
-              cell: (line) => (line.missing === null ? '' : words.f.whole(line.missing)),
-            },
+            ...details.phases.flatMap(({ row: { phase } }, k) => [
+              {
+                key: `scored ${k}`,
+                head: words.afterwards.scoredIn({ phase }),
+                number: true,
+                cell: (line: (typeof lines)[number]) => count(line.of[k]?.scored),
+              },
+              {
+                key: `missing ${k}`,
+                head: words.afterwards.missingIn({ phase }),
+                number: true,
+                cell: (line: (typeof lines)[number]) => count(line.of[k]?.missing),
+              },
+            ]),
             {
               key: 'why',
               head: words.afterwards.why,
               cell: (line) =>
-                words.afterwards.reasonsShort({
-                  reasons: line.missingBy.map(({ reason, n }) => ({ reason: words.missing[reason], n })),
-                }),
+                line.of
+                  .map((one) =>
+                    words.afterwards.reasonsShort({
+                      reasons: (one?.missingBy ?? []).map(({ reason, n }) => ({
+                        reason: words.missing[reason],
+                        n,
+                      })),
+                    }),
+                  )
+                  .filter((text) => text !== '')
+                  .join('; '),
             },
           ]}
         />

@@ -30,7 +30,7 @@ export function NotesSheet({ session: { header, journal } }: { readonly session:
   const labelOf = (id: string): string => codeSet.codes.find((code) => code.id === id)?.label ?? id;
   const add = (wish: NoteWish) => addNote(deps, header.id, wish);
   return (
-    <Sheet title={words.afterwards.notesTitle}>
+    <Sheet title={words.afterwards.notesTitle} className="not-in-print">
       {flags.length + alone.length === 0 && <p className="second">{words.afterwards.notesNone}</p>}
       <ul className="notes">
         {flags.map((flag) => {

@@ -2,12 +2,11 @@ import { type ReactNode, useRef } from 'react';
 import type { PairDetails } from '../../analysis/index.ts';
 import { recordingFacts } from '../../journal/headerFacts.ts';
 import { Button } from '../../ui/Button.tsx';
-import { Figures } from '../../ui/Figures.tsx';
 import { PageHead } from '../../ui/PageHead.tsx';
 import { Sheet } from '../../ui/Sheet.tsx';
-import { say } from '../../words/say.ts';
 import { useServices } from '../services.ts';
 import { CodeTables } from './CodeTables.tsx';
+import { Companions } from './Companions.tsx';
 import { Differences } from './Differences.tsx';
 import { PageFoot } from './PageFoot.tsx';
 import { SheetPicture } from './SheetPicture.tsx';
@@ -19,6 +18,13 @@ interface Props {
   readonly pairs: readonly PairDetails[];
   readonly children: ReactNode;
 }
+
+/** What the line under the heading has said already. */
+const saidInNote: ReadonlySet<string> = new Set([
+  'nearlyAlwaysOnTask',
+  'nearlyNeverOnTask',
+  'oftenOutOfStep',
+]);
 
 /** How far two observers of one visit agree. */
 export function PairPage({ pairs, children }: Props) {
@@ -44,7 +50,9 @@ export function PairPage({ pairs, children }: Props) {
         {sentences.title}
       </PageHead>
       {children}
-      <WarningLines warnings={pairs.flatMap((pair) => pair.warnings)} />
+      <WarningLines
+        warnings={pairs.flatMap((pair) => pair.warnings).filter(({ code }) => !saidInNote.has(code))}
+      />
       {codeSet !== null && first.method !== 'headcount' && first.method !== 'duration' && (
         <Sheet>
           <SheetPicture
@@ -55,9 +63,7 @@ export function PairPage({ pairs, children }: Props) {
           />
         </Sheet>
       )}
-      {pairs.map((pair) => (
-        <Companions key={pair.key} pair={pair} alone={alone} />
-      ))}
+      <Companions pairs={pairs} />
       {differences.length > 0 && (
         <div className="not-in-print">
           <Button onClick={toList}>{words.agreement.differencesOpen({ n: differences.length })}</Button>
@@ -77,47 +83,6 @@ export function PairPage({ pairs, children }: Props) {
       <p className="second small how">{sentences.how}</p>
       <PageFoot />
     </div>
-  );
-}
-
-/** The figures beside the sentence, of one phase; an undefined one says why. */
-function Companions({ pair: { row }, alone }: { readonly pair: PairDetails; readonly alone: boolean }) {
-  const { words } = useServices();
-  const shown = [
-    { field: 'percentAgreement', name: words.agreement.intervalByInterval, say: words.f.percentFine },
-    { field: 'occurrence', name: words.agreement.onTaskAgreed, say: words.f.percentFine },
-    { field: 'nonOccurrence', name: words.agreement.offTaskAgreed, say: words.f.percentFine },
-    { field: 'kappa', name: words.agreement.kappa, say: words.f.kappa },
-    { field: 'maximumKappa', name: words.agreement.highestKappa, say: words.f.kappa },
-    { field: 'ac1', name: words.agreement.ac1, say: words.f.kappa },
-  ] as const;
-  const undefinedOnes = shown.flatMap(({ field, name }) => {
-    const reason = row.why[field];
-    return reason === undefined
-      ? []
-      : [words.agreement.because({ figure: name, reason: say(words.why, { code: reason, values: {} }) })];
-  });
-  return (
-    <section className="stack-tight">
-      <h2 className={alone ? 'visually-hidden' : 'figures-of'}>
-        {words.agreement.figuresOf({ phase: alone ? null : row.phase })}
-      </h2>
-      <Figures
-        items={shown.map(({ field, name, say: format }) => {
-          const value = row[field];
-          return {
-            name,
-            value:
-              value === null ? (
-                <span className="not-defined">{words.agreement.notDefined}</span>
-              ) : (
-                format(value)
-              ),
-          };
-        })}
-      />
-      {undefinedOnes.length > 0 && <p className="second small">{undefinedOnes.join(' ')}</p>}
-    </section>
   );
 }
 

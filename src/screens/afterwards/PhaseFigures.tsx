@@ -13,7 +13,6 @@ type Shown = Pick<Share, 'scored' | 'missing' | 'percentOnTask' | 'lower' | 'upp
 export function PhaseFigures({ phase, alone }: { readonly phase: PhaseDetails; readonly alone: boolean }) {
   const words = useWords();
   const { row, children, lessonParts, offTask } = phase;
-  const name = alone ? null : row.phase;
   const why = (figures: Shown): string =>
     figures.why.percentOnTask === undefined
       ? words.afterwards.undefinedHere
@@ -55,16 +54,31 @@ export function PhaseFigures({ phase, alone }: { readonly phase: PhaseDetails; r
   const parts = lessonParts.filter(({ lessonPart }) => lessonPart !== null);
   const off = offTask.reduce((sum, { n }) => sum + n, 0);
   return (
-    <>
+    <Sheet {...(!alone && row.phase !== null && { title: row.phase })} className="phase">
       {children.length > 0 && (
-        <Sheet title={words.afterwards.perChild({ phase: name })}>
+        <section className="stack-tight">
+          <h3>{words.afterwards.perChild({ phase: null })}</h3>
           <Table
             caption={words.afterwards.perChild({ phase: row.phase })}
             captionHidden
             rows={children}
             rowKey={(child) => child.id}
             columns={[
-              { key: 'child', head: words.afterwards.child, rowHead: true, cell: (child) => child.child },
+              {
+                key: 'child',
+                head: words.afterwards.child,
+                rowHead: true,
+                cell: (child) => (
+                  <>
+                    <span className="name">{child.child}</span>
+                    {child.warnings.map((one) => (
+                      <span key={one.code} className="beside">
+                        {say(words.warnings, one)}
+                      </span>
+                    ))}
+                  </>
+                ),
+              },
               ...shares,
               ...(row.method === 'momentary'
                 ? [
@@ -77,24 +91,19 @@ export function PhaseFigures({ phase, alone }: { readonly phase: PhaseDetails; r
                     },
                   ]
                 : []),
-              {
-                key: 'beside',
-                head: '',
-                cell: (child) => (
-                  <span className="second small">
-                    {child.warnings.map((one) => say(words.warnings, one)).join(' ')}
-                  </span>
-                ),
-              },
             ]}
           />
           {row.classPercent !== null && (
-            <p className="second small">{words.afterwards.classMean({ percent: row.classPercent })}</p>
+            <p className="second small">
+              {words.afterwards.classMean({ percent: row.classPercent })}
+              {row.method === 'momentary' ? ` ${words.afterwards.worthHint}` : ''}
+            </p>
           )}
-        </Sheet>
+        </section>
       )}
       {offTask.length > 1 && (
-        <Sheet title={words.afterwards.makeUp({ phase: name })}>
+        <section className="stack-tight">
+          <h3>{words.afterwards.makeUp({ phase: null })}</h3>
           {off === 0 ? (
             <p className="second">{words.afterwards.makeUpNone}</p>
           ) : (
@@ -112,10 +121,11 @@ export function PhaseFigures({ phase, alone }: { readonly phase: PhaseDetails; r
               )}
             </Chart>
           )}
-        </Sheet>
+        </section>
       )}
       {parts.length > 0 && (
-        <Sheet title={words.afterwards.perPart({ phase: name })}>
+        <section className="stack-tight">
+          <h3>{words.afterwards.perPart({ phase: null })}</h3>
           <Table
             caption={words.afterwards.perPart({ phase: row.phase })}
             captionHidden
@@ -131,8 +141,8 @@ export function PhaseFigures({ phase, alone }: { readonly phase: PhaseDetails; r
               ...shares,
             ]}
           />
-        </Sheet>
+        </section>
       )}
-    </>
+    </Sheet>
   );
 }

@@ -121,9 +121,11 @@ function Session({ session, answer }: { readonly session: StoredSession; readonl
           />
         </Sheet>
       )}
-      {details.phases.map((phase) => (
-        <PhaseFigures key={phase.row.phase ?? ''} phase={phase} alone={details.phases.length === 1} />
-      ))}
+      <div className="phases">
+        {details.phases.map((phase) => (
+          <PhaseFigures key={phase.row.phase ?? ''} phase={phase} alone={details.phases.length === 1} />
+        ))}
+      </div>
       <Timing details={details} />
       {foot}
     </div>

@@ -16,7 +16,7 @@ export function Timing({ details: { timing } }: { readonly details: SessionDetai
   const largest = timing?.largestDeviationMs ?? null;
   const median = timing?.medianDeviationMs ?? null;
   return (
-    <Sheet title={words.afterwards.timing}>
+    <Sheet title={words.afterwards.timing} className="not-in-print">
       {timing === null || largest === null ? (
         <p className="second">{words.afterwards.timingUnknown}</p>
       ) : (

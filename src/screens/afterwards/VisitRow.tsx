@@ -70,9 +70,9 @@ function Record({
       </a>
       <span className="second small grow">
         {remarks.join(', ')}
-        {counts !== null && ` · ${words.afterwards.scoredMissing(counts)}`}
+        {counts !== null && `, ${words.afterwards.scoredMissing(counts)}`}
       </span>
-      <Button look="quiet" onClick={onPair}>
+      <Button look="quiet" className="second small" onClick={onPair}>
         {words.afterwards.pairing}
       </Button>
     </li>

@@ -121,30 +121,33 @@ export function VisitsPage() {
           )}
         </div>
       )}
-      {days.map((day) => (
-        <Sheet
-          key={day.date ?? ''}
-          title={day.date === null ? words.afterwards.withoutDate : words.f.day(day.date)}
-          flush
-        >
-          <ul className="lines">
-            {day.visits.map((visit) => (
-              <VisitRow
-                key={visit.key}
-                visit={visit}
-                byHand={(session) => pairings.some((one) => one.session === session)}
-                onPair={(session, observer) => setAsked({ session, observer, visit })}
-              />
-            ))}
-          </ul>
-        </Sheet>
-      ))}
       <Sheet title={words.files.in}>
         <div className="stack-tight">
           <p className="second">{words.files.inText}</p>
           <BringIn study={study?.id ?? null} />
         </div>
       </Sheet>
+      {days.length > 0 && (
+        <Sheet flush>
+          <ul className="days">
+            {days.map((day) => (
+              <li key={day.date ?? ''} className="day">
+                <h2>{day.date === null ? words.afterwards.withoutDate : words.f.day(day.date)}</h2>
+                <ul className="day-visits">
+                  {day.visits.map((visit) => (
+                    <VisitRow
+                      key={visit.key}
+                      visit={visit}
+                      byHand={(session) => pairings.some((one) => one.session === session)}
+                      onPair={(session, observer) => setAsked({ session, observer, visit })}
+                    />
+                  ))}
+                </ul>
+              </li>
+            ))}
+          </ul>
+        </Sheet>
+      )}
       {asked !== null && (
         <PairingDialog
           observer={asked.observer}

@@ -74,7 +74,7 @@ export const afterwards = {
   practice: 'practice',
   fromFile: 'from a file',
   scoredMissing: ({ scored, missing }: { scored: number; missing: number }, f: F) =>
-    `${f.whole(scored)} scored, ${f.whole(missing)} missing`,
+    `${f.whole(scored)} scored, ${f.whole(missing)} missing`.replaceAll(' ', '\u00a0'),
   notHandedOver: 'not handed over',
   openSession: ({ observer }: { observer: string }) => `Open the record of ${observer}`,
   openAgreement: 'Compare the two',
@@ -125,6 +125,8 @@ export const afterwards = {
     'Whoever knows the result of this lesson looks at the next one with other eyes, and somebody may be standing behind you.',
   showFigures: 'Show the figures',
   hideFigures: 'Cover the figures',
+  scoredIn: ({ phase }: { phase: string | null }) => (phase === null ? 'scored' : `scored ${phase}`),
+  missingIn: ({ phase }: { phase: string | null }) => (phase === null ? 'missing' : `missing ${phase}`),
   completeness: 'What was recorded, child by child',
   timing: 'How well the prompts kept time',
   timingLargest: ({ ms }: { ms: number }, f: F) =>
@@ -204,7 +206,7 @@ export const afterwards = {
   between: 'likely between',
   betweenFigures: ({ lower, upper }: { lower: number; upper: number }, f: F) =>
     `${f.whole(lower)} and ${f.percent(upper)}`,
-  worth: 'worth as independent looks',
+  worth: 'effective looks',
   classMean: ({ percent }: { percent: number }, f: F) =>
     `Mean of the children: ${f.percentFine(percent)} (all looks together weigh children with more looks more).`,
   reasonsShort: ({ reasons }: { reasons: readonly { reason: string; n: number }[] }, f: F) =>
@@ -213,6 +215,8 @@ export const afterwards = {
     phase === null ? 'What off-task was made of' : `What off-task was made of, ${phase}`,
   makeUpShare: ({ code, count, of }: { code: string; count: number; of: number }, f: F) =>
     `${code}: ${f.whole(count)} of ${f.whole(of)}`,
+  worthHint:
+    'Effective looks: what the looks are worth as independent ones (Bayley and Hammersley 1946); blank where a child’s looks are too few or all the same.',
   makeUpNone: 'Nothing was scored off-task.',
   undefinedHere: 'not defined',
   howTitle: 'How it was measured',

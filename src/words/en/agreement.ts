@@ -36,7 +36,10 @@ export const agreement = {
     const each = kappas.map(
       ({ phase, kappa, lower, upper }) =>
         `${f.kappa(kappa)}${kappas.length > 1 && phase !== null ? ` ${phase}` : ''}${
-          lower === null || upper === null ? '' : `, between ${f.kappa(lower)} and ${f.kappa(upper)}`
+          // No error at all comes of perfect agreement, not of certainty; above 1 there is no kappa.
+          lower === null || upper === null || lower === upper
+            ? ''
+            : `, between ${f.kappa(lower)} and ${f.kappa(Math.min(1, upper))}`
         }`,
     );
     const kappa = each.length === 0 ? '' : ` Kappa ${each.join('; ')}.`;
@@ -59,7 +62,6 @@ export const agreement = {
   stepUnknown: 'How far apart their schedules ran is not known: at least one record has no prompt times.',
   kappaUndefined: ({ phase, reason }: { phase: string | null; reason: string }) =>
     `Kappa is not defined${phase === null ? '' : ` ${phase}`}: ${reason}.`,
-  sheet: 'Round sheet of the two',
   keyDiffers: ({ first, second }: { first: string; second: string }) =>
     `they differ (${first} upper left, ${second} lower right)`,
   keyMissing: 'one of them has no mark',
@@ -84,6 +86,7 @@ export const agreement = {
   tableNone: ({ reason }: { reason: string }) => `There is no table of codes: ${reason}.`,
   codesCaption: 'Each code against all others',
   code: 'code',
+  figuresCaption: 'Agreement, phase by phase',
   occurrence: 'agreed where either said it',
   nonOccurrence: 'agreed where either did not',
   excludedTitle: 'Left out',
@@ -126,15 +129,14 @@ export const agreement = {
     }: { pairs: number; percent: number | null; compared: number; kappa: number | null },
     f: F,
   ) => {
-    const who = `${f.whole(pairs)} ${f.plural(pairs, { one: 'pair agrees', other: 'pairs agree' })}`;
+    const who = `In ${f.whole(pairs)} ${f.plural(pairs, { one: 'comparison', other: 'comparisons' })} the observers agree`;
     if (percent === null)
-      return `${f.whole(pairs)} ${f.plural(pairs, { one: 'pair', other: 'pairs' })}, nothing to compare.`;
+      return `${f.whole(pairs)} ${f.plural(pairs, { one: 'comparison', other: 'comparisons' })}, and no interval that both scored.`;
     return `${who} on ${f.percent(percent)} of ${f.whole(compared)} intervals${kappa === null ? '' : `; kappa over all ${f.kappa(kappa)}`}.`;
   },
   noPairsTitle: 'No visit has two observers yet.',
   noPairsText:
     'A second observer takes the visit file and records the same children at the same moments. Their file, brought in here, finds its visit by itself.',
-  practiceTitle: 'practice sessions',
   forTheRecord: 'for the record',
   practice: 'practice',
   whichSessions: 'Sessions',

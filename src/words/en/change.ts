@@ -21,6 +21,10 @@ const inMinutes = (f: F, points: number, of: number): string => {
 /** Under half a point is no change that a whole number can say. */
 const level = (points: number): boolean => Math.abs(points) < 0.5;
 
+/** The words “before” and “after” stand by themselves; any other phase is named. */
+const inPhase = (phase: string): string =>
+  ['before', 'after'].includes(phase.toLowerCase()) ? phase.toLowerCase() : `in “${phase}”`;
+
 /** Change from one phase to another. */
 export const change = {
   about: ({ klass, before, after }: { klass: string | null; before: string; after: string }) =>
@@ -38,20 +42,20 @@ export const change = {
     f: F,
   ) =>
     level(points)
-      ? `${klass} was on-task as much in “${after}” as in “${before}”.`
-      : `${klass} was on-task ${size(f, points)} ${direction(points)} in “${after}” than in “${before}”: ${inMinutes(f, points, of)}.`,
+      ? `${klass} was on-task as much ${inPhase(after)} as ${inPhase(before)}.`
+      : `${klass} was on-task ${size(f, points)} ${direction(points)} ${inPhase(after)} than ${inPhase(before)}: ${inMinutes(f, points, of)}.`,
   classesTogether: (
     { points, of, before, after }: { points: number; of: number; before: string; after: string },
     f: F,
   ) =>
     level(points)
-      ? `The classes were on-task as much in “${after}” as in “${before}”.`
-      : `The classes were on-task ${size(f, points)} ${direction(points)} in “${after}” than in “${before}”: ${inMinutes(f, points, of)}.`,
+      ? `The classes were on-task as much ${inPhase(after)} as ${inPhase(before)}.`
+      : `The classes were on-task ${size(f, points)} ${direction(points)} ${inPhase(after)} than ${inPhase(before)}: ${inMinutes(f, points, of)}.`,
   classesDescribe: (
     { classes, up, before, after }: { classes: number; up: number; before: string; after: string },
     f: F,
   ) =>
-    `${f.whole(up)} of ${f.whole(classes)} ${f.plural(classes, { one: 'class', other: 'classes' })} ${f.plural(up, { one: 'was', other: 'were' })} on-task more in “${after}” than in “${before}”.`,
+    `${f.whole(up)} of ${f.whole(classes)} ${f.plural(classes, { one: 'class', other: 'classes' })} ${f.plural(up, { one: 'was', other: 'were' })} on-task more ${inPhase(after)} than ${inPhase(before)}.`,
   classesCompared: (
     { condition, control, difference }: { condition: string; control: string; difference: number },
     f: F,
@@ -109,7 +113,8 @@ export const change = {
     lower === null || upper === null
       ? f.points(points)
       : `${f.points(points)} (${f.points(lower)} to ${f.points(upper)})`,
-  together: ({ classes }: { classes: number }, f: F) => `all ${f.whole(classes)} together`,
+  together: ({ classes }: { classes: number }, f: F) =>
+    classes === 2 ? 'both together' : `all ${f.whole(classes)} together`,
   pooledHow: 'Random effects (REML, Knapp–Hartung).',
   prediction: (
     { lower, upper, condition }: { lower: number; upper: number; condition: string | null },
@@ -137,6 +142,10 @@ export const change = {
   notDefined: 'not defined',
   because: ({ klass, figure, reason }: { klass: string; figure: string; reason: string }) =>
     `${klass}, ${figure}: ${reason}.`,
+  child: 'child',
+  looks: ({ phase }: { phase: string }) => `looks ${phase}`,
+  linesCaption: 'Percent on-task of each child',
+  analystCaption: 'Errors and paired t of each class',
   analyst: 'For the analyst',
   analystHint: 'Errors, tests and variances.',
   pooledCaption: 'The classes of one condition together',
@@ -182,7 +191,7 @@ export const change = {
     f: F,
   ) =>
     [
-      standardError === null ? '' : `standard error ${f.fixed(standardError, 2)}`,
+      standardError === null ? '' : `Standard error ${f.fixed(standardError, 2)}`,
       df === null ? '' : `df ${f.fixed(df, 1)}`,
       p === null ? '' : `p ${f.p(p)}`,
       g === null ? '' : `pretest–posttest–control effect ${f.fixed(g, 2)} (Morris 2008)`,
