@@ -26,7 +26,7 @@ export function CodeTables({
           : `${words.agreement.tableTitle}, ${row.phase}`
       }
     >
-      <div className="stack">
+      <div className="stack code-tables">
         {counts === null ? (
           <p className="second">
             {words.agreement.tableNone({

@@ -75,7 +75,7 @@ export function PairPage({ pairs, children }: Props) {
       <Sheet title={words.agreement.excludedTitle}>
         <Excluded pairs={pairs} />
       </Sheet>
-      <div ref={list} tabIndex={-1}>
+      <div ref={list} tabIndex={-1} className="not-in-print">
         <Sheet title={words.agreement.differencesTitle({ n: differences.length })}>
           {differences.length > 0 && <Differences differences={differences} observers={observers} />}
         </Sheet>

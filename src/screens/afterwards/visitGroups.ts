@@ -58,7 +58,8 @@ function groupOf(
   const [first] = own;
   const free = own.find(({ id }) => !hand.has(id)) ?? first;
   return {
-    key,
+    // Its first session: whatever is still being worked out, the row stays the same row.
+    key: first?.id ?? key,
     date: own.map(dateOf).find((date) => date !== null) ?? null,
     klass: first?.classroom.name ?? '',
     phases: [...new Set(own.flatMap(({ phases }) => phases.flatMap((phase) => phase ?? [])))],

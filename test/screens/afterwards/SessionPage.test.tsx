@@ -1,0 +1,101 @@
+// @vitest-environment happy-dom
+import { cleanup, screen } from '@testing-library/react';
+import userEvent from '@testing-library/user-event';
+import { afterEach, expect, test } from 'vitest';
+import { isKnown } from '../../../src/journal/entry.ts';
+import { Afterwards } from '../../../src/screens/afterwards/Afterwards.tsx';
+import { fakeServices, renderScreen } from '../support/renderScreen.tsx';
+import { emptyStudy, keepRecorded, must } from '../support/studyOf.ts';
+
+afterEach(cleanup);
+
+async function shown(
+  said: Parameters<typeof keepRecorded>[2],
+  more: Parameters<typeof keepRecorded>[3] = [],
+) {
+  const services = fakeServices();
+  await emptyStudy(services);
+  await keepRecorded(services, { id: 's1' }, said, more);
+  renderScreen(<Afterwards />, services, '/afterwards/session/s1');
+  await screen.findByRole('heading', { level: 1, name: /scored\.$/ });
+  return services;
+}
+const journal = async (services: ReturnType<typeof fakeServices>) =>
+  must(await services.store.readSession('s1'))?.journal.filter(isKnown) ?? [];
+
+test('completeness comes first: what is missing and why, and no figure', async () => {
+  await shown({ 2: 'missed', 4: null, 5: 'off' });
+  expect(screen.getByRole('heading', { level: 1 }).textContent).toBe('4 of 6 looks are scored.');
+  expect(screen.getByText('2 missing: 1 missed and 1 out of view.')).toBeTruthy();
+  expect(screen.getByText(/farthest from its planned moment was 5 ms away/)).toBeTruthy();
+  expect(document.body.textContent).not.toContain('%');
+  expect(screen.queryByRole('img')).toBeNull();
+});
+
+test('one tap shows the figures, another covers them', async () => {
+  await shown({ 2: 'missed', 4: null, 5: 'off' });
+  await userEvent.click(screen.getByRole('button', { name: 'Show the figures' }));
+  // 3 of 4 looks on-task; Wilson 95 % limits 30.1 and 95.4.
+  expect(screen.getByRole('heading', { level: 1 }).textContent).toBe(
+    'On-task at 75\u202f% of the looks, between 30 and 95\u202f%.',
+  );
+  expect(screen.getByRole('img', { name: /^Round sheet of Class Otter/ })).toBeTruthy();
+  // Two looks a child are too few: said beside each child, not on top.
+  expect(screen.getAllByText(/too few to speak of this child alone/)).toHaveLength(3);
+  await userEvent.click(screen.getByRole('button', { name: 'Cover the figures' }));
+  expect(screen.queryByRole('img')).toBeNull();
+});
+
+test('nothing scored is said in words', async () => {
+  await shown({ 1: null, 2: null, 3: null, 4: null, 5: null, 6: null });
+  await userEvent.click(screen.getByRole('button', { name: 'Show the figures' }));
+  expect(screen.getByRole('heading', { level: 1 }).textContent).toBe('There is no percent on-task to tell.');
+  expect(document.body.textContent).not.toMatch(/NaN|null|undefined/);
+});
+
+test('a correction stands beside the mark, with why and by whom', async () => {
+  const services = await shown({ 5: 'off' });
+  await userEvent.click(screen.getByRole('button', { name: 'Correct a look' }));
+  await userEvent.selectOptions(screen.getByLabelText('Child'), 'Otter-02');
+  await userEvent.selectOptions(screen.getByLabelText('Which look'), '5');
+  await userEvent.selectOptions(screen.getByLabelText('What it should be'), 'on-task');
+  await userEvent.click(screen.getByRole('button', { name: 'Keep the correction' }));
+  expect(await screen.findByText('Say what it should be, why, and who corrects it.')).toBeTruthy();
+  await userEvent.type(screen.getByLabelText('Why'), 'Touched the wrong side');
+  await userEvent.type(screen.getByLabelText('Who corrects it'), 'Quill');
+  await userEvent.click(screen.getByRole('button', { name: 'Keep the correction' }));
+  expect(await screen.findByText('The correction is kept beside the mark.')).toBeTruthy();
+  const entries = await journal(services);
+  expect(entries.filter(({ kind }) => kind === 'marked')).toHaveLength(6);
+  expect(entries.at(-1)).toMatchObject({
+    kind: 'amended',
+    interval: 5,
+    codes: ['on'],
+    missing: null,
+    why: 'Touched the wrong side',
+    by: 'Quill',
+  });
+  expect(await screen.findByText(/Interval 5 → on-task\. Touched the wrong side \(Quill/)).toBeTruthy();
+});
+
+test('words can be given to a flag later', async () => {
+  const services = await shown({}, [[50_000, { kind: 'flagged', interval: 3 }]]);
+  expect(screen.getByText('Flag at 0:50, interval 3')).toBeTruthy();
+  await userEvent.type(screen.getByLabelText('Words for this flag'), 'A visitor came in');
+  await userEvent.click(screen.getByRole('button', { name: 'Keep the words' }));
+  expect(await screen.findByText('A visitor came in')).toBeTruthy();
+  const entries = await journal(services);
+  const flag = entries.find(({ kind }) => kind === 'flagged');
+  expect(entries.at(-1)).toMatchObject({
+    kind: 'noted',
+    text: 'A visitor came in',
+    about: { writer: flag?.writer, seq: flag?.seq },
+  });
+});
+
+test('a record that is not here is said so', async () => {
+  const services = fakeServices();
+  await emptyStudy(services);
+  renderScreen(<Afterwards />, services, '/afterwards/session/elsewhere');
+  expect(await screen.findByRole('heading', { name: 'This record is not on this tablet.' })).toBeTruthy();
+});
