@@ -15,6 +15,7 @@ export function CodeTables({
   const words = useWords();
   const { codes, counts } = row.table;
   const [first, second] = row.observers;
+  const phase = alone ? null : row.phase;
   if (row.compared === 0) return null;
   const percent = (value: number | null): string =>
     value === null ? words.agreement.notDefined : words.f.percentFine(value);
@@ -35,7 +36,7 @@ export function CodeTables({
           </p>
         ) : (
           <Table
-            caption={words.agreement.tableCaption({ first, second })}
+            caption={words.agreement.tableCaption({ phase, first, second })}
             rows={codes.map((code, k) => ({ code, counts: counts[k] ?? [] }))}
             rowKey={(line) => line.code}
             columns={[
@@ -51,7 +52,7 @@ export function CodeTables({
         )}
         {row.codes.length > 0 && (
           <Table
-            caption={words.agreement.codesCaption}
+            caption={words.agreement.codesCaption({ phase })}
             rows={row.codes}
             rowKey={(line) => line.code}
             columns={[

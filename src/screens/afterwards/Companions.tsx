@@ -40,7 +40,7 @@ export function Companions({ pairs }: { readonly pairs: readonly PairDetails[] }
           rows={pairs}
           rowKey={(pair) => pair.key}
           columns={[
-            { key: 'phase', head: '', rowHead: true, cell: (pair) => pair.row.phase },
+            { key: 'phase', head: words.agreement.phase, rowHead: true, cell: (pair) => pair.row.phase },
             ...shown.map((one) => ({
               key: one.field,
               head: one.name,

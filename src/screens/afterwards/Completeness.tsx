@@ -35,7 +35,12 @@ export function Completeness({ details }: { readonly details: SessionDetails }) 
           rows={lines}
           rowKey={(line) => line.who}
           columns={[
-            { key: 'who', head: words.afterwards.child, rowHead: true, cell: (line) => line.who },
+            {
+              key: 'who',
+              head: words.afterwards.child,
+              rowHead: true,
+              cell: (line) => <span className="name">{line.who}</span>,
+            },
             ...details.phases.flatMap(({ row: { phase } }, k) => [
               {
                 key: `scored ${k}`,

@@ -31,59 +31,63 @@ export function NotesSheet({ session: { header, journal } }: { readonly session:
   const add = (wish: NoteWish) => addNote(deps, header.id, wish);
   return (
     <Sheet title={words.afterwards.notesTitle} className="not-in-print">
-      {flags.length + alone.length === 0 && <p className="second">{words.afterwards.notesNone}</p>}
-      <ul className="notes">
-        {flags.map((flag) => {
-          const own = notes.filter(({ about }) => about !== undefined && refOf(about) === refOf(flag));
-          return (
-            <li key={refOf(flag)} className="stack-tight">
-              <strong>{words.afterwards.flagAt({ at: flag.at, interval: flag.interval })}</strong>
-              {own.length === 0 && <p className="second">{words.afterwards.flagWithoutWords}</p>}
-              {own.map((note) => (
-                <p key={refOf(note)}>{note.text}</p>
-              ))}
-              <WordsField
-                label={words.afterwards.addWords}
-                onKeep={(text) => add({ text, about: { writer: flag.writer, seq: flag.seq } })}
-              />
-            </li>
-          );
-        })}
-        {alone.map((note) => (
-          <li key={refOf(note)}>
-            <span className="second small">{words.afterwards.noteAt({ at: note.at })}</span>
-            <p>{note.text}</p>
-          </li>
-        ))}
-      </ul>
-      {corrections.length > 0 && (
-        <>
-          <h3>{words.afterwards.correctedTitle}</h3>
+      <div className="stack-tight">
+        {flags.length + alone.length === 0 && <p className="second">{words.afterwards.notesNone}</p>}
+        {flags.length + alone.length > 0 && (
           <ul className="notes">
-            {corrections.map((one) => (
-              <li key={refOf(one)}>
-                {words.afterwards.corrected({
-                  interval: one.interval,
-                  to:
-                    one.missing !== null
-                      ? words.missing[one.missing]
-                      : one.codes === null || one.codes.length === 0
-                        ? words.afterwards.keyNone
-                        : words.f.list(one.codes.map(labelOf)),
-                  by: one.by,
-                  why: one.why,
-                  wall: one.wall,
-                })}
+            {flags.map((flag) => {
+              const own = notes.filter(({ about }) => about !== undefined && refOf(about) === refOf(flag));
+              return (
+                <li key={refOf(flag)} className="stack-tight">
+                  <strong>{words.afterwards.flagAt({ at: flag.at, interval: flag.interval })}</strong>
+                  {own.length === 0 && <p className="second">{words.afterwards.flagWithoutWords}</p>}
+                  {own.map((note) => (
+                    <p key={refOf(note)}>{note.text}</p>
+                  ))}
+                  <WordsField
+                    label={words.afterwards.addWords}
+                    onKeep={(text) => add({ text, about: { writer: flag.writer, seq: flag.seq } })}
+                  />
+                </li>
+              );
+            })}
+            {alone.map((note) => (
+              <li key={refOf(note)}>
+                <span className="second small">{words.afterwards.noteAt({ at: note.at })}</span>
+                <p>{note.text}</p>
               </li>
             ))}
           </ul>
-        </>
-      )}
-      <WordsField
-        label={words.afterwards.addNote}
-        hint={words.afterwards.addNoteHint}
-        onKeep={(text) => add({ text })}
-      />
+        )}
+        {corrections.length > 0 && (
+          <>
+            <h3>{words.afterwards.correctedTitle}</h3>
+            <ul className="notes">
+              {corrections.map((one) => (
+                <li key={refOf(one)}>
+                  {words.afterwards.corrected({
+                    interval: one.interval,
+                    to:
+                      one.missing !== null
+                        ? words.missing[one.missing]
+                        : one.codes === null || one.codes.length === 0
+                          ? words.afterwards.keyNone
+                          : words.f.list(one.codes.map(labelOf)),
+                    by: one.by,
+                    why: one.why,
+                    wall: one.wall,
+                  })}
+                </li>
+              ))}
+            </ul>
+          </>
+        )}
+        <WordsField
+          label={words.afterwards.addNote}
+          hint={words.afterwards.addNoteHint}
+          onKeep={(text) => add({ text })}
+        />
+      </div>
     </Sheet>
   );
 }

@@ -26,7 +26,7 @@ export function PairingDialog({ observer, visit, others, onChoose, onClose }: Pr
       value: other.pairAs,
       label: words.afterwards.pairingWith({
         day: other.date,
-        time: other.sessions[0]?.summary.firstWall?.slice(11, 16) ?? null,
+        time: other.sessions[0]?.summary.firstWall ?? null,
         observers: other.sessions.map(({ summary }) => summary.observer.name),
       }),
     })),

@@ -6,6 +6,7 @@ import { Table } from '../../ui/Table.tsx';
 import { say } from '../../words/say.ts';
 import { useWords } from '../services.ts';
 import { Chart } from './Chart.tsx';
+import { WarningLines } from './WarningLines.tsx';
 
 type Shown = Pick<Share, 'scored' | 'missing' | 'percentOnTask' | 'lower' | 'upper'> & { readonly why: Why };
 
@@ -55,6 +56,7 @@ export function PhaseFigures({ phase, alone }: { readonly phase: PhaseDetails; r
   const off = offTask.reduce((sum, { n }) => sum + n, 0);
   return (
     <Sheet {...(!alone && row.phase !== null && { title: row.phase })} className="phase">
+      <WarningLines warnings={phase.warnings} />
       {children.length > 0 && (
         <section className="stack-tight">
           <h3>{words.afterwards.perChild({ phase: null })}</h3>

@@ -51,7 +51,7 @@ export function ImportChoice({ preview, study, onTake, onRead, onLeave }: Props)
           legend={words.files.intoStudy}
           value={home}
           options={[
-            { value: 'here', label: words.common.study },
+            { value: 'here', label: words.files.thisStudy },
             { value: 'own', label: words.files.newStudy },
           ]}
           onChange={(next) => {

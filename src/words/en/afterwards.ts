@@ -88,7 +88,7 @@ export const afterwards = {
     { day, time, observers }: { day: string | null; time: string | null; observers: readonly string[] },
     f: F,
   ) =>
-    `${day === null ? 'without a date' : f.day(day)}${time === null ? '' : `, ${f.time(time)}`}, with ${f.list(observers)}`,
+    `${day === null ? 'without a date' : f.day(day)}${time === null || f.time(time) === '' ? '' : `, ${f.time(time)}`}, with ${f.list(observers)}`,
   pairingNone: 'There is no other visit of this class.',
   pairingDone: ({ observer }: { observer: string }) =>
     `The record of ${observer} belongs to another visit now.`,
@@ -115,7 +115,7 @@ export const afterwards = {
   missingBy: ({ reasons }: { reasons: readonly { reason: string; n: number }[] }, f: F) =>
     reasons.length === 0
       ? 'Nothing is missing.'
-      : `${f.whole(reasons.reduce((sum, r) => sum + r.n, 0))} missing: ${f.list(reasons.map((r) => `${f.whole(r.n)} ${r.reason}`))}.`,
+      : `${f.whole(reasons.reduce((sum, r) => sum + r.n, 0))} missing: ${f.list(reasons.map((r) => `${r.reason} (${f.whole(r.n)})`))}.`,
   lateMarks: ({ late }: { late: number }, f: F) =>
     late === 0
       ? 'No mark came late.'
@@ -210,7 +210,7 @@ export const afterwards = {
   classMean: ({ percent }: { percent: number }, f: F) =>
     `Mean of the children: ${f.percentFine(percent)} (all looks together weigh children with more looks more).`,
   reasonsShort: ({ reasons }: { reasons: readonly { reason: string; n: number }[] }, f: F) =>
-    reasons.map((r) => `${f.whole(r.n)} ${r.reason}`).join(', '),
+    reasons.map((r) => `${r.reason} (${f.whole(r.n)})`).join(', '),
   makeUp: ({ phase }: { phase: string | null }) =>
     phase === null ? 'What off-task was made of' : `What off-task was made of, ${phase}`,
   makeUpShare: ({ code, count, of }: { code: string; count: number; of: number }, f: F) =>

@@ -81,10 +81,11 @@ export const agreement = {
   criterionIs: ({ agreement: share, kappa }: { agreement: number; kappa: number }, f: F) =>
     `The study asks for ${f.percent(100 * share)} agreement and kappa ${f.kappa(kappa)}.`,
   tableTitle: 'What each of them said',
-  tableCaption: ({ first, second }: { first: string; second: string }) =>
-    `Rows: ${first}. Columns: ${second}.`,
+  tableCaption: ({ phase, first, second }: { phase: string | null; first: string; second: string }) =>
+    `${phase === null ? '' : `${phase}: `}rows ${first}, columns ${second}`,
   tableNone: ({ reason }: { reason: string }) => `There is no table of codes: ${reason}.`,
-  codesCaption: 'Each code against all others',
+  codesCaption: ({ phase }: { phase: string | null }) =>
+    `${phase === null ? '' : `${phase}: `}each code against all others`,
   code: 'code',
   figuresCaption: 'Agreement, phase by phase',
   occurrence: 'agreed where either said it',
@@ -94,7 +95,7 @@ export const agreement = {
   excluded: (
     { observer, reasons }: { observer: string; reasons: readonly { reason: string | null; n: number }[] },
     f: F,
-  ) => `${observer}: ${f.list(reasons.map((r) => `${f.whole(r.n)} ${r.reason ?? 'not in the record'}`))}.`,
+  ) => `${observer}: ${f.list(reasons.map((r) => `${r.reason ?? 'not in the record'} (${f.whole(r.n)})`))}.`,
   differencesTitle: ({ n }: { n: number }, f: F) =>
     n === 0
       ? 'They differ nowhere'

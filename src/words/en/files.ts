@@ -80,6 +80,7 @@ export const files = {
   neither: 'neither',
   rolesDone: 'Read the table again',
   intoStudy: 'The sessions of tables go to',
+  thisStudy: 'the study that is open',
   newStudy: 'a study of their own',
   take: ({ count }: { count: number }, f: F) =>
     f.plural(count, { one: 'Take in the file', other: `Take in ${f.whole(count)} files` }),

@@ -26,7 +26,7 @@ const journal = async (services: ReturnType<typeof fakeServices>) =>
 test('completeness comes first: what is missing and why, and no figure', async () => {
   await shown({ 2: 'missed', 4: null, 5: 'off' });
   expect(screen.getByRole('heading', { level: 1 }).textContent).toBe('4 of 6 looks are scored.');
-  expect(screen.getByText('2 missing: 1 missed and 1 out of view.')).toBeTruthy();
+  expect(screen.getByText('2 missing: missed (1) and out of view (1).')).toBeTruthy();
   expect(screen.getByText(/farthest from its planned moment was 5 ms away/)).toBeTruthy();
   expect(document.body.textContent).not.toContain('%');
   expect(screen.queryByRole('img')).toBeNull();

@@ -36,7 +36,7 @@ test('the sentence, the companions and the table of a published pair', async () 
   expect(companions.textContent).toContain('72.7\u202f%');
   expect(companions.textContent).toContain('75.0\u202f%');
   expect(companions.textContent).toContain('.94');
-  const table = screen.getByRole('table', { name: 'Rows: Marsh. Columns: Quill.' });
+  const table = screen.getByRole('table', { name: 'rows Marsh, columns Quill' });
   expect(
     within(table)
       .getAllByRole('cell')
@@ -57,8 +57,8 @@ test('undefined kappa says why, nowhere a number', async () => {
 test('what only one of them scored is left out, and by whom', async () => {
   await shown('..110', '110.0');
   await screen.findByRole('heading', { level: 1 });
-  expect(screen.getByText('Marsh: 2 missed.')).toBeTruthy();
-  expect(screen.getByText('Quill: 1 missed.')).toBeTruthy();
+  expect(screen.getByText('Marsh: missed (2).')).toBeTruthy();
+  expect(screen.getByText('Quill: missed (1).')).toBeTruthy();
 });
 
 test('one observer alone cannot be compared', async () => {

@@ -151,7 +151,7 @@ describe('afterwards', () => {
           { reason: 'out of view', n: 1 },
         ],
       }),
-    ).toBe('4 missing: 3 missed and 1 out of view.');
+    ).toBe('4 missing: missed (3) and out of view (1).');
     expect(afterwards.completeTitle({ scored: 1, planned: 1, method: 'momentary' })).toBe(
       '1 of 1 look is scored.',
     );
