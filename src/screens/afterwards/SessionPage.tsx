@@ -110,7 +110,7 @@ function Session({ session, answer }: { readonly session: StoredSession; readonl
       <div className="not-in-print">
         <Button onClick={() => setShown(false)}>{words.afterwards.hideFigures}</Button>
       </div>
-      <WarningLines warnings={[...details.warnings, ...details.phases.flatMap((phase) => phase.warnings)]} />
+      <WarningLines warnings={details.warnings} />
       {method !== 'headcount' && (
         <Sheet title={words.afterwards.roundSheet}>
           <SheetPicture

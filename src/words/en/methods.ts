@@ -6,11 +6,11 @@ type F = Format;
 export const methods = {
   title: ({ equal, of }: { equal: number; of: number }, f: F) =>
     equal === of
-      ? `All ${f.whole(of)} measures give their published values on this device.`
-      : `${f.whole(equal)} of ${f.whole(of)} measures give their published values on this device.`,
+      ? `All ${f.whole(of)} measures give their expected values on this device.`
+      : `${f.whole(equal)} of ${f.whole(of)} measures give their expected values on this device.`,
   workingTitle: ({ done, of }: { done: number; of: number }, f: F) =>
     `Recomputing the checks: ${f.whole(done)} of ${f.whole(of)}.`,
-  note: 'Each measure is worked out here and now for an example whose result is printed elsewhere, and compared with it.',
+  note: 'Each measure is worked out here and now for an example whose result is known from elsewhere: printed in its source, from another program, or worked by hand.',
   loading: 'Opening the measures …',
   equal: 'equal within the tolerance',
   differs: 'not equal',

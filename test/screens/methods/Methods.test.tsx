@@ -14,7 +14,7 @@ test('every measure is worked out here and equals its published value', async ()
   expect(
     await screen.findByRole(
       'heading',
-      { level: 1, name: `All ${measures.length} measures give their published values on this device.` },
+      { level: 1, name: `All ${measures.length} measures give their expected values on this device.` },
       { timeout: 20_000 },
     ),
   ).toBeTruthy();
