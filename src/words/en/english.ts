@@ -4,6 +4,7 @@ import { batch } from './batch.ts';
 import { before } from './before.ts';
 import { change } from './change.ts';
 import { common } from './common.ts';
+import { corrections } from './corrections.ts';
 import { files } from './files.ts';
 import { keeping } from './keeping.ts';
 import { methods } from './methods.ts';
@@ -18,7 +19,7 @@ import { figures, why } from './why.ts';
 
 /** The English catalogue, one file an area. */
 export const english = {
-  afterwards,
+  afterwards: { ...afterwards, ...corrections },
   agreement,
   batch,
   before,
