@@ -7,6 +7,7 @@ import { PageHead } from '../../ui/PageHead.tsx';
 import { Sheet } from '../../ui/Sheet.tsx';
 import { say } from '../../words/say.ts';
 import type { SessionAnswer } from '../../worker/questions.ts';
+import { HandOverNotice } from '../files/HandOverNotice.tsx';
 import { useServices } from '../services.ts';
 import { Completeness } from './Completeness.tsx';
 import { LookCorrection } from './LookCorrection.tsx';
@@ -80,6 +81,7 @@ function Session({ session, answer }: { readonly session: StoredSession; readonl
         <PageHead about={about} note={words.afterwards.missingBy({ reasons })}>
           {words.afterwards.completeTitle({ scored: details.scored, planned: details.planned, method })}
         </PageHead>
+        <HandOverNotice study={header.study} />
         <WarningLines warnings={details.warnings} />
         <Sheet title={words.afterwards.figuresWaitTitle}>
           <div className="row">

@@ -32,7 +32,7 @@ export function VisitRow({ visit, byHand, onPair }: Props) {
       <div className="visit-way">
         {visit.sessions.length > 1 && (
           <a className="button" href={`#/afterwards/visit/${encodeURIComponent(first)}`}>
-            {words.afterwards.openAgreement}
+            {words.afterwards.openAgreement({ records: visit.sessions.length })}
           </a>
         )}
       </div>

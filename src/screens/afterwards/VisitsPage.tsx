@@ -1,14 +1,13 @@
 import { useState } from 'react';
-import { exportStudy, pairVisit } from '../../tasks/index.ts';
+import { pairVisit } from '../../tasks/index.ts';
 import { Button } from '../../ui/Button.tsx';
 import { Notice } from '../../ui/Notice.tsx';
 import { PageHead } from '../../ui/PageHead.tsx';
 import { Sheet } from '../../ui/Sheet.tsx';
 import { say } from '../../words/say.ts';
 import { BringIn } from '../files/BringIn.tsx';
-import { HandOut } from '../files/HandOut.tsx';
+import { HandOverNotice } from '../files/HandOverNotice.tsx';
 import '../files/files.css';
-import { useWaiting } from '../files/useWaiting.ts';
 import { useServices } from '../services.ts';
 import { useCurrentStudy } from '../useCurrentStudy.ts';
 import { PairingDialog } from './PairingDialog.tsx';
@@ -27,7 +26,6 @@ interface Pairing {
 export function VisitsPage() {
   const { words, deps, useStored } = useServices();
   const study = useCurrentStudy();
-  const waiting = useWaiting(study?.id);
   const listed = useStored(
     (store) => (study ? store.listSessions(study.id) : Promise.resolve({ ok: true as const, value: [] })),
     [study?.id],
@@ -38,8 +36,7 @@ export function VisitsPage() {
   const [undo, setUndo] = useState<{ session: string; observer: string; visit: string | null } | null>(null);
   const [problem, setProblem] = useState<string | null>(null);
 
-  if (study === undefined || listed === undefined || waiting === undefined)
-    return <p className="second">{words.common.loading}</p>;
+  if (study === undefined || listed === undefined) return <p className="second">{words.common.loading}</p>;
   if (!listed.ok) return <Notice kind="hold">{say(words.problems, listed.problem)}</Notice>;
   const lines = pending.state === 'answered' && pending.answer.ok ? pending.answer.value.visits : [];
   const pairings = study?.pairings ?? [];
@@ -62,20 +59,7 @@ export function VisitsPage() {
           ? words.afterwards.noVisitsTitle
           : words.afterwards.visitsTitle({ visits: visits.length, latest })}
       </PageHead>
-      {study !== null && waiting.recorded > 0 && (
-        <Notice
-          kind={waiting.sessions > 0 ? 'hold' : 'done'}
-          actions={
-            waiting.sessions > 0 ? (
-              <HandOut make={() => exportStudy(deps, study.id)}>{words.files.handOver}</HandOut>
-            ) : undefined
-          }
-        >
-          {waiting.sessions > 0
-            ? words.common.notHandedOver({ n: waiting.sessions })
-            : words.common.handedOver}
-        </Notice>
-      )}
+      {study !== null && <HandOverNotice study={study.id} />}
       {problem !== null && <Notice kind="hold">{problem}</Notice>}
       {undo !== null && (
         <Notice

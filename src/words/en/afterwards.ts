@@ -76,8 +76,7 @@ export const afterwards = {
   scoredMissing: ({ scored, missing }: { scored: number; missing: number }, f: F) =>
     `${f.whole(scored)} scored, ${f.whole(missing)} missing`.replaceAll(' ', '\u00a0'),
   notHandedOver: 'not handed over',
-  openSession: ({ observer }: { observer: string }) => `Open the record of ${observer}`,
-  openAgreement: 'Compare the two',
+  openAgreement: ({ records }: { records: number }) => (records === 2 ? 'Compare the two' : 'Compare them'),
   pairing: 'Wrong visit?',
   pairingTitle: ({ observer, klass }: { observer: string; klass: string }) =>
     `Which visit does this record of ${observer} in ${klass} belong to?`,

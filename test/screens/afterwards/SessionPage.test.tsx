@@ -4,8 +4,9 @@ import userEvent from '@testing-library/user-event';
 import { afterEach, expect, test } from 'vitest';
 import { isKnown } from '../../../src/journal/entry.ts';
 import { Afterwards } from '../../../src/screens/afterwards/Afterwards.tsx';
+import type { Row } from '../../analysis/sessionsFrom.ts';
 import { fakeServices, renderScreen } from '../support/renderScreen.tsx';
-import { emptyStudy, keepRecorded, must } from '../support/studyOf.ts';
+import { emptyStudy, keepRecorded, must, studyOfTable } from '../support/studyOf.ts';
 
 afterEach(cleanup);
 
@@ -98,4 +99,47 @@ test('a record that is not here is said so', async () => {
   await emptyStudy(services);
   renderScreen(<Afterwards />, services, '/afterwards/session/elsewhere');
   expect(await screen.findByRole('heading', { name: 'This record is not on this tablet.' })).toBeTruthy();
+});
+
+const facts = { session: 'a', observer: 'Quill', class: 'Otter', phase: 'before' };
+const methods: Record<string, { rows: Row[]; title: string }> = {
+  partial: {
+    rows: ['on-task|off-task', 'off-task', '', 'on-task'].map((code, k) => ({
+      ...facts,
+      child: 'C1',
+      interval: k + 1,
+      code,
+      method: 'partial',
+    })),
+    title: 'Some on-task in 50\u202f% of the intervals, between 15 and 85\u202f%.',
+  },
+  headcount: {
+    rows: [
+      { ...facts, child: '', interval: 1, code: '', method: 'headcount', on_count: 8, present_count: 10 },
+      { ...facts, child: '', interval: 2, code: '', method: 'headcount', on_count: 7, present_count: 10 },
+    ],
+    title: 'On-task in the counts: 75\u202f% of the children counted, between 53 and 89\u202f%.',
+  },
+  duration: {
+    rows: ['on-task', 'off-task'].map((code, k) => ({
+      ...facts,
+      child: 'C1',
+      interval: k + 1,
+      code,
+      method: 'duration',
+      start_s: k * 30,
+      end_s: k * 30 + (k === 0 ? 30 : 10),
+    })),
+    title: 'On-task for 75\u202f% of the time.',
+  },
+};
+
+test.each(Object.entries(methods))('%s has a sentence of its own', async (_method, { rows, title }) => {
+  const services = fakeServices();
+  const study = await studyOfTable(services, rows);
+  const [session] = must(await services.store.listSessions(study));
+  renderScreen(<Afterwards />, services, `/afterwards/session/${session?.id}`);
+  await userEvent.click(await screen.findByRole('button', { name: 'Show the figures' }));
+  expect(screen.getByRole('heading', { level: 1 }).textContent).toBe(title);
+  expect(document.body.textContent).not.toMatch(/NaN|null|undefined/);
 });
