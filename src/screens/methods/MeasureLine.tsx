@@ -37,7 +37,7 @@ export function MeasureLine({ about, check }: { readonly about: About; readonly 
           <dt>{words.methods.got}</dt>
           <dd>
             {check === null ? verdict : `${words.methods.value({ value: check.got })}, ${verdict}`} (
-            {words.methods.value({ value: about.check.tolerance })})
+            {words.methods.tolerance({ value: about.check.tolerance })})
           </dd>
         </dl>
       </div>

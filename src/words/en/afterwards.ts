@@ -66,8 +66,6 @@ export const afterwards = {
   files: 'Files and hand-over',
   filesHint: 'Study file, interval table, what is kept where.',
   withoutDate: 'Without a date',
-  observers: ({ names }: { names: readonly string[] }, f: F) => f.list(names),
-  role: ({ role }: { role: 'primary' | 'second' }) => (role === 'primary' ? 'primary' : 'second'),
   complete: 'complete',
   endedEarly: 'ended early',
   neverEnded: 'not ended',
@@ -173,7 +171,6 @@ export const afterwards = {
     `Round sheet of ${klass}, ${f.list(observers)}: one row a child, one column a look`,
   sheetTable: 'The same as a table',
   sheetCaption: 'Every look, child by child',
-  look: 'look',
   phaseChild: 'child, phase',
   keyMissing: 'missing',
   keyLate: 'marked late',
@@ -218,7 +215,6 @@ export const afterwards = {
     'Effective looks: what the looks are worth as independent ones (Bayley and Hammersley 1946); blank where a child’s looks are too few or all the same.',
   makeUpNone: 'Nothing was scored off-task.',
   undefinedHere: 'not defined',
-  howTitle: 'How it was measured',
   how: (
     {
       method,

@@ -202,8 +202,6 @@ export const change = {
   how: ({ before, after }: { before: string; after: string }) =>
     `The unit is the child’s percentage: its sessions of “${before}” joined, and those of “${after}”; one record a visit, the primary observer’s. Paired t interval on the children’s changes; g is the mean change in standard deviations before, small-sample corrected (Becker 1988).`,
   caution: 'The figures describe lessons and groups. They say nothing about any one child.',
-  warnings: 'Before you believe it',
-  toClass: ({ klass }: { klass: string }) => `Open ${klass}`,
 } as const;
 
 function signed(f: F, points: number): string {

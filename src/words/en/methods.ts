@@ -23,8 +23,7 @@ export const methods = {
   check: 'Check',
   expected: 'Expected',
   got: 'Worked out here',
-  tolerance: 'Tolerance',
-  checkSource: 'Expected after',
+  tolerance: ({ value }: { value: number }) => `tolerance ${value}`.replace('-', '−'),
   value: ({ value }: { value: number }) =>
     Number.isNaN(value) ? 'not defined' : String(Number(value.toPrecision(10))).replace('-', '−'),
   again: 'Work them out again',
