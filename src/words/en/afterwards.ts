@@ -66,6 +66,7 @@ export const afterwards = {
   files: 'Files and hand-over',
   filesHint: 'Study file, interval table, what is kept where.',
   withoutDate: 'Without a date',
+  role: ({ role }: { role: 'primary' | 'second' }) => (role === 'primary' ? 'primary' : 'second'),
   complete: 'complete',
   endedEarly: 'ended early',
   neverEnded: 'not ended',
