@@ -1,0 +1,66 @@
+import { useState } from 'react';
+import { useLocation } from 'wouter';
+import { Button } from '../../ui/Button.tsx';
+import { Notice } from '../../ui/Notice.tsx';
+import { say } from '../../words/say.ts';
+import { useServices } from '../services.ts';
+import { useFacts } from './RoomFacts.tsx';
+import { useLive, useRoom } from './useRoom.ts';
+
+/** The page of the one tap that begins (or goes on with) a session; the tap also unlocks the sound. */
+export function BeforeStart() {
+  const live = useLive();
+  const { words } = useServices();
+  const { room, problems } = words;
+  const { header, pseudonyms } = useFacts();
+  const [, go] = useLocation();
+  const [starting, setStarting] = useState(false);
+  const [problem, setProblem] = useState<string | null>(null);
+  const s = useRoom(({ resuming, upcoming, intervals, sound }) => ({
+    resuming,
+    child: upcoming?.child ?? null,
+    looks: intervals.length,
+    silent: !sound.on,
+  }));
+  const { schedule } = header;
+  const name = s.child === null ? undefined : pseudonyms.get(s.child);
+  const begin = async (): Promise<void> => {
+    setStarting(true);
+    setProblem(null);
+    const begun = await live.begin();
+    if (begun.ok) return;
+    setProblem(say(problems, begun.problem));
+    setStarting(false);
+  };
+  const shared = header.role !== null;
+  const minutes = schedule.kind === 'laid' ? (s.looks * schedule.protocol.intervalMs) / 60_000 : 0;
+  return (
+    <main className="room-page">
+      <p className="second">
+        {room.readyAbout({
+          klass: header.classroom.name,
+          protocol: schedule.kind === 'laid' ? schedule.protocol.name : '',
+          practice: header.practice,
+        })}
+      </p>
+      <h1 tabIndex={-1}>
+        {s.resuming ? room.readyTitleResuming : shared ? room.readyTitleShared : room.readyTitle}
+      </h1>
+      <p>{s.resuming ? room.readyResuming : shared ? room.readyShared : room.readyAlone}</p>
+      <p className="second">
+        {name !== undefined && !s.resuming && `${room.readyFirst({ child: name })} · `}
+        {room.readyLooks({ n: s.looks, minutes: Math.round(minutes) })}
+        {s.silent && ` · ${room.readySilent}`}
+      </p>
+      {problem !== null && <Notice kind="hold">{problem}</Notice>}
+      <Button look="main" className="start" disabled={starting} onClick={begin}>
+        {starting ? room.starting : s.resuming ? room.goOn : room.start}
+      </Button>
+      <div>
+        <Button look="quiet" disabled={starting} onClick={() => go('/room')}>
+          {room.leaveReady}
+        </Button>
+      </div>
+    </main>
+  );
+}

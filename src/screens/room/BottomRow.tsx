@@ -1,0 +1,172 @@
+import type { ReactNode } from 'react';
+import { Button } from '../../ui/Button.tsx';
+import { CodeSign, Ring, Tick } from '../../ui/Sign.tsx';
+import { useWords } from '../services.ts';
+import { Panel } from './Panel.tsx';
+import { useFacts } from './RoomFacts.tsx';
+import { useLive, useRoom } from './useRoom.ts';
+
+export type PanelName = 'note' | 'child' | 'part' | 'end' | 'more';
+
+interface Props {
+  readonly onPanel: (panel: PanelName) => void;
+}
+
+/** The rare things, in one row: undo says what it would undo; silence and the kept sign stand at its end. */
+export function BottomRow({ onPanel }: Props) {
+  const live = useLive();
+  const { room } = useWords();
+  return (
+    <fieldset className="room-bottom">
+      <legend className="visually-hidden">{room.rare}</legend>
+      <Undo />
+      <Button className="rare" onClick={() => live.flag()}>
+        <svg width="16" height="20" viewBox="0 0 16 20" aria-hidden="true">
+          <path className="rare-flag" d="M2 19V2H13L10 6L13 10H2" />
+        </svg>
+        {room.flag}
+      </Button>
+      <div className="rare-wide">
+        <RareThings onPanel={onPanel} />
+      </div>
+      <Button className="rare rare-more" onClick={() => onPanel('more')}>
+        {room.more}
+      </Button>
+      <span className="room-gap" />
+      <Silence />
+      <KeptSign />
+    </fieldset>
+  );
+}
+
+/** On narrow glass the rarer things wait behind one button. */
+export function MorePanel({ onPanel, onClose }: Props & { readonly onClose: () => void }) {
+  const { room, common } = useWords();
+  return (
+    <Panel title={room.moreTitle} closeLabel={common.close} onClose={onClose}>
+      <div className="panel-choices">
+        <RareThings onPanel={onPanel} onDone={onClose} />
+      </div>
+    </Panel>
+  );
+}
+
+function RareThings({ onPanel, onDone }: Props & { readonly onDone?: () => void }) {
+  const live = useLive();
+  const { room } = useWords();
+  const { lessonParts } = useFacts();
+  const { phase, mayPause, part, last } = useRoom((s) => ({
+    phase: s.phase,
+    mayPause: s.mayPause,
+    part: s.lessonPart,
+    last: s.state.origins.length - 1 <= s.part,
+  }));
+  const running = phase === 'running';
+  const now = (act: () => void) => (): void => {
+    act();
+    onDone?.();
+  };
+  return (
+    <>
+      <Button className="rare" onClick={() => onPanel('child')}>
+        {room.child}
+      </Button>
+      {running && (
+        <>
+          <Button className="rare" onClick={now(() => live.interruptClass())}>
+            {room.interrupt}
+          </Button>
+          {mayPause && (
+            <Button className="rare" onClick={now(() => live.pause())}>
+              {room.pause}
+            </Button>
+          )}
+          {!last && (
+            <Button className="rare" onClick={now(() => live.breakStarted())}>
+              {room.breakStarted}
+            </Button>
+          )}
+        </>
+      )}
+      {lessonParts.length > 0 && (
+        <Button className="rare" onClick={() => onPanel('part')}>
+          {part === null ? room.lessonPart : room.lessonPartNow({ part })}
+        </Button>
+      )}
+      <Button className="rare" onClick={() => onPanel('note')}>
+        {room.note}
+      </Button>
+      <Button className="rare" onClick={() => onPanel('end')}>
+        {room.end}
+      </Button>
+    </>
+  );
+}
+
+function Undo() {
+  const live = useLive();
+  const { room } = useWords();
+  const { codes, pseudonyms } = useFacts();
+  const undo = useRoom(({ undo, intervals }) => ({
+    kind: undo?.kind ?? null,
+    code: undo?.code ?? null,
+    child: undo?.child ?? (undo?.interval == null ? null : (intervals[undo.interval - 1]?.child ?? null)),
+  }));
+  const what = undo.code === null ? undefined : codes.get(undo.code);
+  let sign: ReactNode = null;
+  let words: string = '';
+  if (undo.kind === 'missing') sign = <Ring size={18} />;
+  else if (what !== undefined) sign = <CodeSign kind={what.sign} size={18} />;
+  else if (undo.kind === 'marked') words = room.noneOfThese;
+  else if (undo.kind !== null) words = room.undoKind({ kind: undo.kind });
+  const name = undo.child === null ? '' : (pseudonyms.get(undo.child) ?? '');
+  return (
+    <Button className="rare rare-undo" aria-disabled={undo.kind === null} onClick={() => live.undo()}>
+      <svg width="18" height="18" viewBox="0 0 18 18" aria-hidden="true">
+        <path className="rare-flag" d="M7 2L2 7L7 12M2 7H11A5 5 0 0 1 11 17H8" />
+      </svg>
+      {room.undo}
+      {undo.kind === null ? (
+        <span className="visually-hidden">{room.undoNothing}</span>
+      ) : (
+        <span className="rare-what">
+          {sign}
+          {what !== undefined && <span className="visually-hidden">{what.code.label}</span>}
+          {undo.kind === 'missing' && <span className="visually-hidden">{room.cannotSee}</span>}
+          <span className="rare-who">{`${words} ${name}`.trim()}</span>
+        </span>
+      )}
+    </Button>
+  );
+}
+
+/** One touch, always in sight. */
+function Silence() {
+  const live = useLive();
+  const { room } = useWords();
+  const on = useRoom((s) => s.sound.on);
+  return (
+    <Button className="rare rare-silence" onClick={() => live.silence(on)}>
+      <svg width="22" height="20" viewBox="0 0 22 20" aria-hidden="true">
+        <path className="rare-flag" d="M2 7V13H6L11 17V3L6 7Z" />
+        <path
+          className="rare-flag"
+          d={on ? 'M15 6A6 6 0 0 1 15 14M18 3A10 10 0 0 1 18 17' : 'M15 7L20 13M20 7L15 13'}
+        />
+      </svg>
+      {on ? room.silence : room.soundOn}
+    </Button>
+  );
+}
+
+/** What is on the disk, of what was entered. */
+function KeptSign() {
+  const { room } = useWords();
+  const { kept, of } = useRoom((s) => ({ kept: s.kept.kept, of: s.kept.of }));
+  return (
+    <p className="room-kept">
+      <span className="room-kept-sign">{kept === of && <Tick size={14} />}</span>
+      {room.kept({ kept, of })}
+    </p>
+  );
+}

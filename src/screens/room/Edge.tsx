@@ -1,0 +1,110 @@
+import { CodeSign, Ring } from '../../ui/Sign.tsx';
+import { useWords } from '../services.ts';
+import type { EdgeTarget } from './codeEdges.ts';
+import { useFacts } from './RoomFacts.tsx';
+import { Target } from './Target.tsx';
+import { useLive, useRoom } from './useRoom.ts';
+
+interface Props {
+  readonly side: 'left' | 'right';
+  readonly targets: readonly EdgeTarget[];
+  readonly withChildBefore?: boolean;
+}
+
+/** The targets at one edge of the glass, always in the same places. */
+export function Edge({ side, targets, withChildBefore = false }: Props) {
+  const { room } = useWords();
+  return (
+    <fieldset className={`edge edge-${side}`}>
+      <legend className="visually-hidden">{side === 'left' ? room.codesLeft : room.codesRight}</legend>
+      {targets.map((target) => (
+        <OneTarget key={target.kind === 'code' ? target.code.id : target.kind} target={target} />
+      ))}
+      {withChildBefore && <ChildBefore />}
+    </fieldset>
+  );
+}
+
+function OneTarget({ target }: { readonly target: EdgeTarget }) {
+  if (target.kind === 'code') return <CodeTarget target={target} />;
+  return target.kind === 'nothing' ? <NoneOfThese /> : <CannotSee />;
+}
+
+function CodeTarget({ target }: { readonly target: Extract<EdgeTarget, { kind: 'code' }> }) {
+  const live = useLive();
+  const { id, label } = target.code;
+  const chosen = useRoom((s) => s.current?.codes?.includes(id) ?? false);
+  return (
+    <Target
+      sign={<CodeSign kind={target.sign} />}
+      chosen={chosen}
+      action={`code:${target.position}`}
+      wasFelt={(felt) => felt.code === id && !felt.outOfView}
+      onTouch={(at) => live.touch(id, at)}
+    >
+      {label}
+    </Target>
+  );
+}
+
+function NoneOfThese() {
+  const live = useLive();
+  const { room } = useWords();
+  const chosen = useRoom((s) => s.current?.status === 'scored' && s.current.codes?.length === 0);
+  return (
+    <Target
+      className="target-quiet"
+      sign={<span className="target-none" />}
+      chosen={chosen}
+      action="nothing"
+      wasFelt={(felt) => felt.code === null && !felt.outOfView}
+      onTouch={(at) => live.touch(null, at)}
+    >
+      {room.noneOfThese}
+    </Target>
+  );
+}
+
+function CannotSee() {
+  const live = useLive();
+  const { room } = useWords();
+  const chosen = useRoom((s) => s.current?.missing === 'out of view');
+  return (
+    <Target
+      className="target-dashed"
+      sign={<Ring size={34} />}
+      chosen={chosen}
+      action="cannot see"
+      wasFelt={(felt) => felt.outOfView}
+      onTouch={(at) => live.cannotSee(at)}
+    >
+      {room.cannotSee}
+    </Target>
+  );
+}
+
+/** Turns the next touch to the look before this one. */
+function ChildBefore() {
+  const live = useLive();
+  const { room } = useWords();
+  const { pseudonyms } = useFacts();
+  const armed = useRoom((s) => s.armedBefore !== null);
+  const child = useRoom((s) => (s.previous === null ? null : s.previous.child));
+  const name = child === null ? undefined : pseudonyms.get(child);
+  return (
+    <Target
+      className="target-before"
+      sign={
+        <svg width="34" height="34" viewBox="0 0 34 34" aria-hidden="true">
+          <path className="before-arrow" d="M29 17H7M15 8L6 17L15 26" />
+        </svg>
+      }
+      chosen={armed}
+      action="child before"
+      onTouch={() => live.childBefore()}
+    >
+      {armed ? room.childBeforeArmed : room.childBefore}
+      <span className="target-hint">{name}</span>
+    </Target>
+  );
+}

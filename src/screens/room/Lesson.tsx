@@ -1,0 +1,125 @@
+import { type MouseEvent, type SyntheticEvent, useCallback, useMemo, useState } from 'react';
+import type { PageMs } from '../../kernel/units.ts';
+import type { KeyAction } from '../../model/observer.ts';
+import { BeforeStart } from './BeforeStart.tsx';
+import { BottomRow, MorePanel, type PanelName } from './BottomRow.tsx';
+import { ChildPanel } from './ChildPanel.tsx';
+import { codeEdges } from './codeEdges.ts';
+import { Edge } from './Edge.tsx';
+import { Flash } from './Flash.tsx';
+import { HoldLine } from './HoldLine.tsx';
+import { LessonPlan } from './LessonPlan.tsx';
+import { LookAt } from './LookAt.tsx';
+import { Over } from './Over.tsx';
+import { EndPanel, LessonPartPanel, NotePanel } from './panels.tsx';
+import { useFacts } from './RoomFacts.tsx';
+import { Standstill } from './Standstill.tsx';
+import { TopRow } from './TopRow.tsx';
+import { useKeys } from './useKeys.ts';
+import { useLeaveGuard } from './useLeaveGuard.ts';
+import { useLive, useRoom } from './useRoom.ts';
+import './room.css';
+import './targets.css';
+import './bottomRow.css';
+
+/** The recording, from the tap that begins it to the sign that all is kept. */
+export function Lesson() {
+  const phase = useRoom((s) => s.phase);
+  const settled = useRoom((s) => s.phase === 'ready' || (s.phase === 'ended' && s.kept.kept === s.kept.of));
+  const leaving = useLeaveGuard(!settled);
+  if (phase === 'ready') return <BeforeStart />;
+  if (phase === 'ended') return <Over />;
+  return <OnTheGlass leaving={leaving} />;
+}
+
+const inPanel = (target: EventTarget | null): boolean =>
+  target instanceof Element && target.closest('.panel') !== null;
+
+/** Long presses open no menus. */
+const noMenu = (event: SyntheticEvent): void => event.preventDefault();
+
+/** A tap on a button leaves the focus where it is, so that Enter and Space of a page-turner do not repeat it. */
+const keepFocus = (event: MouseEvent): void => {
+  if (!inPanel(event.target)) event.preventDefault();
+};
+
+function OnTheGlass({ leaving }: { readonly leaving: number }) {
+  const { codes, latched, keys, keysChosen } = useFacts();
+  const [panel, setPanel] = useState<PanelName | null>(null);
+  const [keysSeen, setKeysSeen] = useState(false);
+  const close = useCallback(() => setPanel(null), []);
+  const edges = useMemo(
+    () =>
+      codeEdges(
+        [...codes.values()].map(({ code }) => code),
+        latched,
+      ),
+    [codes, latched],
+  );
+  // After "break started" the last look stays open for its time, so its targets stay as well.
+  const marking = useRoom(
+    ({ phase, current }) =>
+      phase === 'running' || phase === 'counting in' || (phase === 'between parts' && current !== null),
+  );
+  const still = useRoom(({ phase }) => phase !== 'running' && phase !== 'counting in');
+  const act = useKeyAct(useCallback(() => setKeysSeen(true), []));
+  useKeys(keys, panel !== null, act);
+  return (
+    <main
+      className={`room ${marking ? '' : 'room-still'}`}
+      data-keys={keysChosen || keysSeen}
+      onContextMenu={noMenu}
+      onMouseDown={keepFocus}
+    >
+      <TopRow />
+      {marking && <Edge side="left" targets={edges.left} withChildBefore />}
+      <div className="room-centre">
+        {!still && <LookAt />}
+        <div className="room-middle">
+          {panel === 'note' ? (
+            <NotePanel onClose={close} />
+          ) : panel === 'child' ? (
+            <ChildPanel onClose={close} />
+          ) : panel === 'part' ? (
+            <LessonPartPanel onClose={close} />
+          ) : panel === 'end' ? (
+            <EndPanel onClose={close} />
+          ) : panel === 'more' ? (
+            <MorePanel onPanel={setPanel} onClose={close} />
+          ) : still ? (
+            <Standstill />
+          ) : (
+            <LessonPlan />
+          )}
+        </div>
+        <HoldLine leaving={leaving} />
+      </div>
+      {marking && <Edge side="right" targets={edges.right} />}
+      <BottomRow onPanel={setPanel} />
+      <Flash />
+    </main>
+  );
+}
+
+/** What the keys do: the same as the targets and buttons of that name. */
+function useKeyAct(onKey: () => void): (action: KeyAction, at: PageMs) => void {
+  const live = useLive();
+  const { codes, latched } = useFacts();
+  return useCallback(
+    (action, at) => {
+      onKey();
+      if (action === 'cannot see') live.cannotSee(at);
+      else if (action === 'child before') live.childBefore();
+      else if (action === 'undo') live.undo();
+      else if (action === 'flag') live.flag();
+      else if (action === 'silence') live.silence(live.snapshot().sound.on);
+      else if (action === 'nothing') {
+        if (latched) live.touch(null, at);
+      } else {
+        const code = [...codes.keys()][Number(action.slice('code:'.length)) - 1];
+        if (code !== undefined) live.touch(code, at);
+      }
+    },
+    [live, codes, latched, onKey],
+  );
+}

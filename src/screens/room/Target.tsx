@@ -1,0 +1,54 @@
+import { type ReactNode, useState } from 'react';
+import type { PageMs } from '../../kernel/units.ts';
+import type { KeyAction } from '../../model/observer.ts';
+import type { Felt } from '../../recorder/roomSnapshot.ts';
+import { useWords } from '../services.ts';
+import { keyOf } from './keys.ts';
+import { useFacts } from './RoomFacts.tsx';
+import { useLive, useRoom } from './useRoom.ts';
+import { useTouchDown } from './useTouchDown.ts';
+
+interface Props {
+  readonly className?: string;
+  readonly sign: ReactNode;
+  readonly children: ReactNode;
+  /** This is what the current interval holds. */
+  readonly chosen: boolean;
+  /** The key that does the same. */
+  readonly action: KeyAction;
+  /** Whether a touch that was taken was this target's. */
+  readonly wasFelt?: (felt: Felt) => boolean;
+  readonly onTouch: (at: PageMs) => void;
+}
+
+/** One very large target: it acts when the finger goes down, and answers in the same frame. */
+export function Target({ className = '', sign, children, chosen, action, wasFelt, onTouch }: Props) {
+  const ref = useTouchDown(onTouch);
+  return (
+    <button
+      ref={ref}
+      type="button"
+      className={`target ${chosen ? 'target-chosen' : ''} ${className}`}
+      aria-pressed={chosen}
+    >
+      {wasFelt !== undefined && <FeltMark wasFelt={wasFelt} />}
+      <span className="target-sign">{sign}</span>
+      <span className="target-label">{children}</span>
+      <KeyHint action={action} />
+    </button>
+  );
+}
+
+/** The answer to a touch: a frame that stays for a moment. A later touch replaces it. */
+function FeltMark({ wasFelt }: { readonly wasFelt: (felt: Felt) => boolean }) {
+  const live = useLive();
+  const [old] = useState(() => live.snapshot().felt?.count ?? 0);
+  const count = useRoom(({ felt }) => (felt !== null && felt.count > old && wasFelt(felt) ? felt.count : 0));
+  return count === 0 ? null : <span key={count} className="target-felt" />;
+}
+
+function KeyHint({ action }: { readonly action: KeyAction }) {
+  const { room } = useWords();
+  const key = keyOf(useFacts().keys, action);
+  return key === null ? null : <kbd className="key">{room.key({ key })}</kbd>;
+}
