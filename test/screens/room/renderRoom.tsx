@@ -1,0 +1,34 @@
+import { problem } from '../../../src/kernel/result.ts';
+import type { RoomSnapshot } from '../../../src/recorder/roomSnapshot.ts';
+import { Room } from '../../../src/screens/room/Room.tsx';
+import type { RecorderDesk } from '../../../src/screens/services.ts';
+import { fakeServices, renderScreen } from '../support/renderScreen.tsx';
+import { FakeLive } from './fakeLive.ts';
+
+/** A desk on which one session lies. */
+export function deskWith(live: FakeLive, id = 'session-1'): RecorderDesk {
+  let here = true;
+  const listeners = new Set<() => void>();
+  return {
+    current: () => (here ? live : null),
+    currentId: () => (here ? id : null),
+    open: async () => problem('session.running'),
+    resume: async () => problem('session.notThere'),
+    close: () => {
+      here = false;
+      for (const listener of listeners) listener();
+    },
+    subscribe: (listener) => {
+      listeners.add(listener);
+      return () => listeners.delete(listener);
+    },
+  };
+}
+
+export function renderRoom(snapshot: RoomSnapshot) {
+  const live = new FakeLive(snapshot);
+  const recorder = deskWith(live);
+  const services = fakeServices({ recorder });
+  const view = renderScreen(<Room session="session-1" />, services, '/room/session-1');
+  return { ...view, live, services, recorder };
+}
