@@ -1,6 +1,6 @@
 import type { ReactNode } from 'react';
 import { Button } from '../../ui/Button.tsx';
-import { CodeSign, Ring, Tick } from '../../ui/Sign.tsx';
+import { CodeSign, Ring } from '../../ui/Sign.tsx';
 import { useWords } from '../services.ts';
 import { Panel } from './Panel.tsx';
 import { useFacts } from './RoomFacts.tsx';
@@ -12,7 +12,7 @@ interface Props {
   readonly onPanel: (panel: PanelName) => void;
 }
 
-/** The rare things, in one row: undo says what it would undo; silence and the kept sign stand at its end. */
+/** The rare things, in one row: undo says what it would undo; silence stands at its end. */
 export function BottomRow({ onPanel }: Props) {
   const live = useLive();
   const { room } = useWords();
@@ -24,7 +24,7 @@ export function BottomRow({ onPanel }: Props) {
         <svg width="16" height="20" viewBox="0 0 16 20" aria-hidden="true">
           <path className="rare-flag" d="M2 19V2H13L10 6L13 10H2" />
         </svg>
-        {room.flag}
+        <span className="rare-word">{room.flag}</span>
       </Button>
       <div className="rare-wide">
         <RareThings onPanel={onPanel} />
@@ -32,9 +32,7 @@ export function BottomRow({ onPanel }: Props) {
       <Button className="rare rare-more" onClick={() => onPanel('more')}>
         {room.more}
       </Button>
-      <span className="room-gap" />
       <Silence />
-      <KeptSign />
     </fieldset>
   );
 }
@@ -154,19 +152,7 @@ function Silence() {
           d={on ? 'M15 6A6 6 0 0 1 15 14M18 3A10 10 0 0 1 18 17' : 'M15 7L20 13M20 7L15 13'}
         />
       </svg>
-      {on ? room.silence : room.soundOn}
+      <span className="rare-word">{on ? room.silence : room.soundOn}</span>
     </Button>
-  );
-}
-
-/** What is on the disk, of what was entered. */
-function KeptSign() {
-  const { room } = useWords();
-  const { kept, of } = useRoom((s) => ({ kept: s.kept.kept, of: s.kept.of }));
-  return (
-    <p className="room-kept">
-      <span className="room-kept-sign">{kept === of && <Tick size={14} />}</span>
-      {room.kept({ kept, of })}
-    </p>
   );
 }

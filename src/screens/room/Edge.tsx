@@ -15,13 +15,12 @@ interface Props {
 export function Edge({ side, targets, withChildBefore = false }: Props) {
   const { room } = useWords();
   return (
-    <fieldset className={`edge edge-${side}`}>
-      <legend className="visually-hidden">{side === 'left' ? room.codesLeft : room.codesRight}</legend>
+    <section className={`edge edge-${side}`} aria-label={side === 'left' ? room.codesLeft : room.codesRight}>
       {targets.map((target) => (
         <OneTarget key={target.kind === 'code' ? target.code.id : target.kind} target={target} />
       ))}
       {withChildBefore && <ChildBefore />}
-    </fieldset>
+    </section>
   );
 }
 

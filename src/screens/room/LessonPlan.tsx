@@ -48,7 +48,7 @@ export function LessonPlan() {
             label={words.room.plan}
             current={current}
             next={next}
-            fitHeight="100cqh - 48px"
+            fitHeight="100cqh - var(--you)"
           />
         </div>
       )}

@@ -1,14 +1,18 @@
+import { Tick } from '../../ui/Sign.tsx';
 import { useWords } from '../services.ts';
 import { Ribbon } from './Ribbon.tsx';
 import { useRoom } from './useRoom.ts';
 
-/** How far the lesson is: time left, the ribbon, the round. */
+/** How far the lesson is: time left, the ribbon, the round; and the small sign of what is on the disk. */
 export function TopRow() {
   return (
     <header className="room-top">
       <TimeLeft />
       <Ribbon />
-      <Round />
+      <div className="room-facts">
+        <Round />
+        <KeptSign />
+      </div>
     </header>
   );
 }
@@ -33,5 +37,17 @@ function Round() {
   const { round, rounds } = useRoom((s) => ({ round: s.round, rounds: s.rounds }));
   return (
     <p className="room-round">{round !== null && rounds !== null && words.room.round({ round, rounds })}</p>
+  );
+}
+
+/** What is on the disk, of what was entered. */
+function KeptSign() {
+  const { room } = useWords();
+  const { kept, of } = useRoom((s) => ({ kept: s.kept.kept, of: s.kept.of }));
+  return (
+    <p className="room-kept">
+      <span className="room-kept-sign">{kept === of && <Tick size={14} />}</span>
+      {room.kept({ kept, of })}
+    </p>
   );
 }

@@ -217,7 +217,7 @@ export const room = {
 
   // holds: one calm sentence each
   holdRefused: ({ kept, of, why }: { kept: number; of: number; why: string }, f: F) =>
-    `Kept ${f.whole(kept)} of ${f.whole(of)}. ${why} Go on: nothing is dropped, and it is tried again.`,
+    `Kept ${f.whole(kept)} of ${f.whole(of)}. ${why}`,
   holdSoundStuck: 'The tablet gives no sound. Go on with the brass frame at each cue, or try the sound.',
   holdOutput: 'The output changed: cues are silent, the brass frame shows them. Sound again?',
   holdSoundTry: 'Try the sound',
