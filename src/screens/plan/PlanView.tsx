@@ -58,12 +58,8 @@ export function PlanView(props: Props) {
         : `min(100%, ${widest}, (${fitHeight}) * ${across / down})`,
   };
   const at = (x: number, y: number): CSSProperties => ({ gridColumn: x + rim + 1, gridRow: y + rim + 1 });
-  const hasButtons = onSeat !== undefined || open;
   return (
-    <figure
-      className="plan"
-      {...(hasButtons ? { 'aria-label': label } : { role: 'img', 'aria-label': label })}
-    >
+    <figure className="plan" aria-label={label}>
       <div className={`plan-room plan-front-${view.front}`}>
         <div className="plan-seats" style={style}>
           {open &&

@@ -174,7 +174,7 @@ export const room = {
   childBack: 'came back',
   childMoved: 'sits elsewhere …',
   childWhere: ({ child }: { child: string }) => `Where does ${child} sit now?`,
-  childAway: ({ child, reason }: { child: string; reason: string }) => `${child}, ${reason}`,
+  childAway: ({ child, reason }: { child: string; reason: string }) => `${child} (${reason})`,
   endTitle: 'End the session now?',
   endText: ({ n }: { n: number }, f: F) =>
     n === 0

@@ -163,8 +163,8 @@ test('a child leaves, comes back, and sits elsewhere', async () => {
   };
   await choose('Otter-03', 'left the room');
   act(() => live.show({ away: new Map([['c3', 'left the room']]) }));
-  screen.getByText('Away: Otter-03, left the room');
-  await choose('Otter-03, left the room', 'came back');
+  screen.getByText('Away: Otter-03 (left the room)');
+  await choose('Otter-03 (left the room)', 'came back');
   await choose('Otter-01', 'sits elsewhere …');
   await user.click(
     within(screen.getByRole('dialog')).getAllByRole('button', { name: /free/i })[0] as Element,
