@@ -3,8 +3,10 @@ import type { Id } from '../kernel/ids.ts';
 import type { Result } from '../kernel/result.ts';
 import type { PageMs } from '../kernel/units.ts';
 import type { SessionHeader } from '../model/session.ts';
+import { planOf } from './grid.ts';
 import type { RecorderPorts, Stop } from './ports.ts';
 import type { RoomSnapshot } from './roomSnapshot.ts';
+import { RunningSession } from './runningSession.ts';
 
 /**
  * A session while it is recorded. It lives outside React and survives a broken screen. Times of touches are the
@@ -61,10 +63,15 @@ export interface LiveOptions {
   readonly elsewhere?: boolean;
 }
 
+/** Makes a session of its frozen header, ready to begin. Throws for a listed schedule, which no screen offers. */
 export function createLiveSession(
-  _header: SessionHeader,
-  _ports: RecorderPorts,
-  _options: LiveOptions,
+  header: SessionHeader,
+  ports: RecorderPorts,
+  options: LiveOptions,
 ): LiveSession {
-  throw new Error('not written yet');
+  const plan = planOf(header);
+  if (plan === null || header.schedule.kind !== 'laid') {
+    throw new Error('A schedule from a table cannot be recorded.');
+  }
+  return new RunningSession(header, header.schedule.protocol, plan, ports, options);
 }

@@ -26,7 +26,8 @@ export interface UpcomingLook {
   readonly round: number | null;
   readonly child: Id | null;
   readonly seat: Id | null;
-  readonly cueAt: SessionMs;
+  /** null until its part has begun. */
+  readonly cueAt: SessionMs | null;
   /** Why the child is away at present, or null. */
   readonly away: AwayReason | null;
 }

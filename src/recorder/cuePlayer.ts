@@ -1,0 +1,82 @@
+import { sessionMs } from '../kernel/units.ts';
+import type { SessionClock } from './clock.ts';
+import { type CuePattern, countInTick, cuePattern, withLeadIn } from './cuePatterns.ts';
+import { dueIn, type GridCue } from './grid.ts';
+import type { AudioPort, Stop } from './ports.ts';
+import { countInMs } from './standing.ts';
+
+/** Cues lie this far ahead on the audio clock: a page that is hidden or busy for a minute bends none of them. */
+export const aheadMs = 90_000;
+
+/** A sound cannot be laid closer to the audio clock's present than this (seconds). */
+const tooClose = 0.004;
+
+/** One sound on the session's clock. */
+export interface LaidSound {
+  readonly at: number;
+  readonly pattern: CuePattern;
+}
+
+/** The sounds of a session in order: every cue, and three ticks before each part that has begun. */
+export function soundsOf(
+  cues: readonly GridCue[],
+  origins: readonly (number | null)[],
+  leadIn: boolean,
+): LaidSound[] {
+  const dressed = (pattern: CuePattern): CuePattern => (leadIn ? withLeadIn(pattern) : pattern);
+  const ticks = origins.flatMap((origin) =>
+    origin === null
+      ? []
+      : [3, 2, 1].map((n) => ({ at: origin - (n * countInMs) / 3, pattern: dressed(countInTick) })),
+  );
+  const sounds = cues.map(({ at, cue }) => ({ at, pattern: dressed(cuePattern(cue)) }));
+  return [...sounds, ...ticks].sort((a, b) => a.at - b.at);
+}
+
+/** Lays sounds well ahead on the audio clock, and takes them back when silence is asked for. */
+export class CuePlayer {
+  private laid: { readonly at: number; readonly stop: Stop }[] = [];
+  private until = Number.NEGATIVE_INFINITY;
+  private generation = -1;
+
+  constructor(
+    private readonly audio: AudioPort,
+    private readonly clock: SessionClock,
+  ) {}
+
+  /**
+   * Lays what is due from session time `now` until `aheadMs` later and does not lie there yet.
+   * @param sounds in order
+   */
+  layAhead(sounds: readonly LaidSound[], now: number): void {
+    const present = this.audio.now();
+    if (present === null || !this.clock.hasAudio) return;
+    if (this.generation !== this.audio.generation()) this.takeBack();
+    this.generation = this.audio.generation();
+    // A sound is given up once it has been over for longer than anybody asks for it.
+    this.laid = this.laid.filter((sound) => sound.at > now - aheadMs);
+    const from = Math.max(this.until, now - 1);
+    for (const sound of dueIn(sounds, from, now + aheadMs)) {
+      const at = this.clock.audioAt(sessionMs(sound.at));
+      // Too late for its moment: it is not played at all, since a late cue bends the grid.
+      if (at === null || at < present + tooClose) continue;
+      this.laid.push({ at: sound.at, stop: this.audio.lay(sound.pattern, at) });
+    }
+    this.until = Math.max(this.until, now + aheadMs);
+  }
+
+  /** Takes back all that lies ahead, and what sounds at this moment. */
+  takeBack(): void {
+    for (const sound of this.laid) sound.stop();
+    this.laid = [];
+    this.until = Number.NEGATIVE_INFINITY;
+  }
+
+  /** True when a sound lay at this session time and the audio clock has run past it. */
+  heard(at: number): boolean {
+    if (!this.laid.some((sound) => sound.at === at)) return false;
+    const present = this.audio.now();
+    const planned = this.clock.audioAt(sessionMs(at));
+    return present !== null && planned !== null && present >= planned;
+  }
+}

@@ -1,0 +1,132 @@
+import type { EntryBody } from '../journal/entry.ts';
+import type { JournalState } from '../journal/state.ts';
+import type { PageMs } from '../kernel/units.ts';
+import type { Method } from '../model/protocol.ts';
+import { isEcho, type TouchDown } from './doubleTouch.ts';
+import type { Felt, Refusal, RoomSnapshot } from './roomSnapshot.ts';
+import { intervalBefore, type TimedInterval, whoseTouch } from './whoseTouch.ts';
+
+/** "Child before" waits this long for its touch, then forgets it. */
+export const armedForMs = 5000;
+
+/** What a touch says of an interval. */
+export type TouchWord =
+  | { readonly kind: 'code'; readonly code: string | null }
+  | { readonly kind: 'count'; readonly on: number; readonly present: number }
+  | { readonly kind: 'cannot see' };
+
+export interface TouchAt {
+  readonly page: PageMs;
+  /** The same moment in session time. */
+  readonly at: number;
+}
+
+/** Decides what a touch means; the journal entry that it makes, or null when it makes none. */
+export class TouchDesk {
+  private last: TouchDown | null = null;
+  private armed: { interval: number; until: number } | null = null;
+  felt: Felt | null = null;
+  refusal: RoomSnapshot['refusal'] = null;
+
+  constructor(
+    private readonly graceMs: number,
+    private readonly method: Method,
+  ) {}
+
+  /** The interval that "child before" waits to mark. */
+  armedBefore(now: number): number | null {
+    return this.armed !== null && now <= this.armed.until ? this.armed.interval : null;
+  }
+
+  arm(timed: readonly TimedInterval[], now: number): void {
+    if (this.armedBefore(now) !== null) {
+      this.armed = null;
+      return;
+    }
+    const interval = intervalBefore(timed, now);
+    if (interval === null) this.refuse('nothing before');
+    else this.armed = { interval, until: now + armedForMs };
+  }
+
+  /** After an undo the same code may be touched again at once. */
+  forget(): void {
+    this.last = null;
+  }
+
+  refuse(why: Refusal): null {
+    this.refusal = { count: (this.refusal?.count ?? 0) + 1, why };
+    return null;
+  }
+
+  take(
+    word: TouchWord,
+    touch: TouchAt,
+    state: JournalState,
+    timed: readonly TimedInterval[],
+  ): Extract<EntryBody, { kind: 'marked' | 'missing' }> | null {
+    const down: TouchDown = { at: touch.page, target: targetOf(word) };
+    if (isEcho(this.last, down)) return this.refuse('double touch');
+    const answer = whoseTouch({
+      intervals: timed,
+      at: touch.at,
+      graceMs: this.graceMs,
+      isEmpty: (number) => (state.sayings.get(number) ?? []).length === 0,
+      isBarred: (number) => isBarred(state, timed, number),
+      before: this.armedBefore(touch.at),
+    });
+    if (!answer.taken) return this.refuse(answer.why);
+    this.last = down;
+    this.armed = null;
+    const { interval, late, before } = answer;
+    this.felt = {
+      count: (this.felt?.count ?? 0) + 1,
+      interval,
+      code: word.kind === 'code' ? word.code : null,
+      outOfView: word.kind === 'cannot see',
+      late,
+      before,
+    };
+    if (this.saysSoAlready(state, interval, word)) return null;
+    const how = { ...(late ? { late } : {}), ...(before ? { before } : {}) };
+    if (word.kind === 'cannot see') return { kind: 'missing', interval, reason: 'out of view', ...how };
+    if (word.kind === 'code') return { kind: 'marked', interval, code: word.code, ...how };
+    const counts = { on: word.on, present: word.present };
+    return { kind: 'marked', interval, code: null, counts, ...how };
+  }
+
+  /** The same word once more changes nothing, so it makes no entry; it is felt all the same. */
+  private saysSoAlready(state: JournalState, interval: number, word: TouchWord): boolean {
+    const sayings = state.sayings.get(interval) ?? [];
+    const last = sayings.at(-1);
+    if (last === undefined || last.kind === 'amended') return false;
+    if (word.kind === 'cannot see') return last.kind === 'missing' && last.reason === 'out of view';
+    if (word.kind === 'count')
+      return (
+        last.kind === 'marked' && last.counts?.on === word.on && last.counts.present === word.present
+      );
+    if (this.method === 'momentary' || word.code === null)
+      return last.kind === 'marked' && last.counts === undefined && last.code === word.code;
+    // Several codes latch: the code stands when it was said since the interval was last wiped.
+    const wiped = sayings.findLastIndex((saying) => saying.kind !== 'marked' || saying.code === null);
+    return sayings.slice(wiped + 1).some((saying) => saying.kind === 'marked' && saying.code === word.code);
+  }
+}
+
+function targetOf(word: TouchWord): string {
+  if (word.kind === 'code') return `code ${word.code ?? ''}`;
+  return word.kind;
+}
+
+/** No mark for an interval whose cue fell into an interruption, or would have come after its part was closed. */
+function isBarred(state: JournalState, timed: readonly TimedInterval[], number: number): boolean {
+  const cueAt = timed.find((interval) => interval.number === number)?.cueAt ?? Number.NaN;
+  const part = state.planned[number - 1]?.part ?? 0;
+  const closed = state.closed[part] ?? null;
+  if (closed !== null && cueAt >= closed) return true;
+  return state.covers.some(
+    (cover) =>
+      (cover.reason === 'class interrupted' || cover.reason === 'paused') &&
+      cover.from <= cueAt &&
+      (cover.to === null || cueAt < cover.to),
+  );
+}
