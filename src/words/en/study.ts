@@ -1,15 +1,16 @@
-import type { Format } from '../format.ts';
-
-type F = Format;
+import { classWords } from './study/classWords.ts';
+import { glanceWords } from './study/glanceWords.ts';
+import { observerWords } from './study/observerWords.ts';
+import { protocolWords } from './study/protocolWords.ts';
+import { seatWords } from './study/seatWords.ts';
+import { settingsWords } from './study/settingsWords.ts';
 
 /** The study: classes, children, seats, protocols, observers, settings. */
 export const study = {
-  // the plan of seats
-  planYou: 'you',
-  seatOf: ({ name, row, column }: { name: string; row: number; column: number }, f: F) =>
-    `${name}, row ${f.whole(row)}, place ${f.whole(column)}`,
-  seatFree: ({ row, column }: { row: number; column: number }, f: F) =>
-    `Free seat, row ${f.whole(row)}, place ${f.whole(column)}`,
-  seatPlace: ({ row, column }: { row: number; column: number }, f: F) =>
-    `Put a seat in row ${f.whole(row)}, place ${f.whole(column)}`,
+  ...glanceWords,
+  ...classWords,
+  ...seatWords,
+  ...protocolWords,
+  ...observerWords,
+  ...settingsWords,
 } as const;

@@ -1,0 +1,96 @@
+import type { Format } from '../../format.ts';
+
+type F = Format;
+
+/** A class, its children and the draw. */
+export const classWords = {
+  newClassTitle: 'Which class?',
+  newClassNote:
+    'A name of your own, such as Class Otter, keeps the school’s name of the class off the tablet.',
+  className: 'Name of the class',
+  classCondition: 'Condition',
+  noCondition: 'none',
+  addThisClass: 'Add this class',
+
+  classTitle: (
+    { name, children, chosen }: { name: string; children: number; chosen: number | null },
+    f: F,
+  ) =>
+    children === 0
+      ? `${name} has no children yet.`
+      : `${name}: ${f.whole(children)} ${f.plural(children, { one: 'child', other: 'children' })}, ${chosen === null ? 'none drawn yet' : `${f.whole(chosen)} drawn`}.`,
+  children: 'Children',
+  noChildren: 'Write down those with consent.',
+  consentFirst:
+    'Consent and assent come first. A child without consent is not written down, and pseudonyms stand for names.',
+  change: 'Change',
+  changeOf: ({ name }: { name: string }) => `Change ${name}`,
+  withdraw: 'Withdraw',
+  withdrawOf: ({ name }: { name: string }) => `Withdraw ${name}`,
+  withdrawn: ({ name }: { name: string }) => `${name} is withdrawn: no longer drawn, seated or watched.`,
+  withdrawnSign: 'withdrawn',
+  pseudonym: 'Pseudonym',
+  pseudonymHint: 'Never a name.',
+  /** One of these stands in pseudonyms where the class’s own name would tell too much. */
+  animals: 'Otter, Heron, Badger, Wren, Hare, Finch, Newt, Vole',
+  stratum: 'Stratum',
+  stratumHint: 'May stay empty. Children are drawn in proportion from each stratum.',
+  howToAdd: 'How to add children',
+  oneByOne: 'One at a time',
+  numbered: 'Numbered',
+  fromList: 'From a list',
+  fromFile: 'From a file',
+  consent: 'Consent and assent are given for every child that I write down here.',
+  consentFromList: 'Consent and assent are given for every line that does not say otherwise.',
+  addChild: 'Write this child down',
+  howMany: 'How many children?',
+  addNumbered: ({ first, last }: { first: string; last: string }) => `Write down ${first} to ${last}`,
+  addNumberedOne: ({ first }: { first: string }) => `Write down ${first}`,
+  list: 'Lines',
+  listHint: 'One pseudonym a line, or with commas: child, consent, stratum, seat.',
+  takeList: 'Take over the lines',
+  fileHint:
+    'A CSV file with the columns child, consent, stratum and seat. Lines without consent are left out: nothing of them is kept.',
+  takeFile: 'Choose the class list',
+  added: ({ name }: { name: string }) => `${name} is written down.`,
+  listDone: ({ added, changed, left }: { added: number; changed: number; left: number }, f: F) =>
+    [
+      `${f.whole(added)} ${f.plural(added, { one: 'child', other: 'children' })} written down${changed === 0 ? '' : `, ${f.whole(changed)} changed`}.`,
+      left === 0
+        ? 'No line was left out.'
+        : `${f.whole(left)} ${f.plural(left, { one: 'line was', other: 'lines were' })} left out, without consent; nothing of ${f.plural(left, { one: 'it', other: 'them' })} is kept.`,
+    ].join(' '),
+  aClass: 'The class',
+  removeClass: 'Take this class off the list',
+  classRemoved: ({ name }: { name: string }) => `${name} is off the list. Its recorded sessions stay.`,
+  seats: 'Seats',
+  seatsNone: 'No seating plan yet. With one you find the next child at a glance.',
+  seatsSome: ({ seated, children }: { seated: number; children: number }, f: F) =>
+    `${f.whole(seated)} of ${f.whole(children)} children have a seat.`,
+  seatsOpen: 'Open the seating plan',
+  planPicture: ({ klass }: { klass: string }) => `Seating plan of ${klass}, as you see it`,
+
+  draw: 'Children to watch',
+  drawWhy: 'Chance chooses, not you: stratum by stratum among all children of the class.',
+  drawProtocol: 'For which protocol?',
+  drawProtocolHint: ({ children, reserves }: { children: number; reserves: number }, f: F) =>
+    `${f.whole(children)} to watch, ${f.whole(reserves)} in reserve`,
+  seed: 'Seed',
+  seedHint: 'May stay empty. The same seed and the same children give the same draw.',
+  seedLast: ({ seed }: { seed: string }) => `The draw that you took back had the seed ${seed}.`,
+  drawNow: ({ children, reserves }: { children: number; reserves: number }, f: F) =>
+    reserves === 0
+      ? `Draw ${f.whole(children)} at random`
+      : `Draw ${f.whole(children)} and ${f.whole(reserves)} in reserve`,
+  drawFew: ({ children, wanted }: { children: number; wanted: number }, f: F) =>
+    `The class has ${f.whole(children)} of the ${f.whole(wanted)} children that the protocol asks for: all are taken.`,
+  drawnInOrder: 'Watched, in drawn order',
+  reservesInOrder: 'In reserve: the first one here steps in',
+  noReserves: 'Nobody is in reserve.',
+  drawKept: ({ seed, from }: { seed: string; from: number }, f: F) =>
+    `Seed ${seed}, drawn from ${f.whole(from)} ${f.plural(from, { one: 'child', other: 'children' })}.`,
+  drawLate: ({ n }: { n: number }, f: F) =>
+    `${f.whole(n)} ${f.plural(n, { one: 'child came', other: 'children came' })} after the draw and had no chance in it.`,
+  drawBack: 'Take the draw back',
+  drawStands: 'A draw can be taken back until a session has used it. From then on it is part of the record.',
+} as const;
