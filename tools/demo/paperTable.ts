@@ -1,4 +1,3 @@
-import Papa from 'papaparse';
 import { readOut } from '../../src/journal/readOut.ts';
 import { fold } from '../../src/journal/step.ts';
 import type { StoredSession } from '../../src/journal/stored.ts';
@@ -24,5 +23,13 @@ export function paperTable({ header, journal }: StoredSession): string {
     interval_s: protocol.intervalMs / 1000,
     lesson_part: line.lessonPart ?? '',
   }));
-  return `${Papa.unparse(rows, { newline: '\r\n' })}\r\n`;
+  const [first] = rows;
+  if (first === undefined) return '';
+  const lines = [Object.keys(first), ...rows.map((row) => Object.values(row))];
+  return lines.map((cells) => `${cells.map((cell) => quoted(String(cell ?? ''))).join(',')}\r\n`).join('');
+}
+
+/** A cell of a table as RFC 4180 writes it. */
+function quoted(text: string): string {
+  return /[",\r\n]/.test(text) ? `"${text.replaceAll('"', '""')}"` : text;
 }
