@@ -1,144 +1,133 @@
 import { ok, problem, type Result } from '../kernel/result.ts';
-import { audioSeconds, pageMs } from '../kernel/units.ts';
-import type { CueSettings } from '../model/protocol.ts';
-import type { AudioEvent, AudioFacts, AudioPort, AudioState, ClockSample } from '../recorder/ports.ts';
-import { layTones } from './layTones.ts';
-import { onOutputChange, tellsOutputChanges } from './outputChanges.ts';
+import { audioSeconds } from '../kernel/units.ts';
+import type { AudioEvent, AudioFacts, AudioPort, AudioState } from '../recorder/ports.ts';
+import { layPattern } from './layPattern.ts';
+import { type Mixer, mixer } from './mixer.ts';
+import { tellsOutputChanges, watchOutputs } from './outputChanges.ts';
+import { latencyOf, readAudioClock } from './readAudioClock.ts';
 
-/** How often the watchdog looks whether the context's time still moves. */
-const watchEvery = 500;
-/** So long a context may stand still before a new one takes its place. */
-const patience = 3000;
-/** A context that has not moved after so long is locked. */
-const unlockPatience = 1500;
+/** How long unlocking may take, and how often the context's time is looked at meanwhile (ms). */
+const unlockWithin = 2500;
+const lookEvery = 25;
 
-interface Line {
+/** The watchdog looks this often (ms); a clock that stood still for two looks is stuck. */
+const watchEvery = 700;
+
+/** iOS keeps web sound apart from the silent switch only when the page says that it plays. */
+interface WithAudioSession {
+  audioSession?: { type: string };
+}
+
+interface Running {
   readonly context: AudioContext;
-  readonly volume: GainNode;
-  readonly panner: StereoPannerNode;
+  readonly mixer: Mixer;
 }
 
 /**
- * The tablet's sound. Contexts lie: one may say "running" while its time stands still (after a call, a lock screen),
- * or sit in states of its own (`interrupted`); so only moving time counts as running, a watchdog looks at it, and a
- * context that does not come back is replaced by a new one.
+ * Web Audio as a port. Every state that is not `running` is treated alike (suspended, closed, the `interrupted` of
+ * iOS), and "running" is believed only while the context's time moves. Each touch anywhere brings a stopped sound back;
+ * what does not come back is made anew.
  */
 export function audio(): AudioPort {
   const listeners = new Set<(event: AudioEvent) => void>();
-  let line: Line | null = null;
+  let running: Running | null = null;
   let generation = 0;
-  let settings: Pick<CueSettings, 'channel' | 'volume'> = { channel: 'both', volume: 0.4 };
-  let state: AudioState = 'silent';
-  let lastTime = -1;
-  let movedAt = 0;
-  let watching: ReturnType<typeof setInterval> | null = null;
-  let stopOutputs: (() => void) | null = null;
+  let stuck = false;
+  let told: AudioState = 'silent';
+  let settings: { channel: 'both' | 'left' | 'right'; volume: number } = { channel: 'both', volume: 0.4 };
+  let stops: (() => void)[] = [];
 
   const tell = (event: AudioEvent): void => {
     for (const listener of listeners) listener(event);
   };
-  const become = (next: AudioState): void => {
-    if (next === state) return;
-    state = next;
-    tell({ kind: 'state', state });
+  const state = (): AudioState => (running?.context.state === 'running' && !stuck ? 'running' : 'silent');
+  const tellState = (): void => {
+    if (state() === told) return;
+    told = state();
+    tell({ kind: 'state', state: told });
   };
-  const settle = (): void => {
-    if (line === null) return;
-    line.volume.gain.value = settings.volume;
-    line.panner.pan.value = { left: -1, both: 0, right: 1 }[settings.channel];
-  };
-  const open = (): Line => {
-    // iPads mute web audio with the silent switch unless the page says that it plays.
-    const session = (navigator as { audioSession?: { type: string } }).audioSession;
+
+  const make = (): Running => {
+    if (running !== null) void running.context.close().catch(() => undefined);
+    const session = (navigator as WithAudioSession).audioSession;
     if (session !== undefined) session.type = 'playback';
     const context = new AudioContext({ latencyHint: 'interactive' });
-    const volume = new GainNode(context);
-    const panner = new StereoPannerNode(context);
-    volume.connect(panner).connect(context.destination);
-    context.addEventListener('statechange', look);
-    line = { context, volume, panner };
     generation += 1;
-    lastTime = -1;
-    movedAt = performance.now();
-    settle();
-    return line;
+    stuck = false;
+    context.addEventListener('statechange', tellState);
+    const made = { context, mixer: mixer(context) };
+    made.mixer.settle(settings);
+    running = made;
+    return made;
   };
-  function look(): void {
-    if (line === null) return;
-    const { context } = line;
-    const time = context.currentTime;
-    const now = performance.now();
-    const moved = time > lastTime;
-    if (moved) {
-      lastTime = time;
-      movedAt = now;
-    }
-    if (context.state === 'running' && now - movedAt < 2 * watchEvery) {
-      if (moved && time > 0) become('running');
-      return;
-    }
-    become('silent');
-    if (document.visibilityState === 'hidden') return;
-    if (now - movedAt > patience) {
-      void context.close().catch(() => {});
-      open();
-    }
-    void line.context.resume().catch(() => {});
-  }
+
+  /** Any touch may bring the sound back, for as long as the session lasts. */
+  const revive = (): void => {
+    if (running === null || state() === 'running') return;
+    const { context } = stuck || running.context.state === 'closed' ? make() : running;
+    void context.resume().then(tellState, () => undefined);
+  };
+
   const watch = (): void => {
-    watching ??= setInterval(look, watchEvery);
-    stopOutputs ??= onOutputChange((change) => tell({ kind: 'output', ...change }));
+    let last = { generation, time: -1, still: 0 };
+    const stop = setInterval(() => {
+      if (running === null || running.context.state !== 'running') return tellState();
+      const time = running.context.currentTime;
+      const still = generation === last.generation && time === last.time ? last.still + 1 : 0;
+      last = { generation, time, still };
+      stuck = still >= 2;
+      // It reads "running" and stands: only a new context helps, at once where the browser lets it, else at a touch.
+      if (still === 3) revive();
+      tellState();
+    }, watchEvery);
+    stops.push(() => clearInterval(stop));
+    for (const event of ['pointerdown', 'keydown'] as const) {
+      window.addEventListener(event, revive, { capture: true });
+      stops.push(() => window.removeEventListener(event, revive, { capture: true }));
+    }
+    stops.push(watchOutputs((change) => tell({ kind: 'output', change, output: null })));
   };
-  const moves = (context: AudioContext): Promise<boolean> =>
-    new Promise((resolve) => {
-      const begun = performance.now();
-      const from = context.currentTime;
-      const ask = (): void => {
-        if (context.currentTime > from) resolve(true);
-        else if (performance.now() - begun > unlockPatience) resolve(false);
-        else setTimeout(ask, 20);
-      };
-      ask();
-    });
+
   const facts = (): AudioFacts | null => {
-    if (line === null) return null;
-    const { baseLatency, outputLatency, sampleRate } = line.context;
-    const latency = (baseLatency ?? Number.NaN) + (outputLatency ?? 0);
-    return { sampleRate, latencyMs: Number.isNaN(latency) ? null : Math.round(latency * 1000), output: null };
+    if (running === null) return null;
+    const latency = latencyOf(running.context);
+    return {
+      sampleRate: running.context.sampleRate,
+      latencyMs: latency > 0 ? Math.round(latency * 1000) : null,
+      output: null,
+    };
   };
 
   return {
     unlock: async (): Promise<Result<AudioFacts>> => {
       try {
-        const { context } = line ?? open();
-        // Not awaited: on some systems it settles only much later, or never.
-        void context.resume().catch(() => {});
-        if (!(await moves(context))) return problem('audio.locked');
-      } catch {
-        return problem('audio.missing');
+        const { context } = running !== null && running.context.state !== 'closed' ? running : make();
+        if (stops.length === 0) watch();
+        const from = context.currentTime;
+        // Not awaited: it may stay pending, or resolve while time stands at 0.
+        void context.resume().catch(() => undefined);
+        const moved = await timeMoves(context, from);
+        tellState();
+        const found = facts();
+        return moved && found !== null ? ok(found) : problem('recorder.noSound');
+      } catch (error) {
+        return problem('recorder.noSound', { why: error instanceof Error ? error.message : String(error) });
       }
-      watch();
-      look();
-      return ok(facts() ?? { sampleRate: 0, latencyMs: null, output: null });
     },
-    state: () => state,
-    now: () => (line === null || state === 'silent' ? null : audioSeconds(line.context.currentTime)),
-    sample: (): ClockSample | null => {
-      if (line === null || state === 'silent') return null;
-      const { contextTime, performanceTime } = line.context.getOutputTimestamp();
-      if (contextTime && performanceTime)
-        return { audio: audioSeconds(contextTime), page: pageMs(performanceTime) };
-      return { audio: audioSeconds(line.context.currentTime), page: pageMs(performance.now()) };
-    },
+    state,
+    now: () => (state() === 'running' && running !== null ? audioSeconds(running.context.currentTime) : null),
+    sample: () => (state() === 'running' && running !== null ? readAudioClock(running.context) : null),
     generation: () => generation,
-    settle: (wanted) => {
-      settings = wanted;
-      settle();
+    settle: ({ channel, volume }) => {
+      settings = { channel, volume };
+      running?.mixer.settle(settings);
     },
-    lay: (pattern, at) => (line === null ? () => {} : layTones(line.context, line.volume, pattern, at)),
+    lay: (pattern, at) =>
+      running === null ? () => undefined : layPattern(running.context, running.mixer.input, pattern, at),
     play: (pattern) => {
-      if (line !== null && state === 'running')
-        layTones(line.context, line.volume, pattern, line.context.currentTime + 0.005);
+      if (running === null || state() !== 'running') return;
+      const soon = audioSeconds(running.context.currentTime + 0.01);
+      layPattern(running.context, running.mixer.input, pattern, soon);
     },
     facts,
     tellsOutputChanges: tellsOutputChanges(),
@@ -147,13 +136,24 @@ export function audio(): AudioPort {
       return () => listeners.delete(listener);
     },
     close: () => {
-      if (watching !== null) clearInterval(watching);
-      stopOutputs?.();
-      watching = null;
-      stopOutputs = null;
-      void line?.context.close().catch(() => {});
-      line = null;
-      become('silent');
+      for (const stop of stops) stop();
+      stops = [];
+      const last = running;
+      running = null;
+      told = 'silent';
+      void last?.context.close().catch(() => undefined);
     },
   };
+}
+
+function timeMoves(context: AudioContext, from: number): Promise<boolean> {
+  return new Promise((resolve) => {
+    const begun = performance.now();
+    const look = (): void => {
+      if (context.currentTime > from) resolve(true);
+      else if (performance.now() - begun > unlockWithin) resolve(false);
+      else setTimeout(look, lookEvery);
+    };
+    look();
+  });
 }

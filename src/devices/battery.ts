@@ -1,15 +1,14 @@
 import type { BatteryPort } from '../recorder/ports.ts';
 
-interface BatteryNavigator {
+interface WithBattery {
   getBattery?(): Promise<{ readonly level: number; readonly charging: boolean }>;
 }
 
-/** The battery where the browser tells of it. */
 export const battery: BatteryPort = {
   read: async () => {
     try {
-      const manager = await (navigator as BatteryNavigator).getBattery?.();
-      return manager === undefined ? null : { level: manager.level, charging: manager.charging };
+      const found = await (navigator as WithBattery).getBattery?.();
+      return found === undefined ? null : { level: found.level, charging: found.charging };
     } catch {
       return null;
     }

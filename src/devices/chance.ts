@@ -1,7 +1,7 @@
 import type { Random } from '../kernel/random.ts';
 
-/** Numbers in [0, 1) from the browser's cryptographic source: for identifiers and for seeds. */
+/** Cryptographically strong chance: for ids and seeds that nobody may guess or meet again. */
 export const chance: Random = () => {
-  const [word = 0] = crypto.getRandomValues(new Uint32Array(1));
-  return word / 4294967296;
+  const [high = 0, low = 0] = crypto.getRandomValues(new Uint32Array(2));
+  return ((high >>> 5) * 0x4000000 + (low >>> 6)) / 2 ** 53;
 };

@@ -1,41 +1,37 @@
-interface OutputChange {
-  readonly change: 'gone' | 'new';
-  readonly output: string | null;
-}
+import type { Stop } from '../recorder/ports.ts';
 
-/** iPads call themselves Macs; they never tell when an earpiece is pulled out. */
-const isApplePad = (): boolean =>
-  /iPad|iPhone/.test(navigator.userAgent) || (/Mac/.test(navigator.platform) && navigator.maxTouchPoints > 1);
-
-/** True where the browser tells when an audio output comes or goes. */
+/**
+ * True where the browser tells when an earpiece is pulled out. Tablets say nothing of the kind: a browser that lets a
+ * page choose its output (desktop Chromium) also tells when one goes.
+ */
 export function tellsOutputChanges(): boolean {
-  return navigator.mediaDevices !== undefined && 'ondevicechange' in navigator.mediaDevices && !isApplePad();
+  return (
+    typeof navigator !== 'undefined' &&
+    navigator.mediaDevices !== undefined &&
+    'ondevicechange' in navigator.mediaDevices &&
+    typeof AudioContext !== 'undefined' &&
+    'setSinkId' in AudioContext.prototype
+  );
 }
 
 /**
- * Tells when an audio output comes or goes. Without a permission browsers hide names and even the number of outputs:
- * a change that cannot be told apart counts as "gone", since a prompt out loud in a lesson is worse than a silent one.
+ * Calls back when an output comes or goes. Without permission for the microphone browsers list no more than one output
+ * and no names; a change of which nobody can say what it was counts as "gone", since silence is the safe side.
  */
-export function onOutputChange(listener: (change: OutputChange) => void): () => void {
-  if (!tellsOutputChanges()) return () => {};
-  const outputs = async (): Promise<MediaDeviceInfo[]> => {
-    try {
-      return (await navigator.mediaDevices.enumerateDevices()).filter(
-        (device) => device.kind === 'audiooutput',
-      );
-    } catch {
-      return [];
-    }
+export function watchOutputs(tell: (change: 'gone' | 'new') => void): Stop {
+  if (!tellsOutputChanges()) return () => undefined;
+  const devices = navigator.mediaDevices;
+  const count = async (): Promise<number> => {
+    const list = await devices.enumerateDevices().catch(() => []);
+    return list.filter((device) => device.kind === 'audiooutput').length;
   };
-  let known = outputs();
-  const changed = async (): Promise<void> => {
-    const before = await known;
-    known = outputs();
-    const after = await known;
-    const output = after.find((device) => device.label !== '')?.label ?? null;
-    listener({ change: after.length > before.length ? 'new' : 'gone', output });
+  let before = count();
+  const changed = (): void => {
+    before = Promise.all([before, count()]).then(([was, is]) => {
+      tell(is > was ? 'new' : 'gone');
+      return is;
+    });
   };
-  const listen = (): void => void changed();
-  navigator.mediaDevices.addEventListener('devicechange', listen);
-  return () => navigator.mediaDevices.removeEventListener('devicechange', listen);
+  devices.addEventListener('devicechange', changed);
+  return () => devices.removeEventListener('devicechange', changed);
 }

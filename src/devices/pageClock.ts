@@ -1,5 +1,5 @@
 import { pageMs } from '../kernel/units.ts';
 import type { PageClock } from '../recorder/ports.ts';
 
-/** The page's monotonic clock. */
+/** The clock that also stamps events. */
 export const pageClock: PageClock = { now: () => pageMs(performance.now()) };

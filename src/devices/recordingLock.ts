@@ -1,24 +1,31 @@
-import type { LockPort } from '../recorder/ports.ts';
+import type { LockPort, Stop } from '../recorder/ports.ts';
 
 const name = 'lookbell-recording';
+let mine = false;
 
-/** One tab records: the browser gives the lock back by itself when the tab dies. Without the API nothing is locked. */
+/** Where there are no locks (no HTTPS) nobody can be kept out, and recording goes on. */
 export const recordingLock: LockPort = {
-  take: () => {
-    if (!('locks' in navigator)) return Promise.resolve(() => {});
-    return new Promise((resolve, reject) => {
-      navigator.locks
+  take: () =>
+    new Promise<Stop | null>((resolve) => {
+      const locks = navigator.locks;
+      if (locks === undefined) return resolve(() => undefined);
+      locks
         .request(name, { ifAvailable: true }, (lock) => {
           if (lock === null) return resolve(null);
-          // The lock is held until this promise is settled.
-          return new Promise<void>((giveBack) => resolve(() => giveBack()));
+          mine = true;
+          // The lock is held until this promise resolves, or until the tab is gone.
+          return new Promise<void>((letGo) =>
+            resolve(() => {
+              mine = false;
+              letGo();
+            }),
+          );
         })
-        .catch(reject);
-    });
-  },
+        .catch(() => resolve(() => undefined));
+    }),
   heldElsewhere: async () => {
-    if (!('locks' in navigator)) return false;
-    const { held = [] } = await navigator.locks.query();
-    return held.some((lock) => lock.name === name);
+    if (mine) return false;
+    const { held } = (await navigator.locks?.query()) ?? {};
+    return held?.some((lock) => lock.name === name) ?? false;
   },
 };

@@ -1,30 +1,34 @@
-import type { SharePort } from '../recorder/ports.ts';
+import type { FileToHandOver, SharePort } from '../recorder/ports.ts';
 
-/**
- * The system's share sheet where it takes the very file, else a download. Installed apps on iPads have no downloads
- * folder to speak of, and some systems refuse some types: so the file itself is asked about.
- */
+/** The download is read by the browser after the click; a minute is plenty for the slowest tablet. */
+const keepLinkMs = 60_000;
+
 export const share: SharePort = {
-  handOver: async ({ name, type, bytes }) => {
+  handOver: async ({ name, type, bytes }: FileToHandOver) => {
     const file = new File([bytes], name, { type });
-    if (navigator.canShare?.({ files: [file] }) === true) {
+    // Asked with the real file: which types are taken differs from system to system.
+    if (navigator.canShare?.({ files: [file] })) {
       try {
-        await navigator.share({ files: [file] });
+        await navigator.share({ files: [file], title: name });
         return 'shared';
       } catch (error) {
-        const kind = error instanceof DOMException ? error.name : '';
-        if (kind === 'AbortError') return 'cancelled';
-        if (kind === 'NotAllowedError') return 'again';
-        // Anything else: this system cannot share it after all.
+        const why = error instanceof DOMException ? error.name : '';
+        if (why === 'AbortError') return 'cancelled';
+        if (why === 'NotAllowedError' && !navigator.userActivation?.isActive) return 'again';
       }
     }
-    const address = URL.createObjectURL(file);
-    const link = document.createElement('a');
-    link.href = address;
-    link.download = name;
-    link.click();
-    // Not at once: Safari reads the address after the click has been dealt with.
-    setTimeout(() => URL.revokeObjectURL(address), 60_000);
+    save(file);
     return 'saved';
   },
 };
+
+function save(file: File): void {
+  const link = document.createElement('a');
+  const url = URL.createObjectURL(file);
+  link.href = url;
+  link.download = file.name;
+  document.body.append(link);
+  link.click();
+  link.remove();
+  setTimeout(() => URL.revokeObjectURL(url), keepLinkMs);
+}

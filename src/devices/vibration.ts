@@ -1,7 +1,9 @@
 import type { VibrationPort } from '../recorder/ports.ts';
 
-/** Vibration where the browser has it (not on iPadOS, not in Firefox). */
+/** Safari and Firefox have none; a tablet without a motor says yes and does nothing, which nobody can know. */
+const available = typeof navigator !== 'undefined' && typeof navigator.vibrate === 'function';
+
 export const vibration: VibrationPort = {
-  available: 'vibrate' in navigator,
-  vibrate: (pattern) => 'vibrate' in navigator && navigator.vibrate([...pattern]),
+  available,
+  vibrate: (pattern) => available && navigator.vibrate([...pattern]),
 };

@@ -1,17 +1,14 @@
 import type { VisibilityPort } from '../recorder/ports.ts';
 
-/** Whether the page is seen; `pageshow` and `resume` tell of a frozen page that comes back. */
+/** `resume` comes when a frozen page is let run again; its visibility may not have changed. */
+const events = ['visibilitychange', 'resume', 'freeze'] as const;
+
 export const visibility: VisibilityPort = {
   hidden: () => document.visibilityState === 'hidden',
   subscribe: (listener) => {
-    const events: [EventTarget, string][] = [
-      [document, 'visibilitychange'],
-      [document, 'resume'],
-      [window, 'pageshow'],
-    ];
-    for (const [target, name] of events) target.addEventListener(name, listener);
+    for (const event of events) document.addEventListener(event, listener);
     return () => {
-      for (const [target, name] of events) target.removeEventListener(name, listener);
+      for (const event of events) document.removeEventListener(event, listener);
     };
   },
 };

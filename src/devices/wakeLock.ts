@@ -1,50 +1,64 @@
 import type { WakeLockPort, WakeLockState } from '../recorder/ports.ts';
 
-/**
- * Keeps the screen on. The browser drops the lock whenever the page is hidden and may refuse it (battery saving), so
- * the wish is kept apart from the lock, and the lock asked for again when the page is seen.
- */
+/** A wake lock of its own: the wish outlives the lock, which is lost at each hiding of the page. */
 export function wakeLock(): WakeLockPort {
   const listeners = new Set<() => void>();
   let wanted = false;
+  let asking = false;
   let lock: WakeLockSentinel | null = null;
   let state: WakeLockState = 'idle';
-  const become = (next: WakeLockState): void => {
-    if (next === state) return;
+
+  const say = (next: WakeLockState): void => {
+    if (state === next) return;
     state = next;
     for (const listener of listeners) listener();
   };
+
   const ask = async (): Promise<void> => {
-    if (!wanted || lock !== null || document.visibilityState !== 'visible') return;
-    if (!('wakeLock' in navigator)) return become('missing');
+    if (!wanted || lock !== null || asking) return;
+    if (!('wakeLock' in navigator)) return say('missing');
+    asking = true;
     try {
-      const held = await navigator.wakeLock.request('screen');
-      if (!wanted) return void held.release();
-      lock = held;
-      held.addEventListener('release', () => {
-        if (lock === held) lock = null;
-        if (wanted) become('refused');
-        void ask();
+      const given = await navigator.wakeLock.request('screen');
+      if (!wanted) {
+        await given.release();
+        return;
+      }
+      lock = given;
+      given.addEventListener('release', () => {
+        if (lock !== given) return;
+        lock = null;
+        if (!wanted) return;
+        say('refused');
+        // Taken away in full view (battery saver): one more try is all that a page can do.
+        if (document.visibilityState === 'visible') void ask();
       });
-      become('held');
+      say('held');
     } catch {
-      become('refused');
+      if (wanted) say('refused');
+    } finally {
+      asking = false;
     }
   };
-  const seen = (): void => void ask();
+
+  const seenAgain = (): void => {
+    if (document.visibilityState === 'visible') void ask();
+  };
+
   return {
     hold: () => {
       if (wanted) return;
       wanted = true;
-      document.addEventListener('visibilitychange', seen);
+      document.addEventListener('visibilitychange', seenAgain);
       void ask();
     },
     letGo: () => {
       wanted = false;
-      document.removeEventListener('visibilitychange', seen);
-      void lock?.release();
+      document.removeEventListener('visibilitychange', seenAgain);
+      const given = lock;
       lock = null;
-      become('idle');
+      void given?.release().catch(() => undefined);
+      say('idle');
     },
     state: () => state,
     subscribe: (listener) => {

@@ -1,9 +1,9 @@
 import { epochMs } from '../kernel/units.ts';
 import type { WallClock } from '../recorder/ports.ts';
 
-/** The tablet's wall clock and time zone. */
 export const wallClock: WallClock = {
   now: () => epochMs(Date.now()),
-  offsetMinutes: (at) => -new Date(at).getTimezoneOffset(),
+  // 0 − offset, since -0 would be written as such.
+  offsetMinutes: (at) => 0 - new Date(at).getTimezoneOffset(),
   timeZone: () => Intl.DateTimeFormat().resolvedOptions().timeZone ?? null,
 };

@@ -44,7 +44,10 @@ export class Book {
  * On the same tablet the same writer goes on, so that the order of the journal does not hang on a wall clock that may
  * have been set back meanwhile. Elsewhere a new one does, so that two tablets never claim the same entry.
  */
-function nextIdentity(before: readonly JournalEntry[], elsewhere: boolean): { writer: Id; seq: number } | null {
+function nextIdentity(
+  before: readonly JournalEntry[],
+  elsewhere: boolean,
+): { writer: Id; seq: number } | null {
   const last = inOrder(before).at(-1);
   return last === undefined || elsewhere ? null : { writer: last.writer, seq: last.seq + 1 };
 }

@@ -14,6 +14,8 @@ interface Parts {
   readonly cues: CueSettings;
   readonly book: Book;
   readonly player: CuePlayer;
+  /** Whether each tone needs something quiet before it. */
+  readonly leadIn: () => boolean;
   readonly ports: Pick<RecorderPorts, 'visibility' | 'vibration'>;
 }
 
@@ -124,6 +126,6 @@ export class CueRound {
     if (this.basis?.origins === state.origins && this.basis.closed === state.closed) return;
     this.basis = { origins: state.origins, closed: state.closed };
     this.list = gridCues(this.parts.plan, state);
-    this.sounds = soundsOf(this.list, state.origins, this.parts.cues.leadIn ?? false);
+    this.sounds = soundsOf(this.list, state.origins, this.parts.leadIn());
   }
 }

@@ -62,7 +62,10 @@ export function timedIntervals(plan: Plan, origins: JournalState['origins']): Ti
 }
 
 /** The cues of the parts that have begun, in order; a part that was closed has none from then on. */
-export function gridCues(plan: Plan, { origins, closed }: Pick<JournalState, 'origins' | 'closed'>): GridCue[] {
+export function gridCues(
+  plan: Plan,
+  { origins, closed }: Pick<JournalState, 'origins' | 'closed'>,
+): GridCue[] {
   const cues = plan.intervals.flatMap((line) => {
     const origin = origins[line.part] ?? null;
     if (origin === null) return [];

@@ -61,6 +61,8 @@ export interface LiveOptions {
   readonly resumeFrom?: readonly JournalEntry[];
   /** True when that journal comes from another tablet: a new writer then goes on with it. */
   readonly elsewhere?: boolean;
+  /** A quiet lead-in before each tone, for wireless earpieces. Default: where the output's delay says that it is one. */
+  readonly leadIn?: boolean;
 }
 
 /** Makes a session of its frozen header, ready to begin. Throws for a listed schedule, which no screen offers. */

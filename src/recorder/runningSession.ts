@@ -23,6 +23,9 @@ import { timeOf, undoable } from './undoable.ts';
 /** Time between a tap that begins a part and its first tick: enough to lay the tick on the audio clock. */
 const headStartMs = 250;
 
+/** Wired outputs take 10 to 60 ms; from here on the sound goes through the air. From memory, no source. */
+const wirelessFromMs = 100;
+
 /** The session machine: what the observer taps and what the clocks bring becomes journal entries, cues and a snapshot. */
 export class RunningSession implements LiveSession {
   private readonly book: Book;
@@ -53,7 +56,8 @@ export class RunningSession implements LiveSession {
     this.touches = new TouchDesk(protocol.graceMs, protocol.method);
     this.view = new RoomView(header, plan);
     const player = new CuePlayer(ports.audio, this.time.clock);
-    this.cues = new CueRound({ plan, cues: protocol.cues, book: this.book, player, ports });
+    const leadIn = (): boolean => options.leadIn ?? (ports.audio.facts()?.latencyMs ?? 0) >= wirelessFromMs;
+    this.cues = new CueRound({ plan, cues: protocol.cues, book: this.book, player, ports, leadIn });
     // The session may have come to its end while the tablet was dead: nothing is left to begin.
     const stand = resumption(this.book.state, before, ports.wall.now());
     if (stand !== null && this.placeAt(stand.now).phase === 'over') this.goOn();

@@ -14,7 +14,10 @@ export type Standing =
 
 /** The latest part that was opened. */
 export function latestPart(state: JournalState): number {
-  return Math.max(0, state.origins.findLastIndex((origin) => origin !== null));
+  return Math.max(
+    0,
+    state.origins.findLastIndex((origin) => origin !== null),
+  );
 }
 
 /** Where the session stands at session time `now`, from its journal alone. */

@@ -101,9 +101,7 @@ export class TouchDesk {
     if (last === undefined || last.kind === 'amended') return false;
     if (word.kind === 'cannot see') return last.kind === 'missing' && last.reason === 'out of view';
     if (word.kind === 'count')
-      return (
-        last.kind === 'marked' && last.counts?.on === word.on && last.counts.present === word.present
-      );
+      return last.kind === 'marked' && last.counts?.on === word.on && last.counts.present === word.present;
     if (this.method === 'momentary' || word.code === null)
       return last.kind === 'marked' && last.counts === undefined && last.code === word.code;
     // Several codes latch: the code stands when it was said since the interval was last wiped.

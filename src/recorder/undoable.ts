@@ -29,7 +29,8 @@ export function undoable(state: JournalState): Undoable | null {
         target: { writer: entry.writer, seq: entry.seq },
         kind: entry.kind,
         interval: 'interval' in entry ? (entry.interval ?? null) : null,
-        child: entry.kind === 'left' || entry.kind === 'returned' || entry.kind === 'moved' ? entry.child : null,
+        child:
+          entry.kind === 'left' || entry.kind === 'returned' || entry.kind === 'moved' ? entry.child : null,
         code: entry.kind === 'marked' ? entry.code : null,
       };
     }
