@@ -12,6 +12,7 @@ export const glanceWords = {
   demoText: 'An invented primary school: four classes, two observers, lessons before and after a break.',
   demoOpen: 'Open the demo study',
   demoOpening: 'Opening the demo study …',
+  firstFiles: 'Or take over a study file from another tablet',
   ownTitle: 'A study of your own',
   ownName: 'Name of the study',
   ownHint: 'For example the school and the year. Everything can be changed later.',
