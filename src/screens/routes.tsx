@@ -10,6 +10,10 @@ const Room = lazy(() => import('./room/Room.tsx').then((m) => ({ default: m.Room
 const Afterwards = lazy(() => import('./afterwards/Afterwards.tsx').then((m) => ({ default: m.Afterwards })));
 const StudyPages = lazy(() => import('./study/StudyPages.tsx').then((m) => ({ default: m.StudyPages })));
 
+function OpeningTitle() {
+  return <h1>{useWords().common.loading}</h1>;
+}
+
 function Opening() {
   return <p className="second">{useWords().common.loading}</p>;
 }
@@ -20,7 +24,13 @@ export function Routes() {
     <Switch>
       <Route path="/room/:session">
         {({ session }) => (
-          <Suspense fallback={<Opening />}>
+          <Suspense
+            fallback={
+              <main className="page">
+                <OpeningTitle />
+              </main>
+            }
+          >
             <Room session={session} />
           </Suspense>
         )}
