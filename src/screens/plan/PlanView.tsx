@@ -49,6 +49,8 @@ export function PlanView(props: Props) {
   const [across, down] = [sum(widths), sum(heights)];
   const widest = `${across * 108}px`;
   const style: CSSProperties = {
+    // Where seats are put up, every place stays wide enough for a finger; the room scrolls sideways instead.
+    ...(open ? { minWidth: `${across * 44}px` } : {}),
     aspectRatio: `${across} / ${down}`,
     gridTemplateColumns: widths.map((n) => `minmax(0, ${n}fr)`).join(' '),
     gridTemplateRows: heights.map((n) => `minmax(0, ${n}fr)`).join(' '),

@@ -1,7 +1,9 @@
+import { useEffect } from 'react';
 import type { Study } from '../../../model/study.ts';
 import { PageHead } from '../../../ui/PageHead.tsx';
 import { useServices } from '../../services.ts';
 import { useCurrentStudy } from '../../useCurrentStudy.ts';
+import { useFarewell } from '../farewell.ts';
 import { Stored } from '../Stored.tsx';
 import { ClassesSheet } from './ClassesSheet.tsx';
 import { FirstStart } from './FirstStart.tsx';
@@ -12,8 +14,16 @@ import { ObserversSheet, ProtocolsSheet } from './PeopleAndProtocols.tsx';
 export function AtAGlance() {
   const { words } = useServices();
   const study = useCurrentStudy();
+  const { notice, forget } = useFarewell();
+  // biome-ignore lint/correctness/useExhaustiveDependencies: said once, for as long as this page is open
+  useEffect(() => forget, []);
   if (study === undefined) return <p className="second">{words.common.loading}</p>;
-  return study === null ? <FirstStart /> : <Glance key={study.id} study={study} />;
+  return (
+    <div className="stack">
+      {notice}
+      {study === null ? <FirstStart /> : <Glance key={study.id} study={study} />}
+    </div>
+  );
 }
 
 function Glance({ study }: { readonly study: Study }) {

@@ -53,13 +53,21 @@ export const classWords = {
     'A CSV file with the columns child, consent, stratum and seat. Lines without consent are left out: nothing of them is kept.',
   takeFile: 'Choose the class list',
   added: ({ name }: { name: string }) => `${name} is written down.`,
-  listDone: ({ added, changed, left }: { added: number; changed: number; left: number }, f: F) =>
+  listDone: (
+    { added, changed, left, seatsOpen }: { added: number; changed: number; left: number; seatsOpen: number },
+    f: F,
+  ) =>
     [
       `${f.whole(added)} ${f.plural(added, { one: 'child', other: 'children' })} written down${changed === 0 ? '' : `, ${f.whole(changed)} changed`}.`,
       left === 0
         ? 'No line was left out.'
         : `${f.whole(left)} ${f.plural(left, { one: 'line was', other: 'lines were' })} left out, without consent; nothing of ${f.plural(left, { one: 'it', other: 'them' })} is kept.`,
-    ].join(' '),
+      seatsOpen === 0
+        ? ''
+        : `${f.whole(seatsOpen)} ${f.plural(seatsOpen, { one: 'seat is', other: 'seats are' })} open: the list’s word for it was not understood, or somebody sits there.`,
+    ]
+      .filter((sentence) => sentence !== '')
+      .join(' '),
   aClass: 'The class',
   removeClass: 'Take this class off the list',
   classRemoved: ({ name }: { name: string }) => `${name} is off the list. Its recorded sessions stay.`,

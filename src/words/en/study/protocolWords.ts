@@ -61,7 +61,7 @@ export const protocolWords = {
   codesNote:
     'Two to six codes, in the order in which they stand in the room. “Cannot see” is always there and is no code.',
   codeSetName: 'Name of the code set',
-  useStarter: ({ name }: { name: string }) => `Begin with ${name}`,
+  beginWith: ({ name }: { name: string }) => `Begin with ${name}`,
   starterUsed: ({ name }: { name: string }) => `The codes are those of ${name} now.`,
   codeLabel: ({ n }: { n: number }, f: F) => `Label of code ${f.whole(n)}`,
   codeGroup: ({ n }: { n: number }, f: F) => `Code ${f.whole(n)}`,

@@ -14,8 +14,6 @@ export const seatWords = {
 
   seatsTitle: ({ klass }: { klass: string }) => `Where does everybody sit in ${klass}?`,
   seatsNote: 'Drawn as you see the room from your chair. The thick line is the front.',
-  seatsMode: 'What to do',
-  seatsPut: 'Put children on seats',
   seatsBuild: 'Put up and take away seats',
   unseated: 'Children without a seat',
   allSeated: 'Everybody has a seat.',
