@@ -9,5 +9,6 @@ export function useStored<T>(
   dependencies: readonly unknown[],
 ): Result<T> | undefined {
   const { store } = useServices();
-  return useLiveQuery(() => query(store), [store, ...dependencies]);
+  // Dexie follows awaits only in a function that it can see to be asynchronous.
+  return useLiveQuery(async () => await query(store), [store, ...dependencies]);
 }
