@@ -4,7 +4,7 @@ import { ok, problem, type Result } from '../kernel/result.ts';
 export async function demoFiles(): Promise<Result<{ name: string; bytes: Uint8Array }[]>> {
   try {
     const index: unknown = await (await fetch('./demo-sessions/index.json')).json();
-    const names = (index as { files: string[] }).files.filter((name) => name.endsWith('.lookbell.json'));
+    const names = (index as { files: string[] }).files.filter((name) => /\.(json|csv)$/.test(name));
     const files = await Promise.all(
       names.map(async (name) => {
         const answer = await fetch(`./demo-sessions/${name}`);
