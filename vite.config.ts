@@ -18,6 +18,12 @@ export default defineConfig({
     // Nothing inlined: the content security policy knows files only.
     assetsInlineLimit: 0,
     modulePreload: { polyfill: false },
+    rolldownOptions: {
+      output: {
+        // Figures and their distribution functions stay out of what the recording screen has to load.
+        codeSplitting: { groups: [{ name: 'figures', test: /[\\/](src[\\/]stats|@stdlib)[\\/]/ }] },
+      },
+    },
   },
   worker: { format: 'es' },
   plugins: [

@@ -6,22 +6,26 @@ import { type Services, ServicesContext } from '../screens/services.ts';
 import { useSettings } from '../screens/useCurrentStudy.ts';
 import type { Settings } from '../tasks/ports.ts';
 import { ErrorBoundary } from './ErrorBoundary.tsx';
+import { StoreNoticeLine } from './StoreNoticeLine.tsx';
+import type { StoreNotices } from './storeNotices.ts';
 import { UpdateNotice } from './UpdateNotice.tsx';
 import type { Updates } from './updates.ts';
 
 interface Props {
   readonly services: Services;
   readonly updates: Updates;
+  readonly notices: StoreNotices;
   readonly onTheme: (theme: Settings['theme']) => void;
 }
 
 /** The whole program: what screens are given, which address shows what, and what happens when one breaks. */
-export function App({ services, updates, onTheme }: Props) {
+export function App({ services, updates, notices, onTheme }: Props) {
   return (
     <ServicesContext value={services}>
       <Router hook={useHashLocation}>
         <Theme onTheme={onTheme} />
         <UpdateNotice updates={updates} />
+        <StoreNoticeLine notices={notices} />
         <ErrorBoundary words={services.words}>
           <Routes />
         </ErrorBoundary>

@@ -8,6 +8,7 @@ import { vibration } from '../devices/vibration.ts';
 import { visibility } from '../devices/visibility.ts';
 import { wakeLock } from '../devices/wakeLock.ts';
 import { wallClock } from '../devices/wallClock.ts';
+import type { Problem } from '../kernel/result.ts';
 import type { Services } from '../screens/services.ts';
 import { openStore } from '../storage/index.ts';
 import { ensureInstallation } from '../tasks/index.ts';
@@ -20,6 +21,7 @@ import { App } from './App.tsx';
 import { demoFiles } from './demoFiles.ts';
 import { device } from './device.ts';
 import { recorderDesk } from './recorderDesk.ts';
+import { storeNotices } from './storeNotices.ts';
 import { applyTheme } from './theme.ts';
 import { watchForUpdates } from './updates.ts';
 import { useStored } from './useStored.ts';
@@ -31,15 +33,15 @@ export async function openLookbell(root: Root): Promise<void> {
   const words = wordsFor();
   const onTheme = applyTheme(document.documentElement, window.matchMedia('(prefers-color-scheme: dark)'));
   const updates = watchForUpdates();
-  const opened = await openStore();
-  if (!opened.ok) {
+  const notices = storeNotices();
+  const opened = await openStore({ onNotice: notices.tell });
+  const cannot = (why: Problem): void =>
     root.render(
       <main className="page">
-        <PageHead>{say(words.problems, opened.problem)}</PageHead>
+        <PageHead>{say(words.problems, why)}</PageHead>
       </main>,
     );
-    return;
-  }
+  if (!opened.ok) return cannot(opened.problem);
   const store = opened.value;
   const tablet = device();
   const base: Omit<Deps, 'writer'> = {
@@ -51,7 +53,8 @@ export async function openLookbell(root: Root): Promise<void> {
     timeZone: wallClock.timeZone(),
   };
   const writer = await ensureInstallation(base);
-  const deps: Deps = { ...base, writer: writer.ok ? writer.value : '' };
+  if (!writer.ok) return cannot(writer.problem);
+  const deps: Deps = { ...base, writer: writer.value };
   const worker = new Worker(new URL('../worker/worker.ts', import.meta.url), { type: 'module' });
 
   const services: Services = {
@@ -74,5 +77,5 @@ export async function openLookbell(root: Root): Promise<void> {
     useStored,
     demoFiles,
   };
-  root.render(<App services={services} updates={updates} onTheme={onTheme} />);
+  root.render(<App services={services} updates={updates} notices={notices} onTheme={onTheme} />);
 }

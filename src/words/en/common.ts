@@ -24,6 +24,12 @@ export const common = {
   updateReady: 'A new version is ready. It is put in when you ask for it, never while you record.',
   updateNow: 'Put it in now',
   updateLater: 'Later',
+  newerVersionWaits:
+    'Another window has opened a newer version. This window keeps nothing any more: open it anew.',
+  blockedByOtherTab:
+    'Another window still holds the data of an older version. Close it, then open this one anew.',
+  closed: 'The browser has closed the store of this window. Open it anew.',
+  openAnew: 'Open anew',
   brokenTitle: 'Something went wrong on this screen.',
   brokenText:
     'What was kept is kept, and a recording that is running goes on. Open the screen again; if it happens twice, hand over your study file and tell the team what you did last.',
