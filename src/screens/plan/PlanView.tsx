@@ -48,7 +48,9 @@ export function PlanView(props: Props) {
   const sum = (all: readonly number[]) => all.reduce((total, one) => total + one, 0);
   const [across, down] = [sum(widths), sum(heights)];
   const widest = `${across * 108}px`;
-  const style: CSSProperties = {
+  const style: CSSProperties & Record<`--${string}`, number> = {
+    '--plan-across': across,
+    '--plan-down': down,
     // Where seats are put up, every place stays wide enough for a finger; the room scrolls sideways instead.
     ...(open ? { minWidth: `${across * 44}px` } : {}),
     aspectRatio: `${across} / ${down}`,
@@ -73,6 +75,7 @@ export function PlanView(props: Props) {
                   type="button"
                   className="seat seat-place"
                   style={at(x, y)}
+                  data-place={`${place.column} ${place.row}`}
                   aria-label={study.seatPlace({ row: y + 2, column: x + 2 })}
                   onClick={() => onPlace(place)}
                 >
@@ -105,6 +108,7 @@ export function PlanView(props: Props) {
                 key={seat.id}
                 type="button"
                 {...common}
+                data-place={`${seat.column} ${seat.row}`}
                 aria-label={name === undefined ? study.seatFree(place) : study.seatOf({ name, ...place })}
                 aria-pressed={seat.id === chosen}
                 onClick={() => onSeat(seat)}

@@ -8,6 +8,7 @@ import { ClassFacts } from './ClassFacts.tsx';
 import { DrawSheet } from './DrawSheet.tsx';
 import { SeatsSheet } from './SeatsSheet.tsx';
 import { useClass } from './useClass.ts';
+import './classPage.css';
 
 /** /study/class/:id: children, draw, seats, and the class's own facts. */
 export function ClassPage({ id }: { readonly id: string }) {

@@ -40,6 +40,7 @@ function Draw({ classroom, lastSeed, protocols }: Props & { readonly protocols: 
   const protocol = protocols.find((one) => one.id === chosen) ?? protocols[0];
   if (protocol === undefined) return null;
   const present = classroom.children.filter((child) => !child.removed).length;
+  if (present === 0) return <p className="second">{words.study.drawNobody}</p>;
   const children = Math.min(present, protocol.childrenToDraw);
   const reserves = Math.min(present - children, protocol.reserves);
   return (
@@ -68,7 +69,7 @@ function Draw({ classroom, lastSeed, protocols }: Props & { readonly protocols: 
         value={seed}
         onChange={(event) => setSeed(event.target.value)}
       />
-      {present > 0 && present < protocol.childrenToDraw + protocol.reserves && (
+      {present < protocol.childrenToDraw + protocol.reserves && (
         <p>
           {words.study.drawFew({ children: present, wanted: protocol.childrenToDraw + protocol.reserves })}
         </p>
@@ -76,7 +77,7 @@ function Draw({ classroom, lastSeed, protocols }: Props & { readonly protocols: 
       {notice}
       <div className="row">
         <Button
-          disabled={busy || present === 0}
+          disabled={busy}
           onClick={() => run(drawTargets(deps, classroom.id, { id: protocol.id }, seed))}
         >
           {words.study.drawNow({ children, reserves })}

@@ -10,7 +10,7 @@ export function SeatsSheet({ classroom }: { readonly classroom: Classroom }) {
   const { plan } = classroom;
   const labels = pseudonymsOf(classroom);
   return (
-    <Sheet title={study.seats}>
+    <Sheet title={study.seats} className="seats-picture">
       <div className="stack-tight">
         <p className="second">
           {plan === null

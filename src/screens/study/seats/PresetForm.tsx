@@ -57,14 +57,11 @@ export function PresetForm({
         <div className="row">
           <Button
             look={classroom.plan === null ? 'main' : 'plain'}
-            disabled={edits.busy}
-            onClick={() => void edits.step(() => setSeatingPlan(deps, classroom.id, preset))}
+            onClick={() => edits.step(() => setSeatingPlan(deps, classroom.id, preset))}
           >
             {study.presetPut({ seats })}
           </Button>
-          {classroom.plan === null && edits.undo !== null && (
-            <Button onClick={edits.undo}>{words.common.undo}</Button>
-          )}
+          {edits.undo !== null && <Button onClick={edits.undo}>{words.common.undo}</Button>}
         </div>
       </div>
     </Sheet>

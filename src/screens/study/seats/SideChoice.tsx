@@ -13,7 +13,7 @@ export function SideChoice({ plan, edits }: { readonly plan: SeatingPlan; readon
       <Choice<ObserverSide>
         legend={study.side}
         value={plan.observerSide}
-        onChange={(side) => void edits.step(() => turnPlan(deps, edits.classroom, side))}
+        onChange={(side) => edits.step(() => turnPlan(deps, edits.classroom, side))}
         options={[
           { value: 'back', label: study.sideBack },
           { value: 'front', label: study.sideFront },

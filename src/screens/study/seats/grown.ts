@@ -44,3 +44,13 @@ export function trimmed(plan: SeatingPlan): SeatingPlan {
     seats: plan.seats.map((seat) => ({ ...seat, column: seat.column - left, row: seat.row - front })),
   };
 }
+
+/** Where a place of `from` is in `to`, the same room after it grew or was trimmed; a room without a common seat did neither. */
+export function moved(from: SeatingPlan, to: SeatingPlan, { column, row }: Place): Place {
+  for (const before of from.seats) {
+    const after = to.seats.find((one) => one.id === before.id);
+    if (after !== undefined)
+      return { column: column + after.column - before.column, row: row + after.row - before.row };
+  }
+  return { column, row };
+}

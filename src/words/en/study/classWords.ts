@@ -23,9 +23,9 @@ export const classWords = {
   noChildren: 'Write down those with consent.',
   consentFirst:
     'Consent and assent come first. A child without consent is not written down, and pseudonyms stand for names.',
-  change: 'Change',
+  tapToChange: 'Tap a child to change or withdraw it.',
+  addMore: 'Add children',
   changeOf: ({ name }: { name: string }) => `Change ${name}`,
-  withdraw: 'Withdraw',
   withdrawOf: ({ name }: { name: string }) => `Withdraw ${name}`,
   withdrawn: ({ name }: { name: string }) => `${name} is withdrawn: no longer drawn, seated or watched.`,
   withdrawnSign: 'withdrawn',
@@ -80,6 +80,7 @@ export const classWords = {
 
   draw: 'Children to watch',
   drawWhy: 'Chance chooses, not you: stratum by stratum among all children of the class.',
+  drawNobody: 'Write the children down first; then chance can choose among them.',
   drawProtocol: 'For which protocol?',
   drawProtocolHint: ({ children, reserves }: { children: number; reserves: number }, f: F) =>
     `${f.whole(children)} to watch, ${f.whole(reserves)} in reserve`,

@@ -14,6 +14,8 @@ export const seatWords = {
 
   seatsTitle: ({ klass }: { klass: string }) => `Where does everybody sit in ${klass}?`,
   seatsNote: 'Drawn as you see the room from your chair. The thick line is the front.',
+  seatsWork: 'What to do with the seats',
+  seatsPlace: 'Put children on seats',
   seatsBuild: 'Put up and take away seats',
   unseated: 'Children without a seat',
   allSeated: 'Everybody has a seat.',
