@@ -10,6 +10,8 @@ export default defineConfig({
     exclude: ['test/browser/**', 'node_modules/**'],
     environment: 'node',
     maxWorkers: 2,
+    // A bound for what hangs, not a measure: a busy machine may be slow.
+    testTimeout: 30_000,
     retry: 0,
     allowOnly: false,
   },
