@@ -8,6 +8,9 @@ import { countInMs } from './standing.ts';
 /** Cues lie this far ahead on the audio clock: a page that is hidden or busy for a minute bends none of them. */
 export const aheadMs = 90_000;
 
+/** A context's time moves in steps (10 ms seen), so it may stand a little behind what is already on its way (seconds). */
+const step = 0.05;
+
 /** A sound cannot be laid closer to the audio clock's present than this (seconds). */
 const tooClose = 0.004;
 
@@ -72,11 +75,13 @@ export class CuePlayer {
     this.until = Number.NEGATIVE_INFINITY;
   }
 
-  /** True when a sound lay at this session time and the audio clock has run past it. */
+  /** True when a sound lay at this session time and the audio clock has come to it. */
   heard(at: number): boolean {
+    // What lay on a context that is gone is gone with it.
+    if (this.generation !== this.audio.generation()) return false;
     if (!this.laid.some((sound) => sound.at === at)) return false;
     const present = this.audio.now();
     const planned = this.clock.audioAt(sessionMs(at));
-    return present !== null && planned !== null && present >= planned;
+    return present !== null && planned !== null && present >= planned - step;
   }
 }

@@ -104,6 +104,12 @@ export class CueRound {
     else if (clockRuns && this.stuck !== null) this.stuck = this.over(this.stuck, now);
   }
 
+  /** At the end of the session: what still goes on ends with it. */
+  closeDisruptions(at: number): void {
+    if (this.hidden !== null) this.hidden = this.over(this.hidden, at);
+    if (this.stuck !== null) this.stuck = this.over(this.stuck, at);
+  }
+
   /** Cues in (from, to] of which the journal says nothing are said to be lost. */
   sayLost(from: number, to: number): void {
     const { book } = this.parts;

@@ -51,13 +51,21 @@ export function planOf(header: SessionHeader): Plan | null {
   };
 }
 
-/** The intervals of the parts that have begun, on the session's clock, in order of their cues. */
-export function timedIntervals(plan: Plan, origins: JournalState['origins']): TimedInterval[] {
+/**
+ * The intervals of the parts that have begun, on the session's clock, in order of their cues; of a part that was closed
+ * only those whose cue came before.
+ */
+export function timedIntervals(
+  plan: Plan,
+  { origins, closed }: Pick<JournalState, 'origins' | 'closed'>,
+): TimedInterval[] {
   return plan.intervals.flatMap((line) => {
     const origin = origins[line.part] ?? null;
-    return origin === null
-      ? []
-      : [{ number: line.number, cueAt: origin + line.cueMs, closeAt: origin + line.closeMs }];
+    if (origin === null) return [];
+    const cueAt = origin + line.cueMs;
+    return cueAt < (closed[line.part] ?? Number.POSITIVE_INFINITY)
+      ? [{ number: line.number, cueAt, closeAt: origin + line.closeMs }]
+      : [];
   });
 }
 

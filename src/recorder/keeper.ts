@@ -45,7 +45,7 @@ export class Keeper {
     return { kept: this.kept, of: this.of, refused: this.refused };
   }
 
-  /** Tries at once. Resolves true when all is durable, false after a refusal (it goes on trying). */
+  /** Tries at once. Resolves true when all is durable, false after a refusal or a write that hangs (it goes on trying). */
   flush(): Promise<boolean> {
     if (this.kept === this.of) return Promise.resolve(true);
     const done = new Promise<boolean>((resolve) => this.settled.push(resolve));
@@ -66,7 +66,10 @@ export class Keeper {
     this.writing = true;
     const batch = this.queue;
     this.queue = [];
-    const watch = this.timer.wakeIn(slowAfterMs, () => this.say({ code: 'recorder.storeSlow', values: {} }));
+    const watch = this.timer.wakeIn(slowAfterMs, () => {
+      this.say({ code: 'recorder.storeSlow', values: {} });
+      this.settle(false);
+    });
     const answer = await this.tried(batch);
     watch();
     this.writing = false;

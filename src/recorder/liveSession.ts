@@ -7,6 +7,7 @@ import { planOf } from './grid.ts';
 import type { RecorderPorts, Stop } from './ports.ts';
 import type { RoomSnapshot } from './roomSnapshot.ts';
 import { RunningSession } from './runningSession.ts';
+import { SessionRun } from './sessionRun.ts';
 
 /**
  * A session while it is recorded. It lives outside React and survives a broken screen. Times of touches are the
@@ -75,5 +76,5 @@ export function createLiveSession(
   if (plan === null || header.schedule.kind !== 'laid') {
     throw new Error('A schedule from a table cannot be recorded.');
   }
-  return new RunningSession(header, header.schedule.protocol, plan, ports, options);
+  return new RunningSession(new SessionRun(header, header.schedule.protocol, plan, ports, options));
 }

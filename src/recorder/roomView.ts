@@ -30,18 +30,18 @@ export class RoomView {
   private seen: { state: JournalState; cued: number; closed: number } | null = null;
   private records: readonly IntervalRecord[] = [];
   private timed: readonly TimedInterval[] = [];
-  private origins: JournalState['origins'] | null = null;
+  private basis: Pick<JournalState, 'origins' | 'closed'> | null = null;
 
   constructor(
     private readonly header: SessionHeader,
     private readonly plan: Plan,
   ) {}
 
-  /** Intervals of the parts that have begun. */
+  /** The intervals whose cues have come or will come, as far as their parts have begun. */
   timedIn(state: JournalState): readonly TimedInterval[] {
-    if (this.origins !== state.origins) {
-      this.origins = state.origins;
-      this.timed = timedIntervals(this.plan, state.origins);
+    if (this.basis?.origins !== state.origins || this.basis.closed !== state.closed) {
+      this.basis = { origins: state.origins, closed: state.closed };
+      this.timed = timedIntervals(this.plan, state);
     }
     return this.timed;
   }

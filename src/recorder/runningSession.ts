@@ -1,398 +1,110 @@
-import type { AwayReason, EntryBody, EntryRef } from '../journal/entry.ts';
-import { isCovered } from '../journal/state.ts';
+import type { AwayReason, EntryRef } from '../journal/entry.ts';
 import type { Id } from '../kernel/ids.ts';
-import { ok, problem, type Result } from '../kernel/result.ts';
+import type { Result } from '../kernel/result.ts';
 import type { PageMs } from '../kernel/units.ts';
-import type { Protocol } from '../model/protocol.ts';
-import type { SessionHeader } from '../model/session.ts';
-import { Book } from './book.ts';
-import { CuePlayer } from './cuePlayer.ts';
-import { CueRound } from './cueRound.ts';
-import type { Plan } from './grid.ts';
-import type { LiveOptions, LiveSession } from './liveSession.ts';
-import type { RecorderPorts, Stop } from './ports.ts';
-import { resumption } from './resumption.ts';
+import * as deeds from './deeds.ts';
+import type { LiveSession } from './liveSession.ts';
+import type { Stop } from './ports.ts';
 import type { RoomSnapshot } from './roomSnapshot.ts';
-import { RoomView } from './roomView.ts';
-import { SoundDesk } from './soundDesk.ts';
-import { countInMs, cuesGiven, type Standing, standing } from './standing.ts';
-import { Timekeeper } from './timekeeper.ts';
-import { TouchDesk, type TouchWord } from './touchDesk.ts';
-import { timeOf, undoable } from './undoable.ts';
+import type { SessionRun } from './sessionRun.ts';
 
-/** Time between a tap that begins a part and its first tick: enough to lay the tick on the audio clock. */
-const headStartMs = 250;
-
-/** Wired outputs take 10 to 60 ms; from here on the sound goes through the air. From memory, no source. */
-const wirelessFromMs = 100;
-
-/** The session machine: what the observer taps and what the clocks bring becomes journal entries, cues and a snapshot. */
+/** What the observer can do, said to the session that runs. */
 export class RunningSession implements LiveSession {
-  private readonly book: Book;
-  private readonly time: Timekeeper;
-  private readonly sound: SoundDesk;
-  private readonly touches: TouchDesk;
-  private readonly view: RoomView;
-  private readonly cues: CueRound;
-  private readonly listeners = new Set<() => void>();
-  private stops: Stop[] = [];
-  private wake: Stop | null = null;
-  private release: Stop | null = null;
-  private beginning: Promise<Result<{ readonly sound: boolean }>> | null = null;
-  private disposed = false;
-  private shown: RoomSnapshot | null = null;
-
-  constructor(
-    header: SessionHeader,
-    private readonly protocol: Protocol,
-    private readonly plan: Plan,
-    private readonly ports: RecorderPorts,
-    private readonly options: LiveOptions,
-  ) {
-    const before = options.resumeFrom ?? [];
-    this.book = new Book(header, ports, () => this.changed(), before, options.elsewhere ?? false);
-    this.time = new Timekeeper(ports);
-    this.sound = new SoundDesk(ports.audio, this.book.state);
-    this.touches = new TouchDesk(protocol.graceMs, protocol.method);
-    this.view = new RoomView(header, plan);
-    const player = new CuePlayer(ports.audio, this.time.clock);
-    const leadIn = (): boolean => options.leadIn ?? (ports.audio.facts()?.latencyMs ?? 0) >= wirelessFromMs;
-    this.cues = new CueRound({ plan, cues: protocol.cues, book: this.book, player, ports, leadIn });
-    // The session may have come to its end while the tablet was dead: nothing is left to begin.
-    const stand = resumption(this.book.state, before, ports.wall.now());
-    if (stand !== null && this.placeAt(stand.now).phase === 'over') this.goOn();
-  }
+  constructor(private readonly run: SessionRun) {}
 
   subscribe(listener: () => void): Stop {
-    this.listeners.add(listener);
-    return () => this.listeners.delete(listener);
+    return this.run.subscribe(listener);
   }
 
   snapshot(): RoomSnapshot {
-    this.shown ??= this.lookAround();
-    return this.shown;
+    return this.run.snapshot();
   }
 
   begin(): Promise<Result<{ readonly sound: boolean }>> {
-    this.beginning ??= this.reallyBegin().then((answer) => {
-      if (!answer.ok) this.beginning = null;
-      return answer;
-    });
-    return this.beginning;
+    return this.run.begin();
   }
 
   touch(code: string | null, at: PageMs): void {
-    this.take({ kind: 'code', code }, at);
+    this.run.take({ kind: 'code', code }, at);
   }
 
   count(on: number, present: number, at: PageMs): void {
-    this.take({ kind: 'count', on, present }, at);
+    this.run.take({ kind: 'count', on, present }, at);
   }
 
   cannotSee(at: PageMs): void {
-    this.take({ kind: 'cannot see' }, at);
+    this.run.take({ kind: 'cannot see' }, at);
   }
 
   childBefore(): void {
-    this.act(({ now }) => {
-      this.touches.arm(this.view.timedIn(this.book.state), now);
-    });
+    this.run.armBefore();
   }
 
   undo(): void {
-    this.act(({ now }) => {
-      const last = undoable(this.book.state);
-      if (last === null) return;
-      const since = timeOf(this.book.state, last.target) ?? now;
-      this.book.write(now, { kind: 'withdrawn', target: last.target });
-      this.touches.forget();
-      this.cues.takeBack();
-      // Cues that were held back while what is now undone was believed: nobody got them.
-      if (last.kind === 'interrupted' || last.kind === 'breakStarted') this.cues.sayLost(since, now);
-    });
+    this.run.deed(deeds.undo);
   }
 
   childLeft(child: Id, reason: AwayReason): void {
-    this.say({ kind: 'left', child, reason });
+    this.run.say({ kind: 'left', child, reason });
   }
 
   childReturned(child: Id): void {
-    this.say({ kind: 'returned', child });
+    this.run.say({ kind: 'returned', child });
   }
 
   childMoved(child: Id, seat: Id): void {
-    this.say({ kind: 'moved', child, seat });
+    this.run.say({ kind: 'moved', child, seat });
   }
 
   interruptClass(): void {
-    this.act(({ now, place }) => {
-      if (place.phase !== 'running') return;
-      this.book.write(now, { kind: 'interrupted' });
-      this.cues.takeBack();
-    });
+    this.run.deed(deeds.interruptClass);
   }
 
   continueClass(): void {
-    this.act(({ now }) => {
-      if (isCovered(this.book.state, 'class interrupted')) this.book.write(now, { kind: 'continued' });
-    });
+    this.run.deed(deeds.continueClass);
   }
 
   pause(): void {
-    this.act(({ now, place, page }) => {
-      const may = place.phase === 'running' || place.phase === 'interrupted';
-      if (!may || this.book.state.header.role !== null) return;
-      this.time.clock.pause(page);
-      this.book.write(now, { kind: 'paused' });
-      this.cues.takeBack();
-    });
+    this.run.deed(deeds.pause);
   }
 
   resume(): void {
-    this.act(({ now, place, page }) => {
-      if (place.phase !== 'paused') return;
-      this.time.clock.resume(page);
-      this.book.write(now, { kind: 'resumed' });
-    });
+    this.run.deed(deeds.resume);
   }
 
   flag(): void {
-    this.act(({ now }) => {
-      this.book.write(now, { kind: 'flagged', interval: this.snapshot().current?.number ?? null });
-    });
+    this.run.flag();
   }
 
   note(text: string, about?: EntryRef): void {
-    this.say({ kind: 'noted', text, ...(about === undefined ? {} : { about }) });
+    this.run.say({ kind: 'noted', text, ...(about === undefined ? {} : { about }) });
   }
 
   lessonPart(lessonPart: string | null): void {
-    this.say({ kind: 'lessonPart', lessonPart });
+    this.run.say({ kind: 'lessonPart', lessonPart });
   }
 
   breakStarted(): void {
-    this.act(({ now, place }) => {
-      if (place.phase === 'paused' || place.part + 1 >= this.plan.parts.length) return;
-      if ((this.book.state.closed[place.part] ?? null) !== null) return;
-      this.book.write(now, { kind: 'breakStarted' });
-      this.cues.takeBack();
-    });
+    this.run.deed(deeds.breakStarted);
   }
 
   firstTaskGiven(): void {
-    this.act(({ now, place }) => {
-      if (place.phase !== 'between parts') return;
-      const { state } = this.book;
-      if (isCovered(state, 'class interrupted')) this.book.write(now, { kind: 'continued' });
-      const inBreak = (state.closed[place.part] ?? null) !== null;
-      if (inBreak) this.book.write(now, { kind: 'breakEnded' });
-      const origin = Math.round(now) + headStartMs + countInMs;
-      const phase = this.plan.parts[place.next]?.phase ?? '';
-      this.book.write(now, { kind: 'phaseStarted', phase, part: place.next, origin });
-      this.cues.takeBack();
-    });
+    this.run.deed(deeds.firstTaskGiven);
   }
 
   silence(silent: boolean): void {
-    this.act(({ now }) => {
-      const said = this.sound.byHand(!silent);
-      if (said === null) return;
-      this.book.write(now, said);
-      if (silent) this.cues.takeBack();
-    });
+    this.run.deed(deeds.silence(silent));
   }
 
   end(words?: string): void {
-    this.act(({ now }) => {
-      this.finish(now, { reason: 'early', ...(words === undefined ? {} : { words }) });
-    });
+    this.run.end(words);
   }
 
   flush(): Promise<boolean> {
-    return this.book.keeper.flush();
+    return this.run.flush();
   }
 
   dispose(): void {
-    if (this.disposed) return;
-    this.disposed = true;
-    this.letGo();
-    this.listeners.clear();
-    this.release?.();
-  }
-
-  private async reallyBegin(): Promise<Result<{ readonly sound: boolean }>> {
-    if (this.book.state.ended !== null) return problem('recorder.ended');
-    const { audio, lock, wakeLock, visibility } = this.ports;
-    // Both are asked for inside the tap; a sound that stays locked keeps nobody from observing.
-    const unlocking = audio.unlock().catch(() => problem('recorder.noSound'));
-    const release = await lock.take();
-    if (release === null) return problem('recorder.otherTabRecords');
-    const unlocked = await unlocking;
-    if (this.disposed) {
-      release();
-      return problem('recorder.ended');
-    }
-    this.release = release;
-    audio.settle(this.protocol.cues);
-    wakeLock.hold();
-    this.stops = [
-      wakeLock.subscribe(() => this.changed()),
-      visibility.subscribe(() => {
-        this.time.visibilityChanged();
-        this.tick();
-      }),
-      audio.subscribe((event) => {
-        if (event.kind !== 'output' || event.change !== 'gone') this.tick();
-        else this.say(this.sound.outputGone(event.output), () => this.cues.takeBack());
-      }),
-    ];
-    this.time.look();
-    this.goOn();
-    this.tick();
-    return ok({ sound: unlocked.ok });
-  }
-
-  /** Starts session time: counting in, or where the grid of a session that was cut off stands now. */
-  private goOn(): void {
-    const { page, wall, audio } = this.ports;
-    const stand = resumption(this.book.state, this.options.resumeFrom ?? [], wall.now());
-    if (stand === null) {
-      this.time.clock.start(page.now(), -countInMs - headStartMs);
-      const latency = audio.facts()?.latencyMs ?? null;
-      this.book.write(-countInMs - headStartMs, {
-        kind: 'started',
-        checks: [...this.options.checks],
-        anyway: this.options.anyway,
-        ...(latency === null ? {} : { audioLatencyMs: latency }),
-      });
-      return;
-    }
-    this.time.clock.start(page.now(), stand.now);
-    if (isCovered(this.book.state, 'paused')) this.time.clock.pause(page.now());
-    this.cues.startAt(stand.now);
-    const place = this.placeAt(stand.now);
-    const to = Math.round(place.phase === 'over' ? Math.max(place.at, stand.from) : stand.now);
-    this.book.write(to, { kind: 'gap', from: stand.from, to, cause: 'closed', estimated: true });
-    if (place.phase === 'over') this.finish(to, { reason: 'complete' });
-  }
-
-  private placeAt(now: number): Standing {
-    return standing(this.plan, this.book.state, now);
-  }
-
-  /** Brings the session up to the present: jumps of clocks, cues that are due, the end; then lays cues ahead. */
-  private tick(mayEnd = true): void {
-    if (!this.time.clock.started || this.disposed || this.book.state.ended !== null) return;
-    const news = this.time.look();
-    if (news.jump.kind === 'slept') this.cues.slept(news.lastLook, this.time.clock.at(news.page));
-    const now = this.time.clock.at(news.page);
-    if (news.jump.kind === 'moved') {
-      const at = Math.round(now);
-      this.book.write(at, { kind: 'gap', from: at, to: at, cause: 'clock', estimated: false });
-    }
-    this.cues.deliver(now);
-    this.cues.disruption(now, news.reading, this.time.clock.hasAudio);
-    const place = this.placeAt(now);
-    if (place.phase === 'over' && mayEnd) {
-      this.finish(place.at, { reason: 'complete' });
-      return;
-    }
-    if (cuesGiven(place) && this.sound.on) this.cues.layAhead(now);
-    this.sleepUntilNext(now, place);
-    this.changed();
-  }
-
-  private sleepUntilNext(now: number, place: Standing): void {
-    this.wake?.();
-    // Whole seconds for the screen, and each cue at its own moment.
-    const second = (Math.floor(now / 1000) + 1) * 1000;
-    const cue = cuesGiven(place) ? this.cues.nextAfter(now) : Number.POSITIVE_INFINITY;
-    const ms = place.phase === 'paused' ? 1000 : Math.min(second, cue) - now;
-    this.wake = this.ports.timer.wakeIn(Math.max(1, Math.ceil(ms)), () => this.tick());
-  }
-
-  /** Something that the observer did: time is brought up to the present before and after it. */
-  private act(deed: (present: { now: number; page: PageMs; place: Standing }) => void): void {
-    if (!this.time.clock.started) return;
-    this.tick();
-    if (this.disposed || this.book.state.ended !== null) return;
-    const page = this.ports.page.now();
-    const now = this.time.clock.at(page);
-    deed({ now, page, place: this.placeAt(now) });
-    this.shown = null;
-    this.tick();
-  }
-
-  private say(body: EntryBody, then?: () => void): void {
-    this.act(({ now }) => {
-      this.book.write(now, body);
-      then?.();
-    });
-  }
-
-  private take(word: TouchWord, page: PageMs): void {
-    if (!this.time.clock.started || this.book.state.ended !== null) {
-      this.touches.refuse('not running');
-      this.changed();
-      return;
-    }
-    // A touch that went down before the end is taken even when it is told after it.
-    this.tick(false);
-    const at = this.time.clock.at(page);
-    const { state } = this.book;
-    const body = this.touches.take(word, { page, at }, state, this.view.timedIn(state));
-    if (body !== null) this.book.write(at, body);
-    if (this.touches.felt !== this.shown?.felt) this.sound.click();
-    this.tick();
-    this.changed();
-  }
-
-  private finish(at: number, how: { reason: 'complete' | 'early'; words?: string }): void {
-    this.cues.takeBack();
-    this.book.write(at, { kind: 'ended', ...how });
-    this.letGo();
-    this.book.keeper.whenAllKept(() => {
-      void this.ports.store.pack().catch(() => undefined);
-      this.release?.();
-    });
-    this.changed();
-  }
-
-  private letGo(): void {
-    this.wake?.();
-    this.cues.takeBack();
-    for (const stop of this.stops.splice(0)) stop();
-    this.ports.wakeLock.letGo();
-    this.ports.audio.close();
-  }
-
-  private changed(): void {
-    this.shown = null;
-    for (const listener of this.listeners) listener();
-  }
-
-  private lookAround(): RoomSnapshot {
-    const { state, keeper } = this.book;
-    const begun = this.time.clock.started;
-    const resuming = (this.options.resumeFrom ?? []).length > 0;
-    const now = begun ? this.time.now() : resuming ? state.at : -1;
-    const sound = this.sound.now(this.time.clock.hasAudio);
-    return this.view.snapshot({
-      begun,
-      resuming: resuming && !begun,
-      now: state.ended?.at ?? now,
-      state,
-      standing: this.placeAt(now),
-      cues: this.cues.all(),
-      armedBefore: this.touches.armedBefore(now),
-      kept: keeper.status(),
-      sound,
-      wakeLock: this.ports.wakeLock.state(),
-      vibrates: this.protocol.cues.vibration && this.ports.vibration.available,
-      flash: this.cues.flash,
-      flashStrongly: this.protocol.cues.flash || !sound.heard,
-      felt: this.touches.felt,
-      refusal: this.touches.refusal,
-    });
+    this.run.dispose();
   }
 }

@@ -1,4 +1,5 @@
 import type { EntryBody } from '../journal/entry.ts';
+import { readOut } from '../journal/readOut.ts';
 import type { JournalState } from '../journal/state.ts';
 import type { PageMs } from '../kernel/units.ts';
 import type { Method } from '../model/protocol.ts';
@@ -70,7 +71,7 @@ export class TouchDesk {
       intervals: timed,
       at: touch.at,
       graceMs: this.graceMs,
-      isEmpty: (number) => (state.sayings.get(number) ?? []).length === 0,
+      isEmpty: (number) => isEmpty(state, number, touch.at),
       isBarred: (number) => isBarred(state, timed, number),
       before: this.armedBefore(touch.at),
     });
@@ -115,12 +116,18 @@ function targetOf(word: TouchWord): string {
   return word.kind;
 }
 
-/** No mark for an interval whose cue fell into an interruption, or would have come after its part was closed. */
+/**
+ * Nothing is known of the interval. One that is missing for a reason (its child has left, its cue failed) waits for no
+ * mark, so a quick touch after the next cue is not its own.
+ */
+function isEmpty(state: JournalState, number: number, now: number): boolean {
+  const record = readOut(state, { now })[number - 1];
+  return record?.status === 'open' || (record?.status === 'missing' && record.missing === 'missed');
+}
+
+/** No mark for an interval whose cue fell into an interruption or a pause. */
 function isBarred(state: JournalState, timed: readonly TimedInterval[], number: number): boolean {
   const cueAt = timed.find((interval) => interval.number === number)?.cueAt ?? Number.NaN;
-  const part = state.planned[number - 1]?.part ?? 0;
-  const closed = state.closed[part] ?? null;
-  if (closed !== null && cueAt >= closed) return true;
   return state.covers.some(
     (cover) =>
       (cover.reason === 'class interrupted' || cover.reason === 'paused') &&

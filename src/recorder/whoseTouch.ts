@@ -11,9 +11,9 @@ export interface TouchQuestion {
   /** Session time at which the touch went down. */
   readonly at: number;
   readonly graceMs: number;
-  /** True while nothing was said of the interval. */
+  /** True while nothing is known of the interval: no mark, and no other reason why it has none than having been missed. */
   readonly isEmpty: (number: number) => boolean;
-  /** True when its cue fell into an interruption, or after its part was closed: no mark is taken. */
+  /** True when its cue fell into an interruption or a pause: no mark is taken. */
   readonly isBarred: (number: number) => boolean;
   /** Number of the interval that "child before" is armed for; null when it is not. */
   readonly before: number | null;

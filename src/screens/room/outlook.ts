@@ -33,7 +33,7 @@ export function outlook({ header, journal }: StoredSession, wallNow: EpochMs): O
   const cut = resumption(state, journal, wallNow);
   if (cut === null)
     return { ...facts, between: 0, goesOn: { kind: 'start', child: nameOf(plan.intervals[0]?.child) } };
-  const timed = timedIntervals(plan, state.origins);
+  const timed = timedIntervals(plan, state);
   const between = timed.filter(({ cueAt }) => cueAt > cut.from && cueAt <= cut.now).length;
   const place = standing(plan, state, cut.now);
   if (place.phase === 'between parts')
