@@ -1,3 +1,5 @@
+import { isValid, parseISO } from 'date-fns';
+
 /** Numbers, dates and plurals as people read them. Every figure on a screen or in a text goes through here. */
 export interface Format {
   readonly locale: string;
@@ -36,12 +38,10 @@ export function formatFor(locale: string): Format {
   const wholes = new Intl.NumberFormat(locale, { maximumFractionDigits: 0 });
   const rules = new Intl.PluralRules(locale);
   const lists = new Intl.ListFormat(locale, { type: 'conjunction' });
-  // Dates are kept as they were written down; UTC here keeps them from being shifted once more.
   const days = new Intl.DateTimeFormat(locale, {
     weekday: 'long',
     day: 'numeric',
     month: 'long',
-    timeZone: 'UTC',
   });
   const trueMinus = (text: string): string => text.replace('-', minus);
   const fixed = (n: number, digits: number): string =>
@@ -67,8 +67,9 @@ export function formatFor(locale: string): Format {
       return `${Math.floor(seconds / 60)}:${String(seconds % 60).padStart(2, '0')}`;
     },
     day: (isoDate) => {
-      const instant = Date.parse(`${isoDate.slice(0, 10)}T00:00:00Z`);
-      return Number.isNaN(instant) ? isoDate : days.format(instant);
+      // The date alone, read in the reader's own zone: the day as it was where it was written.
+      const day = parseISO(isoDate.slice(0, 10));
+      return isValid(day) ? days.format(day) : isoDate;
     },
     time: (wall) => wall.slice(11, 16),
     plural: (n, forms) => (rules.select(n) === 'one' ? forms.one : forms.other),

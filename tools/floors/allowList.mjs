@@ -71,7 +71,6 @@ export const packages = {
   dexie: ['storage'],
   'dexie-react-hooks': ['app'],
   fflate: ['exchange'],
-  papaparse: ['exchange'],
   react: ['app', 'charts', 'screens', 'ui'],
   'react-dom': ['app', 'charts', 'screens', 'ui'],
   uuid: ['exchange', 'kernel'],
