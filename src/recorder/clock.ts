@@ -73,7 +73,11 @@ export class SessionClock {
 
   /** Reads the audio clock against the page clock; null while it does not run. Call it at each wake-up. */
   read(sample: ClockSample | null, generation: number): Reading {
-    if (sample === null) return this.lose();
+    if (sample === null) {
+      // It said itself that it stopped: when it says that it runs again, it need not prove it against old readings.
+      this.lastSample = null;
+      return this.lose();
+    }
     if (this.audioShift === null || generation !== this.generation) {
       const standing = generation === this.generation && this.standsStill(sample);
       this.generation = generation;

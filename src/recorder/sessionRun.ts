@@ -5,6 +5,7 @@ import type { PageMs } from '../kernel/units.ts';
 import type { Protocol } from '../model/protocol.ts';
 import type { SessionHeader } from '../model/session.ts';
 import { Book } from './book.ts';
+import type { Reading } from './clock.ts';
 import { CuePlayer } from './cuePlayer.ts';
 import { CueRound } from './cueRound.ts';
 import * as deeds from './deeds.ts';
@@ -22,6 +23,9 @@ import { TouchDesk, type TouchWord } from './touchDesk.ts';
 
 /** Wired outputs take 10 to 60 ms; from here on the sound goes through the air. From memory, no source. */
 const wirelessFromMs = 100;
+
+/** A clock that seems to stand still has to be watched for a while before it can be believed again. */
+const lookAgainMs: Partial<Record<Reading, number>> = { doubtful: 50, lost: 250 };
 
 /** The session machine: what the observer taps and what the clocks bring becomes journal entries, cues and a snapshot. */
 export class SessionRun {
@@ -176,18 +180,18 @@ export class SessionRun {
       return;
     }
     if (cuesGiven(place) && this.sound.on) this.cues.layAhead(now);
-    this.sleepUntilNext(now, place, news.reading === 'doubtful');
+    this.sleepUntilNext(now, place, news.reading);
     this.changed();
   }
 
-  private sleepUntilNext(now: number, place: Standing, inDoubt: boolean): void {
+  private sleepUntilNext(now: number, place: Standing, reading: Reading): void {
     this.wake?.();
     // Whole seconds for the screen, and each cue at its own moment.
     const second = (Math.floor(now / 1000) + 1) * 1000;
     const cue = cuesGiven(place) ? this.cues.nextAfter(now) : Number.POSITIVE_INFINITY;
     const due = place.phase === 'paused' ? 1000 : Math.min(second, cue) - now;
-    // A strange reading of the audio clock is looked at again soon, before a cue comes out at the wrong moment.
-    const ms = inDoubt ? Math.min(due, 50) : due;
+    // A strange reading of the audio clock is looked at again soon, before a cue comes out at a wrong moment or not at all.
+    const ms = Math.min(due, lookAgainMs[reading] ?? due);
     this.wake = this.ports.timer.wakeIn(Math.max(1, Math.ceil(ms)), () => this.tick());
   }
 

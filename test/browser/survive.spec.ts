@@ -151,7 +151,7 @@ test('a new version waits while a session is recorded, and is offered after it',
   const page = await tablet.visitOnce();
   await goIn(
     page,
-    await shortVisitFile({ key: 'update', protocol: { partLength: { kind: 'rounds', rounds: 4 } } }),
+    await shortVisitFile({ key: 'update', protocol: { partLength: { kind: 'rounds', rounds: 3 } } }),
   );
   await start(page);
   await expect(page.locator('.look-lead', { hasText: 'look at' })).toBeVisible({ timeout: 20_000 });
