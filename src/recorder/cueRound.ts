@@ -87,7 +87,8 @@ export class CueRound {
   /** The tablet slept from session time `from` to `to`: what fell in between came to nobody. */
   slept(from: number, to: number): void {
     this.deliver(from);
-    this.done = to;
+    // A cue of the very moment of waking is still due.
+    this.done = to - 1;
     this.takeBack();
     if (standing(this.parts.plan, this.parts.book.state, from).phase === 'paused') return;
     const stretch = { from: Math.round(from), to: Math.round(to) };

@@ -13,6 +13,7 @@ export class FakeStore implements SessionStore {
 
   async append(entries: readonly JournalEntry[]): Promise<Result<null>> {
     this.appends.push(entries.length);
+    await Promise.resolve();
     if (this.mood === 'refuses') return problem('store.full');
     if (this.mood === 'throws') throw new Error('the connection is gone');
     if (this.mood === 'hangs') await new Promise<void>((go) => this.hanging.push(go));
