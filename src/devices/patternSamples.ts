@@ -25,5 +25,5 @@ export function patternSamples({ tones }: CuePattern, sampleRate: number): Patte
       samples[frame(at) - first + k] = (samples[frame(at) - first + k] ?? 0) + value;
     }
   }
-  return { samples, before: -first };
+  return { samples, before: 0 - first };
 }
