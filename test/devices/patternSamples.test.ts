@@ -30,7 +30,7 @@ describe('patternSamples', () => {
     for (const pattern of [...kinds.map(cuePattern), countInTick, confirmationClick]) {
       const { samples, before } = patternSamples(pattern, rate);
       expect(before).toBe(0);
-      expect(Math.abs(samples[0] ?? 0)).toBeGreaterThan(1e-5);
+      expect(Math.abs(samples[0] ?? 0)).toBeGreaterThan(1e-6);
     }
   });
 
