@@ -54,7 +54,6 @@ export class CuePlayer {
   layAhead(sounds: readonly LaidSound[], now: number): void {
     const present = this.audio.now();
     if (present === null || !this.clock.hasAudio) return;
-    if (this.generation !== this.audio.generation()) this.takeBack();
     this.generation = this.audio.generation();
     // A sound is given up once it has been over for longer than anybody asks for it.
     this.laid = this.laid.filter((sound) => sound.at > now - aheadMs);

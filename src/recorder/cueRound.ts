@@ -34,7 +34,7 @@ export class CueRound {
   private done = Number.NEGATIVE_INFINITY;
   private hidden: Trouble | null = null;
   private stuck: Trouble | null = null;
-  private basis: Pick<JournalState, 'origins' | 'closed'> | null = null;
+  private basis: (Pick<JournalState, 'origins' | 'closed'> & { readonly leadIn: boolean }) | null = null;
   private list: readonly GridCue[] = [];
   private sounds: readonly LaidSound[] = [];
 
@@ -130,9 +130,12 @@ export class CueRound {
 
   private readGrid(): void {
     const { state } = this.parts.book;
-    if (this.basis?.origins === state.origins && this.basis.closed === state.closed) return;
-    this.basis = { origins: state.origins, closed: state.closed };
+    // The way to the ear is known only once the sound is unlocked, and may change with the output.
+    const leadIn = this.parts.leadIn();
+    const { basis } = this;
+    if (basis?.origins === state.origins && basis.closed === state.closed && basis.leadIn === leadIn) return;
+    this.basis = { origins: state.origins, closed: state.closed, leadIn };
     this.list = gridCues(this.parts.plan, state);
-    this.sounds = soundsOf(this.list, state.origins, this.parts.leadIn());
+    this.sounds = soundsOf(this.list, state.origins, leadIn);
   }
 }

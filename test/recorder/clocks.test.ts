@@ -112,6 +112,18 @@ describe('the page is hidden', () => {
     expect(gaps(lesson)).toEqual([['hidden', 45_000, 80_000, false]]);
   });
 
+  it('still hidden at the end, the stretch ends with the session, and the end stays complete and on time', async () => {
+    const lesson = await begun();
+    lesson.session.silence(true);
+    await lesson.until(560_000);
+    lesson.clock.throttle = 60_000;
+    lesson.setHidden(true);
+    await lesson.until(700_000);
+    expect(gaps(lesson)).toEqual([['hidden', 570_000, 615_000, false]]);
+    expect(lesson.store.journal().at(-1)).toMatchObject({ kind: 'ended', reason: 'complete', at: 615_000 });
+    expect(lesson.outcome().slice(36)).toEqual(['missed', 'prompt failed', 'prompt failed', 'prompt failed']);
+  });
+
   it('a busy page keeps its sounds, and shows no cue that is over', async () => {
     const lesson = await begun();
     await lesson.until(14_900);

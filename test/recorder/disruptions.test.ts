@@ -1,4 +1,5 @@
 import { describe, expect, it } from 'vitest';
+import { leadIn } from '../../src/recorder/cuePatterns.ts';
 import { headerOf } from '../support/session.ts';
 import { Lesson, outcomeOf } from './fakes/lesson.ts';
 
@@ -273,6 +274,24 @@ describe('silence and the output', () => {
     await lesson.until(110_000);
     expect(lesson.outcome()).toEqual(Array(6).fill('on'));
     expect(lesson.kinds()).not.toContain('gap');
+  });
+
+  it('wakes an earpiece on the air with something quiet before each tone, and a wired one with nothing', async () => {
+    for (const [latencyMs, leads] of [
+      [180, true],
+      [20, false],
+    ] as const) {
+      const lesson = new Lesson();
+      lesson.audio.latencyMs = latencyMs;
+      // The screen has looked at the session before its sound was unlocked.
+      expect(lesson.session.snapshot().phase).toBe('ready');
+      await lesson.begin();
+      await lesson.until(110_000);
+      const patterns = lesson.audio.heard().map(({ pattern }) => pattern.tones.includes(leadIn));
+      expect(patterns).toEqual(Array(9).fill(leads));
+      expect(heardTimes(lesson)).toEqual([15_000, 30_000, 45_000, 60_000, 75_000, 90_000]);
+      expect(lesson.store.journal()[0]).toMatchObject({ kind: 'started', audioLatencyMs: latencyMs });
+    }
   });
 
   it('vibrates only where the protocol asks for it', async () => {

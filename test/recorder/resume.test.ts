@@ -180,6 +180,7 @@ describe('resumption', () => {
     await paused.lesson.clock.advance(0);
     const again = await resumed(paused.header, paused.lesson.store.journal(), 600_000);
     await again.session.begin();
+    await again.clock.advance(30_000);
     expect(again.session.snapshot()).toMatchObject({ phase: 'paused', now: 50_000 });
     again.session.resume();
     await again.clock.advance(10_000);
