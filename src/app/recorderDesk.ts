@@ -1,6 +1,7 @@
 import { ok, problem, type Result } from '../kernel/result.ts';
 import type { SessionHeader } from '../model/session.ts';
-import { createLiveSession, type LiveOptions, type LiveSession } from '../recorder/liveSession.ts';
+import { createLiveSession } from '../recorder/createLiveSession.ts';
+import type { LiveOptions, LiveSession } from '../recorder/liveSession.ts';
 import type { RecorderPorts } from '../recorder/ports.ts';
 import type { OpenOptions, RecorderDesk } from '../screens/services.ts';
 import type { Store } from '../tasks/ports.ts';

@@ -2,12 +2,8 @@ import type { AwayReason, EntryRef, JournalEntry } from '../journal/entry.ts';
 import type { Id } from '../kernel/ids.ts';
 import type { Result } from '../kernel/result.ts';
 import type { PageMs } from '../kernel/units.ts';
-import type { SessionHeader } from '../model/session.ts';
-import { planOf } from './grid.ts';
-import type { RecorderPorts, Stop } from './ports.ts';
+import type { Stop } from './ports.ts';
 import type { RoomSnapshot } from './roomSnapshot.ts';
-import { RunningSession } from './runningSession.ts';
-import { SessionRun } from './sessionRun.ts';
 
 /**
  * A session while it is recorded. It lives outside React and survives a broken screen. Times of touches are the
@@ -64,17 +60,4 @@ export interface LiveOptions {
   readonly elsewhere?: boolean;
   /** A quiet lead-in before each tone, for wireless earpieces. Default: where the output's delay says that it is one. */
   readonly leadIn?: boolean;
-}
-
-/** Makes a session of its frozen header, ready to begin. Throws for a listed schedule, which no screen offers. */
-export function createLiveSession(
-  header: SessionHeader,
-  ports: RecorderPorts,
-  options: LiveOptions,
-): LiveSession {
-  const plan = planOf(header);
-  if (plan === null || header.schedule.kind !== 'laid') {
-    throw new Error('A schedule from a table cannot be recorded.');
-  }
-  return new RunningSession(new SessionRun(header, header.schedule.protocol, plan, ports, options));
 }

@@ -10,6 +10,7 @@ import { useFarewell } from '../farewell.ts';
 import { useDoing } from '../useDoing.tsx';
 import { CodesSheet } from './CodesSheet.tsx';
 import { CuesSheet } from './CuesSheet.tsx';
+import type { Change } from './change.ts';
 import { Meaning } from './Meaning.tsx';
 import { MethodFields } from './MethodFields.tsx';
 import { WhomFields } from './WhomFields.tsx';
@@ -20,8 +21,6 @@ interface Props {
   /** The version as which changes will be kept; null for a new protocol. */
   readonly nextVersion: number | null;
 }
-
-export type Change = (changes: Partial<ProtocolDraft>) => void;
 
 /** The recipe of an observation: it says at once what it comes to, and is kept by one button. */
 export function ProtocolForm({ first, nextVersion }: Props) {

@@ -2,7 +2,7 @@ import type { ProtocolDraft } from '../../../tasks/index.ts';
 import { Choice } from '../../../ui/Choice.tsx';
 import { useWords } from '../../services.ts';
 import { NumberField } from '../NumberField.tsx';
-import type { Change } from './ProtocolForm.tsx';
+import type { Change } from './change.ts';
 
 /** How many children, whose turn it is, and how long a part takes. */
 export function WhomFields({ draft, change }: { readonly draft: ProtocolDraft; readonly change: Change }) {
