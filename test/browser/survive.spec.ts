@@ -2,6 +2,7 @@ import type { Page } from '@playwright/test';
 import { seededRandom } from '../../src/kernel/random.ts';
 import { durabilities, journalOnDisk, sessionOf, watchDurability } from './support/kept.ts';
 import { goIn, start } from './support/observing.ts';
+import { picture } from './support/picture.ts';
 import { shortVisitFile } from './support/shortVisit.ts';
 import { expect, test } from './support/test.ts';
 
@@ -134,6 +135,7 @@ test('a second window of the tablet says that the first one records', async ({ t
   );
   await start(page);
   await expect(page.locator('.look-lead', { hasText: 'look at' })).toBeVisible({ timeout: 20_000 });
+  await picture(page, 'room');
   const second = await tablet.openApp({ hash: '/before', newTab: true });
   await second
     .locator('input[type=file]')
