@@ -1,10 +1,10 @@
 import { createContext, type ReactNode, useContext, useMemo } from 'react';
 import type { Code } from '../../model/codeSet.ts';
+import { defaultKeyMap } from '../../model/keyMap.ts';
 import type { KeyMap } from '../../model/observer.ts';
 import type { SessionHeader } from '../../model/session.ts';
 import { useServices } from '../services.ts';
 import { codeSigns, type SignKind } from './codeEdges.ts';
-import { defaultKeys } from './keys.ts';
 
 /** What stays the same through a session. */
 export interface RoomFacts {
@@ -50,7 +50,7 @@ export function RoomFactsFrom({
       codes: new Map(codes.map((code) => [code.id, { code, sign: signs.get(code.id) ?? 'other' }])),
       latched: method === 'partial',
       pseudonyms: new Map(header.children.map((child) => [child.id, child.pseudonym])),
-      keys: chosen ?? defaultKeys,
+      keys: chosen ?? defaultKeyMap(),
       keysChosen: chosen?.on === true,
       lessonParts: lessonParts ?? [],
     };

@@ -1,9 +1,9 @@
 import { type ReactNode, useState } from 'react';
 import type { PageMs } from '../../kernel/units.ts';
+import { keyOf } from '../../model/keyMap.ts';
 import type { KeyAction } from '../../model/observer.ts';
 import type { Felt } from '../../recorder/roomSnapshot.ts';
 import { useWords } from '../services.ts';
-import { keyOf } from './keys.ts';
 import { useFacts } from './RoomFacts.tsx';
 import { useLive, useRoom } from './useRoom.ts';
 import { useTouchDown } from './useTouchDown.ts';

@@ -1,7 +1,7 @@
 import { useEffect, useRef } from 'react';
 import { type PageMs, pageMs } from '../../kernel/units.ts';
+import { actionOf } from '../../model/keyMap.ts';
 import type { KeyAction, KeyMap } from '../../model/observer.ts';
-import { actionOf } from './keys.ts';
 
 const typesText = 'input, textarea, select, [contenteditable]';
 

@@ -117,7 +117,7 @@ test('keys do what their targets do: once, without modifiers, with their own tim
   press('1');
   press('2', { repeat: true });
   press('2', { ctrlKey: true });
-  press('PageDown');
+  press('PageUp');
   press('0');
   press('B');
   press('Backspace');

@@ -1,5 +1,5 @@
 import { useState } from 'react';
-import { defaultKeyMap } from '../../../model/defaultKeyMap.ts';
+import { defaultKeyMap } from '../../../model/keyMap.ts';
 import type { KeyAction, KeyMap, Observer } from '../../../model/observer.ts';
 import { saveObserver } from '../../../tasks/index.ts';
 import { Button } from '../../../ui/Button.tsx';

@@ -1,5 +1,5 @@
 import { useEffect, useState } from 'react';
-import { keyName, mayMean } from '../../../model/defaultKeyMap.ts';
+import { keyName, mayMean } from '../../../model/keyMap.ts';
 import type { KeyAction, KeyMap } from '../../../model/observer.ts';
 import { Button } from '../../../ui/Button.tsx';
 import { Dialog } from '../../../ui/Dialog.tsx';

@@ -61,3 +61,10 @@ export function actionOf(map: KeyMap | null, key: string): KeyAction | null {
   const name = keyName(key);
   return on && Object.hasOwn(keys, name) ? (keys[name] ?? null) : null;
 }
+
+/** The key to be shown beside a target: the first one that does it (digits come first); null for none, and where keys are off. */
+export function keyOf(map: KeyMap | null, action: KeyAction): string | null {
+  const { on, keys } = map ?? defaultKeyMap();
+  if (!on) return null;
+  return Object.entries(keys).find(([, does]) => does === action)?.[0] ?? null;
+}

@@ -1,5 +1,5 @@
 import { describe, expect, test } from 'vitest';
-import { actionOf, defaultKeyMap, keyName, mayMean } from '../../src/model/defaultKeyMap.ts';
+import { actionOf, defaultKeyMap, keyName, keyOf, mayMean } from '../../src/model/keyMap.ts';
 import { keyMap } from '../../src/model/observer.ts';
 
 describe('the keys to begin with', () => {
@@ -52,5 +52,13 @@ describe('what a key does', () => {
   test('the own map replaces the keys to begin with', () => {
     expect(actionOf({ on: true, keys: { q: 'flag' } }, 'q')).toBe('flag');
     expect(actionOf({ on: true, keys: { q: 'flag' } }, 'f')).toBeNull();
+  });
+});
+
+describe('the key shown beside a target', () => {
+  test('is the first that does it, digits before the rest, and none where keys are off or the action has no key', () => {
+    expect(keyOf(null, 'code:1')).toBe('1');
+    expect(keyOf({ on: false, keys: { a: 'undo' } }, 'undo')).toBeNull();
+    expect(keyOf({ on: true, keys: { a: 'undo' } }, 'flag')).toBeNull();
   });
 });
