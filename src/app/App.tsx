@@ -1,8 +1,8 @@
 import { useEffect } from 'react';
 import { Router } from 'wouter';
 import { useHashLocation } from 'wouter/use-hash-location';
+import { type CoreServices, CoreServicesContext } from '../screens/coreServices.ts';
 import { Routes } from '../screens/routes.tsx';
-import { type Services, ServicesContext } from '../screens/services.ts';
 import { useSettings } from '../screens/useCurrentStudy.ts';
 import type { Settings } from '../tasks/ports.ts';
 import { ErrorBoundary } from './ErrorBoundary.tsx';
@@ -12,7 +12,7 @@ import { UpdateNotice } from './UpdateNotice.tsx';
 import type { Updates } from './updates.ts';
 
 interface Props {
-  readonly services: Services;
+  readonly services: CoreServices;
   readonly updates: Updates;
   readonly notices: StoreNotices;
   readonly onTheme: (theme: Settings['theme']) => void;
@@ -21,7 +21,7 @@ interface Props {
 /** The whole program: what screens are given, which address shows what, and what happens when one breaks. */
 export function App({ services, updates, notices, onTheme }: Props) {
   return (
-    <ServicesContext value={services}>
+    <CoreServicesContext value={services}>
       <Router hook={useHashLocation}>
         <Theme onTheme={onTheme} />
         <UpdateNotice updates={updates} />
@@ -30,7 +30,7 @@ export function App({ services, updates, notices, onTheme }: Props) {
           <Routes />
         </ErrorBoundary>
       </Router>
-    </ServicesContext>
+    </CoreServicesContext>
   );
 }
 

@@ -1,10 +1,10 @@
 import { Component, type ReactNode } from 'react';
 import { Button } from '../ui/Button.tsx';
 import { PageHead } from '../ui/PageHead.tsx';
-import type { Words } from '../words/words.ts';
+import type { CoreWords } from '../words/coreWords.ts';
 
 interface Props {
-  readonly words: Words;
+  readonly words: CoreWords;
   readonly children: ReactNode;
 }
 

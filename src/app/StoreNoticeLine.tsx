@@ -1,5 +1,5 @@
 import { useSyncExternalStore } from 'react';
-import { useServices } from '../screens/services.ts';
+import { useCoreServices } from '../screens/coreServices.ts';
 import { Button } from '../ui/Button.tsx';
 import { Notice } from '../ui/Notice.tsx';
 import type { StoreNotices } from './storeNotices.ts';
@@ -7,7 +7,7 @@ import './updateNotice.css';
 
 /** One sentence when another window makes this one's store step aside; opening the app anew mends it. */
 export function StoreNoticeLine({ notices }: { readonly notices: StoreNotices }) {
-  const { words } = useServices();
+  const { words } = useCoreServices();
   const latest = useSyncExternalStore(notices.subscribe, notices.latest);
   if (latest === null) return null;
   return (

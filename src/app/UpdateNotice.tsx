@@ -1,6 +1,6 @@
 import { useState, useSyncExternalStore } from 'react';
 import { useLocation } from 'wouter';
-import { useServices } from '../screens/services.ts';
+import { useCoreServices } from '../screens/coreServices.ts';
 import { Button } from '../ui/Button.tsx';
 import { Notice } from '../ui/Notice.tsx';
 import type { Updates } from './updates.ts';
@@ -8,7 +8,7 @@ import './updateNotice.css';
 
 /** Offers the new version between sessions; on the recording screen it keeps silent. */
 export function UpdateNotice({ updates }: { readonly updates: Updates }) {
-  const { words, recorder } = useServices();
+  const { words, recorder } = useCoreServices();
   const [location] = useLocation();
   const [later, setLater] = useState(false);
   const waiting = useSyncExternalStore(updates.subscribe, updates.waiting);

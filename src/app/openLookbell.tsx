@@ -9,18 +9,18 @@ import { visibility } from '../devices/visibility.ts';
 import { wakeLock } from '../devices/wakeLock.ts';
 import { wallClock } from '../devices/wallClock.ts';
 import type { Problem } from '../kernel/result.ts';
-import type { Services } from '../screens/services.ts';
+import type { CoreServices } from '../screens/coreServices.ts';
 import { openStore } from '../storage/index.ts';
-import { ensureInstallation } from '../tasks/index.ts';
+import { ensureInstallation } from '../tasks/installation.ts';
 import type { Deps } from '../tasks/ports.ts';
 import { PageHead } from '../ui/PageHead.tsx';
+import { coreWordsFor } from '../words/coreWords.ts';
 import { say } from '../words/say.ts';
-import { wordsFor } from '../words/words.ts';
-import { createAsker } from '../worker/client.ts';
 import { App } from './App.tsx';
 import { demoFiles } from './demoFiles.ts';
 import { device } from './device.ts';
 import { recorderDesk } from './recorderDesk.ts';
+import { startWorker } from './startWorker.ts';
 import { storeNotices } from './storeNotices.ts';
 import { applyTheme } from './theme.ts';
 import { watchForUpdates } from './updates.ts';
@@ -30,7 +30,7 @@ declare const __APP_VERSION__: string;
 
 /** Opens the store, fills every port with its adapter, and shows the program; or says in one sentence why it cannot. */
 export async function openLookbell(root: Root): Promise<void> {
-  const words = wordsFor();
+  const words = coreWordsFor();
   const onTheme = applyTheme(document.documentElement, window.matchMedia('(prefers-color-scheme: dark)'));
   const updates = watchForUpdates();
   const notices = storeNotices();
@@ -55,13 +55,12 @@ export async function openLookbell(root: Root): Promise<void> {
   const writer = await ensureInstallation(base);
   if (!writer.ok) return cannot(writer.problem);
   const deps: Deps = { ...base, writer: writer.value };
-  const worker = new Worker(new URL('../worker/worker.ts', import.meta.url), { type: 'module' });
 
-  const services: Services = {
+  const services: CoreServices = {
     words,
     store,
     deps,
-    ask: createAsker(worker),
+    ask: startWorker(),
     device: tablet,
     recorder: recorderDesk(store, () => ({
       page: pageClock,

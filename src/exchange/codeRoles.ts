@@ -1,5 +1,5 @@
 import { byCodePoint } from '../kernel/compare.ts';
-import { idFromContent } from '../kernel/ids.ts';
+import { idFromContent } from '../kernel/idFromContent.ts';
 import { type Code, type CodeRole, type CodeSet, labelsOfTable } from '../model/codeSet.ts';
 import type { ReadOptions } from './types.ts';
 

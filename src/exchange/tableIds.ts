@@ -1,5 +1,6 @@
 import { byCodePoint } from '../kernel/compare.ts';
-import { type Id, idFromContent } from '../kernel/ids.ts';
+import { idFromContent } from '../kernel/idFromContent.ts';
+import type { Id } from '../kernel/ids.ts';
 import type { TableRow } from './readTableRow.ts';
 import type { ReadOptions } from './types.ts';
 

@@ -1,7 +1,8 @@
 import type { KnownEntry } from '../journal/entry.ts';
 import type { StoredSession } from '../journal/stored.ts';
 import { byCodePoint } from '../kernel/compare.ts';
-import { type Id, idFromContent } from '../kernel/ids.ts';
+import { idFromContent } from '../kernel/idFromContent.ts';
+import type { Id } from '../kernel/ids.ts';
 import { sessionMs } from '../kernel/units.ts';
 import { dateOf } from '../kernel/wallTime.ts';
 import type { SessionChild, SessionHeader } from '../model/session.ts';

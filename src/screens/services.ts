@@ -1,84 +1,20 @@
 import { createContext, useContext } from 'react';
-import type { Result } from '../kernel/result.ts';
-import type { WallTime } from '../kernel/units.ts';
-import type { CueSettings } from '../model/protocol.ts';
-import type { SessionHeader } from '../model/session.ts';
-import type { LiveSession } from '../recorder/liveSession.ts';
-import type { Deps, ExportedFile, Store, StoreReader } from '../tasks/ports.ts';
 import type { Words } from '../words/words.ts';
-import type { Ask } from '../worker/questions.ts';
+import type { CoreServices } from './coreServices.ts';
 
-/** What the screens ask of the tablet itself; `app/` fulfils it from `devices/`. */
-export interface Device {
-  /** Plays the protocol's look cue once. Called in a tap, since sound starts locked. */
-  playTestTone(cues: CueSettings): Promise<{
-    readonly played: boolean;
-    /** The output's name where the browser tells it. */
-    readonly output: string | null;
-    readonly latencyMs: number | null;
-  }>;
-  /** True where the browser tells when an earpiece is pulled out. */
-  readonly tellsOutputChanges: boolean;
-  wakeLock(): Promise<'held' | 'refused' | 'missing'>;
-  /** Free bytes and whether the browser promised to keep them; null where it does not tell. */
-  room(): Promise<{ readonly free: number | null; readonly kept: boolean | null }>;
-  battery(): Promise<{ readonly level: number; readonly charging: boolean } | null>;
-  otherTabRecords(): Promise<boolean>;
-  /** True when everything needed is on the tablet and a start without network will work. */
-  readyOffline(): Promise<boolean>;
-  now(): { readonly wall: WallTime; readonly timeZone: string | null };
-  readonly vibrates: boolean;
-  /** Share sheet where it takes the file, else download. Called in a tap with the bytes ready; `again`: the browser wants another tap. */
-  handOver(
-    file: Pick<ExportedFile, 'name' | 'type' | 'bytes'>,
-  ): Promise<'shared' | 'saved' | 'cancelled' | 'again'>;
-  print(): void;
-}
+export type { Device, OpenOptions, RecorderDesk } from './coreServices.ts';
 
-export interface OpenOptions {
-  /** Checks that stood on hold when the observer went in. */
-  readonly checks: readonly string[];
-  readonly anyway: boolean;
-}
-
-/** The one recorder of this tab. Its state lives here, not in React: it survives a broken screen. */
-export interface RecorderDesk {
-  /** The running session, or null. */
-  current(): LiveSession | null;
-  /** Whose session it is. */
-  currentId(): string | null;
-  /** Opens a new session or resumes an unfinished one; fails when another tab records. */
-  open(header: SessionHeader, options: OpenOptions): Promise<Result<LiveSession>>;
-  /** Resumes an unfinished session from its journal. */
-  resume(session: string): Promise<Result<LiveSession>>;
-  /** Puts the session away after it has ended. */
-  close(): void;
-  subscribe(listener: () => void): () => void;
-}
-
-/** Everything that screens are given. */
-export interface Services {
+/** Everything that pages are given: all words. The recording screen does without and is loaded without. */
+export interface Services extends Omit<CoreServices, 'words'> {
   readonly words: Words;
-  readonly store: Store;
-  readonly deps: Deps;
-  readonly ask: Ask;
-  readonly device: Device;
-  readonly recorder: RecorderDesk;
-  /** A stored answer that follows the store; undefined until the first answer. */
-  readonly useStored: <T>(
-    query: (store: StoreReader) => Promise<Result<T>>,
-    dependencies: readonly unknown[],
-  ) => Result<T> | undefined;
-  /** Reads the demo files that come with the program. */
-  readonly demoFiles: () => Promise<Result<{ name: string; bytes: Uint8Array }[]>>;
 }
 
 export const ServicesContext = createContext<Services | null>(null);
 
-/** The services of the app; a screen outside it is a bug. */
+/** The services of the app; a page outside it, or the recording screen, that asks for them is a bug. */
 export function useServices(): Services {
   const services = useContext(ServicesContext);
-  if (services === null) throw new Error('A screen was rendered outside the app.');
+  if (services === null) throw new Error('A page was rendered outside the app.');
   return services;
 }
 

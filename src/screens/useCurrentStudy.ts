@@ -1,16 +1,16 @@
 import type { Study } from '../model/study.ts';
 import type { Settings } from '../tasks/ports.ts';
-import { useServices } from './services.ts';
+import { useCoreServices } from './coreServices.ts';
 
 /** The settings as they stand; undefined while they are being read. */
 export function useSettings(): Settings | undefined {
-  const answer = useServices().useStored((store) => store.settings(), []);
+  const answer = useCoreServices().useStored((store) => store.settings(), []);
   return answer?.ok ? answer.value : undefined;
 }
 
 /** The study that the screens show: null when there is none yet, undefined while it is being read. */
 export function useCurrentStudy(): Study | null | undefined {
-  const answer = useServices().useStored(async (store) => {
+  const answer = useCoreServices().useStored(async (store) => {
     const settings = await store.settings();
     if (!settings.ok) return settings;
     if (settings.value.study !== null) {

@@ -1,6 +1,6 @@
 import { canonicalJson } from '../kernel/canonicalJson.ts';
 import { byCodePoint } from '../kernel/compare.ts';
-import { idFromContent } from '../kernel/ids.ts';
+import { idFromContent } from '../kernel/idFromContent.ts';
 import type { Classroom } from '../model/classroom.ts';
 import type { Revision } from '../model/common.ts';
 import type { Observer } from '../model/observer.ts';

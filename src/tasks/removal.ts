@@ -1,4 +1,4 @@
-import { idFromContent } from '../kernel/ids.ts';
+import { idFromContent } from '../kernel/idFromContent.ts';
 import { ok, problem, type Result } from '../kernel/result.ts';
 import { nextRevision } from '../model/revision.ts';
 import type { Study } from '../model/study.ts';

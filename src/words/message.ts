@@ -1,4 +1,4 @@
-import type { Format } from './format.ts';
+import { type Format, formatFor } from './format.ts';
 
 /** A sentence with gaps: its values and the number forms of its language. */
 export type Message<Values> = (values: Values, f: Format) => string;
@@ -20,4 +20,14 @@ export function spoken<A extends Area>(area: A, f: Format): Spoken<A> {
     typeof message === 'function' ? (values: never) => (message as Message<never>)(values, f) : message,
   ]);
   return Object.fromEntries(entries) as Spoken<A>;
+}
+
+/** A catalogue, or a part of one, with its number forms filled in, which are there as `f` too. */
+export type Bound<C> = { readonly [Name in keyof C]: Spoken<C[Name]> } & { readonly f: Format };
+
+/** Binds all areas of a catalogue to the number forms of a language. */
+export function bind<C extends object>(catalogue: C, locale: string): Bound<C> {
+  const f = formatFor(locale);
+  const areas = Object.entries(catalogue).map(([name, area]) => [name, spoken(area as Area, f)]);
+  return { ...Object.fromEntries(areas), f } as Bound<C>;
 }

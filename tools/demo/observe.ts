@@ -1,6 +1,6 @@
 import type { EntryBody, JournalEntry } from '../../src/journal/entry.ts';
 import type { StoredSession } from '../../src/journal/stored.ts';
-import { idFromContent } from '../../src/kernel/ids.ts';
+import { idFromContent } from '../../src/kernel/idFromContent.ts';
 import { type Random, seededRandom, shuffled } from '../../src/kernel/random.ts';
 import { epochMs } from '../../src/kernel/units.ts';
 import { epochOf, toWallTime } from '../../src/kernel/wallTime.ts';

@@ -1,4 +1,4 @@
-import { idFromContent } from '../../src/kernel/ids.ts';
+import { idFromContent } from '../../src/kernel/idFromContent.ts';
 import type { Child, Classroom } from '../../src/model/classroom.ts';
 import type { Observer } from '../../src/model/observer.ts';
 import type { Protocol } from '../../src/model/protocol.ts';

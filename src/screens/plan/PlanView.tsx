@@ -1,6 +1,6 @@
 import type { CSSProperties } from 'react';
 import type { Seat, SeatingPlan } from '../../model/seatingPlan.ts';
-import { useWords } from '../services.ts';
+import { useCoreWords } from '../coreServices.ts';
 import { SeatLabel } from './SeatLabel.tsx';
 import { onGlass, type Place, tracks, turned } from './turned.ts';
 import './planView.css';
@@ -38,7 +38,7 @@ export function PlanView(props: Props) {
     onSeat,
     onPlace,
   } = props;
-  const { study } = useWords();
+  const { plan: said } = useCoreWords();
   const view = turned(plan);
   const open = onPlace !== undefined;
   // While seats are put up, one more place on each side can be tapped, and aisles are as wide as seats.
@@ -76,7 +76,7 @@ export function PlanView(props: Props) {
                   className="seat seat-place"
                   style={at(x, y)}
                   data-place={`${place.column} ${place.row}`}
-                  aria-label={study.seatPlace({ row: y + 2, column: x + 2 })}
+                  aria-label={said.seatPlace({ row: y + 2, column: x + 2 })}
                   onClick={() => onPlace(place)}
                 >
                   <svg className="seat-plus" viewBox="0 0 14 14" aria-hidden="true">
@@ -109,7 +109,7 @@ export function PlanView(props: Props) {
                 type="button"
                 {...common}
                 data-place={`${seat.column} ${seat.row}`}
-                aria-label={name === undefined ? study.seatFree(place) : study.seatOf({ name, ...place })}
+                aria-label={name === undefined ? said.seatFree(place) : said.seatOf({ name, ...place })}
                 aria-pressed={seat.id === chosen}
                 onClick={() => onSeat(seat)}
               >
@@ -124,7 +124,7 @@ export function PlanView(props: Props) {
           <circle cx="18" cy="9" r="7" />
           <path d="M2 31 C2 21 9 17 18 17 C27 17 34 21 34 31" />
         </svg>
-        <span>{study.planYou}</span>
+        <span>{said.you}</span>
       </figcaption>
     </figure>
   );

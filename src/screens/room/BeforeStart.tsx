@@ -3,14 +3,14 @@ import { useLocation } from 'wouter';
 import { Button } from '../../ui/Button.tsx';
 import { Notice } from '../../ui/Notice.tsx';
 import { say } from '../../words/say.ts';
-import { useServices } from '../services.ts';
+import { useCoreServices } from '../coreServices.ts';
 import { useFacts } from './RoomFacts.tsx';
 import { useLive, useRoom } from './useRoom.ts';
 
 /** The page of the one tap that begins (or goes on with) a session; the tap also unlocks the sound. */
 export function BeforeStart() {
   const live = useLive();
-  const { words } = useServices();
+  const { words } = useCoreServices();
   const { room, problems } = words;
   const { header, pseudonyms } = useFacts();
   const [, go] = useLocation();

@@ -1,7 +1,7 @@
 import type { ReactNode } from 'react';
 import { Button } from '../../ui/Button.tsx';
 import { CodeSign, Ring } from '../../ui/Sign.tsx';
-import { useWords } from '../services.ts';
+import { useCoreWords } from '../coreServices.ts';
 import { Panel } from './Panel.tsx';
 import { useFacts } from './RoomFacts.tsx';
 import { useLive, useRoom } from './useRoom.ts';
@@ -15,7 +15,7 @@ interface Props {
 /** The rare things, in one row: undo says what it would undo; silence stands at its end. */
 export function BottomRow({ onPanel }: Props) {
   const live = useLive();
-  const { room } = useWords();
+  const { room } = useCoreWords();
   return (
     <fieldset className="room-bottom">
       <legend className="visually-hidden">{room.rare}</legend>
@@ -39,7 +39,7 @@ export function BottomRow({ onPanel }: Props) {
 
 /** On narrow glass the rarer things wait behind one button. */
 export function MorePanel({ onPanel, onClose }: Props & { readonly onClose: () => void }) {
-  const { room, common } = useWords();
+  const { room, common } = useCoreWords();
   return (
     <Panel title={room.moreTitle} closeLabel={common.close} onClose={onClose}>
       <div className="panel-choices">
@@ -51,7 +51,7 @@ export function MorePanel({ onPanel, onClose }: Props & { readonly onClose: () =
 
 function RareThings({ onPanel, onDone }: Props & { readonly onDone?: () => void }) {
   const live = useLive();
-  const { room } = useWords();
+  const { room } = useCoreWords();
   const { lessonParts } = useFacts();
   const { phase, mayPause, part, last } = useRoom((s) => ({
     phase: s.phase,
@@ -103,7 +103,7 @@ function RareThings({ onPanel, onDone }: Props & { readonly onDone?: () => void 
 
 function Undo() {
   const live = useLive();
-  const { room } = useWords();
+  const { room } = useCoreWords();
   const { codes, pseudonyms } = useFacts();
   const undo = useRoom(({ undo, intervals }) => ({
     kind: undo?.kind ?? null,
@@ -141,7 +141,7 @@ function Undo() {
 /** One touch, always in sight. */
 function Silence() {
   const live = useLive();
-  const { room } = useWords();
+  const { room } = useCoreWords();
   const on = useRoom((s) => s.sound.on);
   return (
     <Button className="rare rare-silence" onClick={() => live.silence(on)}>

@@ -2,8 +2,8 @@ import { useState } from 'react';
 import type { AwayReason } from '../../journal/entry.ts';
 import type { SessionChild } from '../../model/session.ts';
 import { Button } from '../../ui/Button.tsx';
+import { useCoreWords } from '../coreServices.ts';
 import { PlanView } from '../plan/PlanView.tsx';
-import { useWords } from '../services.ts';
 import { usePlanNow } from './LessonPlan.tsx';
 import { Panel } from './Panel.tsx';
 import { useFacts } from './RoomFacts.tsx';
@@ -11,7 +11,7 @@ import { useLive, useRoom } from './useRoom.ts';
 
 /** A child left, came back, or sits elsewhere: first who, then what. */
 export function ChildPanel({ onClose }: { readonly onClose: () => void }) {
-  const { room, missing } = useWords();
+  const { room, missing } = useCoreWords();
   const { header } = useFacts();
   const away = useRoom((s) => s.away);
   const [child, setChild] = useState<SessionChild | null>(null);
@@ -36,7 +36,7 @@ export function ChildPanel({ onClose }: { readonly onClose: () => void }) {
 
 function AboutChild({ child, onClose }: { readonly child: SessionChild; readonly onClose: () => void }) {
   const live = useLive();
-  const { room } = useWords();
+  const { room } = useCoreWords();
   const { pseudonyms } = useFacts();
   const plan = usePlanNow();
   const isAway = useRoom((s) => s.away.has(child.id));

@@ -1,5 +1,5 @@
 import { CodeSign, Ring } from '../../ui/Sign.tsx';
-import { useWords } from '../services.ts';
+import { useCoreWords } from '../coreServices.ts';
 import type { EdgeTarget } from './codeEdges.ts';
 import { useFacts } from './RoomFacts.tsx';
 import { Target } from './Target.tsx';
@@ -13,7 +13,7 @@ interface Props {
 
 /** The targets at one edge of the glass, always in the same places. */
 export function Edge({ side, targets, withChildBefore = false }: Props) {
-  const { room } = useWords();
+  const { room } = useCoreWords();
   return (
     <section className={`edge edge-${side}`} aria-label={side === 'left' ? room.codesLeft : room.codesRight}>
       {targets.map((target) => (
@@ -48,7 +48,7 @@ function CodeTarget({ target }: { readonly target: Extract<EdgeTarget, { kind: '
 
 function NoneOfThese() {
   const live = useLive();
-  const { room } = useWords();
+  const { room } = useCoreWords();
   const chosen = useRoom((s) => s.current?.status === 'scored' && s.current.codes?.length === 0);
   return (
     <Target
@@ -66,7 +66,7 @@ function NoneOfThese() {
 
 function CannotSee() {
   const live = useLive();
-  const { room } = useWords();
+  const { room } = useCoreWords();
   const chosen = useRoom((s) => s.current?.missing === 'out of view');
   return (
     <Target
@@ -85,7 +85,7 @@ function CannotSee() {
 /** Turns the next touch to the look before this one. */
 function ChildBefore() {
   const live = useLive();
-  const { room } = useWords();
+  const { room } = useCoreWords();
   const { pseudonyms } = useFacts();
   const armed = useRoom((s) => s.armedBefore !== null);
   const child = useRoom((s) => (s.previous === null ? null : s.previous.child));

@@ -3,7 +3,7 @@ import type { RoomSnapshot } from '../../recorder/roomSnapshot.ts';
 import { Button } from '../../ui/Button.tsx';
 import { Hold } from '../../ui/Sign.tsx';
 import { say } from '../../words/say.ts';
-import { useWords } from '../services.ts';
+import { useCoreWords } from '../coreServices.ts';
 import { useLive, useRoom } from './useRoom.ts';
 
 /** Which hold comes first; the others wait until it is gone or seen. */
@@ -27,7 +27,7 @@ function holdsOf(s: RoomSnapshot) {
 /** One calm sentence at a fixed place: nothing moves when it comes or goes. `leaving` counts attempts to go back. */
 export function HoldLine({ leaving }: { readonly leaving: number }) {
   const live = useLive();
-  const { room, problems } = useWords();
+  const { room, problems } = useCoreWords();
   const s = useRoom(holdsOf);
   const [seen, setSeen] = useState(() => ({ gaps: 0, leaving: 0, awake: false }));
   const refusal = useFreshRefusal(s);

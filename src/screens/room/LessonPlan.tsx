@@ -1,7 +1,7 @@
 import { useMemo } from 'react';
 import type { SeatingPlan } from '../../model/seatingPlan.ts';
+import { useCoreWords } from '../coreServices.ts';
 import { PlanView } from '../plan/PlanView.tsx';
-import { useWords } from '../services.ts';
 import { useFacts } from './RoomFacts.tsx';
 import { useRoom } from './useRoom.ts';
 
@@ -26,7 +26,7 @@ export function usePlanNow(): SeatingPlan | null {
 
 /** The seats as the observer sees them: brass = now, dashed = next. Who is away is said below. */
 export function LessonPlan() {
-  const words = useWords();
+  const words = useCoreWords();
   const { pseudonyms, header } = useFacts();
   const plan = usePlanNow();
   const current = useRoom((s) => s.current?.child ?? null);

@@ -1,10 +1,10 @@
-import { useWords } from '../services.ts';
+import { useCoreWords } from '../coreServices.ts';
 import { useFacts } from './RoomFacts.tsx';
 import { useRoom } from './useRoom.ts';
 
 /** Whom to look at, and whom then: the largest words on the glass. */
 export function LookAt() {
-  const { room, missing } = useWords();
+  const { room, missing } = useCoreWords();
   const { pseudonyms } = useFacts();
   const s = useRoom(({ current, upcoming, countIn, cuePart, armedBefore, previous, away }) => ({
     child: current?.child ?? null,

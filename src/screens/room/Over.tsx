@@ -3,14 +3,14 @@ import { useLocation } from 'wouter';
 import { Button } from '../../ui/Button.tsx';
 import { Hold, Tick } from '../../ui/Sign.tsx';
 import { say } from '../../words/say.ts';
-import { useServices } from '../services.ts';
+import { useCoreServices } from '../coreServices.ts';
 import { useFacts } from './RoomFacts.tsx';
 import { useLive, useRoom } from './useRoom.ts';
 
 /** The end: whether everything is kept, how complete it is, and the way to the figures. No figure is shown here. */
 export function Over() {
   const live = useLive();
-  const { words, recorder } = useServices();
+  const { words, recorder } = useCoreServices();
   const { room, problems } = words;
   const { header } = useFacts();
   const [, go] = useLocation();

@@ -1,6 +1,6 @@
 import { type KeyboardEvent, type ReactNode, useEffect, useId, useRef } from 'react';
 import { Button } from '../../ui/Button.tsx';
-import { useWords } from '../services.ts';
+import { useCoreWords } from '../coreServices.ts';
 
 interface Props {
   readonly title: ReactNode;
@@ -15,7 +15,7 @@ interface Props {
  * edges go on while it is open.
  */
 export function Panel({ title, children, actions, closeLabel, onClose }: Props) {
-  const { common } = useWords();
+  const { common } = useCoreWords();
   const heading = useRef<HTMLHeadingElement>(null);
   const id = useId();
   useEffect(() => {

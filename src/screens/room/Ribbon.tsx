@@ -1,12 +1,12 @@
 import { type CSSProperties, memo } from 'react';
-import { useWords } from '../services.ts';
+import { useCoreWords } from '../coreServices.ts';
 import { ribbonText } from './ribbonText.ts';
 import { useRoom } from './useRoom.ts';
 import './ribbon.css';
 
 /** The whole session: a tick an interval, ring = missing, dot above = late, brass = now, a thin line between parts. */
 export function Ribbon() {
-  const words = useWords();
+  const words = useCoreWords();
   const text = useRoom((s) => ribbonText(s.intervals));
   // Before the first cue the triangle stands just before the look that is coming.
   const now = useRoom((s) =>

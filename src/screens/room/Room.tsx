@@ -1,14 +1,14 @@
 import { useEffect, useState, useSyncExternalStore } from 'react';
 import { PageHead } from '../../ui/PageHead.tsx';
 import { say } from '../../words/say.ts';
-import { useServices } from '../services.ts';
+import { useCoreServices } from '../coreServices.ts';
 import { Lesson } from './Lesson.tsx';
 import { RoomFactsFrom } from './RoomFacts.tsx';
 import { LiveContext } from './useRoom.ts';
 
 /** The recording of one session: the one that runs in this tab, or one that is taken up again. */
 export function Room({ session }: { readonly session: string }) {
-  const { words, recorder } = useServices();
+  const { words, recorder } = useCoreServices();
   const isHere = useSyncExternalStore(recorder.subscribe, () => recorder.currentId() === session);
   const [problem, setProblem] = useState<string | null>(null);
   // Put away while its screen is still there (on the way out): not to be taken up again.

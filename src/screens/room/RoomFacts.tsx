@@ -3,7 +3,7 @@ import type { Code } from '../../model/codeSet.ts';
 import { defaultKeyMap } from '../../model/keyMap.ts';
 import type { KeyMap } from '../../model/observer.ts';
 import type { SessionHeader } from '../../model/session.ts';
-import { useServices } from '../services.ts';
+import { useCoreServices } from '../coreServices.ts';
 import { codeSigns, type SignKind } from './codeEdges.ts';
 
 /** What stays the same through a session. */
@@ -35,7 +35,7 @@ export function RoomFactsFrom({
   readonly header: SessionHeader;
   readonly children: ReactNode;
 }) {
-  const { useStored } = useServices();
+  const { useStored } = useCoreServices();
   const observer = useStored((store) => store.observer(header.observer.id), [header.observer.id]);
   const study = useStored((store) => store.study(header.study), [header.study]);
   const chosen = (observer?.ok ? observer.value?.keyMap : null) ?? null;

@@ -1,12 +1,12 @@
 import type { ReactNode } from 'react';
 import { Button } from '../../ui/Button.tsx';
-import { useWords } from '../services.ts';
+import { useCoreWords } from '../coreServices.ts';
 import { useLive, useRoom } from './useRoom.ts';
 
 /** States in which nothing is marked: what goes on, what is missing, one main button. */
 export function Standstill() {
   const live = useLive();
-  const { room } = useWords();
+  const { room } = useCoreWords();
   const s = useRoom(({ phase, partPhase, nextPart, breakStarted }) => ({
     phase,
     partPhase: partPhase ?? '',
@@ -56,7 +56,7 @@ function Still({
   readonly text: string;
   readonly children: ReactNode;
 }) {
-  const { room } = useWords();
+  const { room } = useCoreWords();
   const missing = useRoom((s) => s.intervals.filter(({ status }) => status === 'missing').length);
   return (
     <div className="still">

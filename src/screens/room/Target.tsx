@@ -3,7 +3,7 @@ import type { PageMs } from '../../kernel/units.ts';
 import { keyOf } from '../../model/keyMap.ts';
 import type { KeyAction } from '../../model/observer.ts';
 import type { Felt } from '../../recorder/roomSnapshot.ts';
-import { useWords } from '../services.ts';
+import { useCoreWords } from '../coreServices.ts';
 import { useFacts } from './RoomFacts.tsx';
 import { useLive, useRoom } from './useRoom.ts';
 import { useTouchDown } from './useTouchDown.ts';
@@ -48,7 +48,7 @@ function FeltMark({ wasFelt }: { readonly wasFelt: (felt: Felt) => boolean }) {
 }
 
 function KeyHint({ action }: { readonly action: KeyAction }) {
-  const { room } = useWords();
+  const { room } = useCoreWords();
   const key = keyOf(useFacts().keys, action);
   return key === null ? null : <kbd className="key">{room.key({ key })}</kbd>;
 }

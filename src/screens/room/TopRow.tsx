@@ -1,5 +1,5 @@
 import { Tick } from '../../ui/Sign.tsx';
-import { useWords } from '../services.ts';
+import { useCoreWords } from '../coreServices.ts';
 import { Ribbon } from './Ribbon.tsx';
 import { useRoom } from './useRoom.ts';
 
@@ -18,7 +18,7 @@ export function TopRow() {
 }
 
 function TimeLeft() {
-  const words = useWords();
+  const words = useCoreWords();
   const left = useRoom((s) => (s.msLeft === null ? null : Math.ceil(s.msLeft / 1000)));
   return (
     <p className="room-left">
@@ -33,7 +33,7 @@ function TimeLeft() {
 }
 
 function Round() {
-  const words = useWords();
+  const words = useCoreWords();
   const { round, rounds } = useRoom((s) => ({ round: s.round, rounds: s.rounds }));
   return (
     <p className="room-round">{round !== null && rounds !== null && words.room.round({ round, rounds })}</p>
@@ -42,7 +42,7 @@ function Round() {
 
 /** What is on the disk, of what was entered. */
 function KeptSign() {
-  const { room } = useWords();
+  const { room } = useCoreWords();
   const { kept, of } = useRoom((s) => ({ kept: s.kept.kept, of: s.kept.of }));
   return (
     <p className="room-kept">

@@ -2,7 +2,7 @@ import { type FormEvent, useId, useState } from 'react';
 import { Button } from '../../ui/Button.tsx';
 import { Check } from '../../ui/Choice.tsx';
 import { TextArea, TextField } from '../../ui/Field.tsx';
-import { useWords } from '../services.ts';
+import { useCoreWords } from '../coreServices.ts';
 import { Panel } from './Panel.tsx';
 import { useFacts } from './RoomFacts.tsx';
 import { useLive, useRoom } from './useRoom.ts';
@@ -14,7 +14,7 @@ interface Props {
 /** Words about the lesson, or about the last flag. */
 export function NotePanel({ onClose }: Props) {
   const live = useLive();
-  const { room } = useWords();
+  const { room } = useCoreWords();
   const form = useId();
   const flag = useRoom((s) => s.lastFlag);
   const [text, setText] = useState('');
@@ -51,7 +51,7 @@ export function NotePanel({ onClose }: Props) {
 /** Which part of the lesson it is now. */
 export function LessonPartPanel({ onClose }: Props) {
   const live = useLive();
-  const { room } = useWords();
+  const { room } = useCoreWords();
   const { lessonParts } = useFacts();
   const now = useRoom((s) => s.lessonPart);
   const choose = (part: string | null) => (): void => {
@@ -77,7 +77,7 @@ export function LessonPartPanel({ onClose }: Props) {
 /** Ending cannot be taken back, so it is asked once, with what it costs. */
 export function EndPanel({ onClose }: Props) {
   const live = useLive();
-  const { room } = useWords();
+  const { room } = useCoreWords();
   const form = useId();
   const notMade = useRoom((s) => s.intervals.filter(({ status }) => status === 'waiting').length);
   const [why, setWhy] = useState('');

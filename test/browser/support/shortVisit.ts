@@ -1,5 +1,5 @@
 import { writeVisitFile } from '../../../src/exchange/writeVisitFile.ts';
-import { idFromContent } from '../../../src/kernel/ids.ts';
+import { idFromContent } from '../../../src/kernel/idFromContent.ts';
 import type { WallTime } from '../../../src/kernel/units.ts';
 import type { Protocol } from '../../../src/model/protocol.ts';
 import type { VisitPlan } from '../../../src/model/visitPlan.ts';

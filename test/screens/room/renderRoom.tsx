@@ -1,7 +1,7 @@
 import { problem } from '../../../src/kernel/result.ts';
 import type { RoomSnapshot } from '../../../src/recorder/roomSnapshot.ts';
 import { Room } from '../../../src/screens/room/Room.tsx';
-import type { RecorderDesk } from '../../../src/screens/services.ts';
+import { type RecorderDesk, ServicesContext } from '../../../src/screens/services.ts';
 import { fakeServices, renderScreen } from '../support/renderScreen.tsx';
 import { FakeLive } from './fakeLive.ts';
 
@@ -29,6 +29,12 @@ export function renderRoom(snapshot: RoomSnapshot) {
   const live = new FakeLive(snapshot);
   const recorder = deskWith(live);
   const services = fakeServices({ recorder });
-  const view = renderScreen(<Room session="session-1" />, services, '/room/session-1');
+  // The recording screen has the core's words only.
+  const room = (
+    <ServicesContext value={null}>
+      <Room session="session-1" />
+    </ServicesContext>
+  );
+  const view = renderScreen(room, services, '/room/session-1');
   return { ...view, live, services, recorder };
 }

@@ -5,7 +5,8 @@ import { memoryLocation } from 'wouter/memory-location';
 import { seededRandom } from '../../../src/kernel/random.ts';
 import { problem, type Result } from '../../../src/kernel/result.ts';
 import type { WallTime } from '../../../src/kernel/units.ts';
-import { type Device, type Services, ServicesContext, useServices } from '../../../src/screens/services.ts';
+import { CoreServicesContext, useCoreServices } from '../../../src/screens/coreServices.ts';
+import { type Device, type Services, ServicesContext } from '../../../src/screens/services.ts';
 import { memoryStore } from '../../../src/storage/index.ts';
 import type { StoreReader } from '../../../src/tasks/ports.ts';
 import { wordsFor } from '../../../src/words/words.ts';
@@ -35,7 +36,7 @@ function useStored<T>(
   query: (reader: StoreReader) => Promise<Result<T>>,
   dependencies: readonly unknown[],
 ): Result<T> | undefined {
-  const { store } = useServices();
+  const { store } = useCoreServices();
   const [answer, setAnswer] = useState<Result<T>>();
   // biome-ignore lint/correctness/useExhaustiveDependencies: the caller names what the query depends on
   useEffect(() => store.watch(query, setAnswer), [store, ...dependencies]);
@@ -77,9 +78,11 @@ export function fakeServices(changes: Partial<Services> = {}): Services {
 export function renderScreen(screen: ReactNode, services: Services, path = '/before') {
   const { hook, history } = memoryLocation({ path, record: true });
   const view = render(
-    <ServicesContext value={services}>
-      <Router hook={hook}>{screen}</Router>
-    </ServicesContext>,
+    <CoreServicesContext value={services}>
+      <ServicesContext value={services}>
+        <Router hook={hook}>{screen}</Router>
+      </ServicesContext>
+    </CoreServicesContext>,
   );
   return { ...view, visited: history };
 }

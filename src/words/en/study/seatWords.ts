@@ -2,16 +2,8 @@ import type { Format } from '../../format.ts';
 
 type F = Format;
 
-/** The plan of seats, as a picture and as something to set up. */
+/** The plan of seats as something to set up. */
 export const seatWords = {
-  planYou: 'you',
-  seatOf: ({ name, row, column }: { name: string; row: number; column: number }, f: F) =>
-    `${name}, row ${f.whole(row)}, place ${f.whole(column)}`,
-  seatFree: ({ row, column }: { row: number; column: number }, f: F) =>
-    `Free seat, row ${f.whole(row)}, place ${f.whole(column)}`,
-  seatPlace: ({ row, column }: { row: number; column: number }, f: F) =>
-    `Put a seat in row ${f.whole(row)}, place ${f.whole(column)}`,
-
   seatsTitle: ({ klass }: { klass: string }) => `Where does everybody sit in ${klass}?`,
   seatsNote: 'Drawn as you see the room from your chair. The thick line is the front.',
   seatsWork: 'What to do with the seats',

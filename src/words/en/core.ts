@@ -1,0 +1,8 @@
+import { common } from './common.ts';
+import { keeping } from './keeping.ts';
+import { missing } from './missing.ts';
+import { plan } from './plan.ts';
+import { room } from './room.ts';
+
+/** What the recording screen says, and what is said everywhere: loaded before anything else, so it is kept small. */
+export const core = { common, missing, problems: keeping, plan, room };
