@@ -3,6 +3,7 @@ import { audio } from '../devices/audio.ts';
 import { chance } from '../devices/chance.ts';
 import { pageClock } from '../devices/pageClock.ts';
 import { recordingLock } from '../devices/recordingLock.ts';
+import { speech } from '../devices/speech.ts';
 import { timer } from '../devices/timer.ts';
 import { vibration } from '../devices/vibration.ts';
 import { visibility } from '../devices/visibility.ts';
@@ -70,6 +71,7 @@ export async function openLookbell(root: Root): Promise<void> {
       visibility,
       wakeLock: wakeLock(),
       vibration,
+      speech: speech('en'),
       lock: recordingLock,
       random: chance,
     })),

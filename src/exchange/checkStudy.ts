@@ -66,9 +66,10 @@ function checkReferences({ header, journal }: StoredSession, path: string): Refu
       return refuse(`${at}.session`, fault('study.otherSession', values));
     }
     if (!isKnown(entry)) continue;
-    if ('interval' in entry && entry.interval !== null && !has(entry.interval)) {
-      const values = { path: `${at}.interval`, interval: entry.interval, most };
-      return refuse(`${at}.interval`, fault('study.noInterval', values));
+    for (const { member, interval } of intervalsOf(entry)) {
+      if (has(interval)) continue;
+      const values = { path: `${at}.${member}`, interval, most };
+      return refuse(`${at}.${member}`, fault('study.noInterval', values));
     }
     for (const { member, code } of codesOf(entry)) {
       if (ids.has(code)) continue;
@@ -80,9 +81,18 @@ function checkReferences({ header, journal }: StoredSession, path: string): Refu
   return null;
 }
 
+function intervalsOf(entry: KnownEntry): { member: string; interval: number }[] {
+  if (entry.kind === 'swapped')
+    return entry.pairs.flatMap((pair, i) =>
+      pair.map((interval, k) => ({ member: `pairs[${i}][${k}]`, interval })),
+    );
+  if (!('interval' in entry) || entry.interval === null) return [];
+  return [{ member: 'interval', interval: entry.interval }];
+}
+
 function codesOf(entry: KnownEntry): { member: string; code: string }[] {
   if (entry.kind === 'marked') return entry.code === null ? [] : [{ member: 'code', code: entry.code }];
-  if (entry.kind === 'settled' || entry.kind === 'amended')
+  if (entry.kind === 'settled' || entry.kind === 'amended' || entry.kind === 'corrected')
     return (entry.codes ?? []).map((code, i) => ({ member: `codes[${i}]`, code }));
   return [];
 }
@@ -97,6 +107,7 @@ function intervalNumbers(header: SessionHeader): { most: number; has: (interval:
   }
   const { protocol, phases } = schedule;
   const perPart = intervalsInPart(protocol.partLength, protocol, children.length);
-  const most = children.length === 0 ? 0 : phases.length * perPart;
+  const nobody = children.length === 0 && protocol.method !== 'headcount';
+  const most = nobody ? 0 : phases.length * perPart;
   return { most, has: (interval) => interval <= most };
 }

@@ -8,8 +8,8 @@ const at = z.int();
 export const entryRef = z.object({ writer: id, seq: whole });
 export type EntryRef = z.infer<typeof entryRef>;
 
-/** Which cue: a momentary look, or the beginning of an observe or a record part. */
-export const cueKind = z.enum(['look', 'observe', 'record']);
+/** Which cue: a momentary look, the next child of a sweep, or the beginning of an observe or a record part. */
+export const cueKind = z.enum(['look', 'observe', 'record', 'next']);
 export type CueKind = z.infer<typeof cueKind>;
 
 export const cueCarrier = z.enum(['sound', 'screen', 'vibration']);
@@ -25,6 +25,9 @@ export type AwayReason = z.infer<typeof awayReason>;
 /** Only where a table uses one interval number for several children: whose interval is meant. */
 const ofChild = z.optional(id);
 
+/** Headcount: children on-task and children present. */
+const counts = z.object({ on: whole, present: whole });
+
 /** What each kind of entry says beside who wrote it and when. */
 const bodies = {
   /** Recording began; `checks` are those that stood on hold, `anyway` says that the observer started all the same. */
@@ -33,6 +36,8 @@ const bodies = {
     checks: z.array(shortText),
     anyway: z.boolean(),
     audioLatencyMs: z.optional(z.number()),
+    /** The second of the wall clock at which both observers had agreed to begin. */
+    agreedStart: z.optional(wallTime),
   }),
   /** A cue as planned and as delivered; `by` empty means that it was neither heard nor shown. */
   cued: z.object({
@@ -51,8 +56,7 @@ const bodies = {
     code: z.nullable(shortText),
     late: z.optional(z.boolean()),
     before: z.optional(z.boolean()),
-    /** Headcount: children on-task and children present. */
-    counts: z.optional(z.object({ on: whole, present: whole })),
+    counts: z.optional(counts),
   }),
   missing: z.object({
     kind: z.literal('missing'),
@@ -62,13 +66,36 @@ const bodies = {
     late: z.optional(z.boolean()),
     before: z.optional(z.boolean()),
   }),
+  /** A correction in the room: from now on the interval holds this, whatever was touched before. */
+  corrected: z.object({
+    kind: z.literal('corrected'),
+    interval,
+    codes: z.nullable(z.array(shortText)),
+    missing: z.nullable(missingReason),
+    counts: z.optional(counts),
+  }),
+  /** The wrong child was watched: what stands at the two intervals of each pair changes places. */
+  swapped: z.object({
+    kind: z.literal('swapped'),
+    pairs: z.array(z.tuple([interval, interval])).check(z.minLength(1)),
+  }),
+  /** A stretch of session time that is of no use: intervals whose cue lies in [from, to) are missing, with this reason. */
+  unusable: z.object({
+    kind: z.literal('unusable'),
+    from: at,
+    to: at,
+    reason: missingReason,
+    words: z.optional(longText),
+  }),
   /** Undo: the named entry counts as not made. */
   withdrawn: z.object({ kind: z.literal('withdrawn'), target: entryRef }),
   interrupted: z.object({ kind: z.literal('interrupted') }),
   continued: z.object({ kind: z.literal('continued') }),
   paused: z.object({ kind: z.literal('paused') }),
-  resumed: z.object({ kind: z.literal('resumed') }),
-  left: z.object({ kind: z.literal('left'), child: id, reason: awayReason }),
+  /** The schedule goes on; `repeats` names the interval that the pause broke and that begins anew: session time steps back to it. */
+  resumed: z.object({ kind: z.literal('resumed'), repeats: z.optional(interval) }),
+  /** `by`: the reserve who stands in until the child returns. */
+  left: z.object({ kind: z.literal('left'), child: id, reason: awayReason, by: z.optional(id) }),
   returned: z.object({ kind: z.literal('returned'), child: id }),
   moved: z.object({ kind: z.literal('moved'), child: id, seat: id }),
   lessonPart: z.object({ kind: z.literal('lessonPart'), lessonPart: z.nullable(shortText) }),
@@ -82,6 +109,7 @@ const bodies = {
   }),
   flagged: z.object({ kind: z.literal('flagged'), interval: z.nullable(interval) }),
   noted: z.object({ kind: z.literal('noted'), text: longText, about: z.optional(entryRef) }),
+  /** By the tick check: this tablet's wall clock has to be read so many milliseconds later (negative: earlier). Nudges add up. */
   clockNudged: z.object({ kind: z.literal('clockNudged'), by: at }),
   /** Sound switched: by hand (silence) or because the output changed (earpiece pulled out). */
   outputChanged: z.object({
@@ -121,6 +149,9 @@ const body = z.discriminatedUnion('kind', [
   bodies.cued,
   bodies.marked,
   bodies.missing,
+  bodies.corrected,
+  bodies.swapped,
+  bodies.unusable,
   bodies.withdrawn,
   bodies.interrupted,
   bodies.continued,

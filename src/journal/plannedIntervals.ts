@@ -1,5 +1,5 @@
 import type { SessionHeader } from '../model/session.ts';
-import { layOut } from '../schedule/layOut.ts';
+import { layOutSchedule } from '../schedule/layOut.ts';
 
 /** One interval as the header plans it, whichever kind of schedule it has. Part times in ms; NaN where a table gave none. */
 export interface PlannedInterval {
@@ -9,6 +9,7 @@ export interface PlannedInterval {
   readonly round: number | null;
   readonly child: string | null;
   readonly openMs: number;
+  readonly endMs: number;
   readonly cueMs: number;
   readonly closeMs: number;
   readonly lessonPart: string | null;
@@ -19,14 +20,14 @@ export interface PlannedInterval {
 export function plannedIntervals(header: SessionHeader): PlannedInterval[] {
   const { schedule } = header;
   if (schedule.kind === 'laid') {
-    return layOut(
-      schedule.protocol,
-      schedule.phases,
+    return layOutSchedule(
+      schedule,
       header.children.map((child) => child.id),
     ).map((line) => ({ ...line, lessonPart: null, minutesFromBreak: null }));
   }
   return schedule.intervals.map((line) => {
     const startMs = line.startMs ?? Number.NaN;
+    const endMs = line.endMs ?? startMs + (schedule.intervalMs ?? Number.NaN);
     return {
       number: line.number,
       part: 0,
@@ -34,8 +35,9 @@ export function plannedIntervals(header: SessionHeader): PlannedInterval[] {
       round: line.round,
       child: line.child,
       openMs: startMs,
+      endMs,
       cueMs: startMs,
-      closeMs: line.endMs ?? startMs + (schedule.intervalMs ?? Number.NaN),
+      closeMs: endMs,
       lessonPart: line.lessonPart,
       minutesFromBreak: line.minutesFromBreak,
     };

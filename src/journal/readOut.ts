@@ -1,38 +1,10 @@
-import type { MissingReason } from '../model/missing.ts';
+import type { IntervalRecord } from './intervalRecord.ts';
 import type { PlannedInterval } from './plannedIntervals.ts';
-import type { JournalState } from './state.ts';
+import { readStretches } from './readStretches.ts';
+import { childAt, type JournalState } from './state.ts';
+import { lessonPartAt, minutesFromBreak } from './whereabouts.ts';
 
-/**
- * One interval as it came out. `status`: `waiting` (its cue has not come), `open` (its cue came, it may still be
- * marked), `scored` or `missing`. Times are session milliseconds, NaN where unknown (tables without times, a part
- * that has not begun).
- */
-export interface IntervalRecord {
-  readonly number: number;
-  readonly part: number;
-  readonly phase: string | null;
-  readonly round: number | null;
-  readonly child: string | null;
-  readonly openAt: number;
-  readonly cueAt: number;
-  readonly closeAt: number;
-  readonly lessonPart: string | null;
-  readonly minutesFromBreak: number | null;
-  readonly status: 'waiting' | 'open' | 'scored' | 'missing';
-  /** The codes scored, in order of marking; empty = observed, none occurred; null unless scored. */
-  readonly codes: readonly string[] | null;
-  readonly counts: { readonly on: number; readonly present: number } | null;
-  readonly missing: MissingReason | null;
-  /** Marked within the grace after the next cue. */
-  readonly late: boolean;
-  /** Changed after the session. */
-  readonly amended: boolean;
-  readonly settled: readonly string[] | null;
-  /** Session time of the touch that decided; NaN for none. */
-  readonly touchedAt: number;
-  /** Session time at which the cue was delivered; NaN when not known. */
-  readonly cuedAt: number;
-}
+export type { IntervalRecord } from './intervalRecord.ts';
 
 /**
  * The intervals of a session as they stand at session time `now` (default: the last time the journal speaks of).
@@ -45,12 +17,24 @@ export function readOut(
 ): IntervalRecord[] {
   const end = state.ended?.at ?? (options.final ? state.at : null);
   const now = end ?? options.now ?? state.at;
+  if (isContinuous(state)) return readStretches(state, { now, ended: end !== null });
   return state.planned.map((line) => read(state, line, now, end));
 }
 
-function read(state: JournalState, line: PlannedInterval, now: number, end: number | null): IntervalRecord {
-  const origin = state.origins[line.part] ?? Number.NaN;
-  const cueAt = origin + line.cueMs;
+/** A duration that was recorded here: its intervals are the stretches between touches, not those of a schedule. */
+function isContinuous({ header: { schedule } }: JournalState): boolean {
+  return schedule.kind === 'laid' && schedule.protocol.method === 'duration';
+}
+
+function read(
+  state: JournalState,
+  planned: PlannedInterval,
+  now: number,
+  end: number | null,
+): IntervalRecord {
+  const origin = state.origins[planned.part] ?? Number.NaN;
+  const cueAt = origin + planned.cueMs;
+  const line = planned.child === null ? planned : { ...planned, child: childAt(state, planned.child, cueAt) };
   const closeAt = origin + line.closeMs;
   const cues = state.cues.get(line.number) ?? [];
   const delivered = cues.find((cue) => cue.cue !== 'record')?.delivered;
@@ -71,6 +55,7 @@ function read(state: JournalState, line: PlannedInterval, now: number, end: numb
     counts: null,
     missing: null,
     late: false,
+    corrected: state.swapped.has(line.number),
     amended: false,
     touchedAt: Number.NaN,
     ...status,
@@ -85,8 +70,8 @@ type Outcome = Pick<IntervalRecord, 'status'> & Partial<IntervalRecord>;
 function spoken(state: JournalState, line: PlannedInterval): Outcome | null {
   const sayings = state.sayings
     .get(line.number)
-    ?.filter(({ child }) => child === undefined || child === line.child);
-  // A correction outranks every mark, also one that was made by a clock that stood behind the recorder's.
+    ?.filter((saying) => !('child' in saying) || saying.child === undefined || saying.child === line.child);
+  // A correction afterwards outranks every mark, also one that was made by a clock that stood behind the recorder's.
   const last = sayings?.findLast((saying) => saying.kind === 'amended') ?? sayings?.at(-1);
   if (sayings === undefined || last === undefined) return null;
   if (last.kind === 'amended') {
@@ -94,7 +79,14 @@ function spoken(state: JournalState, line: PlannedInterval): Outcome | null {
       ? { status: 'missing', missing: last.missing, amended: true }
       : { status: 'scored', codes: last.codes ?? [], amended: true };
   }
-  const rest = { late: last.late ?? false, touchedAt: last.at };
+  if (last.kind === 'unusable') return { status: 'missing', missing: last.reason, corrected: true };
+  if (last.kind === 'corrected') {
+    if (last.missing !== null) return { status: 'missing', missing: last.missing, corrected: true };
+    return { status: 'scored', codes: last.codes ?? [], counts: last.counts ?? null, corrected: true };
+  }
+  const touch = { late: last.late ?? false, touchedAt: last.at };
+  // The touch of a mark that changed places was for another interval's cue.
+  const rest = state.swapped.has(line.number) ? { late: touch.late } : touch;
   if (last.kind === 'missing') return { status: 'missing', missing: last.reason, ...rest };
   if (last.counts !== undefined) return { status: 'scored', codes: [], counts: last.counts, ...rest };
   if (!severalCodes(state))
@@ -103,6 +95,7 @@ function spoken(state: JournalState, line: PlannedInterval): Outcome | null {
   for (const saying of sayings) {
     if (saying.kind !== 'marked' || saying.code === null) codes.length = 0;
     else if (!codes.includes(saying.code)) codes.push(saying.code);
+    if (saying.kind === 'corrected') codes.push(...(saying.codes ?? []));
   }
   return { status: 'scored', codes, ...rest };
 }
@@ -147,15 +140,4 @@ function silent(state: JournalState, line: PlannedInterval, { cueAt, closeAt, no
 /** A true pause stops the schedule, so a momentary look goes on after it; an observed stretch is broken by it. */
 function hides(reason: string, line: PlannedInterval): boolean {
   return reason !== 'paused' || line.openMs === line.cueMs;
-}
-
-function lessonPartAt(state: JournalState, at: number): string | null {
-  return state.lessonParts.findLast((change) => change.at <= at)?.lessonPart ?? null;
-}
-
-/** Minutes from the break to the cue: negative before the break began, positive after the first task was given. */
-function minutesFromBreak(state: JournalState, part: number, cueAt: number): number | null {
-  if (Number.isNaN(cueAt) || state.breakStartedAt === null) return null;
-  const origin = part === 0 ? state.breakStartedAt : (state.origins[part] ?? Number.NaN);
-  return Number.isNaN(origin) ? null : Math.round(((cueAt - origin) / 60_000) * 1000) / 1000;
 }

@@ -3,7 +3,18 @@ import type { AwayReason, GapCause, KnownEntry } from './entry.ts';
 import { type PlannedInterval, plannedIntervals } from './plannedIntervals.ts';
 
 /** What the observer said of one interval, newest last. */
-export type Saying = Extract<KnownEntry, { kind: 'marked' | 'missing' | 'amended' }>;
+export type Saying = Extract<
+  KnownEntry,
+  { kind: 'marked' | 'missing' | 'corrected' | 'unusable' | 'amended' }
+>;
+
+/** A reserve in the place of a child who left; `to` null = still. */
+export interface StandIn {
+  readonly child: string;
+  readonly by: string;
+  readonly from: number;
+  readonly to: number | null;
+}
 
 /** A stretch of session time in which something kept intervals from being scored; `to` null = still going on. */
 export interface Cover {
@@ -36,6 +47,13 @@ export interface JournalState {
   readonly settled: ReadonlyMap<number, readonly string[]>;
   readonly cues: ReadonlyMap<number, readonly Extract<KnownEntry, { kind: 'cued' }>[]>;
   readonly covers: readonly Cover[];
+  readonly standIns: readonly StandIn[];
+  /** Intervals whose marks changed places with another's. */
+  readonly swapped: ReadonlySet<number>;
+  /** Stretches that were said to be of no use, in the order said. */
+  readonly unusable: readonly Extract<KnownEntry, { kind: 'unusable' }>[];
+  /** How many milliseconds later than it shows this tablet's wall clock has to be read. */
+  readonly nudge: number;
   /** Session time at which each part began; null = not yet. */
   readonly origins: readonly (number | null)[];
   /** Session time at which a part was closed by "break started"; null = not closed by hand. */
@@ -65,6 +83,10 @@ export function emptyState(header: SessionHeader): JournalState {
     settled: new Map(),
     cues: new Map(),
     covers: [],
+    standIns: [],
+    swapped: new Set(),
+    unusable: [],
+    nudge: 0,
     origins: Array.from({ length: parts }, (_, part) => (part === 0 ? 0 : null)),
     closed: Array.from({ length: parts }, () => null),
     seats,
@@ -90,4 +112,18 @@ export function isCovered(
 export function awayNow(state: JournalState, child: string): AwayReason | null {
   const cover = state.covers.find((c) => c.to === null && c.child === child);
   return cover === undefined ? null : (cover.reason as AwayReason);
+}
+
+/** Who is really to be watched when a child's turn comes at that session time: the child, or who stands in for it. */
+export function childAt(state: Pick<JournalState, 'standIns'>, child: string, at: number): string {
+  let now = child;
+  // A reserve may leave, too; each stands in at most once along the chain.
+  for (let step = 0; step <= state.standIns.length; step++) {
+    const next = state.standIns.find(
+      ({ child: gone, from, to }) => gone === now && from <= at && (to === null || at < to),
+    );
+    if (next === undefined) return now;
+    now = next.by;
+  }
+  return now;
 }

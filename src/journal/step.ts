@@ -1,11 +1,11 @@
 import type { SessionHeader } from '../model/session.ts';
 import { isKnown, type JournalEntry, type KnownEntry } from './entry.ts';
 import { inOrder } from './order.ts';
-import { type Cover, emptyState, type JournalState } from './state.ts';
+import { type Cover, emptyState, type JournalState, type Saying } from './state.ts';
 
 /** Reads one more entry. Total: an entry that makes no sense where it stands changes nothing but the count. */
 export function step(state: JournalState, entry: JournalEntry): JournalState {
-  const counted = { ...state, read: state.read + 1, at: Math.max(state.at, entry.at) };
+  const counted = { ...state, read: state.read + 1, at: timeAfter(state.at, entry) };
   if (!isKnown(entry)) return counted;
   if (entry.kind === 'withdrawn') {
     const { writer, seq } = entry.target;
@@ -42,8 +42,15 @@ export function fold(header: SessionHeader, entries: readonly JournalEntry[]): J
   return {
     ...state,
     read: ordered.length,
-    at: ordered.reduce((latest, entry) => Math.max(latest, entry.at), state.at),
+    at: ordered.reduce(timeAfter, 0),
   };
+}
+
+/** The latest session time that is spoken of. Only a repeated interval turns it back. */
+function timeAfter(latest: number, entry: JournalEntry): number {
+  if (!isKnown(entry)) return Math.max(latest, entry.at);
+  if (entry.kind === 'resumed' && entry.repeats !== undefined) return entry.at;
+  return Math.max(latest, entry.at, entry.kind === 'gap' ? entry.to : entry.at);
 }
 
 type Draft = { -readonly [Key in keyof JournalState]: JournalState[Key] } & {
@@ -51,6 +58,7 @@ type Draft = { -readonly [Key in keyof JournalState]: JournalState[Key] } & {
   settled: Map<number, readonly string[]>;
   cues: Map<number, JournalState['cues'] extends ReadonlyMap<number, infer V> ? V : never>;
   seats: Map<string, string>;
+  swapped: Set<number>;
 };
 
 function copied(state: JournalState): Draft {
@@ -60,6 +68,7 @@ function copied(state: JournalState): Draft {
     settled: new Map(state.settled),
     cues: new Map(state.cues),
     seats: new Map(state.seats),
+    swapped: new Set(state.swapped),
   };
 }
 
@@ -73,8 +82,19 @@ function apply(draft: Draft, entry: KnownEntry): void {
   switch (entry.kind) {
     case 'marked':
     case 'missing':
+    case 'corrected':
     case 'amended':
-      draft.sayings.set(entry.interval, [...(draft.sayings.get(entry.interval) ?? []), entry]);
+      hear(draft, entry.interval, entry);
+      break;
+    case 'swapped':
+      for (const [a, b] of entry.pairs) swap(draft, a, b);
+      break;
+    case 'unusable':
+      draft.unusable = [...draft.unusable, entry];
+      for (const line of draft.planned) {
+        const cueAt = (draft.origins[line.part] ?? Number.NaN) + line.cueMs;
+        if (cueAt >= entry.from && cueAt < entry.to) hear(draft, line.number, entry);
+      }
       break;
     case 'settled':
       draft.settled.set(entry.interval, entry.codes);
@@ -93,12 +113,23 @@ function apply(draft: Draft, entry: KnownEntry): void {
       break;
     case 'resumed':
       close(draft, entry.at, (cover) => cover.reason === 'paused');
+      // It begins anew, so what was said of its first half does not stand.
+      if (entry.repeats !== undefined) draft.sayings.delete(entry.repeats);
+      break;
+    case 'clockNudged':
+      draft.nudge += entry.by;
       break;
     case 'left':
       open(draft, { from: entry.at, to: null, reason: entry.reason, child: entry.child });
+      endStandIn(draft, entry.child, entry.at);
+      if (entry.by !== undefined) {
+        const standIn = { child: entry.child, by: entry.by, from: entry.at, to: null };
+        draft.standIns = [...draft.standIns, standIn];
+      }
       break;
     case 'returned':
       close(draft, entry.at, (cover) => cover.child === entry.child);
+      endStandIn(draft, entry.child, entry.at);
       break;
     case 'moved':
       draft.seats.set(entry.child, entry.seat);
@@ -119,7 +150,6 @@ function apply(draft: Draft, entry: KnownEntry): void {
       draft.breakEndedAt = entry.at;
       break;
     case 'gap':
-      draft.at = Math.max(draft.at, entry.to);
       draft.gaps = [
         ...draft.gaps,
         { from: entry.from, to: entry.to, cause: entry.cause, estimated: entry.estimated },
@@ -150,5 +180,27 @@ function open(draft: Draft, cover: Cover): void {
 function close(draft: Draft, at: number, which: (cover: Cover) => boolean): void {
   draft.covers = draft.covers.map((c) =>
     c.to === null && which(c) ? { ...c, to: Math.max(at, c.from) } : c,
+  );
+}
+
+function hear(draft: Draft, interval: number, saying: Saying): void {
+  draft.sayings.set(interval, [...(draft.sayings.get(interval) ?? []), saying]);
+}
+
+function swap(draft: Draft, a: number, b: number): void {
+  const [first, second] = [draft.sayings.get(a), draft.sayings.get(b)];
+  for (const [interval, sayings] of [
+    [a, second],
+    [b, first],
+  ] as const) {
+    if (sayings === undefined) draft.sayings.delete(interval);
+    else draft.sayings.set(interval, sayings);
+    draft.swapped.add(interval);
+  }
+}
+
+function endStandIn(draft: Draft, child: string, at: number): void {
+  draft.standIns = draft.standIns.map((standIn) =>
+    standIn.to === null && standIn.child === child ? { ...standIn, to: at } : standIn,
   );
 }

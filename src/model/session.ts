@@ -29,6 +29,8 @@ export const laidSchedule = z.object({
   kind: z.literal('laid'),
   protocol,
   phases: z.array(shortText).check(z.minLength(1)),
+  /** Whose turn it is where chance decides anew each round: part by part, interval by interval, the child's place in the list. */
+  turns: z.optional(z.array(z.array(whole))),
 });
 export type LaidSchedule = z.infer<typeof laidSchedule>;
 
@@ -61,10 +63,16 @@ export const sessionHeader = z.object({
   observer: z.object({ id, name: shortText }),
   role: z.nullable(role),
   practice: z.boolean(),
+  /** A visit to let the class get used to the observer: kept, and left out of results unless asked for. */
+  familiarisation: z.optional(z.boolean()),
+  /** Recorded on the printed sheet and typed in: no prompts, no times of touches. */
+  fromPaper: z.optional(z.boolean()),
   date: z.nullable(isoDate),
   plannedStart: z.nullable(wallTime),
   /** The target children in the order of the schedule. */
   children: z.array(sessionChild),
+  /** Drawn children who may step in, in their order; those present on the day. */
+  reserves: z.optional(z.array(sessionChild)),
   plan: z.nullable(seatingPlan),
   draw: z.nullable(draw),
   orderSeed: z.nullable(shortText),

@@ -21,6 +21,7 @@ export const visitPlan = z.object({
   condition: z.nullable(shortText),
   plannedStart: z.nullable(wallTime),
   children: z.array(sessionChild),
+  reserves: z.optional(z.array(sessionChild)),
   plan: z.nullable(seatingPlan),
   draw: z.nullable(draw),
   orderSeed: z.nullable(shortText),

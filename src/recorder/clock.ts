@@ -71,6 +71,11 @@ export class SessionClock {
     this.pausedSince = null;
   }
 
+  /** Session time goes back by so many milliseconds: an interval that a pause broke is done once more. */
+  stepBack(ms: number): void {
+    this.pausedFor += ms;
+  }
+
   /** Reads the audio clock against the page clock; null while it does not run. Call it at each wake-up. */
   read(sample: ClockSample | null, generation: number): Reading {
     if (sample === null) {

@@ -1,6 +1,6 @@
 import { sessionMs } from '../kernel/units.ts';
 import type { SessionClock } from './clock.ts';
-import { type CuePattern, countInTick, cuePattern, withLeadIn } from './cuePatterns.ts';
+import { type CuePattern, countInTick, cuePattern, headsUpPattern, withLeadIn } from './cuePatterns.ts';
 import { dueIn, type GridCue } from './grid.ts';
 import type { AudioPort, Stop } from './ports.ts';
 import { countInMs } from './standing.ts';
@@ -20,11 +20,15 @@ export interface LaidSound {
   readonly pattern: CuePattern;
 }
 
-/** The sounds of a session in order: every cue, and three ticks before each part that has begun. */
+/**
+ * The sounds of a session in order: every cue, and three ticks before each part that has begun.
+ * @param headsUpMs so long before a look a soft tone says that it is near; null for none
+ */
 export function soundsOf(
   cues: readonly GridCue[],
   origins: readonly (number | null)[],
   leadIn: boolean,
+  headsUpMs: number | null = null,
 ): LaidSound[] {
   const dressed = (pattern: CuePattern): CuePattern => (leadIn ? withLeadIn(pattern) : pattern);
   const ticks = origins.flatMap((origin) =>
@@ -33,7 +37,13 @@ export function soundsOf(
       : [3, 2, 1].map((n) => ({ at: origin - (n * countInMs) / 3, pattern: dressed(countInTick) })),
   );
   const sounds = cues.map(({ at, cue }) => ({ at, pattern: dressed(cuePattern(cue)) }));
-  return [...sounds, ...ticks].sort((a, b) => a.at - b.at);
+  const near =
+    headsUpMs === null
+      ? []
+      : cues
+          .filter(({ cue }) => cue === 'look' || cue === 'observe')
+          .map(({ at }) => ({ at: at - headsUpMs, pattern: dressed(headsUpPattern) }));
+  return [...sounds, ...ticks, ...near].sort((a, b) => a.at - b.at);
 }
 
 /** Lays sounds well ahead on the audio clock, and takes them back when silence is asked for. */

@@ -16,6 +16,10 @@ interface Parts {
   readonly player: CuePlayer;
   /** Whether each tone needs something quiet before it. */
   readonly leadIn: () => boolean;
+  /** So long before each look a soft tone; null for none. */
+  readonly headsUpMs: () => number | null;
+  /** Nobody can touch a hidden page, which a record of onsets and offsets cannot do without. */
+  readonly continuous: boolean;
   readonly ports: Pick<RecorderPorts, 'visibility' | 'vibration'>;
 }
 
@@ -34,7 +38,12 @@ export class CueRound {
   private done = Number.NEGATIVE_INFINITY;
   private hidden: Trouble | null = null;
   private stuck: Trouble | null = null;
-  private basis: (Pick<JournalState, 'origins' | 'closed'> & { readonly leadIn: boolean }) | null = null;
+  private basis:
+    | (Pick<JournalState, 'origins' | 'closed'> & {
+        readonly leadIn: boolean;
+        readonly headsUpMs: number | null;
+      })
+    | null = null;
   private list: readonly GridCue[] = [];
   private sounds: readonly LaidSound[] = [];
 
@@ -123,7 +132,8 @@ export class CueRound {
 
   private over(trouble: Trouble, now: number): null {
     const stretch = { from: Math.round(trouble.from), to: Math.round(now) };
-    const lost = lostStretch(trouble.cues, stretch);
+    const all = this.parts.continuous && trouble.cause === 'hidden';
+    const lost = all ? stretch : lostStretch(trouble.cues, stretch);
     this.parts.book.write(now, { kind: 'gap', ...lost, cause: trouble.cause, estimated: false });
     return null;
   }
@@ -132,10 +142,17 @@ export class CueRound {
     const { state } = this.parts.book;
     // The way to the ear is known only once the sound is unlocked, and may change with the output.
     const leadIn = this.parts.leadIn();
+    const headsUpMs = this.parts.headsUpMs();
     const { basis } = this;
-    if (basis?.origins === state.origins && basis.closed === state.closed && basis.leadIn === leadIn) return;
-    this.basis = { origins: state.origins, closed: state.closed, leadIn };
+    if (
+      basis?.origins === state.origins &&
+      basis.closed === state.closed &&
+      basis.leadIn === leadIn &&
+      basis.headsUpMs === headsUpMs
+    )
+      return;
+    this.basis = { origins: state.origins, closed: state.closed, leadIn, headsUpMs };
     this.list = gridCues(this.parts.plan, state);
-    this.sounds = soundsOf(this.list, state.origins, leadIn);
+    this.sounds = soundsOf(this.list, state.origins, leadIn, headsUpMs);
   }
 }

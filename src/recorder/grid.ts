@@ -1,7 +1,7 @@
 import type { CueKind } from '../journal/entry.ts';
 import type { JournalState } from '../journal/state.ts';
 import type { SessionHeader } from '../model/session.ts';
-import { layOut, partDuration, type ScheduledInterval } from '../schedule/layOut.ts';
+import { layOutSchedule, partDuration, type ScheduledInterval } from '../schedule/layOut.ts';
 import type { TimedInterval } from './whoseTouch.ts';
 
 /** A cue on the session's own clock, in milliseconds. */
@@ -15,7 +15,6 @@ export interface GridCue {
 export interface Plan {
   readonly intervals: readonly ScheduledInterval[];
   readonly parts: readonly PlannedPart[];
-  readonly lookCue: CueKind;
 }
 
 export interface PlannedPart {
@@ -30,15 +29,12 @@ export interface PlannedPart {
 export function planOf(header: SessionHeader): Plan | null {
   const { schedule } = header;
   if (schedule.kind !== 'laid') return null;
-  const intervals = layOut(
-    schedule.protocol,
-    schedule.phases,
+  const intervals = layOutSchedule(
+    schedule,
     header.children.map((child) => child.id),
   );
-  const { method } = schedule.protocol;
   return {
     intervals,
-    lookCue: method === 'momentary' || method === 'headcount' ? 'look' : 'observe',
     parts: schedule.phases.map((phase, part) => {
       const own = intervals.filter((line) => line.part === part);
       return {
@@ -77,7 +73,7 @@ export function gridCues(
   const cues = plan.intervals.flatMap((line) => {
     const origin = origins[line.part] ?? null;
     if (origin === null) return [];
-    const own: GridCue[] = [{ interval: line.number, cue: plan.lookCue, at: origin + line.cueMs }];
+    const own: GridCue[] = [{ interval: line.number, cue: line.cue, at: origin + line.cueMs }];
     if (line.recordMs !== null) {
       own.push({ interval: line.number, cue: 'record', at: origin + line.recordMs });
     }

@@ -1,7 +1,9 @@
 import type { AwayReason, EntryRef, JournalEntry } from '../journal/entry.ts';
 import type { Id } from '../kernel/ids.ts';
 import type { Result } from '../kernel/result.ts';
-import type { PageMs } from '../kernel/units.ts';
+import type { EpochMs, PageMs } from '../kernel/units.ts';
+import type { MissingReason } from '../model/missing.ts';
+import type { Manner } from '../model/observer.ts';
 import type { Stop } from './ports.ts';
 import type { RoomSnapshot } from './roomSnapshot.ts';
 
@@ -16,12 +18,24 @@ export interface LiveSession {
    * Called in the tap: unlocks the sound, counts in (3, 2, 1), then session time 0. Goes on without sound where the
    * browser gives none (`sound` false). Fails when another tab records.
    */
-  begin(): Promise<Result<{ readonly sound: boolean }>>;
+  begin(how?: Beginning): Promise<Result<{ readonly sound: boolean }>>;
   /** A code; null = observed, none of the codes occurred. */
   touch(code: string | null, at: PageMs): void;
   /** Headcount: children on-task and children present. */
   count(on: number, present: number, at: PageMs): void;
   cannotSee(at: PageMs): void;
+  /** What stands at the other intervals of each pair changes places: the wrong child was watched. */
+  swap(pairs: readonly (readonly [number, number])[]): void;
+  /** From now on the interval holds this, whatever was touched before. */
+  correct(interval: number, to: Correction): void;
+  /** Intervals whose cue lies in [from, to) of session time are missing, with this reason. */
+  unusable(
+    stretch: { readonly from: number; readonly to: number },
+    reason: MissingReason,
+    words?: string,
+  ): void;
+  /** How touches are answered and prompts recalled; may change while the session runs. */
+  behave(manner: Pick<Manner, 'confirm' | 'remind'>): void;
   /** The next touch (within 5 s) marks the interval before; a second call takes that back. */
   childBefore(): void;
   undo(): void;
@@ -50,7 +64,24 @@ export interface LiveSession {
   dispose(): void;
 }
 
+/** What a correction puts in place of what was there. */
+export type Correction =
+  | { readonly codes: readonly string[] }
+  | { readonly missing: MissingReason }
+  | { readonly counts: { readonly on: number; readonly present: number } };
+
+export interface Beginning {
+  /** Session time 0 is this moment of the nudged wall clock (agreed with the second observer). Default: after the count-in. */
+  readonly at?: EpochMs;
+  /** What the tick check found: how many milliseconds later than it shows this tablet's wall clock is to be read. */
+  readonly nudgeMs?: number;
+}
+
 export interface LiveOptions {
+  /** How touches are answered and prompts recalled. Default: answered, and not recalled. */
+  readonly manner?: Pick<Manner, 'confirm' | 'remind'>;
+  /** The words that are spoken ahead of a look; null where there is nothing to say. */
+  readonly headsUp?: (look: { readonly child: Id | null; readonly seat: Id | null }) => string | null;
   /** Checks that stood on hold when the observer went in. */
   readonly checks: readonly string[];
   readonly anyway: boolean;

@@ -96,6 +96,15 @@ export interface VibrationPort {
   vibrate(pattern: readonly number[]): boolean;
 }
 
+/** Words in the earpiece. */
+export interface SpeechPort {
+  /** True when a voice is on the tablet itself: one that needs a network is never used. */
+  available(): boolean;
+  /** Speaks at once, quietly; a new word cuts the last one off. */
+  speak(words: string, volume: number): void;
+  hush(): void;
+}
+
 /** One tab records. */
 export interface LockPort {
   /** The way to give it back; null while another tab holds it. */
@@ -146,6 +155,7 @@ export interface RecorderPorts {
   readonly visibility: VisibilityPort;
   readonly wakeLock: WakeLockPort;
   readonly vibration: VibrationPort;
+  readonly speech: SpeechPort;
   readonly lock: LockPort;
   readonly store: SessionStore;
   readonly random: Random;

@@ -104,7 +104,16 @@ export interface RoomSnapshot {
   readonly previous: IntervalRecord | null;
   /** Number of the interval that the next touch marks by "child before"; null when not armed. */
   readonly armedBefore: number | null;
+  /** In a duration record the stretches so far, the one that goes on now last. */
   readonly intervals: readonly IntervalRecord[];
+  /** The looks of the last round whose cues have come, oldest first: what may be corrected at once. */
+  readonly lastRound: readonly IntervalRecord[];
+  /** Headcount: children present, as the last count said, or as many as are expected and not away. */
+  readonly present: number;
+  /** Milliseconds until the second at which both observers agreed to begin; null when none is awaited. */
+  readonly startsIn: number | null;
+  /** Goes up by one each time a prompt that waits for its mark is recalled. */
+  readonly reminded: number;
   /** Part now running, or last run. */
   readonly part: number;
   readonly partPhase: string | null;

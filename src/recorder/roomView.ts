@@ -1,12 +1,12 @@
 import type { AwayReason, CueKind } from '../journal/entry.ts';
 import { type IntervalRecord, readOut } from '../journal/readOut.ts';
-import { awayNow, type JournalState } from '../journal/state.ts';
+import { awayNow, childAt, type JournalState } from '../journal/state.ts';
 import { sessionMs } from '../kernel/units.ts';
 import type { SessionHeader } from '../model/session.ts';
 import type { ScheduledInterval } from '../schedule/layOut.ts';
 import { type GridCue, type Plan, timedIntervals } from './grid.ts';
 import type { RoomPhase, RoomSnapshot, UpcomingLook } from './roomSnapshot.ts';
-import type { Standing } from './standing.ts';
+import { countInMs, type Standing } from './standing.ts';
 import { undoable } from './undoable.ts';
 import { intervalBefore, lastCued, type TimedInterval } from './whoseTouch.ts';
 
@@ -14,7 +14,15 @@ import { intervalBefore, lastCued, type TimedInterval } from './whoseTouch.ts';
 export interface ViewInput
   extends Pick<
     RoomSnapshot,
-    'resuming' | 'armedBefore' | 'kept' | 'sound' | 'wakeLock' | 'vibrates' | 'flash' | 'flashStrongly'
+    | 'resuming'
+    | 'armedBefore'
+    | 'kept'
+    | 'sound'
+    | 'wakeLock'
+    | 'vibrates'
+    | 'reminded'
+    | 'flash'
+    | 'flashStrongly'
   > {
   readonly begun: boolean;
   readonly now: number;
@@ -32,10 +40,34 @@ export class RoomView {
   private timed: readonly TimedInterval[] = [];
   private basis: Pick<JournalState, 'origins' | 'closed'> | null = null;
 
+  private readonly continuous: boolean;
+
   constructor(
     private readonly header: SessionHeader,
     private readonly plan: Plan,
-  ) {}
+  ) {
+    const { schedule } = header;
+    this.continuous = schedule.kind === 'laid' && schedule.protocol.method === 'duration';
+  }
+
+  /** The interval whose cue came last, while it may still be marked. */
+  currentAt(state: JournalState, now: number): IntervalRecord | null {
+    const timed = this.timedIn(state);
+    const position = lastCued(timed, now);
+    const latest = timed[position];
+    if (latest === undefined || now >= latest.closeAt || state.ended !== null) return null;
+    return this.currentOf(this.readRecords(state, now, position, true), latest.number, now);
+  }
+
+  /** In a duration record it is the stretch that goes on. */
+  private currentOf(
+    intervals: readonly IntervalRecord[],
+    number: number,
+    now: number,
+  ): IntervalRecord | null {
+    if (!this.continuous) return intervals[number - 1] ?? null;
+    return intervals.findLast(({ status, openAt }) => status !== 'waiting' && openAt <= now) ?? null;
+  }
 
   /** The intervals whose cues have come or will come, as far as their parts have begun. */
   timedIn(state: JournalState): readonly TimedInterval[] {
@@ -53,8 +85,9 @@ export class RoomView {
     const latest = timed[position];
     const open = begun && latest !== undefined && now < latest.closeAt && state.ended === null;
     const intervals = this.readRecords(state, now, position, open);
-    const current = open ? (intervals[latest.number - 1] ?? null) : null;
-    const previous = begun && state.ended === null ? intervalBefore(timed, now) : null;
+    const current = open ? this.currentOf(intervals, latest.number, now) : null;
+    const previous = begun && state.ended === null && !this.continuous ? intervalBefore(timed, now) : null;
+    const away = this.away(state);
     const { part } = place;
     const origin = state.origins[part] ?? 0;
     const running = place.phase !== 'between parts' && place.phase !== 'over' && place.phase !== 'ended';
@@ -65,12 +98,15 @@ export class RoomView {
       phase: phaseOf(begun, place),
       resuming: input.resuming,
       now: sessionMs(now),
-      countIn: begun && place.phase === 'counting in' ? Math.min(3, Math.ceil((origin - now) / 1000)) : null,
+      countIn: counted(begun, place, origin - now),
+      startsIn: begun && place.phase === 'counting in' && origin - now > longestCountMs ? origin - now : null,
       current,
       upcoming,
       previous: previous === null ? null : (intervals[previous - 1] ?? null),
       armedBefore: input.armedBefore,
       intervals,
+      lastRound: this.continuous ? [] : this.lastRound(intervals, part),
+      present: this.present(state, away),
       part,
       partPhase: this.plan.parts[part]?.phase ?? null,
       nextPart: next === null ? null : { part: next, phase: this.plan.parts[next]?.phase ?? null },
@@ -84,11 +120,12 @@ export class RoomView {
       sound: input.sound,
       wakeLock: input.wakeLock,
       vibrates: input.vibrates,
-      away: this.away(state),
+      away,
       seats: state.seats,
       lessonPart: state.lessonParts.at(-1)?.lessonPart ?? null,
       mayPause: this.header.role === null,
       breakStarted: (state.closed[part] ?? null) !== null,
+      reminded: input.reminded,
       flash: input.flash,
       flashStrongly: input.flashStrongly,
       felt: input.felt,
@@ -102,7 +139,14 @@ export class RoomView {
   private readRecords(state: JournalState, now: number, position: number, open: boolean) {
     const key = { state, cued: position, closed: open ? 0 : 1 };
     const { seen } = this;
-    if (seen === null || seen.state !== state || seen.cued !== key.cued || seen.closed !== key.closed) {
+    // A stretch that goes on is longer at each look.
+    if (
+      this.continuous ||
+      seen === null ||
+      seen.state !== state ||
+      seen.cued !== key.cued ||
+      seen.closed !== key.closed
+    ) {
       this.records = readOut(state, { now });
       this.seen = key;
     }
@@ -121,9 +165,25 @@ export class RoomView {
     return next === undefined ? null : look(state, next, origin + next.cueMs);
   }
 
+  /** The looks of this round and of the one before, as far as their cues have come, but no more than one round. */
+  private lastRound(intervals: readonly IntervalRecord[], part: number): readonly IntervalRecord[] {
+    const length = this.plan.intervals.filter((line) => line.part === 0 && line.round === 1).length;
+    return intervals
+      .filter((line) => line.part === part && line.status !== 'waiting')
+      .slice(-Math.min(mostToCorrect, Math.max(fewestToCorrect, length)));
+  }
+
+  private present(state: JournalState, away: ReadonlyMap<string, AwayReason>): number {
+    const last = state.entries.findLast(
+      (entry) => (entry.kind === 'marked' || entry.kind === 'corrected') && entry.counts !== undefined,
+    );
+    if (last !== undefined && 'counts' in last && last.counts !== undefined) return last.counts.present;
+    return this.header.children.filter(({ id }) => !away.has(id)).length;
+  }
+
   private away(state: JournalState): ReadonlyMap<string, AwayReason> {
     const away = new Map<string, AwayReason>();
-    for (const { id } of this.header.children) {
+    for (const { id } of [...this.header.children, ...(this.header.reserves ?? [])]) {
       const reason = awayNow(state, id);
       if (reason !== null) away.set(id, reason);
     }
@@ -132,17 +192,30 @@ export class RoomView {
 }
 
 function look(state: JournalState, line: ScheduledInterval, cueAt: number | null): UpcomingLook {
+  const child = line.child === null ? null : childAt(state, line.child, cueAt ?? Number.POSITIVE_INFINITY);
   return {
     number: line.number,
     part: line.part,
     phase: line.phase,
     round: line.round,
-    child: line.child,
-    seat: state.seats.get(line.child) ?? null,
+    child,
+    seat: child === null ? null : (state.seats.get(child) ?? null),
     cueAt: cueAt === null ? null : sessionMs(cueAt),
-    away: awayNow(state, line.child),
+    away: child === null ? null : awayNow(state, child),
   };
 }
+
+/** What is counted aloud: three, two, one. A longer wait is for an agreed second. */
+const longestCountMs = countInMs + 1000;
+
+function counted(begun: boolean, place: Standing, left: number): number | null {
+  if (!begun || place.phase !== 'counting in' || left > longestCountMs) return null;
+  return Math.min(3, Math.ceil(left / 1000));
+}
+
+/** How many looks the page for corrections lists. */
+const fewestToCorrect = 6;
+const mostToCorrect = 36;
 
 function phaseOf(begun: boolean, place: Standing): RoomPhase {
   if (place.phase === 'ended') return 'ended';

@@ -2,8 +2,10 @@ import type { AwayReason, EntryRef } from '../journal/entry.ts';
 import type { Id } from '../kernel/ids.ts';
 import type { Result } from '../kernel/result.ts';
 import type { PageMs } from '../kernel/units.ts';
+import type { MissingReason } from '../model/missing.ts';
+import type { Manner } from '../model/observer.ts';
 import * as deeds from './deeds.ts';
-import type { LiveSession } from './liveSession.ts';
+import type { Beginning, Correction, LiveSession } from './liveSession.ts';
 import type { Stop } from './ports.ts';
 import type { RoomSnapshot } from './roomSnapshot.ts';
 import type { SessionRun } from './sessionRun.ts';
@@ -20,8 +22,8 @@ export class RunningSession implements LiveSession {
     return this.run.snapshot();
   }
 
-  begin(): Promise<Result<{ readonly sound: boolean }>> {
-    return this.run.begin();
+  begin(how: Beginning = {}): Promise<Result<{ readonly sound: boolean }>> {
+    return this.run.begin(how);
   }
 
   touch(code: string | null, at: PageMs): void {
@@ -36,6 +38,22 @@ export class RunningSession implements LiveSession {
     this.run.take({ kind: 'cannot see' }, at);
   }
 
+  swap(pairs: readonly (readonly [number, number])[]): void {
+    this.run.deed(deeds.swap(pairs));
+  }
+
+  correct(interval: number, to: Correction): void {
+    this.run.deed(deeds.correct(interval, to));
+  }
+
+  unusable(stretch: { from: number; to: number }, reason: MissingReason, words?: string): void {
+    this.run.deed(deeds.unusable(stretch, reason, words));
+  }
+
+  behave(manner: Pick<Manner, 'confirm' | 'remind'>): void {
+    this.run.behave(manner);
+  }
+
   childBefore(): void {
     this.run.armBefore();
   }
@@ -45,7 +63,7 @@ export class RunningSession implements LiveSession {
   }
 
   childLeft(child: Id, reason: AwayReason): void {
-    this.run.say({ kind: 'left', child, reason });
+    this.run.deed(deeds.childLeft(child, reason));
   }
 
   childReturned(child: Id): void {

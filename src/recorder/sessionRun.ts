@@ -2,16 +2,20 @@ import type { EntryBody } from '../journal/entry.ts';
 import { isCovered } from '../journal/state.ts';
 import { problem, type Result } from '../kernel/result.ts';
 import type { PageMs } from '../kernel/units.ts';
+import { toWallTime } from '../kernel/wallTime.ts';
+import type { Manner } from '../model/observer.ts';
 import type { Protocol } from '../model/protocol.ts';
 import type { SessionHeader } from '../model/session.ts';
 import { Book } from './book.ts';
 import type { Reading } from './clock.ts';
+import { confirmationClick, confirmationRhythm, reminder, reminderRhythm } from './cuePatterns.ts';
 import { CuePlayer } from './cuePlayer.ts';
 import { CueRound } from './cueRound.ts';
 import * as deeds from './deeds.ts';
 import type { Plan } from './grid.ts';
 import { Grip } from './grip.ts';
-import type { LiveOptions } from './liveSession.ts';
+import { HeadsUp } from './headsUp.ts';
+import type { Beginning, LiveOptions } from './liveSession.ts';
 import type { RecorderPorts, Stop } from './ports.ts';
 import { resumption } from './resumption.ts';
 import type { RoomSnapshot } from './roomSnapshot.ts';
@@ -23,6 +27,9 @@ import { TouchDesk, type TouchWord } from './touchDesk.ts';
 
 /** Wired outputs take 10 to 60 ms; from here on the sound goes through the air. From memory, no source. */
 const wirelessFromMs = 100;
+
+/** So long before its interval is lost a prompt is recalled, or a quarter of its time where that is shorter. */
+const remindMs = 3000;
 
 /** A clock that seems to stand still has to be watched for a while before it can be believed again. */
 const lookAgainMs: Partial<Record<Reading, number>> = { doubtful: 50, lost: 250 };
@@ -41,6 +48,9 @@ export class SessionRun {
   private beginning: Promise<Result<{ readonly sound: boolean }>> | null = null;
   private disposed = false;
   private shown: RoomSnapshot | null = null;
+  private readonly headsUp: HeadsUp;
+  private manner: Pick<Manner, 'confirm' | 'remind'>;
+  private reminded = { count: 0, interval: 0 };
 
   constructor(
     header: SessionHeader,
@@ -58,10 +68,27 @@ export class SessionRun {
     this.view = new RoomView(header, plan);
     const player = new CuePlayer(ports.audio, this.time.clock);
     const leadIn = (): boolean => options.leadIn ?? (ports.audio.facts()?.latencyMs ?? 0) >= wirelessFromMs;
-    this.cues = new CueRound({ plan, cues: protocol.cues, book: this.book, player, ports, leadIn });
+    this.manner = options.manner ?? { confirm: true, remind: false };
+    this.headsUp = new HeadsUp({
+      protocol,
+      plan,
+      book: this.book,
+      speech: ports.speech,
+      words: options.headsUp ?? null,
+    });
+    this.cues = new CueRound({
+      plan,
+      cues: protocol.cues,
+      book: this.book,
+      player,
+      ports,
+      leadIn,
+      headsUpMs: () => this.headsUp.toneAheadMs,
+      continuous: protocol.method === 'duration',
+    });
     // The session may have come to its end while the tablet was dead: nothing is left to begin.
     const stand = resumption(this.book.state, before, ports.wall.now());
-    if (stand !== null && this.placeAt(stand.now).phase === 'over') this.goOn();
+    if (stand !== null && this.placeAt(stand.now).phase === 'over') this.goOn({});
   }
 
   subscribe(listener: () => void): Stop {
@@ -74,8 +101,8 @@ export class SessionRun {
     return this.shown;
   }
 
-  begin(): Promise<Result<{ readonly sound: boolean }>> {
-    this.beginning ??= this.reallyBegin().then((answer) => {
+  begin(how: Beginning): Promise<Result<{ readonly sound: boolean }>> {
+    this.beginning ??= this.reallyBegin(how).then((answer) => {
       if (!answer.ok) this.beginning = null;
       return answer;
     });
@@ -113,8 +140,14 @@ export class SessionRun {
     this.book.keeper.whenAllKept(() => this.grip.giveBack());
   }
 
-  private async reallyBegin(): Promise<Result<{ readonly sound: boolean }>> {
+  behave(manner: Pick<Manner, 'confirm' | 'remind'>): void {
+    this.manner = manner;
+  }
+
+  private async reallyBegin(how: Beginning): Promise<Result<{ readonly sound: boolean }>> {
     if (this.book.state.ended !== null) return problem('recorder.ended');
+    if (how.at !== undefined && how.at - this.nudgedWall(how) < countInMs + deeds.headStartMs)
+      return problem('recorder.startTooNear', { seconds: Math.ceil((countInMs + deeds.headStartMs) / 1000) });
     const taken = await this.grip.take(this.protocol.cues, {
       wakeLock: () => this.changed(),
       visibility: () => {
@@ -128,24 +161,28 @@ export class SessionRun {
     });
     if (!taken.ok) return taken;
     this.time.look();
-    this.goOn();
+    this.goOn(how);
     this.tick();
     return taken;
   }
 
   /** Starts session time: counting in, or where the grid of a session that was cut off stands now. */
-  private goOn(): void {
+  private goOn(how: Beginning): void {
     const { page, wall, audio } = this.ports;
     const stand = resumption(this.book.state, this.options.resumeFrom ?? [], wall.now());
     if (stand === null) {
-      this.time.clock.start(page.now(), -countInMs - deeds.headStartMs);
+      const wait = how.at === undefined ? countInMs + deeds.headStartMs : how.at - this.nudgedWall(how);
+      this.time.clock.start(page.now(), -wait);
       const latency = audio.facts()?.latencyMs ?? null;
-      this.book.write(-countInMs - deeds.headStartMs, {
+      this.book.write(-wait, {
         kind: 'started',
         checks: [...this.options.checks],
         anyway: this.options.anyway,
         ...(latency === null ? {} : { audioLatencyMs: latency }),
+        ...(how.at === undefined ? {} : { agreedStart: toWallTime(how.at, wall.offsetMinutes(how.at)) }),
       });
+      if ((how.nudgeMs ?? 0) !== 0)
+        this.book.write(-wait, { kind: 'clockNudged', by: Math.round(how.nudgeMs ?? 0) });
       return;
     }
     this.time.clock.start(page.now(), stand.now);
@@ -156,6 +193,11 @@ export class SessionRun {
     const to = Math.round(place.phase === 'over' ? Math.max(place.at, stand.from) : stand.now);
     this.book.write(to, { kind: 'gap', from: stand.from, to, cause: 'closed', estimated: true });
     if (place.phase === 'over') this.finish(to, { reason: 'complete' });
+  }
+
+  /** The wall clock as the tick check says it is to be read. */
+  private nudgedWall(how: Beginning): number {
+    return this.ports.wall.now() + (how.nudgeMs ?? 0);
   }
 
   private placeAt(now: number): Standing {
@@ -180,6 +222,8 @@ export class SessionRun {
       return;
     }
     if (cuesGiven(place) && this.sound.on) this.cues.layAhead(now);
+    this.headsUp.speak(this.cues.all(), now, cuesGiven(place) && this.sound.on);
+    this.remind(now, place);
     this.sleepUntilNext(now, place, news.reading);
     this.changed();
   }
@@ -188,11 +232,38 @@ export class SessionRun {
     this.wake?.();
     // Whole seconds for the screen, and each cue at its own moment.
     const second = (Math.floor(now / 1000) + 1) * 1000;
-    const cue = cuesGiven(place) ? this.cues.nextAfter(now) : Number.POSITIVE_INFINITY;
-    const due = place.phase === 'paused' ? 1000 : Math.min(second, cue) - now;
+    const given = cuesGiven(place);
+    const cue = given ? this.cues.nextAfter(now) : Number.POSITIVE_INFINITY;
+    const words = given ? this.headsUp.nextAfter(this.cues.all(), now) : Number.POSITIVE_INFINITY;
+    const recall = this.recallAt(now);
+    const due = place.phase === 'paused' ? 1000 : Math.min(second, cue, words, recall) - now;
     // A strange reading of the audio clock is looked at again soon, before a cue comes out at a wrong moment or not at all.
     const ms = Math.min(due, lookAgainMs[reading] ?? due);
     this.wake = this.ports.timer.wakeIn(Math.max(1, Math.ceil(ms)), () => this.tick());
+  }
+
+  /** A prompt that waits for its mark is felt and heard once more before its interval is lost. */
+  private remind(now: number, place: Standing): void {
+    if (place.phase !== 'running') return;
+    const waiting = this.waiting(now);
+    if (waiting === null || now < waiting.recallAt) return;
+    this.reminded = { count: this.reminded.count + 1, interval: waiting.number };
+    this.sound.play(reminder);
+    if (this.ports.vibration.available) this.ports.vibration.vibrate(reminderRhythm);
+  }
+
+  private recallAt(now: number): number {
+    const at = this.waiting(now)?.recallAt ?? Number.POSITIVE_INFINITY;
+    return at > now ? at : Number.POSITIVE_INFINITY;
+  }
+
+  /** The interval that waits for its mark and was not recalled yet; null where none does, or nobody wants to be reminded. */
+  private waiting(now: number): { readonly number: number; readonly recallAt: number } | null {
+    if (!this.manner.remind || this.protocol.method === 'duration') return null;
+    const current = this.view.currentAt(this.book.state, now);
+    if (current?.status !== 'open' || current.number === this.reminded.interval) return null;
+    const left = Math.min(remindMs, (current.closeAt - current.cueAt) / 4);
+    return { number: current.number, recallAt: current.closeAt - left };
   }
 
   /** Something that the observer did: time is brought up to the present before and after it. */
@@ -208,8 +279,9 @@ export class SessionRun {
   }
 
   deed(deed: deeds.Deed): void {
-    const { plan, book, cues, sound, touches } = this;
-    this.act((present) => deed({ plan, book, cues, sound, touches, clock: this.time.clock }, present));
+    const { protocol, plan, book, cues, sound, touches, headsUp } = this;
+    const { clock } = this.time;
+    this.act((present) => deed({ protocol, plan, book, cues, sound, touches, headsUp, clock }, present));
   }
 
   say(body: EntryBody, then?: () => void): void {
@@ -232,9 +304,19 @@ export class SessionRun {
     const before = this.touches.felt;
     const body = this.touches.take(word, { page, at }, state, this.view.timedIn(state));
     if (body !== null) this.book.write(at, body);
-    if (this.touches.felt !== before) this.sound.click();
+    if (this.touches.felt !== before && this.manner.confirm) this.confirm(word);
     this.tick();
     this.changed();
+  }
+
+  /** The answer to a touch that was taken, in ear and hand, different for each code. */
+  private confirm(word: TouchWord): void {
+    const place =
+      word.kind === 'code' ? this.protocol.codeSet.codes.findIndex(({ id }) => id === word.code) : -1;
+    const touched = place < 0 ? 'other' : place;
+    this.sound.play(confirmationClick(touched));
+    const { vibration } = this.ports;
+    if (vibration.available) vibration.vibrate(confirmationRhythm(touched));
   }
 
   private finish(at: number, how: { reason: 'complete' | 'early'; words?: string }): void {
@@ -250,6 +332,7 @@ export class SessionRun {
   }
 
   private letGo(): void {
+    this.ports.speech.hush();
     this.wake?.();
     this.cues.takeBack();
     this.grip.letGo();
@@ -278,6 +361,7 @@ export class SessionRun {
       sound,
       wakeLock: this.ports.wakeLock.state(),
       vibrates: this.protocol.cues.vibration && this.ports.vibration.available,
+      reminded: this.reminded.count,
       flash: this.cues.flash,
       flashStrongly: this.protocol.cues.flash || !sound.heard,
       felt: this.touches.felt,

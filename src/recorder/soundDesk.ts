@@ -1,6 +1,6 @@
 import type { EntryBody } from '../journal/entry.ts';
 import type { JournalState } from '../journal/state.ts';
-import { confirmationClick } from './cuePatterns.ts';
+import type { CuePattern } from './cuePatterns.ts';
 import type { AudioPort } from './ports.ts';
 import type { SoundNow } from './roomSnapshot.ts';
 
@@ -41,9 +41,9 @@ export class SoundDesk {
     return { ...this.said(), ...(output === null ? {} : { output }) };
   }
 
-  /** The quiet answer to a touch. */
-  click(): void {
-    if (this.wanted) this.audio.play(confirmationClick);
+  /** Sounds at once what hangs on no moment: the answer to a touch, a reminder. */
+  play(pattern: CuePattern): void {
+    if (this.wanted) this.audio.play(pattern);
   }
 
   now(clockRuns: boolean): SoundNow {

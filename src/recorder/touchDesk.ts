@@ -72,7 +72,7 @@ export class TouchDesk {
       at: touch.at,
       graceMs: this.graceMs,
       isEmpty: (number) => isEmpty(state, number, touch.at),
-      isBarred: (number) => isBarred(state, timed, number),
+      isBarred: (number) => isBarred(state, timed, number, this.method === 'duration' ? touch.at : null),
       before: this.armedBefore(touch.at),
     });
     if (!answer.taken) return this.refuse(answer.why);
@@ -87,7 +87,7 @@ export class TouchDesk {
       late,
       before,
     };
-    if (this.saysSoAlready(state, interval, word)) return null;
+    if (this.saysSoAlready(state, interval, word, touch.at)) return null;
     const how = { ...(late ? { late } : {}), ...(before ? { before } : {}) };
     if (word.kind === 'cannot see') return { kind: 'missing', interval, reason: 'out of view', ...how };
     if (word.kind === 'code') return { kind: 'marked', interval, code: word.code, ...how };
@@ -96,10 +96,11 @@ export class TouchDesk {
   }
 
   /** The same word once more changes nothing, so it makes no entry; it is felt all the same. */
-  private saysSoAlready(state: JournalState, interval: number, word: TouchWord): boolean {
+  private saysSoAlready(state: JournalState, interval: number, word: TouchWord, at: number): boolean {
     const sayings = state.sayings.get(interval) ?? [];
     const last = sayings.at(-1);
-    if (last === undefined || last.kind === 'amended') return false;
+    if (last === undefined || (last.kind !== 'marked' && last.kind !== 'missing')) return false;
+    if (this.method === 'duration') return goesOn(state, word, at);
     if (word.kind === 'cannot see') return last.kind === 'missing' && last.reason === 'out of view';
     if (word.kind === 'count')
       return last.kind === 'marked' && last.counts?.on === word.on && last.counts.present === word.present;
@@ -113,7 +114,17 @@ export class TouchDesk {
 
 function targetOf(word: TouchWord): string {
   if (word.kind === 'code') return `code ${word.code ?? ''}`;
-  return word.kind;
+  // Counting goes fast: each further child is a new touch, however quick.
+  return word.kind === 'count' ? `count ${word.on} of ${word.present}` : word.kind;
+}
+
+/** In a duration record: what the touch says holds already. */
+function goesOn(state: JournalState, word: TouchWord, at: number): boolean {
+  const stretch = readOut(state, { now: at }).findLast(({ openAt }) => openAt <= at);
+  if (stretch === undefined) return false;
+  if (word.kind === 'cannot see') return stretch.missing === 'out of view';
+  const code = word.kind === 'code' ? word.code : null;
+  return stretch.status === 'scored' && (stretch.codes?.[0] ?? null) === code;
 }
 
 /**
@@ -125,9 +136,17 @@ function isEmpty(state: JournalState, number: number, now: number): boolean {
   return record?.status === 'open' || (record?.status === 'missing' && record.missing === 'missed');
 }
 
-/** No mark for an interval whose cue fell into an interruption or a pause. */
-function isBarred(state: JournalState, timed: readonly TimedInterval[], number: number): boolean {
-  const cueAt = timed.find((interval) => interval.number === number)?.cueAt ?? Number.NaN;
+/**
+ * No mark for an interval whose cue fell into an interruption or a pause; in a duration record (`touchedAt` given) none
+ * during one.
+ */
+function isBarred(
+  state: JournalState,
+  timed: readonly TimedInterval[],
+  number: number,
+  touchedAt: number | null,
+): boolean {
+  const cueAt = touchedAt ?? timed.find((interval) => interval.number === number)?.cueAt ?? Number.NaN;
   return state.covers.some(
     (cover) =>
       (cover.reason === 'class interrupted' || cover.reason === 'paused') &&

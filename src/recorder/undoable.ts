@@ -5,6 +5,9 @@ import type { Undoable } from './roomSnapshot.ts';
 const canBeUndone: ReadonlySet<EntryKind> = new Set<EntryKind>([
   'marked',
   'missing',
+  'corrected',
+  'swapped',
+  'unusable',
   'flagged',
   'noted',
   'left',

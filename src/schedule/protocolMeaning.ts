@@ -1,21 +1,21 @@
 import type { Protocol } from '../model/protocol.ts';
-import { intervalsInPart } from './layOut.ts';
+import { layOut } from './layOut.ts';
 
 type Recipe = Pick<
   Protocol,
   'method' | 'intervalMs' | 'observeMs' | 'rotation' | 'partLength' | 'childrenToDraw'
 >;
 
-export type ProtocolWarning = 'longInterval' | 'longObserve' | 'fewLooks';
+export type ProtocolWarning = 'longInterval' | 'longObserve' | 'fewLooks' | 'sweepTooLong';
 
 export interface ProtocolMeaning {
   /** Intervals of one part, all children together. */
   readonly intervals: number;
   /** Milliseconds from the beginning of a part to the end of its last interval. */
   readonly lengthMs: number;
-  /** Children who are watched in one part. */
+  /** Children who are watched in one part; 0 for a headcount, which looks at everybody. */
   readonly watched: number;
-  /** Looks in one part at the child who gets fewest and at the one who gets most. */
+  /** Looks in one part at the child who gets fewest and at the one who gets most (a headcount: scans). */
   readonly fewest: number;
   readonly most: number;
   /** What makes figures weak; it is said and never stops anybody. */
@@ -25,20 +25,35 @@ export interface ProtocolMeaning {
 /**
  * What a protocol comes to in one part with all children present.
  * Warnings: a momentary interval over 30 s, more than 10 s watched in partial or whole intervals, fewer than 10
- * looks at a child (limits as the field uses them: common practice, no single source).
+ * looks at a child (limits as the field uses them: common practice, no single source), a sweep that needs more time
+ * than an interval has. With turns by chance each round, counts are those of a listed order: they differ by at most
+ * one round that is cut short.
  */
 export function protocolMeaning(recipe: Recipe): ProtocolMeaning {
-  const { rotation, method } = recipe;
-  const intervals = intervalsInPart(recipe.partLength, recipe, recipe.childrenToDraw);
-  const watched = rotation.kind === 'one' ? 1 : recipe.childrenToDraw;
-  const inRow = rotation.kind === 'block' ? rotation.intervals : 1;
-  const rounds = Math.floor(intervals / (inRow * watched));
-  const rest = intervals - rounds * inRow * watched;
-  const fewest = rounds * inRow + Math.max(0, rest - (watched - 1) * inRow);
-  const most = rounds * inRow + Math.min(rest, inRow);
+  const { method, rotation } = recipe;
+  const children = Array.from({ length: recipe.childrenToDraw }, (_, i) => `${i + 1}`);
+  // When looks come within an interval makes no difference to how many there are.
+  const lines = layOut({ ...recipe, lookAt: 'start' }, [''], children);
+  const looks = new Map<string | null, number>();
+  for (const { child } of lines) looks.set(child, (looks.get(child) ?? 0) + 1);
+  const turnless = method === 'headcount' || method === 'duration';
+  // A child whose turn does not come within the part is not watched, and still belongs to the drawn ones.
+  const unseen = !turnless && rotation.kind !== 'one' && looks.size < children.length;
+  const counts = [...looks.values()];
+  const fewest = unseen || counts.length === 0 ? 0 : Math.min(...counts);
   const warnings: ProtocolWarning[] = [];
   if (method === 'momentary' && recipe.intervalMs > 30_000) warnings.push('longInterval');
   if ((method === 'partial' || method === 'whole') && recipe.observeMs > 10_000) warnings.push('longObserve');
-  if (fewest < 10) warnings.push('fewLooks');
-  return { intervals, lengthMs: intervals * recipe.intervalMs, watched, fewest, most, warnings };
+  if (method !== 'duration' && fewest < 10) warnings.push('fewLooks');
+  if (!turnless && rotation.kind === 'sweep' && rotation.eachMs * children.length > recipe.intervalMs)
+    warnings.push('sweepTooLong');
+  return {
+    intervals: lines.length,
+    lengthMs: lines.at(-1)?.endMs ?? 0,
+    watched:
+      method === 'headcount' ? 0 : method === 'duration' || rotation.kind === 'one' ? 1 : children.length,
+    fewest,
+    most: Math.max(0, ...counts),
+    warnings,
+  };
 }

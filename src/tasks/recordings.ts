@@ -13,6 +13,7 @@ export interface SessionWish {
   readonly observer: string;
   readonly role: Role | null;
   readonly practice: boolean;
+  readonly familiarisation?: boolean;
 }
 
 /** Keeps the header of a session that is about to begin; its first entry is the recorder's. */
@@ -34,9 +35,11 @@ export async function startSession(
     observer: { id: observer.value.id, name: observer.value.name },
     role: wish.role,
     practice: wish.practice,
+    ...(wish.familiarisation === true ? { familiarisation: true } : {}),
     date: dateOf(deps.clock.wall()),
     plannedStart: plan.plannedStart,
     children: plan.children,
+    ...(plan.reserves === undefined ? {} : { reserves: plan.reserves }),
     plan: plan.plan,
     draw: plan.draw,
     orderSeed: plan.orderSeed,

@@ -4,13 +4,16 @@ import type { CueKind } from '../../src/journal/entry.ts';
 import {
   type CuePattern,
   confirmationClick,
+  confirmationRhythm,
   countInTick,
   cuePattern,
   cueRhythm,
+  type Touched,
   withLeadIn,
 } from '../../src/recorder/cuePatterns.ts';
 
-const kinds: CueKind[] = ['look', 'observe', 'record'];
+const kinds: CueKind[] = ['look', 'observe', 'record', 'next'];
+const touched: Touched[] = [0, 1, 2, 3, 4, 5, 'other'];
 const rates = [8000, 22_050, 44_100, 48_000, 96_000];
 
 /** Stretches of sound, from first to after last frame, in milliseconds; 10 ms of silence part them. */
@@ -27,10 +30,10 @@ function stretches(samples: Float32Array, rate: number): [number, number][] {
 
 describe('patternSamples', () => {
   it.each(rates)('begins every cue with its very first frame, at %i Hz', (rate) => {
-    for (const pattern of [...kinds.map(cuePattern), countInTick, confirmationClick]) {
+    for (const pattern of [...kinds.map(cuePattern), countInTick, ...touched.map(confirmationClick)]) {
       const { samples, before } = patternSamples(pattern, rate);
       expect(before).toBe(0);
-      expect(Math.abs(samples[0] ?? 0)).toBeGreaterThan(1e-6);
+      expect(Math.abs(samples[0] ?? 0)).toBeGreaterThan(5e-7);
     }
   });
 
@@ -65,16 +68,25 @@ describe('patternSamples', () => {
     expect(Math.max(...led.samples.slice(0, led.before).map(Math.abs))).toBeLessThan(0.04);
   });
 
-  it('gives a confirmation click that no one takes for a cue: shorter than a tenth, quieter than a quarter', () => {
+  it('gives confirmation clicks that no one takes for a cue: short, and quieter than a quarter', () => {
     const loudest = (pattern: CuePattern) =>
       Math.max(...patternSamples(pattern, 48_000).samples.map(Math.abs));
-    expect(loudest(confirmationClick)).toBeLessThan(loudest(cuePattern('look')) / 4);
-    expect(patternSamples(confirmationClick, 48_000).samples.length).toBeLessThan(48 * 22);
+    for (const click of touched.map(confirmationClick)) {
+      expect(loudest(click)).toBeLessThan(loudest(cuePattern('look')) / 4);
+      expect(patternSamples(click, 48_000).samples.length).toBeLessThan(48 * 280);
+    }
   });
 
-  it('tells the three cues apart by rhythm and by pitch', () => {
+  it('answers each of six codes, and what is no code, in a rhythm of its own, in ear and hand', () => {
+    const heard = touched.map((one) => JSON.stringify(confirmationClick(one)));
+    expect(new Set(heard).size).toBe(touched.length);
+    const codes = touched.filter((one) => one !== 'other');
+    expect(new Set(codes.map((one) => confirmationRhythm(one).join())).size).toBe(codes.length);
+  });
+
+  it('tells the cues apart by rhythm and by pitch', () => {
     const pitches = kinds.map((kind) => cuePattern(kind).tones[0]?.pitch);
-    expect(new Set(pitches).size).toBe(3);
-    expect(new Set(kinds.map((kind) => cueRhythm(kind).join())).size).toBe(3);
+    expect(new Set(pitches).size).toBe(kinds.length);
+    expect(new Set(kinds.map((kind) => cueRhythm(kind).join())).size).toBe(kinds.length);
   });
 });

@@ -108,7 +108,7 @@ export function observe(lesson: Lesson, watching: Watching): StoredSession {
       said.push([touched, { kind: 'missing', interval: line.number, reason: 'out of view' }]);
       continue;
     }
-    const life = lives.get(line.child)?.[line.phase === 'before' ? 'before' : 'after'] ?? [];
+    const life = lives.get(line.child ?? '')?.[line.phase === 'before' ? 'before' : 'after'] ?? [];
     said.push([
       touched,
       {

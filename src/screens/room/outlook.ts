@@ -28,7 +28,7 @@ export function outlook({ header, journal }: StoredSession, wallNow: EpochMs): O
     scored: readOut(state).filter((interval) => interval.status === 'scored').length,
     intervals: plan.intervals.length,
   };
-  const nameOf = (id: string | undefined): string | null =>
+  const nameOf = (id: string | null | undefined): string | null =>
     header.children.find((child) => child.id === id)?.pseudonym ?? null;
   const cut = resumption(state, journal, wallNow);
   if (cut === null)

@@ -11,7 +11,8 @@ export function methodSentence({ study }: Words, recipe: Recipe): string {
     method: study.method({ method: recipe.method }),
     seconds: recipe.intervalMs / 1000,
     observeSeconds: parted ? recipe.observeMs / 1000 : null,
-    turns: rotation.kind,
+    // A headcount looks at everybody.
+    turns: recipe.method === 'headcount' ? null : recipe.method === 'duration' ? 'one' : rotation.kind,
     inRow: rotation.kind === 'block' ? rotation.intervals : 1,
     minutes: partLength.kind === 'minutes' ? partLength.minutes : null,
     rounds: partLength.kind === 'rounds' ? partLength.rounds : null,

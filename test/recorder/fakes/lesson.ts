@@ -4,7 +4,7 @@ import { seededRandom } from '../../../src/kernel/random.ts';
 import { pageMs } from '../../../src/kernel/units.ts';
 import type { SessionHeader } from '../../../src/model/session.ts';
 import { createLiveSession } from '../../../src/recorder/createLiveSession.ts';
-import type { LiveOptions, LiveSession } from '../../../src/recorder/liveSession.ts';
+import type { Beginning, LiveOptions, LiveSession } from '../../../src/recorder/liveSession.ts';
 import type { RecorderPorts, Stop, WakeLockState } from '../../../src/recorder/ports.ts';
 import { headerOf } from '../../support/session.ts';
 import { FakeAudio } from './fakeAudio.ts';
@@ -20,6 +20,8 @@ export class Lesson {
   readonly audio = new FakeAudio(this.clock);
   hidden = false;
   vibrations = 0;
+  hasVoice = false;
+  readonly spoken: { readonly words: string; readonly page: number }[] = [];
   wakeLock: WakeLockState = 'idle';
   lockHeld = false;
   lockTaken = false;
@@ -51,9 +53,10 @@ export class Lesson {
   }
 
   /** The tap that begins. */
-  async begin(): Promise<this> {
-    this.zero = this.clock.page + beforeZero;
-    const answer = await this.session.begin();
+  async begin(how: Beginning = {}): Promise<this> {
+    const wait = how.at === undefined ? beforeZero : how.at - (how.nudgeMs ?? 0) - this.clock.wall;
+    this.zero = this.clock.page + wait;
+    const answer = await this.session.begin(how);
     if (!answer.ok) throw new Error(answer.problem.code);
     return this;
   }
@@ -124,6 +127,11 @@ export class Lesson {
           this.vibrations += 1;
           return true;
         },
+      },
+      speech: {
+        available: () => this.hasVoice,
+        speak: (words) => this.spoken.push({ words, page: this.clock.page }),
+        hush: () => undefined,
       },
       lock: {
         take: () => {

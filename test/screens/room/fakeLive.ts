@@ -5,7 +5,7 @@ import { ok, type Result } from '../../../src/kernel/result.ts';
 import { sessionMs } from '../../../src/kernel/units.ts';
 import type { SeatingPlan } from '../../../src/model/seatingPlan.ts';
 import type { SessionHeader } from '../../../src/model/session.ts';
-import type { LiveSession } from '../../../src/recorder/liveSession.ts';
+import type { Beginning, Correction, LiveSession } from '../../../src/recorder/liveSession.ts';
 import type { RoomSnapshot } from '../../../src/recorder/roomSnapshot.ts';
 import { journalOf } from '../../support/session.ts';
 
@@ -57,6 +57,10 @@ export function snapshotOf(
     previous: current === null ? null : (intervals[current.number - 2] ?? null),
     armedBefore: null,
     intervals,
+    lastRound: intervals.filter(({ status }) => status !== 'waiting').slice(-6),
+    present: header.children.length,
+    startsIn: null,
+    reminded: 0,
     part: 0,
     partPhase: 'before',
     nextPart: null,
@@ -118,13 +122,18 @@ export class FakeLive implements LiveSession {
     this.calls.push(call);
   }
 
-  begin = async () => {
-    this.told('begin');
+  begin = async (how?: Beginning) => {
+    if (how === undefined || Object.keys(how).length === 0) this.told('begin');
+    else this.told('begin', how);
     return this.begun;
   };
   touch = (code: string | null, at: number) => this.told('touch', code, at);
   count = (on: number, present: number, at: number) => this.told('count', on, present, at);
   cannotSee = (at: number) => this.told('cannotSee', at);
+  swap = (pairs: readonly (readonly [number, number])[]) => this.told('swap', pairs);
+  correct = (interval: number, to: Correction) => this.told('correct', interval, to);
+  unusable = (...said: Parameters<LiveSession['unusable']>) => this.told('unusable', ...said);
+  behave = (...said: Parameters<LiveSession['behave']>) => this.told('behave', ...said);
   childBefore = () => this.told('childBefore');
   undo = () => this.told('undo');
   childLeft = (child: string, reason: string) => this.told('childLeft', child, reason);

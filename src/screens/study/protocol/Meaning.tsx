@@ -14,6 +14,7 @@ export function Meaning({ draft }: { readonly draft: ProtocolDraft }) {
     longInterval: study.warnLongInterval,
     longObserve: study.warnLongObserve,
     fewLooks: study.warnFewLooks,
+    sweepTooLong: study.warnSweepTooLong,
   };
   return (
     <Sheet title={study.meansTitle}>

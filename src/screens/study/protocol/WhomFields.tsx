@@ -1,8 +1,16 @@
+import type { Rotation } from '../../../model/protocol.ts';
 import type { ProtocolDraft } from '../../../tasks/index.ts';
 import { Choice } from '../../../ui/Choice.tsx';
 import { useWords } from '../../services.ts';
 import { NumberField } from '../NumberField.tsx';
 import type { Change } from './change.ts';
+
+/** A rotation with its usual numbers. */
+function rotationOf(kind: Rotation['kind']): Rotation {
+  if (kind === 'block') return { kind, intervals: 4 };
+  if (kind === 'sweep') return { kind, eachMs: 3000 };
+  return kind === 'target' ? { kind, peerEvery: 4 } : { kind };
+}
 
 /** How many children, whose turn it is, and how long a part takes. */
 export function WhomFields({ draft, change }: { readonly draft: ProtocolDraft; readonly change: Change }) {
@@ -26,10 +34,10 @@ export function WhomFields({ draft, change }: { readonly draft: ProtocolDraft; r
           onValue={(reserves) => change({ reserves })}
         />
       </div>
-      <Choice
+      <Choice<Rotation['kind']>
         legend={study.turns}
         value={rotation.kind}
-        onChange={(kind) => change({ rotation: kind === 'block' ? { kind, intervals: 4 } : { kind } })}
+        onChange={(kind) => change({ rotation: rotationOf(kind) })}
         options={[
           { value: 'next', label: study.turnsNext },
           { value: 'block', label: study.turnsBlock },
@@ -45,7 +53,7 @@ export function WhomFields({ draft, change }: { readonly draft: ProtocolDraft; r
           onValue={(intervals) => change({ rotation: { kind: 'block', intervals } })}
         />
       )}
-      <Choice
+      <Choice<ProtocolDraft['order']>
         legend={study.order}
         value={draft.order}
         onChange={(order) => change({ order })}

@@ -79,7 +79,7 @@ export const glanceWords = {
       method: string;
       seconds: number;
       observeSeconds: number | null;
-      turns: 'next' | 'block' | 'one';
+      turns: 'next' | 'block' | 'one' | 'sweep' | 'target' | null;
       inRow: number;
       minutes: number | null;
       rounds: number | null;

@@ -57,6 +57,8 @@ export const protocolWords = {
     'More than 10 seconds of watching: nearly every interval will hold some off-task. Watch for a shorter time if you can.',
   warnFewLooks:
     'Fewer than 10 looks at a child: a figure for one child says little. Watch fewer children or longer.',
+  warnSweepTooLong:
+    'A sweep needs more time than an interval has: each child will get less. Make the interval longer, or watch fewer children.',
   codes: 'What can be recorded',
   codesNote:
     'Two to six codes, in the order in which they stand in the room. “Cannot see” is always there and is no code.',
