@@ -89,7 +89,9 @@ function wordAt(state: JournalState, line: PlannedInterval, origin: number, at: 
   const child = line.child === null ? null : childAt(state, line.child, at);
   const mine = state.covers.filter((cover) => cover.child === null || cover.child === child);
   const cover = mine.find(({ from, to }) => from <= at && (to === null || at < to));
-  if (cover !== undefined) return { ...silence, missing: cover.reason };
+  // No prompt is needed here: while the tablet stood still, touches were missed.
+  if (cover !== undefined)
+    return { ...silence, missing: cover.reason === 'prompt failed' ? 'missed' : cover.reason };
   const ends = [...mine.map(({ to }) => to), ...state.standIns.flatMap(({ from, to }) => [from, to])];
   const since = Math.max(origin, ...ends.filter((end): end is number => end !== null && end <= at));
   const touch = touchesOf(state, line).findLast((saying) => saying.at <= at && saying.at >= since);

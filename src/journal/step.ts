@@ -112,9 +112,8 @@ function apply(draft: Draft, entry: KnownEntry): void {
       open(draft, { from: entry.at, to: null, reason: 'paused', child: null });
       break;
     case 'resumed':
-      close(draft, entry.at, (cover) => cover.reason === 'paused');
-      // It begins anew, so what was said of its first half does not stand.
-      if (entry.repeats !== undefined) draft.sayings.delete(entry.repeats);
+      if (entry.repeats === undefined) close(draft, entry.at, (cover) => cover.reason === 'paused');
+      else repeat(draft, entry.repeats);
       break;
     case 'clockNudged':
       draft.nudge += entry.by;
@@ -197,6 +196,12 @@ function swap(draft: Draft, a: number, b: number): void {
     else draft.sayings.set(interval, sayings);
     draft.swapped.add(interval);
   }
+}
+
+/** An interval begins anew: neither what was said of its first half stands, nor the pause that broke it. */
+function repeat(draft: Draft, interval: number): void {
+  draft.sayings.delete(interval);
+  draft.covers = draft.covers.filter(({ reason, to }) => reason !== 'paused' || to !== null);
 }
 
 function endStandIn(draft: Draft, child: string, at: number): void {
