@@ -9,20 +9,27 @@ const { version } = JSON.parse(readFileSync(new URL('./package.json', import.met
   version: string;
 };
 
+const ownModule = /[\\/]src[\\/](?!app[\\/]main\.tsx$|worker[\\/]worker\.ts$).*\.tsx?$/;
+
 export default defineConfig({
   // Relative, so that the built files work under any folder of any host.
   base: './',
+  resolve: {
+    // The same program without the detour for browsers that have neither promises nor classes.
+    alias: [{ find: /^dexie$/, replacement: 'dexie/dist/modern/dexie.mjs' }],
+  },
   define: { __APP_VERSION__: JSON.stringify(version) },
   build: {
     target: ['chrome111', 'firefox115', 'safari16.4'],
     // Nothing inlined: the content security policy knows files only.
     assetsInlineLimit: 0,
     modulePreload: { polyfill: false },
+    // Which file holds what: the size of the recorder is added up from it.
+    manifest: true,
     rolldownOptions: {
-      output: {
-        // Figures and their distribution functions stay out of what the recording screen has to load.
-        codeSplitting: { groups: [{ name: 'figures', test: /[\\/](src[\\/]stats|@stdlib)[\\/]/ }] },
-      },
+      // Our modules do nothing by being imported, but for the two that start something: an index file that is passed
+      // through brings along only what is used of it.
+      treeshake: { moduleSideEffects: [{ test: ownModule, sideEffects: false }] },
     },
   },
   worker: { format: 'es' },

@@ -1,5 +1,3 @@
-import { registerSW } from 'virtual:pwa-register';
-
 /** A new version waits until it is asked for; `subscribe` tells when one does. */
 export interface Updates {
   waiting(): boolean;
@@ -8,22 +6,37 @@ export interface Updates {
   putIn(): void;
 }
 
-/** Registers the service worker, which keeps the whole program on the tablet. */
-export function watchForUpdates(): Updates {
-  let waiting = false;
+/** Registers the service worker, which keeps the whole program on the tablet. The development server has none. */
+export function watchForUpdates(
+  workers = import.meta.env.PROD ? navigator.serviceWorker : undefined,
+): Updates {
+  let waiting: ServiceWorker | null = null;
   const listeners = new Set<() => void>();
-  const update = registerSW({
-    onNeedRefresh() {
-      waiting = true;
-      for (const listener of listeners) listener();
-    },
-  });
+  const wait = (worker: ServiceWorker | null): void => {
+    // The very first version waits for nobody: there is none before it.
+    if (worker?.state !== 'installed' || workers?.controller === null) return;
+    waiting = worker;
+    for (const listener of listeners) listener();
+  };
+  const register = async (all: ServiceWorkerContainer): Promise<void> => {
+    const registration = await all.register('./sw.js');
+    wait(registration.waiting);
+    registration.addEventListener('updatefound', () => {
+      const coming = registration.installing;
+      coming?.addEventListener('statechange', () => wait(coming));
+    });
+  };
+  // Without it (no HTTPS, no network at the first start) the app runs as well, from the network.
+  if (workers !== undefined) void register(workers).catch(() => undefined);
   return {
-    waiting: () => waiting,
+    waiting: () => waiting !== null,
     subscribe: (listener) => {
       listeners.add(listener);
       return () => listeners.delete(listener);
     },
-    putIn: () => void update(true),
+    putIn: () => {
+      workers?.addEventListener('controllerchange', () => window.location.reload(), { once: true });
+      waiting?.postMessage({ type: 'SKIP_WAITING' });
+    },
   };
 }

@@ -3,14 +3,8 @@ import { canonicalJson } from '../kernel/canonicalJson.ts';
 import type { Study } from '../model/study.ts';
 import type { Join, StudyBundle } from '../tasks/ports.ts';
 import { ChangedMeanwhile, type Core, changeRows } from './core.ts';
-import {
-  type AnyRecord,
-  historyRow,
-  openRecords,
-  type RecordTypes,
-  recordKey,
-  recordRow,
-} from './records.ts';
+import { historyRow, recordRow } from './putEdits.ts';
+import { type AnyRecord, openRecords, type RecordTypes, recordKey } from './records.ts';
 import type {
   EntryRow,
   HeaderRow,

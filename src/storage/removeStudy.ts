@@ -1,7 +1,7 @@
 import type { Study } from '../model/study.ts';
 import type { Edit } from '../tasks/ports.ts';
 import type { Core } from './core.ts';
-import { recordRow, requireRevision } from './records.ts';
+import { recordRow, requireRevision } from './putEdits.ts';
 import { type RowWriter, type TableName, tableNames } from './rows.ts';
 
 /** Removes whatever belongs to a study, all at once, and keeps its tombstone. */

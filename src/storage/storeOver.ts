@@ -2,7 +2,6 @@ import type { Classroom } from '../model/classroom.ts';
 import type { Observer } from '../model/observer.ts';
 import type { Protocol } from '../model/protocol.ts';
 import type { Store, StoreReader, StudyBundle } from '../tasks/ports.ts';
-import { applyBundles } from './applyBundles.ts';
 import { type Core, queue } from './core.ts';
 import { answer } from './problems.ts';
 import {
@@ -11,10 +10,8 @@ import {
   listStudies,
   openRecords,
   protocolVersions,
-  putEdits,
   readRecord,
 } from './records.ts';
-import { removeStudy } from './removeStudy.ts';
 import type { EntryRow, RowStore } from './rows.ts';
 import { identitySeal, type Seal } from './seal.ts';
 import { openSession, type SessionRows, sessionTables } from './sessionRows.ts';
@@ -29,6 +26,9 @@ import {
   unfinishedSessions,
 } from './sessions.ts';
 import { readSettings, saveSettings } from './settings.ts';
+
+/** The recording writes entries and settings only, and is loaded without the rest. */
+const studyWrites = () => import('./studyWrites.ts');
 
 const done = (work: () => Promise<void>) => answer(async () => work().then(() => null));
 
@@ -58,13 +58,13 @@ export function storeOver(rows: RowStore, seal: Seal = identitySeal): Store {
   };
   return {
     ...reader,
-    put: (edits) => done(() => putEdits(core, edits)),
+    put: (edits) => done(async () => (await studyWrites()).putEdits(core, edits)),
     createSession: (header) => done(() => createSession(core, header)),
     appendEntries: (session, entries) => done(() => appendEntries(core, session, entries)),
     pack: (session) => done(() => packSession(core, session)),
     applyBundles: (bundles, join, options = {}) =>
-      done(() => applyBundles(core, bundles, join, new Set(options.revive))),
-    removeStudy: (tombstone) => done(() => removeStudy(core, tombstone)),
+      done(async () => (await studyWrites()).applyBundles(core, bundles, join, new Set(options.revive))),
+    removeStudy: (tombstone) => done(async () => (await studyWrites()).removeStudy(core, tombstone)),
     markHandedOver: (covers) => done(() => markHandedOver(core, covers)),
     saveSettings: (changes) => done(() => saveSettings(core, changes)),
     watch: (query, callback) => rows.watch(() => query(reader), callback),
