@@ -35,7 +35,9 @@ function partStretches(
   const end = origin + line.endMs;
   const closedAt = state.closed[line.part] ?? Number.POSITIVE_INFINITY;
   const until = Math.min(end, closedAt, now);
-  const edges = edgesOf(state, line, origin, until);
+  const goesOn = !ended && until === now && closedAt > now;
+  // A touch of this very moment is answered at once, though its stretch has no length yet.
+  const edges = edgesOf(state, line, origin, goesOn ? until + 1 : until);
   const stretches: IntervalRecord[] = [];
   for (const [i, from] of edges.entries()) {
     const to = edges[i + 1] ?? until;
@@ -46,7 +48,6 @@ function partStretches(
     else stretches.push(next);
   }
   const last = stretches.at(-1);
-  const goesOn = !ended && until === now && closedAt > now;
   if (goesOn && last?.missing === 'missed')
     stretches[stretches.length - 1] = { ...last, status: 'open', missing: null };
   if (until < end && !goesOn)

@@ -141,7 +141,8 @@ describe('a duration record', () => {
         const first = looks.filter(({ part }) => part === 0);
         expect(first[0]?.openAt).toBe(0);
         for (const [i, look] of first.entries()) {
-          expect(look.closeAt).toBeGreaterThan(look.openAt);
+          // Only what was touched this very moment has no length yet.
+          if (over || i < first.length - 1) expect(look.closeAt).toBeGreaterThan(look.openAt);
           if (i > 0) expect(look.openAt).toBe(first[i - 1]?.closeAt);
         }
         expect(first.at(-1)?.closeAt).toBe(over ? 120_000 : 119_000);

@@ -138,7 +138,7 @@ describe('whatever happens in whatever order', () => {
     await fc.assert(
       fc.asyncProperty(
         fc.array(action, { minLength: 5, maxLength: 60 }),
-        fc.constantFrom('momentary', 'partial'),
+        fc.constantFrom(...methods),
         async (actions, method) => {
           const lesson = await lessonOf(method).begin();
           for (const one of actions) await act(lesson, one);
