@@ -11,6 +11,7 @@ import { wakeLock } from '../devices/wakeLock.ts';
 import { wallClock } from '../devices/wallClock.ts';
 import type { Problem } from '../kernel/result.ts';
 import type { CoreServices } from '../screens/coreServices.ts';
+import { loadAhead } from '../screens/routes.tsx';
 import { openStore } from '../storage/index.ts';
 import { ensureInstallation } from '../tasks/installation.ts';
 import type { Deps } from '../tasks/ports.ts';
@@ -35,6 +36,7 @@ export async function openLookbell(root: Root): Promise<void> {
   const onTheme = applyTheme(document.documentElement, window.matchMedia('(prefers-color-scheme: dark)'));
   const updates = watchForUpdates();
   const notices = storeNotices();
+  const ahead = loadAhead(window.location.hash);
   const opened = await openStore({ onNotice: notices.tell });
   const cannot = (why: Problem): void =>
     root.render(
@@ -78,5 +80,6 @@ export async function openLookbell(root: Root): Promise<void> {
     useStored,
     demoFiles,
   };
+  await ahead;
   root.render(<App services={services} updates={updates} notices={notices} onTheme={onTheme} />);
 }

@@ -2,8 +2,16 @@ import { lazy, Suspense } from 'react';
 import { Route, Switch } from 'wouter';
 import { useCoreWords } from './coreServices.ts';
 
-const Room = lazy(() => import('./room/Room.tsx').then((m) => ({ default: m.Room })));
-const Pages = lazy(() => import('./Pages.tsx').then((m) => ({ default: m.Pages })));
+const loadRoom = () => import('./room/Room.tsx').then((m) => ({ default: m.Room }));
+const loadPages = () => import('./Pages.tsx').then((m) => ({ default: m.Pages }));
+const Room = lazy(loadRoom);
+const Pages = lazy(loadPages);
+
+/** Loads what an address shows, so that its first picture is not a word about loading. */
+export async function loadAhead(hash: string): Promise<void> {
+  // What cannot be loaded now is tried again, and told, when it is shown.
+  await (/^#\/room\/./.test(hash) ? loadRoom() : loadPages()).catch(() => undefined);
+}
 
 function Opening() {
   return (
