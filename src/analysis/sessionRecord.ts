@@ -1,4 +1,4 @@
-import { type RecordingFacts, recordingFacts } from '../journal/headerFacts.ts';
+import { childrenOf, type RecordingFacts, recordingFacts } from '../journal/headerFacts.ts';
 import { type IntervalRecord, readOut } from '../journal/readOut.ts';
 import type { JournalState } from '../journal/state.ts';
 import { fold } from '../journal/step.ts';
@@ -88,7 +88,7 @@ export function sessionRecords(session: StoredSession): SessionRecord[] {
     method: facts.method,
     facts,
     laid,
-    children: header.children.map(({ id, pseudonym }) => ({ id, label: pseudonym })),
+    children: childrenOf(header).map(({ id, pseudonym }) => ({ id, label: pseudonym })),
     looks: looks.filter((look) => look.phase === phase && began(look)),
     state,
   }));

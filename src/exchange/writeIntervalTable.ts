@@ -1,4 +1,4 @@
-import { recordingFacts } from '../journal/headerFacts.ts';
+import { childrenOf, recordingFacts } from '../journal/headerFacts.ts';
 import { type IntervalRecord, readOut } from '../journal/readOut.ts';
 import { fold } from '../journal/step.ts';
 import type { StoredSession } from '../journal/stored.ts';
@@ -74,7 +74,7 @@ function cellsOf({ header, journal }: StoredSession): {
   const state = fold(header, journal);
   const facts = recordingFacts(header);
   const listed = header.schedule.kind === 'listed' ? header.schedule.intervals : null;
-  const pseudonyms = new Map(header.children.map(({ id, pseudonym }) => [id, pseudonym]));
+  const pseudonyms = new Map(childrenOf(header).map(({ id, pseudonym }) => [id, pseudonym]));
   const labels = new Map(facts.codeSet.codes.map(({ id, label }) => [id, label]));
   const started = state.entries.find((entry) => entry.kind === 'started');
   const common = {

@@ -1,6 +1,6 @@
 import type { CodeSet } from '../model/codeSet.ts';
 import type { LookMoment, Method } from '../model/protocol.ts';
-import type { SessionHeader } from '../model/session.ts';
+import type { SessionChild, SessionHeader } from '../model/session.ts';
 
 /** How a session was recorded, whichever kind of schedule its header holds. */
 export interface RecordingFacts {
@@ -11,6 +11,11 @@ export interface RecordingFacts {
   readonly lookAt: LookMoment | null;
   readonly codeSet: CodeSet;
   readonly phases: readonly (string | null)[];
+}
+
+/** Everybody whose turn may come: the target children in the order of the schedule, then the reserves. */
+export function childrenOf({ children, reserves }: SessionHeader): readonly SessionChild[] {
+  return reserves === undefined ? children : [...children, ...reserves];
 }
 
 /** The method, lengths, codes and phases of a session. */

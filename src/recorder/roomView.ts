@@ -1,4 +1,5 @@
 import type { AwayReason, CueKind } from '../journal/entry.ts';
+import { childrenOf } from '../journal/headerFacts.ts';
 import { type IntervalRecord, readOut } from '../journal/readOut.ts';
 import { awayNow, childAt, type JournalState } from '../journal/state.ts';
 import { sessionMs } from '../kernel/units.ts';
@@ -183,7 +184,7 @@ export class RoomView {
 
   private away(state: JournalState): ReadonlyMap<string, AwayReason> {
     const away = new Map<string, AwayReason>();
-    for (const { id } of [...this.header.children, ...(this.header.reserves ?? [])]) {
+    for (const { id } of childrenOf(this.header)) {
       const reason = awayNow(state, id);
       if (reason !== null) away.set(id, reason);
     }
