@@ -13,6 +13,9 @@ const lookEvery = 25;
 /** The watchdog looks this often (ms); a clock that stood still for two looks is stuck. */
 const watchEvery = 700;
 
+/** A context that was asked to go on and does not within this time (ms) is given up for a new one. */
+const comesBackWithin = 2000;
+
 /** iOS keeps web sound apart from the silent switch only when the page says that it plays. */
 interface WithAudioSession {
   audioSession?: { type: string };
@@ -25,8 +28,8 @@ interface Running {
 
 /**
  * Web Audio as a port. Every state that is not `running` is treated alike (suspended, closed, the `interrupted` of
- * iOS), and "running" is believed only while the context's time moves. Each touch anywhere brings a stopped sound back;
- * what does not come back is made anew.
+ * iOS), and "running" is believed only while the context's time moves. While the page is seen a stopped sound is asked to
+ * go on, by the watchdog and by each touch anywhere; what does not come back is made anew.
  */
 export function audio(): AudioPort {
   const listeners = new Set<(event: AudioEvent) => void>();
@@ -61,29 +64,51 @@ export function audio(): AudioPort {
     return made;
   };
 
-  /** Any touch may bring the sound back, for as long as the session lasts. */
-  const revive = (): void => {
-    if (running === null || state() === 'running') return;
-    const { context } = stuck || running.context.state === 'closed' ? make() : running;
-    void context.resume().then(tellState, () => undefined);
+  /** Since when the stopped context is asked to go on; null while it runs. */
+  let askedSince: number | null = null;
+  /** Whether a new context has been made since a sound was last heard or the glass was last touched. */
+  let renewed = false;
+
+  /**
+   * Browsers that want a touch for it keep a new context locked as well: without one, one new context is enough.
+   */
+  const revive = (touched: boolean): void => {
+    if (running === null) return;
+    if (state() === 'running') {
+      askedSince = null;
+      renewed = false;
+      return;
+    }
+    const now = performance.now();
+    const staysAway = askedSince !== null && now - askedSince >= comesBackWithin;
+    const lost = stuck || running.context.state === 'closed' || staysAway;
+    if (lost && (touched || !renewed)) {
+      make();
+      renewed = !touched;
+      askedSince = null;
+    }
+    askedSince ??= now;
+    void running.context.resume().then(tellState, () => undefined);
   };
+  const touched = (): void => revive(true);
 
   const watch = (): void => {
     let last = { generation, time: -1, still: 0 };
     const stop = setInterval(() => {
-      if (running === null || running.context.state !== 'running') return tellState();
-      const time = running.context.currentTime;
-      const still = generation === last.generation && time === last.time ? last.still + 1 : 0;
-      last = { generation, time, still };
-      stuck = still >= 2;
-      // It reads "running" and stands: only a new context helps, at once where the browser lets it, else at a touch.
-      if (still === 3) revive();
+      if (running?.context.state === 'running') {
+        const time = running.context.currentTime;
+        const still = generation === last.generation && time === last.time ? last.still + 1 : 0;
+        last = { generation, time, still };
+        // It reads "running" and stands: only a new context helps.
+        stuck = still >= 2;
+      }
       tellState();
+      if (document.visibilityState === 'visible') revive(false);
     }, watchEvery);
     stops.push(() => clearInterval(stop));
     for (const event of ['pointerdown', 'keydown'] as const) {
-      window.addEventListener(event, revive, { capture: true });
-      stops.push(() => window.removeEventListener(event, revive, { capture: true }));
+      window.addEventListener(event, touched, { capture: true });
+      stops.push(() => window.removeEventListener(event, touched, { capture: true }));
     }
     stops.push(watchOutputs((change) => tell({ kind: 'output', change, output: null })));
   };
