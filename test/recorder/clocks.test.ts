@@ -167,6 +167,30 @@ describe('the tablet sleeps', () => {
   });
 });
 
+describe('a gap is noticed within two seconds of return, with nobody touching anything', () => {
+  it.each<[string, (lesson: Lesson) => Promise<void> | void]>([
+    ['sleep', ({ clock }) => clock.sleep(60_000)],
+    ['a page that hid for five seconds', ({ clock }) => clock.advance(5000)],
+    ['a clock set back', ({ clock }) => clock.sleep(-600_000)],
+  ])('%s', async (_, happens) => {
+    const lesson = await begun();
+    await lesson.until(50_400);
+    // No event tells of it: only the next wake-up does.
+    lesson.hidden = true;
+    await happens(lesson);
+    lesson.hidden = false;
+    const back = lesson.clock.page;
+    let noticed = Number.NaN;
+    lesson.session.subscribe(() => {
+      const known = lesson.session.snapshot().state.gaps.length > 0;
+      if (known && Number.isNaN(noticed)) noticed = lesson.clock.page;
+    });
+    await lesson.clock.advance(10_000);
+    expect(noticed - back).toBeLessThanOrEqual(2000);
+    expect(lesson.store.journal().some(({ kind }) => kind === 'gap')).toBe(true);
+  });
+});
+
 describe('the wall clock is moved', () => {
   it.each([
     ['forth by an hour', 3_600_000],
@@ -195,6 +219,23 @@ describe('the wall clock is moved', () => {
     await lesson.until(700_000);
     expect(heardTimes(lesson)).toEqual(grid);
     expect(new Set(lesson.outcome())).toEqual(new Set(['missed']));
+  });
+
+  it('summer time ends in the lesson: nothing shifts, nothing is a gap, and entries keep their order', async () => {
+    const lesson = new Lesson({ header: headerOf({ partLength: { kind: 'minutes', minutes: 10 } }) });
+    // 25 October 2026, 1:55 of summer time in London: in five minutes it is one o'clock again.
+    lesson.clock.wall = Date.UTC(2026, 9, 25, 0, 55);
+    lesson.clock.offset = 60;
+    await lesson.begin();
+    await lesson.until(299_000);
+    lesson.clock.offset = 0;
+    await lesson.until(700_000);
+    expect(heardTimes(lesson)).toEqual(grid);
+    expect(gaps(lesson)).toEqual([]);
+    const walls = lesson.store.journal().flatMap((e) => (e.kind === 'cued' ? [e.wall] : []));
+    expect(walls[18]).toBe('2026-10-25T01:59:48.250+01:00');
+    expect(walls[19]).toBe('2026-10-25T01:00:03.250+00:00');
+    expect(lesson.kept()).toHaveLength(40);
   });
 
   it('trimmed by less than a second: not even written down', async () => {

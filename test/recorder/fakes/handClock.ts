@@ -12,6 +12,8 @@ export class HandClock {
   page = 5_000;
   /** 3 November 2026, 10 o'clock. */
   wall = Date.UTC(2026, 10, 3, 10);
+  /** Minutes east of UTC. */
+  offset = 0;
   /** Timers wake no more often than this many ms apart, as in a hidden page. */
   throttle = 0;
   private timers: { readonly at: number; readonly wake: () => void }[] = [];
@@ -20,7 +22,7 @@ export class HandClock {
   readonly pageClock: PageClock = { now: () => pageMs(this.page) };
   readonly wallClock: WallClock = {
     now: () => epochMs(this.wall),
-    offsetMinutes: () => 0,
+    offsetMinutes: () => this.offset,
     timeZone: () => 'Europe/London',
   };
   readonly timer: Timer = {
