@@ -1,6 +1,6 @@
 import type { IntervalRecord } from './intervalRecord.ts';
 import type { PlannedInterval } from './plannedIntervals.ts';
-import { childAt, type JournalState } from './state.ts';
+import { childAt, type JournalState, type Saying } from './state.ts';
 import { lessonPartAt, minutesFromBreak } from './whereabouts.ts';
 
 /** What holds from one moment on, until something else does. */
@@ -36,12 +36,16 @@ function partStretches(
   const closedAt = state.closed[line.part] ?? Number.POSITIVE_INFINITY;
   const until = Math.min(end, closedAt, now);
   const goesOn = !ended && until === now && closedAt > now;
+  const touches = touchesOf(state, line);
   // A touch of this very moment is answered at once, though its stretch has no length yet.
-  const edges = edgesOf(state, line, origin, goesOn ? until + 1 : until);
+  const edges = edgesOf(state, touches, origin, goesOn ? until + 1 : until);
   const stretches: IntervalRecord[] = [];
+  let heard = 0;
   for (const [i, from] of edges.entries()) {
+    while ((touches[heard]?.at ?? Number.POSITIVE_INFINITY) <= from) heard += 1;
+    const word = wordAt(state, line, touches[heard - 1], from);
     const to = edges[i + 1] ?? until;
-    const next = recordOf(state, line, from, to, wordAt(state, line, origin, from));
+    const next = recordOf(state, line, from, to, word);
     const last = stretches.at(-1);
     if (last !== undefined && saysTheSame(last, next))
       stretches[stretches.length - 1] = { ...last, closeAt: to };
@@ -63,11 +67,20 @@ const silence: Word = {
   touchedAt: Number.NaN,
 };
 
+type Touch = Extract<Saying, { kind: 'marked' | 'missing' }>;
+
+/** The touches of a part in the order of their moments. */
+function touchesOf(state: JournalState, { number }: PlannedInterval): Touch[] {
+  return (state.sayings.get(number) ?? [])
+    .flatMap((saying) => (saying.kind === 'marked' || saying.kind === 'missing' ? [saying] : []))
+    .sort((a, b) => a.at - b.at);
+}
+
 /** The moments at which something may change, in order, the first one being the beginning. */
-function edgesOf(state: JournalState, line: PlannedInterval, origin: number, until: number): number[] {
+function edgesOf(state: JournalState, touches: readonly Touch[], origin: number, until: number): number[] {
   const moments = [
     origin,
-    ...touchesOf(state, line).map(({ at }) => at),
+    ...touches.map(({ at }) => at),
     ...state.covers.flatMap(({ from, to }) => [from, to]),
     ...state.standIns.flatMap(({ from, to }) => [from, to]),
     ...state.unusable.flatMap(({ from, to }) => [from, to]),
@@ -77,14 +90,8 @@ function edgesOf(state: JournalState, line: PlannedInterval, origin: number, unt
   return [...new Set(inside)].sort((a, b) => a - b);
 }
 
-function touchesOf(state: JournalState, { number }: PlannedInterval) {
-  return (state.sayings.get(number) ?? []).filter(
-    (saying) => saying.kind === 'marked' || saying.kind === 'missing',
-  );
-}
-
-/** What holds at a moment: a stretch of no use, a cover, or the last touch that nothing has ended since. */
-function wordAt(state: JournalState, line: PlannedInterval, origin: number, at: number): Word {
+/** What holds at a moment: a stretch of no use, a cover, or the last touch before, if nothing has ended it since. */
+function wordAt(state: JournalState, line: PlannedInterval, touch: Touch | undefined, at: number): Word {
   const unusable = state.unusable.findLast(({ from, to }) => from <= at && at < to);
   if (unusable !== undefined) return { ...silence, missing: unusable.reason, corrected: true };
   const child = line.child === null ? null : childAt(state, line.child, at);
@@ -93,10 +100,9 @@ function wordAt(state: JournalState, line: PlannedInterval, origin: number, at: 
   // No prompt is needed here: while the tablet stood still, touches were missed.
   if (cover !== undefined)
     return { ...silence, missing: cover.reason === 'prompt failed' ? 'missed' : cover.reason };
-  const ends = [...mine.map(({ to }) => to), ...state.standIns.flatMap(({ from, to }) => [from, to])];
-  const since = Math.max(origin, ...ends.filter((end): end is number => end !== null && end <= at));
-  const touch = touchesOf(state, line).findLast((saying) => saying.at <= at && saying.at >= since);
   if (touch === undefined) return silence;
+  const ends = [...mine.map(({ to }) => to), ...state.standIns.flatMap(({ from, to }) => [from, to])];
+  if (ends.some((end) => end !== null && end > touch.at && end <= at)) return silence;
   if (touch.kind === 'missing') return { ...silence, missing: touch.reason, touchedAt: touch.at };
   return {
     status: 'scored',
