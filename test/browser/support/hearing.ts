@@ -22,6 +22,52 @@ interface Heard {
 
 const script = readFileSync('test/browser/support/worklets/capture.js', 'utf8');
 
+/** Runs in the page, before anything of the app does. */
+function tapSpeakers({ ms, code }: { ms: number; code: string }): void {
+  const heard: Heard = { sounds: [], listening: [] };
+  Object.assign(globalThis, { heard });
+  const { connect, disconnect } = AudioNode.prototype;
+  const hubs = new WeakMap<BaseAudioContext, GainNode>();
+
+  async function tap(audio: AudioContext): Promise<void> {
+    const context = heard.listening.push(false) - 1;
+    const hub = audio.createGain();
+    hubs.set(audio, hub);
+    await audio.audioWorklet.addModule(URL.createObjectURL(new Blob([code], { type: 'text/javascript' })));
+    const node = new AudioWorkletNode(audio, 'capture', {
+      channelCount: 2,
+      channelCountMode: 'explicit',
+      processorOptions: { silence: Math.round((ms / 1000) * audio.sampleRate) },
+    });
+    node.port.onmessage = ({ data: { kind, ...sound } }) => {
+      if (kind === 'listening') heard.listening[context] = true;
+      else heard.sounds.push({ ...sound, sampleRate: audio.sampleRate, context });
+    };
+    // The listener itself is silent; a node is run only when it leads to the speakers.
+    Reflect.apply(connect, hub, [node]);
+    Reflect.apply(connect, node, [audio.destination]);
+  }
+
+  globalThis.AudioContext = class AudioContext extends globalThis.AudioContext {
+    constructor(options?: AudioContextOptions) {
+      super(options);
+      void tap(this);
+    }
+  };
+  const hubOf = (target: unknown) =>
+    target instanceof AudioDestinationNode ? hubs.get(target.context) : undefined;
+  AudioNode.prototype.connect = function (this: AudioNode, ...args: unknown[]) {
+    const hub = hubOf(args[0]);
+    if (hub) Reflect.apply(connect, this, [hub]);
+    return Reflect.apply(connect, this, args);
+  } as typeof connect;
+  AudioNode.prototype.disconnect = function (this: AudioNode, ...args: unknown[]) {
+    const hub = hubOf(args[0]);
+    if (hub) Reflect.apply(disconnect, this, [hub]);
+    return Reflect.apply(disconnect, this, args);
+  } as typeof disconnect;
+}
+
 /**
  * Listens to all that the pages of a browser send to their speakers, sample by sample: for `tabletOptions.prepare`,
  * before a page is opened. It works without network, too, so the listener comes from no address but out of the page
@@ -30,56 +76,12 @@ const script = readFileSync('test/browser/support/worklets/capture.js', 'utf8');
  * @param silenceMs how long it must be silent for the next sound to be another one
  */
 export async function listen(context: BrowserContext, silenceMs = 10): Promise<void> {
-  await context.addInitScript(
-    ({ ms, code }) => {
-      const heard: Heard = { sounds: [], listening: [] };
-      Object.assign(globalThis, { heard });
-      const { connect, disconnect } = AudioNode.prototype;
-      const hubs = new WeakMap<BaseAudioContext, GainNode>();
-
-      async function tap(audio: AudioContext): Promise<void> {
-        const context = heard.listening.push(false) - 1;
-        const hub = audio.createGain();
-        hubs.set(audio, hub);
-        await audio.audioWorklet.addModule(
-          URL.createObjectURL(new Blob([code], { type: 'text/javascript' })),
-        );
-        const node = new AudioWorkletNode(audio, 'capture', {
-          channelCount: 2,
-          channelCountMode: 'explicit',
-          processorOptions: { silence: Math.round((ms / 1000) * audio.sampleRate) },
-        });
-        node.port.onmessage = ({ data: { kind, ...sound } }) => {
-          if (kind === 'listening') heard.listening[context] = true;
-          else heard.sounds.push({ ...sound, sampleRate: audio.sampleRate, context });
-        };
-        // The listener itself is silent; a node is run only when it leads to the speakers.
-        Reflect.apply(connect, hub, [node]);
-        Reflect.apply(connect, node, [audio.destination]);
-      }
-
-      globalThis.AudioContext = class AudioContext extends globalThis.AudioContext {
-        constructor(options?: AudioContextOptions) {
-          super(options);
-          void tap(this);
-        }
-      };
-      const hubOf = (target: unknown) =>
-        target instanceof AudioDestinationNode ? hubs.get(target.context) : undefined;
-      AudioNode.prototype.connect = function (this: AudioNode, ...args: unknown[]) {
-        const hub = hubOf(args[0]);
-        if (hub) Reflect.apply(connect, this, [hub]);
-        return Reflect.apply(connect, this, args);
-      } as typeof connect;
-      AudioNode.prototype.disconnect = function (this: AudioNode, ...args: unknown[]) {
-        const hub = hubOf(args[0]);
-        if (hub) Reflect.apply(disconnect, this, [hub]);
-        return Reflect.apply(disconnect, this, args);
-      } as typeof disconnect;
-    },
-    { ms: silenceMs, code: script },
-  );
+  await context.addInitScript(tapSpeakers, { ms: silenceMs, code: script });
 }
+
+/** The same as source text, for a browser that is driven in another way. */
+export const listenSource = (silenceMs = 10): string =>
+  `(${tapSpeakers})(${JSON.stringify({ ms: silenceMs, code: script })})`;
 
 /** Waits until the page's newest audio context is being listened to. */
 export async function listening(page: Page): Promise<void> {

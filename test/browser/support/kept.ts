@@ -1,8 +1,14 @@
 import type { BrowserContext, Page } from '@playwright/test';
 import type { KnownEntry } from '../../../src/journal/entry.ts';
+import type { SessionHeader } from '../../../src/model/session.ts';
+
+/** A page of Playwright's, or one that can be hidden. */
+interface Evaluates {
+  evaluate<Given, Answer>(work: (given: Given) => Answer, given: Given): Promise<Awaited<Answer>>;
+}
 
 /** The journal of a session as it lies in the tablet's database: packed and single rows together, by number. */
-export async function journalOnDisk(page: Page, session: string): Promise<KnownEntry[]> {
+export async function journalOnDisk(page: Evaluates, session: string): Promise<KnownEntry[]> {
   const entries = await page.evaluate(async (id) => {
     const done = <T>(request: IDBRequest<T>): Promise<T> =>
       new Promise((resolve, reject) => {
@@ -20,6 +26,22 @@ export async function journalOnDisk(page: Page, session: string): Promise<KnownE
   return (entries as unknown as KnownEntry[]).sort((a, b) =>
     a.writer === b.writer ? a.seq - b.seq : a.wall < b.wall ? -1 : 1,
   );
+}
+
+/** The header of a session as it lies in the tablet's database. */
+export async function headerOnDisk(page: Evaluates, session: string): Promise<SessionHeader> {
+  const row = await page.evaluate(async (id) => {
+    const done = <T>(request: IDBRequest<T>): Promise<T> =>
+      new Promise((resolve, reject) => {
+        request.onsuccess = () => resolve(request.result);
+        request.onerror = () => reject(request.error);
+      });
+    const db = await done(indexedDB.open('lookbell'));
+    const found = await done(db.transaction('headers').objectStore('headers').get(id));
+    db.close();
+    return found as { sealed: unknown };
+  }, session);
+  return row.sealed as SessionHeader;
 }
 
 /** The session whose room is open. */
