@@ -4,6 +4,7 @@ import { disk } from '../devices/disk.ts';
 import { tellsOutputChanges } from '../devices/outputChanges.ts';
 import { recordingLock } from '../devices/recordingLock.ts';
 import { share } from '../devices/share.ts';
+import { timer } from '../devices/timer.ts';
 import { vibration } from '../devices/vibration.ts';
 import { wakeLock } from '../devices/wakeLock.ts';
 import { wallClock } from '../devices/wallClock.ts';
@@ -35,6 +36,11 @@ export function device(): Device {
     vibrates: vibration.available,
     handOver: ({ name, type, bytes }) => share.handOver({ name, type, bytes: new Uint8Array(bytes) }),
     print: () => window.print(),
+    // Loaded when it is wanted: the recording does without.
+    openCamera: async (shown) => (await import('../devices/camera.ts')).openCamera(shown),
+    pixelsOf: async (picture, edge) => (await import('../devices/pixelsOf.ts')).pixelsOf(picture, edge),
+    copyText: async (text) => (await import('../devices/copyText.ts')).copyText(text),
+    wakeIn: timer.wakeIn,
   };
 }
 

@@ -7,6 +7,7 @@ import { ServicesContext, useWords } from './services.ts';
 
 const Prepare = lazy(() => import('./before/Prepare.tsx').then((m) => ({ default: m.Prepare })));
 const Ready = lazy(() => import('./before/Ready.tsx').then((m) => ({ default: m.Ready })));
+const ReadCard = lazy(() => import('./before/card/ReadCard.tsx').then((m) => ({ default: m.ReadCard })));
 const RoomDoor = lazy(() => import('./room/RoomDoor.tsx').then((m) => ({ default: m.RoomDoor })));
 const Afterwards = lazy(() => import('./afterwards/Afterwards.tsx').then((m) => ({ default: m.Afterwards })));
 const StudyPages = lazy(() => import('./study/StudyPages.tsx').then((m) => ({ default: m.StudyPages })));
@@ -25,7 +26,10 @@ export function Pages() {
         <Suspense fallback={<Opening />}>
           <Switch>
             <Route path="/before" component={Prepare} />
-            <Route path="/before/ready" component={Ready} />
+            <Route path="/before/ready/:as?">
+              {({ as }) => <Ready role={as === 'second' ? 'second' : null} />}
+            </Route>
+            <Route path="/before/card" component={ReadCard} />
             <Route path="/room" component={RoomDoor} />
             <Route path="/afterwards/*?" component={Afterwards} />
             <Route path="/study/*?" component={StudyPages} />

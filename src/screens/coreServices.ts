@@ -8,6 +8,20 @@ import type { Deps, ExportedFile, Store, StoreReader } from '../tasks/ports.ts';
 import type { CoreWords } from '../words/coreWords.ts';
 import type { Ask } from '../worker/questions.ts';
 
+/** A picture, 4 bytes a pixel (red, green, blue, opacity), row by row from the top. */
+export interface Pixels {
+  readonly data: Uint8ClampedArray;
+  readonly width: number;
+  readonly height: number;
+}
+
+/** A camera that is open; it shows what it sees in the element that it was given. */
+export interface Camera {
+  /** The square in the middle of what it sees now, at most `edge` a side; null until it sees something. */
+  frame(edge: number): Pixels | null;
+  stop(): void;
+}
+
 /** What the screens ask of the tablet itself; `app/` fulfils it from `devices/`. */
 export interface Device {
   /** Plays the protocol's look cue once. Called in a tap, since sound starts locked. */
@@ -33,6 +47,14 @@ export interface Device {
     file: Pick<ExportedFile, 'name' | 'type' | 'bytes'>,
   ): Promise<'shared' | 'saved' | 'cancelled' | 'again'>;
   print(): void;
+  /** The camera at the back. `busy`: another program holds it, or it does not answer. */
+  openCamera(shown: HTMLVideoElement): Promise<Camera | 'refused' | 'missing' | 'busy'>;
+  /** A picture file, made smaller where a side is longer than `edge`; null when it is no picture. */
+  pixelsOf(picture: Blob, edge: number): Promise<Pixels | null>;
+  /** False where the browser does not let it. */
+  copyText(text: string): Promise<boolean>;
+  /** Calls once, after about so long. Returns the way to stop it. */
+  wakeIn(ms: number, wake: () => void): () => void;
 }
 
 export interface OpenOptions {

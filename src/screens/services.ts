@@ -2,7 +2,7 @@ import { createContext, useContext } from 'react';
 import type { Words } from '../words/words.ts';
 import type { CoreServices } from './coreServices.ts';
 
-export type { Device, OpenOptions, RecorderDesk } from './coreServices.ts';
+export type { Camera, Device, OpenOptions, Pixels, RecorderDesk } from './coreServices.ts';
 
 /** Everything that pages are given: all words. The recording screen does without and is loaded without. */
 export interface Services extends Omit<CoreServices, 'words'> {

@@ -20,6 +20,11 @@ export async function adoptVisitFile(deps: Deps, file: IncomingFile): Promise<Re
     return { ok: false, problem: read.problems[0]?.problem ?? { code: 'task.noVisitFile', values: {} } };
   const [plan] = read.bundle.visitPlans;
   if (read.form !== 'visit' || plan === undefined) return problem('task.noVisitFile', { file: file.name });
+  return adoptVisit(deps, plan);
+}
+
+/** The same with the visit itself, from a file or from a pairing card. */
+export async function adoptVisit(deps: Deps, plan: VisitPlan): Promise<Result<VisitPlan>> {
   const edits = await missingRecords(deps, plan);
   if (!edits.ok) return edits;
   const kept = await deps.store.put(edits.value);

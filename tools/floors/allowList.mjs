@@ -71,6 +71,8 @@ export const packages = {
   dexie: ['storage'],
   'dexie-react-hooks': ['app'],
   fflate: ['exchange'],
+  jsqr: ['exchange'],
+  qrcode: ['exchange'],
   react: ['app', 'charts', 'screens', 'ui'],
   'react-dom': ['app', 'charts', 'screens', 'ui'],
   uuid: ['exchange', 'kernel'],

@@ -1,4 +1,4 @@
-import { useEffect, useState } from 'react';
+import { lazy, Suspense, useEffect, useState } from 'react';
 import type { VisitPlan } from '../../model/visitPlan.ts';
 import { type ExportedFile, exportVisit } from '../../tasks/index.ts';
 import { Button } from '../../ui/Button.tsx';
@@ -6,10 +6,13 @@ import { say } from '../../words/say.ts';
 import { useServices } from '../services.ts';
 import { CheckRow } from './CheckRow.tsx';
 
-/** The frozen schedule goes to the second tablet as a file. The bytes are ready before the tap: share sheets ask for that. */
+const ShowCard = lazy(() => import('./card/ShowCard.tsx').then((m) => ({ default: m.ShowCard })));
+
+/** The frozen schedule goes to the second tablet as a file, or as pictures that its camera reads. The bytes are ready before the tap: share sheets ask for that. */
 export function HandVisit({ plan }: { readonly plan: VisitPlan }) {
   const { words, deps, device } = useServices();
   const [file, setFile] = useState<ExportedFile | null>(null);
+  const [showing, show] = useState(false);
   const [said, setSaid] = useState<string | null>(null);
   useEffect(() => {
     let here = true;
@@ -31,14 +34,28 @@ export function HandVisit({ plan }: { readonly plan: VisitPlan }) {
   return (
     <CheckRow
       name={words.before.secondTablet}
-      state={said === words.before.handed ? 'ready' : 'hold'}
+      state={said === words.before.handed || said === words.pairing.shown ? 'ready' : 'hold'}
       actions={
-        <Button disabled={file === null} onClick={hand}>
-          {words.before.handVisit}
-        </Button>
+        <>
+          <Button onClick={() => show(true)}>{words.pairing.show}</Button>
+          <Button disabled={file === null} onClick={hand}>
+            {words.before.handVisit}
+          </Button>
+        </>
       }
     >
       {said ?? words.before.secondTabletText}
+      {showing && (
+        <Suspense fallback={null}>
+          <ShowCard
+            plan={plan}
+            onClose={() => {
+              show(false);
+              setSaid(words.pairing.shown);
+            }}
+          />
+        </Suspense>
+      )}
     </CheckRow>
   );
 }

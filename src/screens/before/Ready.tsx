@@ -1,5 +1,6 @@
 import { useState } from 'react';
 import { useLocation } from 'wouter';
+import type { Role } from '../../model/session.ts';
 import type { VisitPlan } from '../../model/visitPlan.ts';
 import { startSession } from '../../tasks/index.ts';
 import { Button } from '../../ui/Button.tsx';
@@ -17,7 +18,7 @@ import { type Heard, SoundCheck } from './SoundCheck.tsx';
 import { TabletChecks, useTabletLines } from './TabletChecks.tsx';
 
 /** The last page before the classroom door: what would spoil the visit. */
-export function Ready() {
+export function Ready({ role = null }: { readonly role?: Role | null }) {
   const { words } = useServices();
   const settings = useSettings();
   if (settings === undefined) return <p className="second">{words.common.loading}</p>;
@@ -31,15 +32,15 @@ export function Ready() {
       </>
     );
   }
-  return <Checks key={settings.prepared.visit} plan={settings.prepared} />;
+  return <Checks key={settings.prepared.visit} plan={settings.prepared} role={role} />;
 }
 
-function Checks({ plan }: { readonly plan: VisitPlan }) {
+function Checks({ plan, role }: { readonly plan: VisitPlan; readonly role: Role | null }) {
   const { words, deps, store, recorder, useStored } = useServices();
   const [, go] = useLocation();
   const answer = useStored((reader) => reader.observers(plan.study.id), [plan.study.id]);
   const observers = answer?.ok ? answer.value : [];
-  const [who, setWho] = useState<Who>({ observer: null, role: null, practice: false });
+  const [who, setWho] = useState<Who>({ observer: null, role, practice: false });
   const [heard, setHeard] = useState<Heard>('not asked');
   const [present, setPresent] = useState(false);
   const [problem, setProblem] = useState<string | null>(null);

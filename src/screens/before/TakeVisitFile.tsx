@@ -28,6 +28,9 @@ export function TakeVisitFile() {
     <Sheet title={words.before.secondTitle}>
       <div className="row">
         <p className="grow second">{words.before.secondText}</p>
+        <a className="button button-plain" href="#/before/card">
+          {words.pairing.read}
+        </a>
         <FileButton accept=".json,.gz,application/json" onFiles={take}>
           {words.before.secondTake}
         </FileButton>

@@ -37,7 +37,10 @@ export function TakeVisit() {
           {words.files.visitTaken(state)}
         </Notice>
       )}
-      <div>
+      <div className="row">
+        <a className="button button-plain" href="#/before/card">
+          {words.pairing.read}
+        </a>
         <FileButton accept=".json,.gz,application/json" onFiles={take}>
           {words.files.visitTake}
         </FileButton>

@@ -7,6 +7,7 @@ import { core } from './core.ts';
 import { corrections } from './corrections.ts';
 import { files } from './files.ts';
 import { methods } from './methods.ts';
+import { cardProblems, pairing } from './pairing.ts';
 import { problems } from './problems.ts';
 import { refusals } from './refusals.ts';
 import { remarks, warnings } from './remarks.ts';
@@ -25,7 +26,8 @@ export const english = {
   figures,
   files,
   methods,
-  problems: { ...core.problems, ...problems, ...refusals },
+  pairing,
+  problems: { ...core.problems, ...problems, ...cardProblems, ...refusals },
   remarks,
   starter,
   study,

@@ -28,6 +28,10 @@ export function fakeDevice(changes: Partial<Device> = {}): Device {
     vibrates: false,
     handOver: async () => 'saved',
     print: () => {},
+    openCamera: async () => 'missing',
+    pixelsOf: async () => null,
+    copyText: async () => true,
+    wakeIn: () => () => {},
     ...changes,
   };
 }
