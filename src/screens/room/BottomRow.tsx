@@ -4,9 +4,8 @@ import { CodeSign, Ring } from '../../ui/Sign.tsx';
 import { useCoreWords } from '../coreServices.ts';
 import { Panel } from './Panel.tsx';
 import { useFacts } from './RoomFacts.tsx';
+import type { PanelName } from './RoomPanel.tsx';
 import { useLive, useRoom } from './useRoom.ts';
-
-export type PanelName = 'note' | 'child' | 'part' | 'end' | 'more';
 
 interface Props {
   readonly onPanel: (panel: PanelName) => void;

@@ -1,19 +1,17 @@
-import { type MouseEvent, type SyntheticEvent, useCallback, useMemo, useState } from 'react';
+import { type MouseEvent, type SyntheticEvent, useCallback, useState } from 'react';
 import type { PageMs } from '../../kernel/units.ts';
 import type { KeyAction } from '../../model/observer.ts';
 import { BeforeStart } from './BeforeStart.tsx';
-import { BottomRow, MorePanel, type PanelName } from './BottomRow.tsx';
-import { ChildPanel } from './ChildPanel.tsx';
-import { codeEdges } from './codeEdges.ts';
-import { Edge } from './Edge.tsx';
+import { BottomRow } from './BottomRow.tsx';
 import { Flash } from './Flash.tsx';
 import { HoldLine } from './HoldLine.tsx';
 import { LessonPlan } from './LessonPlan.tsx';
 import { LookAt } from './LookAt.tsx';
 import { Over } from './Over.tsx';
-import { EndPanel, LessonPartPanel, NotePanel } from './panels.tsx';
 import { useFacts } from './RoomFacts.tsx';
+import { type PanelName, RoomPanel } from './RoomPanel.tsx';
 import { Standstill } from './Standstill.tsx';
+import { Targets } from './Targets.tsx';
 import { TopRow } from './TopRow.tsx';
 import { useKeys } from './useKeys.ts';
 import { useLeaveGuard } from './useLeaveGuard.ts';
@@ -44,18 +42,10 @@ const keepFocus = (event: MouseEvent): void => {
 };
 
 function OnTheGlass({ leaving }: { readonly leaving: number }) {
-  const { codes, latched, keys, keysChosen } = useFacts();
+  const { keys, keysChosen } = useFacts();
   const [panel, setPanel] = useState<PanelName | null>(null);
   const [keysSeen, setKeysSeen] = useState(false);
   const close = useCallback(() => setPanel(null), []);
-  const edges = useMemo(
-    () =>
-      codeEdges(
-        [...codes.values()].map(({ code }) => code),
-        latched,
-      ),
-    [codes, latched],
-  );
   // After "break started" the last look stays open for its time, so its targets stay as well.
   const marking = useRoom(
     ({ phase, current }) =>
@@ -72,20 +62,12 @@ function OnTheGlass({ leaving }: { readonly leaving: number }) {
       onMouseDown={keepFocus}
     >
       <TopRow />
-      {marking && <Edge side="left" targets={edges.left} withChildBefore />}
+      {marking && <Targets side="left" />}
       <div className="room-centre">
         {!still && <LookAt />}
         <div className="room-middle">
-          {panel === 'note' ? (
-            <NotePanel onClose={close} />
-          ) : panel === 'child' ? (
-            <ChildPanel onClose={close} />
-          ) : panel === 'part' ? (
-            <LessonPartPanel onClose={close} />
-          ) : panel === 'end' ? (
-            <EndPanel onClose={close} />
-          ) : panel === 'more' ? (
-            <MorePanel onPanel={setPanel} onClose={close} />
+          {panel !== null ? (
+            <RoomPanel name={panel} onPanel={setPanel} onClose={close} />
           ) : still ? (
             <Standstill />
           ) : (
@@ -94,7 +76,7 @@ function OnTheGlass({ leaving }: { readonly leaving: number }) {
         </div>
         <HoldLine leaving={leaving} />
       </div>
-      {marking && <Edge side="right" targets={edges.right} />}
+      {marking && <Targets side="right" />}
       <BottomRow onPanel={setPanel} />
       <Flash />
     </main>
