@@ -1,6 +1,6 @@
 import type { AwayReason } from '../journal/entry.ts';
 import { readOut } from '../journal/readOut.ts';
-import { awayNow, isCovered, type JournalState } from '../journal/state.ts';
+import { isCovered, type JournalState } from '../journal/state.ts';
 import type { Id } from '../kernel/ids.ts';
 import type { PageMs } from '../kernel/units.ts';
 import type { MissingReason } from '../model/missing.ts';
@@ -9,6 +9,7 @@ import type { ScheduledInterval } from '../schedule/layOut.ts';
 import type { Book } from './book.ts';
 import type { SessionClock } from './clock.ts';
 import type { CueRound } from './cueRound.ts';
+import { freeReserve } from './freeReserve.ts';
 import type { Plan } from './grid.ts';
 import type { HeadsUp } from './headsUp.ts';
 import type { Correction } from './liveSession.ts';
@@ -119,15 +120,6 @@ export const childLeft =
     const by = protocol.reservesStepIn === true ? freeReserve(book.state, child) : null;
     book.write(now, { kind: 'left', child, reason, ...(by === null ? {} : { by }) });
   };
-
-/** The first reserve who is there and stands in for nobody. */
-function freeReserve(state: JournalState, leaving: Id): Id | null {
-  const standing = new Set(state.standIns.filter(({ to }) => to === null).map(({ by }) => by));
-  const free = (state.header.reserves ?? []).find(
-    ({ id }) => id !== leaving && !standing.has(id) && awayNow(state, id) === null,
-  );
-  return free?.id ?? null;
-}
 
 export const swap =
   (pairs: readonly (readonly [number, number])[]): Deed =>

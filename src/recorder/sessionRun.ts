@@ -63,7 +63,9 @@ export class SessionRun {
     this.book = new Book(header, ports, () => this.changed(), before, options.elsewhere ?? false);
     this.time = new Timekeeper(ports);
     this.sound = new SoundDesk(ports.audio, this.book.state);
-    this.touches = new TouchDesk(protocol.graceMs, protocol.method);
+    // A count is made up step by step: its first step is no late answer to the prompt before.
+    const graceMs = protocol.method === 'headcount' ? 0 : protocol.graceMs;
+    this.touches = new TouchDesk(graceMs, protocol.method);
     this.grip = new Grip(ports);
     this.view = new RoomView(header, plan);
     const player = new CuePlayer(ports.audio, this.time.clock);

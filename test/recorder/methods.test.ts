@@ -73,6 +73,19 @@ describe('headcount', () => {
     expect(cuesOf(lesson)).toEqual(['1 look 60', '2 look 120', '3 look 180']);
   });
 
+  it('begins a count with its prompt: its first steps are never late ones of the scan before', async () => {
+    const lesson = await lessonOf({ ...scans, partLength: { kind: 'minutes', minutes: 2 } });
+    await lesson.until(120_100); // nobody counted at the first prompt
+    count(lesson, 1, 9);
+    await lesson.clock.advance(100);
+    count(lesson, 2, 9);
+    await lesson.until(190_000);
+    expect(lesson.kept().map(({ counts, missing }) => counts ?? missing)).toEqual([
+      'missed',
+      { on: 2, present: 9 },
+    ]);
+  });
+
   it('needs no drawn children', async () => {
     const lesson = await lessonOf(scans, ['before'], { children: [] });
     await lesson.until(61_000);

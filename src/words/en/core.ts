@@ -3,6 +3,14 @@ import { keeping } from './keeping.ts';
 import { missing } from './missing.ts';
 import { plan } from './plan.ts';
 import { room } from './room.ts';
+import { roomCorrections } from './roomCorrections.ts';
+import { roomMethods } from './roomMethods.ts';
 
 /** What the recording screen says, and what is said everywhere: loaded before anything else, so it is kept small. */
-export const core = { common, missing, problems: keeping, plan, room };
+export const core = {
+  common,
+  missing,
+  problems: keeping,
+  plan,
+  room: { ...room, ...roomMethods, ...roomCorrections },
+};
