@@ -6,7 +6,7 @@ type Recipe = Pick<
   'method' | 'intervalMs' | 'observeMs' | 'rotation' | 'partLength' | 'childrenToDraw'
 >;
 
-export type ProtocolWarning = 'longInterval' | 'longObserve' | 'fewLooks' | 'sweepTooLong';
+export type ProtocolWarning = 'longInterval' | 'longObserve' | 'fewLooks' | 'sweepTooLong' | 'shortPart';
 
 export interface ProtocolMeaning {
   /** Intervals of one part, all children together. */
@@ -26,7 +26,7 @@ export interface ProtocolMeaning {
  * What a protocol comes to in one part with all children present.
  * Warnings: a momentary interval over 30 s, more than 10 s watched in partial or whole intervals, fewer than 10
  * looks at a child (limits as the field uses them: common practice, no single source), a sweep that needs more time
- * than an interval has. With turns by chance each round, counts are those of a listed order: they differ by at most
+ * than an interval has, a part shorter than the two minutes that a session is made for. With turns by chance each round, counts are those of a listed order: they differ by at most
  * one round that is cut short.
  */
 export function protocolMeaning(recipe: Recipe): ProtocolMeaning {
@@ -41,15 +41,17 @@ export function protocolMeaning(recipe: Recipe): ProtocolMeaning {
   const unseen = !turnless && rotation.kind !== 'one' && looks.size < children.length;
   const counts = [...looks.values()];
   const fewest = unseen || counts.length === 0 ? 0 : Math.min(...counts);
+  const lengthMs = lines.at(-1)?.endMs ?? 0;
   const warnings: ProtocolWarning[] = [];
   if (method === 'momentary' && recipe.intervalMs > 30_000) warnings.push('longInterval');
   if ((method === 'partial' || method === 'whole') && recipe.observeMs > 10_000) warnings.push('longObserve');
   if (method !== 'duration' && fewest < 10) warnings.push('fewLooks');
   if (!turnless && rotation.kind === 'sweep' && rotation.eachMs * children.length > recipe.intervalMs)
     warnings.push('sweepTooLong');
+  if (lengthMs > 0 && lengthMs < 120_000) warnings.push('shortPart');
   return {
     intervals: lines.length,
-    lengthMs: lines.at(-1)?.endMs ?? 0,
+    lengthMs,
     watched:
       method === 'headcount' ? 0 : method === 'duration' || rotation.kind === 'one' ? 1 : children.length,
     fewest,

@@ -3,10 +3,10 @@ import { newId } from '../kernel/ids.ts';
 import { ok, type Problem, problem, type Result } from '../kernel/result.ts';
 import { type Protocol, protocol as protocolSchema } from '../model/protocol.ts';
 import { nextRevision } from '../model/revision.ts';
-import { intervalsInPart } from '../schedule/layOut.ts';
 import { requireStudy } from './edits.ts';
 import type { Deps } from './ports.ts';
-import type { ProtocolDraft } from './protocolDrafts.ts';
+import { recipeProblem } from './protocolChecks.ts';
+import { type ProtocolDraft, withoutIdleParts } from './protocolDrafts.ts';
 import { cleaned, nameFrom, sameName } from './text.ts';
 import { versionWasUsed } from './usedVersions.ts';
 
@@ -23,6 +23,8 @@ export async function saveProtocol(deps: Deps, draft: ProtocolDraft): Promise<Re
   const newest = found.value;
   if (id !== null && (newest === null || newest.study !== draft.study))
     return problem('task.noProtocol', { id });
+  // What nobody touched is not judged again: it may be older than a rule.
+  if (newest !== null && sameContent(newest, content)) return ok(newest);
   const checked = await checkedContent(deps, content, newest?.id ?? null);
   if (!checked.ok) return checked;
   if (newest === null) {
@@ -33,8 +35,7 @@ export async function saveProtocol(deps: Deps, draft: ProtocolDraft): Promise<Re
       null,
     );
   }
-  const { id: _id, version: _version, revision: _revision, removed: _removed, ...standing } = newest;
-  if (!newest.removed && canonicalJson(standing) === canonicalJson(checked.value)) return ok(newest);
+  if (sameContent(newest, checked.value)) return ok(newest);
   const used = await versionWasUsed(deps, newest);
   if (!used.ok) return used;
   const next = { ...checked.value, id: newest.id, removed: false };
@@ -65,6 +66,11 @@ async function keep(deps: Deps, record: Protocol, previous: Protocol | null): Pr
 
 type Content = Omit<Protocol, 'id' | 'version' | 'removed' | 'revision'>;
 
+function sameContent(newest: Protocol, content: Content): boolean {
+  const { id: _id, version: _version, revision: _revision, removed, ...standing } = newest;
+  return !removed && canonicalJson(standing) === canonicalJson(content);
+}
+
 async function checkedContent(
   deps: Deps,
   content: Content,
@@ -77,8 +83,9 @@ async function checkedContent(
   if (others.value.some((other) => other.id !== self && sameName(other.name, name.value)))
     return problem('task.nameTaken', { what: 'protocol', name: name.value });
   const codes = content.codeSet.codes.map((code) => ({ ...code, label: cleaned(code.label) }));
-  const checked = { ...content, name: name.value, codeSet: { ...content.codeSet, codes } };
-  if (content.observeMs > content.intervalMs) return problem('task.observeLongerThanInterval');
+  const checked = withoutIdleParts({ ...content, name: name.value, codeSet: { ...content.codeSet, codes } });
+  const recipe = recipeProblem(checked);
+  if (recipe !== null) return problem(recipe.code, recipe.values);
   // In the room there are six places for codes at the screen's edges.
   if (codes.length < 1 || codes.length > 6) return problem('task.codesOutOfRange', { most: 6 });
   if (new Set(codes.map((code) => code.id)).size < codes.length) return problem('task.codeTwice');
@@ -90,7 +97,5 @@ async function checkedContent(
     return problem('task.protocolOutOfRange', {
       where: (parsed.error.issues[0]?.path ?? []).map(String).join('.'),
     });
-  if (intervalsInPart(content.partLength, content, content.childrenToDraw) < 1)
-    return problem('task.noInterval');
   return ok(checked);
 }

@@ -1,12 +1,11 @@
 import { newId } from '../kernel/ids.ts';
-import { seededRandom, shuffled } from '../kernel/random.ts';
 import { ok, problem, type Result } from '../kernel/result.ts';
-import type { Child, Draw } from '../model/classroom.ts';
+import type { Child } from '../model/classroom.ts';
 import type { SessionChild } from '../model/session.ts';
 import { type VisitPlan, visitPlan } from '../model/visitPlan.ts';
 import { intervalsInPart } from '../schedule/layOut.ts';
-import { type Attendance, replaceAbsent } from '../schedule/replaceAbsent.ts';
-import { drawTurns } from '../schedule/turns.ts';
+import { hasTarget, looksAtEverybody, orderOfDay, watchesOne } from '../schedule/orderOfDay.ts';
+import type { Attendance } from '../schedule/replaceAbsent.ts';
 import { requireClassroom, requireStudy } from './edits.ts';
 import type { Deps } from './ports.ts';
 import { newSeed } from './seeds.ts';
@@ -21,6 +20,8 @@ export interface VisitWish {
   readonly plannedStart: string | null;
   /** For the order of the children; chance gives one when it is left out. */
   readonly orderSeed?: string;
+  /** The child to be the target, or the only one watched; chance decides when it is left out. */
+  readonly first?: string | null;
 }
 
 export interface PreparedVisit {
@@ -44,28 +45,28 @@ export async function prepareVisit(deps: Deps, wish: VisitWish): Promise<Result<
   if (strange !== undefined) return problem('task.noSuchPhase', { phase: strange });
   if (wish.phases.length === 0) return problem('task.noPhase');
   const { draw, children, plan, condition } = classroom.value;
-  const scans = protocol.method === 'headcount';
-  if (draw === null && !scans) return problem('task.notDrawn');
-
+  const first = hasTarget(protocol) ? (wish.first ?? null) : null;
   const absent = new Set(wish.absent);
   const here = children.filter((child) => !child.removed);
-  // A headcount looks at everybody, so nobody has to be drawn for it.
-  const today: Attendance =
-    draw === null || scans
-      ? { children: here.filter(({ id }) => !absent.has(id)).map(({ id }) => id), replaced: [] }
-      : replaceAbsent(upTo(draw, protocol.childrenToDraw), absent, here);
-  if (today.children.length === 0) return problem('task.nobodyThere');
-  const byChance = protocol.order !== 'listed' && !scans;
-  const orderSeed = byChance ? (wish.orderSeed ?? newSeed(deps.random)) : null;
-  const order = orderSeed === null ? today.children : shuffled(today.children, seededRandom(orderSeed));
-  const intervals = intervalsInPart(protocol.partLength, protocol, order.length);
-  if (intervals === 0) return problem('task.noInterval');
-  const eachRound = orderSeed !== null && protocol.order === 'random each round';
-  const turns = eachRound
-    ? { turns: drawTurns(protocol, order.length, intervals, wish.phases.length, orderSeed) }
-    : {};
-  const reserves =
-    draw === null || scans ? [] : waiting(upTo(draw, protocol.childrenToDraw), today.children, absent, here);
+  if (first !== null && (absent.has(first) || !here.some(({ id }) => id === first)))
+    return problem('task.firstNotThere');
+  // Nobody has to be drawn where everybody is looked at, or where the one to be watched is chosen.
+  const needsDraw = !looksAtEverybody(protocol) && !(first !== null && watchesOne(protocol));
+  if (draw === null && needsDraw) return problem('task.notDrawn');
+  const day = orderOfDay(protocol, classroom.value, {
+    absent,
+    first,
+    orderSeed: wish.orderSeed ?? newSeed(deps.random),
+    parts: wish.phases.length,
+  });
+  if (day.children.length === 0) return problem('task.nobodyThere');
+  if (hasTarget(protocol) && !watchesOne(protocol) && day.children.length < 2)
+    return problem('task.targetAloneToday');
+  if (intervalsInPart(protocol.partLength, protocol, day.children.length) === 0)
+    return problem('task.noInterval');
+  const inSession = (ids: readonly string[]): SessionChild[] =>
+    ids.flatMap((id) => here.filter((one) => one.id === id).map(asSessionChild));
+  const reserves = inSession(day.reserves);
 
   const prepared: VisitPlan = {
     visit: newId(deps.random),
@@ -79,37 +80,21 @@ export async function prepareVisit(deps: Deps, wish: VisitWish): Promise<Result<
     classroom: { id: classroom.value.id, name: classroom.value.name },
     condition,
     plannedStart: wish.plannedStart,
-    children: order.flatMap((id) => here.filter((one) => one.id === id).map(inSession)),
+    children: inSession(day.children),
     ...(reserves.length === 0 ? {} : { reserves }),
     plan,
-    draw: scans ? null : draw,
-    orderSeed,
-    schedule: { kind: 'laid', protocol, phases: [...wish.phases], ...turns },
+    draw: looksAtEverybody(protocol) ? null : draw,
+    orderSeed: day.orderSeed,
+    schedule: {
+      kind: 'laid',
+      protocol,
+      phases: [...wish.phases],
+      ...(day.turns === undefined ? {} : { turns: day.turns }),
+    },
   };
   if (!visitPlan.safeParse(prepared).success) return problem('task.visitOutOfRange');
   const frozen = await freezeVersions(deps, [protocol]);
-  return frozen.ok ? ok({ plan: prepared, replaced: today.replaced }) : frozen;
+  return frozen.ok ? ok({ plan: prepared, replaced: day.replaced }) : frozen;
 }
 
-const inSession = ({ id, pseudonym, stratum }: Child): SessionChild => ({ id, pseudonym, stratum });
-
-/** Reserves who are there and were not needed yet, in their drawn order: they may step in during the session. */
-function waiting(
-  draw: Draw,
-  today: readonly string[],
-  absent: ReadonlySet<string>,
-  here: readonly Child[],
-): SessionChild[] {
-  return draw.reserves
-    .filter((id) => !absent.has(id) && !today.includes(id))
-    .flatMap((id) => here.filter((one) => one.id === id).map(inSession));
-}
-
-/** A protocol that watches fewer children than were drawn takes the first ones; the others are its first reserves. */
-function upTo(draw: Draw, count: number): Draw {
-  return {
-    ...draw,
-    chosen: draw.chosen.slice(0, count),
-    reserves: [...draw.chosen.slice(count), ...draw.reserves],
-  };
-}
+const asSessionChild = ({ id, pseudonym, stratum }: Child): SessionChild => ({ id, pseudonym, stratum });

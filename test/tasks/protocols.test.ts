@@ -50,7 +50,8 @@ it('refuses what nobody could record with', async () => {
   const refused = async (changes: Partial<ProtocolDraft>) =>
     codeOf(await saveProtocol(on.deps, { ...draft, ...changes }));
   expect(await refused({ observeMs: 20_000 })).toBe('task.observeLongerThanInterval');
-  expect(await refused({ intervalMs: 100, observeMs: 100 })).toBe('task.protocolOutOfRange');
+  expect(await refused({ intervalMs: 100, observeMs: 100 })).toBe('task.intervalOutOfRange');
+  expect(await refused({ graceMs: 9000 })).toBe('task.protocolOutOfRange');
   expect(await refused({ codeSet: { name: 'x', codes: [] } })).toBe('task.codesOutOfRange');
   expect(await refused({ codeSet: { name: 'x', codes: [code, { ...code, label: 'y' }] } })).toBe(
     'task.codeTwice',

@@ -1,9 +1,10 @@
-import { useState } from 'react';
+import { useMemo, useState } from 'react';
 import { useLocation } from 'wouter';
 import type { Classroom } from '../../model/classroom.ts';
 import type { Protocol } from '../../model/protocol.ts';
 import type { Study } from '../../model/study.ts';
-import { prepareVisit } from '../../tasks/index.ts';
+import { hasTarget, looksAtEverybody, watchesOne } from '../../schedule/orderOfDay.ts';
+import { newSeed, prepareVisit } from '../../tasks/index.ts';
 import { Button } from '../../ui/Button.tsx';
 import { Choice } from '../../ui/Choice.tsx';
 import { TextField } from '../../ui/Field.tsx';
@@ -12,8 +13,9 @@ import { PageHead } from '../../ui/PageHead.tsx';
 import { Sheet } from '../../ui/Sheet.tsx';
 import { say } from '../../words/say.ts';
 import { useServices } from '../services.ts';
+import { methodSentence } from '../study/methodSentence.ts';
 import { useCurrentStudy } from '../useCurrentStudy.ts';
-import { Attendance } from './Attendance.tsx';
+import { DaySheet } from './DaySheet.tsx';
 import { PreparedNotice, UnfinishedNotice } from './notices.tsx';
 import { TakeVisitFile } from './TakeVisitFile.tsx';
 
@@ -73,11 +75,26 @@ function Form({ study, classes, protocols }: FormProps) {
   const [protocolId, chooseProtocol] = useState<string | null>(protocols[0]?.id ?? null);
   const [phaseChoice, choosePhases] = useState<string>('all');
   const [absent, setAbsent] = useState<ReadonlySet<string>>(new Set());
+  const [chosen, choose] = useState<string | null>(null);
+  // Tossed before the visit is frozen, so that the order can be looked at; it is kept with the schedule.
+  const [orderSeed] = useState(() => newSeed(deps.random));
   const [start, setStart] = useState('');
   const [problem, setProblem] = useState<string | null>(null);
   const classroom = classes.find((c) => c.id === classId) ?? null;
   const protocol = protocols.find((p) => p.id === protocolId) ?? null;
-  const phases = phaseChoice === 'all' ? study.phases : [phaseChoice];
+  const phases = useMemo(
+    () => (phaseChoice === 'all' ? study.phases : [phaseChoice]),
+    [phaseChoice, study.phases],
+  );
+  const there = classroom?.children.some((child) => child.id === chosen && !child.removed) === true;
+  const first =
+    protocol !== null && hasTarget(protocol) && there && chosen !== null && !absent.has(chosen)
+      ? chosen
+      : null;
+  const undecided =
+    classroom === null ||
+    protocol === null ||
+    (classroom.draw === null && !looksAtEverybody(protocol) && !(watchesOne(protocol) && first !== null));
 
   const prepare = async () => {
     if (classroom === null || protocol === null) return;
@@ -87,6 +104,8 @@ function Form({ study, classes, protocols }: FormProps) {
       protocol: { id: protocol.id },
       phases,
       absent: [...absent],
+      orderSeed,
+      first,
       plannedStart: start === '' ? null : `${wall.slice(0, 10)}T${start}:00.000${wall.slice(23)}`,
     });
     if (!prepared.ok) return setProblem(say(words.problems, prepared.problem));
@@ -118,6 +137,7 @@ function Form({ study, classes, protocols }: FormProps) {
               onChange={(id) => {
                 chooseClass(id);
                 setAbsent(new Set());
+                choose(null);
               }}
               options={classes.map((c) => ({
                 value: c.id,
@@ -132,7 +152,7 @@ function Form({ study, classes, protocols }: FormProps) {
               options={protocols.map((p) => ({
                 value: p.id,
                 label: p.name,
-                hint: words.before.protocolHint({ method: p.method, seconds: p.intervalMs / 1000 }),
+                hint: methodSentence(words, p),
               }))}
             />
             <Choice
@@ -156,12 +176,10 @@ function Form({ study, classes, protocols }: FormProps) {
               ]}
             />
             {classroom !== null && protocol !== null && (
-              <Attendance
-                classroom={classroom}
-                protocol={protocol}
-                parts={phases.length}
-                absent={absent}
-                onChange={setAbsent}
+              <DaySheet
+                {...{ classroom, protocol, phases, orderSeed, absent, first }}
+                onAbsent={setAbsent}
+                onFirst={choose}
               />
             )}
             <TextField
@@ -173,11 +191,7 @@ function Form({ study, classes, protocols }: FormProps) {
             />
             {problem !== null && <Notice kind="hold">{problem}</Notice>}
             <div className="row">
-              <Button
-                look="main"
-                disabled={classroom === null || protocol === null || classroom.draw === null}
-                onClick={prepare}
-              >
+              <Button look="main" disabled={undecided} onClick={prepare}>
                 {words.before.prepare}
               </Button>
             </div>

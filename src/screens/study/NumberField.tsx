@@ -9,11 +9,16 @@ interface Props {
   readonly min: number;
   readonly max: number;
   readonly step?: number;
+  /** 0 fits too, whatever the least number is. */
+  readonly orNone?: boolean;
+  /** The sentence for what does not fit, where a range alone would not say it. */
+  readonly problem?: string;
   readonly onValue: (value: number) => void;
 }
 
 /** A number to type in. What does not fit stays in the field, with a sentence, and the last number that fits counts. */
-export function NumberField({ label, hint, value, min, max, step = 1, onValue }: Props) {
+export function NumberField(props: Props) {
+  const { label, hint, value, min, max, step = 1, orNone = false, problem, onValue } = props;
   const { study } = useWords();
   const [text, setText] = useState(String(value));
   const [from, setFrom] = useState(value);
@@ -23,19 +28,21 @@ export function NumberField({ label, hint, value, min, max, step = 1, onValue }:
     if (Number(text) !== value) setText(String(value));
   }
   const typed = numberIn(text);
-  const whole = step !== 1 || Number.isInteger(typed);
-  const fits = typed !== null && typed >= min && typed <= max && whole;
+  const fits = (number: number | null): number is number =>
+    number !== null &&
+    ((number >= min && number <= max) || (orNone && number === 0)) &&
+    (step !== 1 || Number.isInteger(number));
   return (
     <TextField
       label={label}
       {...(hint === undefined ? {} : { hint })}
-      problem={fits ? undefined : study.between({ min, max })}
+      problem={fits(typed) ? undefined : (problem ?? study.between({ min, max }))}
       inputMode={step === 1 ? 'numeric' : 'decimal'}
       value={text}
       onChange={(event) => {
         setText(event.target.value);
         const next = numberIn(event.target.value);
-        if (next === null || next < min || next > max || (step === 1 && !Number.isInteger(next))) return;
+        if (!fits(next)) return;
         setFrom(next);
         onValue(next);
       }}

@@ -1,6 +1,10 @@
 import type { Format } from '../format.ts';
+import { short } from './study/short.ts';
 
 type F = Format;
+
+const inMinutes = (minutes: number, f: F): string =>
+  `${short(Math.round(minutes * 10) / 10, f)} ${f.plural(minutes, { one: 'minute', other: 'minutes' })}`;
 
 /** Before the visit: choosing class, protocol and children, and the checks at the classroom door. */
 export const before = {
@@ -25,14 +29,6 @@ export const before = {
   klassHint: ({ n }: { n: number }, f: F) =>
     `${f.whole(n)} ${f.plural(n, { one: 'child', other: 'children' })}`,
   protocol: 'Protocol',
-  protocolHint: (
-    {
-      method,
-      seconds,
-    }: { method: 'momentary' | 'partial' | 'whole' | 'headcount' | 'duration'; seconds: number },
-    f: F,
-  ) =>
-    `${{ momentary: 'momentary', partial: 'partial interval', whole: 'whole interval', headcount: 'headcount', duration: 'duration' }[method]}, ${f.fixed(seconds, seconds % 1 === 0 ? 0 : 1)} s`,
   phases: 'Phases of this lesson',
   phasesAll: ({ phases }: { phases: readonly string[] }) => phases.join(', break, '),
   phasesAllHint: 'One sitting: the break lies between, the children stay the same.',
@@ -50,11 +46,42 @@ export const before = {
   start: 'Agreed start (may stay empty)',
   startHint: 'Only written down. You start by hand, on a shared count.',
   prepare: 'Prepare the visit',
+  everybody: 'Children of the class today',
+  everybodyHint:
+    'A headcount looks at everybody: nobody is drawn. Take the tick away from a child who is not there.',
+  targetChild: 'Target child',
+  targetChildHint: 'The others are its peers, in an order of their own.',
+  onlyChild: 'The child to watch',
+  onlyChildHint: 'All looks of the lesson go to this one child.',
+  targetDrawn: 'drawn',
+  targetOthers: 'others of the class',
+  targetOpen: 'not chosen yet',
+  targetByChance: ({ name }: { name: string }) => `as chance has it: ${name}`,
+  targetAsDrawn: ({ name }: { name: string }) => `as drawn: ${name}`,
+  scheduleTitle: 'The schedule',
   meaning: (
-    { looks, minutes, children, parts }: { looks: number; minutes: number; children: number; parts: number },
+    {
+      fewest,
+      most,
+      minutes,
+      children,
+      parts,
+    }: { fewest: number; most: number; minutes: number; children: number; parts: number },
     f: F,
   ) =>
-    `${f.whole(looks)} ${f.plural(looks, { one: 'look', other: 'looks' })} a child in ${f.fixed(minutes, minutes % 1 === 0 ? 0 : 1)} minutes${parts > 1 ? ' in each phase' : ''}, ${f.whole(children)} ${f.plural(children, { one: 'child', other: 'children' })}.`,
+    `${fewest === most ? f.whole(fewest) : `${f.whole(fewest)} to ${f.whole(most)}`} ${f.plural(most, { one: 'look', other: 'looks' })} a child in ${inMinutes(minutes, f)}${parts > 1 ? ' in each phase' : ''}, ${f.whole(children)} ${f.plural(children, { one: 'child', other: 'children' })}.`,
+  meaningCounts: (
+    {
+      counts,
+      minutes,
+      children,
+      parts,
+    }: { counts: number; minutes: number; children: number; parts: number },
+    f: F,
+  ) =>
+    `${f.whole(counts)} ${f.plural(counts, { one: 'count', other: 'counts' })} of the class in ${inMinutes(minutes, f)}${parts > 1 ? ' in each phase' : ''}, ${f.whole(children)} ${f.plural(children, { one: 'child', other: 'children' })} present.`,
+  meaningDuration: ({ minutes, parts }: { minutes: number; parts: number }, f: F) =>
+    `One child, watched for all of ${inMinutes(minutes, f)}${parts > 1 ? ' in each phase' : ''}.`,
   secondTitle: 'You are the second observer?',
   secondText:
     'Take the visit file of the first tablet: the same children, order and prompts, under your own name.',

@@ -62,6 +62,23 @@ export const refusals = {
   'task.keysOutOfRange': 'A key is set to something that no key can do.',
   'task.observeLongerThanInterval':
     'Watching takes longer than the interval. Shorten it, or make the interval longer.',
+  'task.intervalOutOfRange': 'An interval takes from 3 seconds to 10 minutes, in whole seconds.',
+  'task.observeOutOfRange': 'Watching takes from 3 seconds to 10 minutes, in whole seconds.',
+  'task.recordOutOfRange':
+    'Recording takes from 3 seconds to 10 minutes, in whole seconds, or no time of its own: 0.',
+  'task.sweepIsMomentary': 'A sweep is one short look after the other: it goes with momentary looks only.',
+  'task.sweepTooLong': (v: { children: number; seconds: number; interval: number }, f: Numbers) =>
+    `A sweep of ${f.whole(v.children)} children takes ${f.whole(v.seconds)} s, and the interval has ${f.whole(v.interval)} s. Make the interval longer, or give each child less.`,
+  'task.targetAlone':
+    'A target child needs at least one other to be compared with: draw two children or more.',
+  'task.headsUpTooEarly': (v: { seconds: number; interval: number }, f: Numbers) =>
+    `The heads-up comes ${f.whole(v.seconds)} s ahead, and the interval has ${f.whole(v.interval)} s. It has to come after the look before.`,
+  'task.durationByMinutes': 'A duration has no rounds: say for how many minutes a part goes on.',
+  'task.partTooLong': (v: { minutes: number }, f: Numbers) =>
+    `A part would take ${f.whole(v.minutes)} minutes; three hours are the most. Take fewer rounds or shorter intervals.`,
+  'task.firstNotThere': 'The child that you chose is not there today. Choose another one.',
+  'task.targetAloneToday':
+    'Only the target child is there today: at least one other has to be watched beside it.',
   'task.codesOutOfRange': (v: { most: number }, f: Numbers) =>
     `A protocol has one code at least and ${f.whole(v.most)} at most: that is how many fit at the edges of the screen.`,
   'task.codeTwice': 'One code is there twice.',

@@ -2,6 +2,7 @@ import { classWords } from './study/classWords.ts';
 import { glanceWords } from './study/glanceWords.ts';
 import { observerWords } from './study/observerWords.ts';
 import { protocolWords } from './study/protocolWords.ts';
+import { scheduleWords } from './study/scheduleWords.ts';
 import { seatWords } from './study/seatWords.ts';
 import { settingsWords } from './study/settingsWords.ts';
 
@@ -11,6 +12,7 @@ export const study = {
   ...classWords,
   ...seatWords,
   ...protocolWords,
+  ...scheduleWords,
   ...observerWords,
   ...settingsWords,
 } as const;

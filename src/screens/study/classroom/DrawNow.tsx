@@ -1,6 +1,7 @@
 import { useState } from 'react';
 import type { Classroom } from '../../../model/classroom.ts';
 import type { Protocol } from '../../../model/protocol.ts';
+import { looksAtEverybody } from '../../../schedule/orderOfDay.ts';
 import { drawTargets } from '../../../tasks/index.ts';
 import { Button } from '../../../ui/Button.tsx';
 import { Choice } from '../../../ui/Choice.tsx';
@@ -21,13 +22,17 @@ export function DrawNow(props: Props) {
   const protocols = useStored((store) => store.protocols(props.classroom.study), [props.classroom.study]);
   return (
     <Stored answer={protocols}>
-      {(found) =>
-        found.length === 0 ? (
-          <p className="second">{words.study.noProtocols}</p>
-        ) : (
-          <Draw {...props} protocols={found} />
-        )
-      }
+      {(found) => {
+        const forDraws = found.filter((one) => !looksAtEverybody(one));
+        if (found.length === 0) return <p className="second">{words.study.noProtocols}</p>;
+        if (forDraws.length === 0) return <p className="second">{words.study.drawNotNeeded}</p>;
+        return (
+          <>
+            {forDraws.length < found.length && <p className="second">{words.study.drawNotFor}</p>}
+            <Draw {...props} protocols={forDraws} />
+          </>
+        );
+      }}
     </Stored>
   );
 }

@@ -5,14 +5,17 @@ import { TextField } from '../../../ui/Field.tsx';
 import { Sheet } from '../../../ui/Sheet.tsx';
 import { useServices } from '../../services.ts';
 import { useDoing } from '../useDoing.tsx';
+import { HeadsUpFields } from './HeadsUpFields.tsx';
 
 interface Props {
   readonly cues: CueSettings;
+  /** A heads-up comes after the look before; null where there is nobody to tell apart. */
+  readonly headsUpWithinMs: number | null;
   readonly onChange: (cues: CueSettings) => void;
 }
 
 /** How prompts reach the observer and nobody else. */
-export function CuesSheet({ cues, onChange }: Props) {
+export function CuesSheet({ cues, headsUpWithinMs, onChange }: Props) {
   const { words, device } = useServices();
   const { study, f } = words;
   const { hold, forget, notice } = useDoing();
@@ -57,6 +60,9 @@ export function CuesSheet({ cues, onChange }: Props) {
             onChange={(vibration) => onChange({ ...cues, vibration })}
           />
         </div>
+        {headsUpWithinMs !== null && (
+          <HeadsUpFields cues={cues} withinMs={headsUpWithinMs} onChange={onChange} />
+        )}
         {notice}
         <div className="row">
           <Button onClick={play}>{study.playCue}</Button>

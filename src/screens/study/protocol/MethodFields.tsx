@@ -1,76 +1,105 @@
-import type { ProtocolDraft } from '../../../tasks/index.ts';
+import type { Method } from '../../../model/protocol.ts';
+import { type ProtocolDraft, switchMethod } from '../../../tasks/index.ts';
 import { Choice } from '../../../ui/Choice.tsx';
 import { useWords } from '../../services.ts';
 import { NumberField } from '../NumberField.tsx';
 import type { Change } from './change.ts';
 
-/** Method, interval and moment of the look. */
-export function MethodFields({ draft, change }: { readonly draft: ProtocolDraft; readonly change: Change }) {
+interface Props {
+  readonly draft: ProtocolDraft;
+  readonly change: Change;
+}
+
+/** The method, and its times. */
+export function MethodFields({ draft, change }: Props) {
   const { study } = useWords();
-  const momentary = draft.method === 'momentary';
-  const seconds = draft.intervalMs / 1000;
-  // A momentary look watches no part of the interval; a partial one keeps time to record where it can.
-  const observeFor = (method: string, intervalMs: number, observeMs: number) =>
-    method === 'momentary' ? intervalMs : Math.min(observeMs, intervalMs);
+  const moments = draft.method === 'momentary' || draft.method === 'headcount';
   return (
     <>
-      <Choice<string>
+      <Choice<Method>
         legend={study.methodLegend}
         value={draft.method}
-        onChange={(method) => {
-          if (method === 'momentary') change({ method, observeMs: draft.intervalMs });
-          if (method === 'partial')
-            change({ method, observeMs: Math.max(1000, Math.round((draft.intervalMs * 2) / 3000) * 1000) });
-        }}
+        onChange={(method) => change(switchMethod(draft, method))}
         options={[
           { value: 'momentary', label: study.momentary, hint: study.momentaryHint },
           { value: 'partial', label: study.partial, hint: study.partialHint },
+          { value: 'whole', label: study.whole, hint: study.wholeHint },
+          { value: 'headcount', label: study.headcount, hint: study.headcountHint },
+          { value: 'duration', label: study.duration, hint: study.durationHint },
         ]}
       />
-      <div className="recipe-fields">
-        <NumberField
-          label={study.interval}
-          min={3}
-          max={600}
-          value={seconds}
-          onValue={(next) =>
-            change({
-              intervalMs: next * 1000,
-              observeMs: observeFor(draft.method, next * 1000, draft.observeMs),
-            })
-          }
-        />
-        {!momentary && (
+      {draft.method !== 'duration' && (
+        <div className="recipe-fields">
+          {moments ? (
+            <IntervalField draft={draft} change={change} />
+          ) : (
+            <WatchFields draft={draft} change={change} />
+          )}
           <NumberField
-            label={study.observe}
-            hint={study.observeHint}
-            min={1}
-            max={seconds}
-            value={draft.observeMs / 1000}
-            onValue={(next) => change({ observeMs: next * 1000 })}
+            label={study.grace}
+            hint={study.graceHint}
+            min={0}
+            max={3}
+            step={0.1}
+            value={draft.graceMs / 1000}
+            onValue={(next) => change({ graceMs: Math.round(next * 1000) })}
           />
-        )}
-        <NumberField
-          label={study.grace}
-          hint={study.graceHint}
-          min={0}
-          max={3}
-          step={0.1}
-          value={draft.graceMs / 1000}
-          onValue={(next) => change({ graceMs: Math.round(next * 1000) })}
-        />
-      </div>
-      {momentary && (
+        </div>
+      )}
+      {moments && (
         <Choice
-          legend={study.lookAt}
+          legend={draft.method === 'headcount' ? study.countAt : study.lookAt}
           value={draft.lookAt}
           onChange={(lookAt) => change({ lookAt })}
           options={[
-            { value: 'end', label: study.lookAtEnd },
-            { value: 'start', label: study.lookAtStart },
+            { value: 'end', label: study.lookAtEnd, hint: study.lookAtHint },
+            { value: 'start', label: study.lookAtStart, hint: study.lookAtHint },
           ]}
         />
       )}
+    </>
+  );
+}
+
+/** Looks are moments: nothing of the interval is watched or set aside for recording. */
+function IntervalField({ draft, change }: Props) {
+  const { study } = useWords();
+  return (
+    <NumberField
+      label={study.interval}
+      hint={study.intervalHint}
+      min={3}
+      max={600}
+      value={draft.intervalMs / 1000}
+      onValue={(next) => change({ intervalMs: next * 1000, observeMs: next * 1000 })}
+    />
+  );
+}
+
+/** Time to watch and time to record make the interval. */
+function WatchFields({ draft, change }: Props) {
+  const { study } = useWords();
+  const recordMs = draft.intervalMs - draft.observeMs;
+  return (
+    <>
+      <NumberField
+        label={study.observe}
+        hint={study.observeHint}
+        min={3}
+        max={600}
+        value={draft.observeMs / 1000}
+        onValue={(next) => change({ observeMs: next * 1000, intervalMs: next * 1000 + recordMs })}
+      />
+      <NumberField
+        label={study.record}
+        hint={study.recordHint}
+        min={3}
+        max={600}
+        orNone
+        problem={study.recordBetween}
+        value={recordMs / 1000}
+        onValue={(next) => change({ intervalMs: draft.observeMs + next * 1000 })}
+      />
     </>
   );
 }

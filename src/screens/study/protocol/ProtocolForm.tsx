@@ -1,5 +1,6 @@
 import { useRef, useState } from 'react';
 import { useLocation } from 'wouter';
+import { looksAtEverybody, watchesOne } from '../../../schedule/orderOfDay.ts';
 import { type ProtocolDraft, removeProtocol, saveProtocol } from '../../../tasks/index.ts';
 import { restoreProtocol } from '../../../tasks/restore.ts';
 import { Button } from '../../../ui/Button.tsx';
@@ -13,6 +14,7 @@ import { CuesSheet } from './CuesSheet.tsx';
 import type { Change } from './change.ts';
 import { Meaning } from './Meaning.tsx';
 import { MethodFields } from './MethodFields.tsx';
+import { SchedulePreview } from './SchedulePreview.tsx';
 import { WhomFields } from './WhomFields.tsx';
 import './protocol.css';
 
@@ -76,10 +78,15 @@ export function ProtocolForm({ first, nextVersion }: Props) {
       </div>
       <div className="recipe-means">
         <Meaning draft={draft} />
+        <SchedulePreview draft={draft} />
       </div>
       <div className="stack recipe-rest">
         <CodesSheet set={draft.codeSet} onChange={(codeSet) => change({ codeSet })} />
-        <CuesSheet cues={draft.cues} onChange={(cues) => change({ cues })} />
+        <CuesSheet
+          cues={draft.cues}
+          headsUpWithinMs={looksAtEverybody(draft) || watchesOne(draft) ? null : draft.intervalMs}
+          onChange={(cues) => change({ cues })}
+        />
         {notice}
         <div className="row">
           <Button type="submit" look="main" disabled={busy}>

@@ -80,6 +80,8 @@ export const classWords = {
 
   draw: 'Children to watch',
   drawWhy: 'Chance chooses, not you: stratum by stratum among all children of the class.',
+  drawNotNeeded: 'A headcount looks at everybody: nobody has to be drawn.',
+  drawNotFor: 'For a headcount nobody has to be drawn.',
   drawNobody: 'Write the children down first; then chance can choose among them.',
   drawProtocol: 'For which protocol?',
   drawProtocolHint: ({ children, reserves }: { children: number; reserves: number }, f: F) =>

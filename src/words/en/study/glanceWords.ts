@@ -1,5 +1,5 @@
 import type { Format } from '../../format.ts';
-import { short } from './short.ts';
+import { ordinal, short } from './short.ts';
 
 type F = Format;
 
@@ -71,16 +71,23 @@ export const glanceWords = {
       method,
       seconds,
       observeSeconds,
+      lookAt,
       turns,
       inRow,
+      eachSeconds,
+      peerEvery,
       minutes,
       rounds,
     }: {
       method: string;
-      seconds: number;
+      /** null where there are no intervals. */
+      seconds: number | null;
       observeSeconds: number | null;
-      turns: 'next' | 'block' | 'one' | 'sweep' | 'target' | null;
+      lookAt: 'end' | 'start' | null;
+      turns: 'next' | 'block' | 'one' | 'sweep' | 'target' | 'everybody';
       inRow: number;
+      eachSeconds: number;
+      peerEvery: number;
       minutes: number | null;
       rounds: number | null;
     },
@@ -88,14 +95,20 @@ export const glanceWords = {
   ) =>
     [
       method,
-      observeSeconds === null
-        ? `every ${short(seconds, f)} s`
-        : `${short(observeSeconds, f)} s watched of ${short(seconds, f)} s`,
-      turns === 'next'
-        ? 'next child'
-        : turns === 'one'
-          ? 'one child'
-          : `${f.whole(inRow)} in a row for each child`,
+      seconds === null
+        ? 'on and off as it happens'
+        : observeSeconds === null
+          ? `every ${short(seconds, f)} s`
+          : `${short(observeSeconds, f)} s watched of ${short(seconds, f)} s`,
+      ...(lookAt === null ? [] : [`looked at the ${lookAt} of the interval`]),
+      {
+        next: 'next child',
+        one: 'one child',
+        block: `${f.whole(inRow)} in a row for each child`,
+        sweep: `all children in turn, ${short(eachSeconds, f)} s each`,
+        target: `target child, every ${ordinal(peerEvery, f)} look a peer`,
+        everybody: 'everybody',
+      }[turns],
       minutes === null
         ? `${f.whole(rounds ?? 0)} ${f.plural(rounds ?? 0, { one: 'round', other: 'rounds' })} a part`
         : `${short(minutes, f)} ${f.plural(minutes, { one: 'minute', other: 'minutes' })} a part`,

@@ -3,3 +3,9 @@ import type { Format } from '../../format.ts';
 /** A number as short as it is exact. */
 export const short = (n: number, f: Format): string =>
   f.fixed(n, Number.isInteger(n) ? 0 : Number.isInteger(n * 10) ? 1 : 2);
+
+const endings: Record<string, string> = { one: 'st', two: 'nd', few: 'rd' };
+
+/** 2nd, 3rd, 4th, 21st. */
+export const ordinal = (n: number, f: Pick<Format, 'whole' | 'locale'>): string =>
+  `${f.whole(n)}${endings[new Intl.PluralRules(f.locale, { type: 'ordinal' }).select(n)] ?? 'th'}`;
