@@ -1,7 +1,7 @@
 import type { KeyAction, KeyMap } from './observer.ts';
 
 /**
- * The keys to begin with: digits for codes, letters for the rest, and the keys that page-turners send (page and
+ * The keys to begin with: digits for codes, letters for the rest, signs for headcounts, and the keys that page-turners send (page and
  * arrow keys) for the first two codes. Names of keys are those of `KeyboardEvent.key`, single characters in lower case.
  */
 export function defaultKeyMap(): KeyMap {
@@ -19,6 +19,9 @@ export function defaultKeyMap(): KeyMap {
     Backspace: 'undo',
     s: 'silence',
     f: 'flag',
+    '+': 'one more',
+    '-': 'one fewer',
+    '=': 'same again',
     PageDown: 'code:1',
     ArrowRight: 'code:1',
     ArrowDown: 'code:1',

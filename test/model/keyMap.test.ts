@@ -19,6 +19,9 @@ describe('the keys to begin with', () => {
         'undo',
         'silence',
         'flag',
+        'one more',
+        'one fewer',
+        'same again',
       ].sort(),
     );
   });

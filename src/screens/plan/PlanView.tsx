@@ -1,9 +1,17 @@
-import type { CSSProperties } from 'react';
+import type { CSSProperties, ReactNode } from 'react';
 import type { Seat, SeatingPlan } from '../../model/seatingPlan.ts';
 import { useCoreWords } from '../coreServices.ts';
 import { SeatLabel } from './SeatLabel.tsx';
 import { onGlass, type Place, tracks, turned } from './turned.ts';
 import './planView.css';
+
+/** What every seat has, whatever element it is. */
+export interface SeatLook {
+  readonly className: string;
+  readonly style: CSSProperties;
+  readonly 'data-joined': string;
+  readonly children: ReactNode;
+}
 
 interface Props {
   readonly plan: SeatingPlan;
@@ -21,6 +29,8 @@ interface Props {
   readonly fitHeight?: string;
   /** Makes every seat a button. */
   readonly onSeat?: (seat: Seat) => void;
+  /** Draws a seat that has a child its own way; null leaves it as it is. */
+  readonly seatAs?: (seat: Seat, look: SeatLook) => ReactNode;
   /** Makes the places where no seat stands buttons too, one place beyond each edge included. */
   readonly onPlace?: (place: Place) => void;
 }
@@ -36,6 +46,7 @@ export function PlanView(props: Props) {
     chosen = null,
     fitHeight,
     onSeat,
+    seatAs,
     onPlace,
   } = props;
   const { plan: said } = useCoreWords();
@@ -96,6 +107,8 @@ export function PlanView(props: Props) {
               'data-joined': seat.joined.join(' '),
             };
             const inside = name === undefined ? <span className="seat-dot" /> : <SeatLabel>{name}</SeatLabel>;
+            const own = name === undefined ? null : (seatAs?.(seat, { ...common, children: inside }) ?? null);
+            if (own !== null) return own;
             if (onSeat === undefined)
               return (
                 <span key={seat.id} {...common}>

@@ -31,10 +31,13 @@ function OneTarget({ target }: { readonly target: EdgeTarget }) {
 
 function CodeTarget({ target }: { readonly target: Extract<EdgeTarget, { kind: 'code' }> }) {
   const live = useLive();
+  const { room } = useCoreWords();
+  const { method } = useFacts();
   const { id, label } = target.code;
   const chosen = useRoom((s) => s.current?.codes?.includes(id) ?? false);
   return (
     <Target
+      className={method === 'duration' ? 'target-lasting' : ''}
       sign={<CodeSign kind={target.sign} />}
       chosen={chosen}
       action={`code:${target.position}`}
@@ -42,35 +45,48 @@ function CodeTarget({ target }: { readonly target: Extract<EdgeTarget, { kind: '
       onTouch={(at) => live.touch(id, at)}
     >
       {label}
+      {method === 'whole' && <span className="target-hint">{room.throughout}</span>}
+      {method === 'duration' && chosen && <InForceFor />}
     </Target>
   );
+}
+
+/** How long what is in force has lasted. */
+function InForceFor() {
+  const { room } = useCoreWords();
+  const seconds = useRoom((s) => Math.floor((s.now - (s.current?.openAt ?? s.now)) / 1000));
+  return <span className="target-hint">{room.inForceFor({ ms: seconds * 1000 })}</span>;
 }
 
 function NoneOfThese() {
   const live = useLive();
   const { room } = useCoreWords();
+  const { method } = useFacts();
   const chosen = useRoom((s) => s.current?.status === 'scored' && s.current.codes?.length === 0);
   return (
     <Target
-      className="target-quiet"
+      className={method === 'duration' ? 'target-quiet target-lasting' : 'target-quiet'}
       sign={<span className="target-none" />}
       chosen={chosen}
       action="nothing"
       wasFelt={(felt) => felt.code === null && !felt.outOfView}
       onTouch={(at) => live.touch(null, at)}
     >
-      {room.noneOfThese}
+      {method === 'whole' ? room.noneThroughout : room.noneOfThese}
+      {method === 'duration' && chosen && <InForceFor />}
     </Target>
   );
 }
 
-function CannotSee() {
+/** What cannot be seen is missing, and never off-task. */
+export function CannotSee() {
   const live = useLive();
   const { room } = useCoreWords();
+  const { method } = useFacts();
   const chosen = useRoom((s) => s.current?.missing === 'out of view');
   return (
     <Target
-      className="target-dashed"
+      className={method === 'duration' ? 'target-dashed target-lasting' : 'target-dashed'}
       sign={<Ring size={34} />}
       chosen={chosen}
       action="cannot see"
@@ -78,6 +94,8 @@ function CannotSee() {
       onTouch={(at) => live.cannotSee(at)}
     >
       {room.cannotSee}
+      {method === 'headcount' && <span className="target-hint">{room.noScanHint}</span>}
+      {method === 'duration' && chosen && <InForceFor />}
     </Target>
   );
 }

@@ -1,6 +1,4 @@
 import { type MouseEvent, type SyntheticEvent, useCallback, useState } from 'react';
-import type { PageMs } from '../../kernel/units.ts';
-import type { KeyAction } from '../../model/observer.ts';
 import { BeforeStart } from './BeforeStart.tsx';
 import { BottomRow } from './BottomRow.tsx';
 import { Flash } from './Flash.tsx';
@@ -13,9 +11,10 @@ import { type PanelName, RoomPanel } from './RoomPanel.tsx';
 import { Standstill } from './Standstill.tsx';
 import { Targets } from './Targets.tsx';
 import { TopRow } from './TopRow.tsx';
+import { useKeyAct } from './useKeyAct.ts';
 import { useKeys } from './useKeys.ts';
 import { useLeaveGuard } from './useLeaveGuard.ts';
-import { useLive, useRoom } from './useRoom.ts';
+import { useRoom } from './useRoom.ts';
 import './room.css';
 import './targets.css';
 import './bottomRow.css';
@@ -80,28 +79,5 @@ function OnTheGlass({ leaving }: { readonly leaving: number }) {
       <BottomRow onPanel={setPanel} />
       <Flash />
     </main>
-  );
-}
-
-/** What the keys do: the same as the targets and buttons of that name. */
-function useKeyAct(onKey: () => void): (action: KeyAction, at: PageMs) => void {
-  const live = useLive();
-  const { codes, latched } = useFacts();
-  return useCallback(
-    (action, at) => {
-      onKey();
-      if (action === 'cannot see') live.cannotSee(at);
-      else if (action === 'child before') live.childBefore();
-      else if (action === 'undo') live.undo();
-      else if (action === 'flag') live.flag();
-      else if (action === 'silence') live.silence(live.snapshot().sound.on);
-      else if (action === 'nothing') {
-        if (latched) live.touch(null, at);
-      } else {
-        const code = [...codes.keys()][Number(action.slice('code:'.length)) - 1];
-        if (code !== undefined) live.touch(code, at);
-      }
-    },
-    [live, codes, latched, onKey],
   );
 }

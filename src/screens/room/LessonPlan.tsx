@@ -2,8 +2,11 @@ import { useMemo } from 'react';
 import type { SeatingPlan } from '../../model/seatingPlan.ts';
 import { useCoreWords } from '../coreServices.ts';
 import { PlanView } from '../plan/PlanView.tsx';
+import { CountSeat } from './CountSeat.tsx';
 import { useFacts } from './RoomFacts.tsx';
 import { useRoom } from './useRoom.ts';
+import { useStandIns } from './useStandIns.ts';
+import { useSweepRest } from './useSweep.ts';
 
 /** The plan with every child where it sits now. */
 export function usePlanNow(): SeatingPlan | null {
@@ -26,18 +29,14 @@ export function usePlanNow(): SeatingPlan | null {
 
 /** The seats as the observer sees them: brass = now, dashed = next. Who is away is said below. */
 export function LessonPlan() {
-  const words = useCoreWords();
-  const { pseudonyms, header } = useFacts();
+  const { room } = useCoreWords();
+  const { header, method } = useFacts();
   const plan = usePlanNow();
-  const current = useRoom((s) => s.current?.child ?? null);
+  const resting = useSweepRest();
+  const current = useRoom((s) => (resting ? null : (s.current?.child ?? null)));
   const next = useRoom((s) => s.upcoming?.child ?? null);
-  const away = useRoom((s) => s.away);
-  const awayNames = header.children.filter((child) => away.has(child.id));
-  // The seat of a child who is away looks free, so that nobody searches there.
-  const labels = useMemo(
-    () => new Map([...pseudonyms].filter(([child]) => !away.has(child) || child === current)),
-    [pseudonyms, away, current],
-  );
+  const labels = useLabels(current);
+  const counts = method === 'headcount';
   return (
     <div className="lesson-plan">
       {plan !== null && plan.seats.length > 0 && (
@@ -45,25 +44,52 @@ export function LessonPlan() {
           <PlanView
             plan={plan}
             labels={labels}
-            label={words.room.plan}
+            label={counts ? room.planCount : room.plan}
             current={current}
             next={next}
             fitHeight="100cqh - var(--you)"
+            {...(counts
+              ? {
+                  seatAs: (seat, look) =>
+                    seat.child === null ? null : <CountSeat key={seat.id} child={seat.child} look={look} />,
+                }
+              : {})}
           />
         </div>
       )}
-      {awayNames.length > 0 && (
-        <p className="lesson-plan-away">
-          {words.room.awayList({
-            children: awayNames.map((child) =>
-              words.room.childAway({
-                child: child.pseudonym,
-                reason: words.missing[away.get(child.id) ?? 'not taking part'],
-              }),
-            ),
-          })}
-        </p>
-      )}
+      <Away among={header.children.concat(header.reserves ?? [])} />
     </div>
   );
+}
+
+/** Whose names stand on the seats: not those of who is away, so that nobody searches there; of the reserves only who stands in. */
+function useLabels(current: string | null): ReadonlyMap<string, string> {
+  const { pseudonyms, header } = useFacts();
+  const away = useRoom((s) => s.away);
+  const standIns = useStandIns();
+  return useMemo(() => {
+    const reserves = new Set((header.reserves ?? []).map(({ id }) => id));
+    const inPlace = new Set(standIns.values());
+    const shown = (child: string): boolean =>
+      child === current || (!away.has(child) && (!reserves.has(child) || inPlace.has(child)));
+    return new Map([...pseudonyms].filter(([child]) => shown(child)));
+  }, [pseudonyms, header, away, standIns, current]);
+}
+
+function Away({ among }: { readonly among: readonly { id: string; pseudonym: string }[] }) {
+  const words = useCoreWords();
+  const { pseudonyms } = useFacts();
+  const away = useRoom((s) => s.away);
+  const standIns = useStandIns();
+  const gone = among.filter(({ id }) => away.has(id));
+  if (gone.length === 0) return null;
+  const { room, missing } = words;
+  const said = gone.map(({ id, pseudonym }) => {
+    const reason = missing[away.get(id) ?? 'not taking part'];
+    const by = pseudonyms.get(standIns.get(id) ?? '');
+    return by === undefined
+      ? room.childAway({ child: pseudonym, reason })
+      : room.awayStoodIn({ child: pseudonym, reason, by });
+  });
+  return <p className="lesson-plan-away">{room.awayList({ children: said })}</p>;
 }

@@ -2,6 +2,7 @@ import { useEffect, useState, useSyncExternalStore } from 'react';
 import { PageHead } from '../../ui/PageHead.tsx';
 import { say } from '../../words/say.ts';
 import { useCoreServices } from '../coreServices.ts';
+import { CountingFrom } from './Counting.tsx';
 import { Lesson } from './Lesson.tsx';
 import { RoomFactsFrom } from './RoomFacts.tsx';
 import { LiveContext } from './useRoom.ts';
@@ -45,7 +46,9 @@ export function Room({ session }: { readonly session: string }) {
   return (
     <LiveContext value={live}>
       <RoomFactsFrom header={live.snapshot().state.header}>
-        <Lesson />
+        <CountingFrom>
+          <Lesson />
+        </CountingFrom>
       </RoomFactsFrom>
     </LiveContext>
   );

@@ -2,17 +2,33 @@ import { createContext, type ReactNode, useContext, useMemo } from 'react';
 import type { Code } from '../../model/codeSet.ts';
 import { defaultKeyMap } from '../../model/keyMap.ts';
 import type { KeyMap } from '../../model/observer.ts';
+import type { Method } from '../../model/protocol.ts';
 import type { SessionHeader } from '../../model/session.ts';
+import { type Plan, planOf } from '../../recorder/grid.ts';
 import { useCoreServices } from '../coreServices.ts';
 import { codeSigns, type SignKind } from './codeEdges.ts';
 
 /** What stays the same through a session. */
 export interface RoomFacts {
   readonly header: SessionHeader;
+  readonly method: Method;
+  /** What the session consists of, in the words of the room. */
+  readonly unit: 'look' | 'scan' | 'time';
   readonly codes: ReadonlyMap<string, { readonly code: Code; readonly sign: SignKind }>;
   /** Several codes may be marked in one interval. */
   readonly latched: boolean;
+  /** "None of these" is an answer. */
+  readonly withNone: boolean;
+  /** "Child before" has a meaning. */
+  readonly withBefore: boolean;
+  /** Names of the target children and of the reserves. */
   readonly pseudonyms: ReadonlyMap<string, string>;
+  /** The schedule; no intervals in a session that came from a table. */
+  readonly plan: Plan;
+  /** How the children of a sweep follow each other; null for other rotations. */
+  readonly sweep: { readonly eachMs: number } | null;
+  /** The one whose looks alternate with those at peers; null for other rotations. */
+  readonly target: string | null;
   readonly keys: KeyMap;
   /** The observer chose the keys, so they are shown from the start. */
   readonly keysChosen: boolean;
@@ -40,20 +56,40 @@ export function RoomFactsFrom({
   const study = useStored((store) => store.study(header.study), [header.study]);
   const chosen = (observer?.ok ? observer.value?.keyMap : null) ?? null;
   const lessonParts = (study?.ok ? study.value?.lessonParts : null) ?? null;
-  const facts = useMemo((): RoomFacts => {
-    const { schedule } = header;
-    const { codes } = schedule.kind === 'laid' ? schedule.protocol.codeSet : schedule.codeSet;
-    const method = schedule.kind === 'laid' ? schedule.protocol.method : schedule.method;
-    const signs = codeSigns(codes);
-    return {
-      header,
-      codes: new Map(codes.map((code) => [code.id, { code, sign: signs.get(code.id) ?? 'other' }])),
-      latched: method === 'partial',
-      pseudonyms: new Map(header.children.map((child) => [child.id, child.pseudonym])),
+  const facts = useMemo(
+    (): RoomFacts => ({
+      ...factsOf(header),
       keys: chosen ?? defaultKeyMap(),
       keysChosen: chosen?.on === true,
       lessonParts: lessonParts ?? [],
-    };
-  }, [header, chosen, lessonParts]);
+    }),
+    [header, chosen, lessonParts],
+  );
   return <FactsContext value={facts}>{children}</FactsContext>;
+}
+
+function factsOf(header: SessionHeader): Omit<RoomFacts, 'keys' | 'keysChosen' | 'lessonParts'> {
+  const { schedule } = header;
+  const protocol = schedule.kind === 'laid' ? schedule.protocol : null;
+  const { codes } = schedule.kind === 'laid' ? schedule.protocol.codeSet : schedule.codeSet;
+  const method = schedule.kind === 'laid' ? schedule.protocol.method : schedule.method;
+  const signs = codeSigns(codes);
+  const inTurns = method !== 'headcount' && method !== 'duration';
+  const rotation = inTurns ? (protocol?.rotation ?? null) : null;
+  const latched = method === 'partial' || method === 'whole';
+  return {
+    header,
+    method,
+    unit: method === 'headcount' ? 'scan' : method === 'duration' ? 'time' : 'look',
+    codes: new Map(codes.map((code) => [code.id, { code, sign: signs.get(code.id) ?? 'other' }])),
+    latched,
+    withNone: latched || method === 'duration',
+    withBefore: inTurns,
+    pseudonyms: new Map(
+      [...(header.reserves ?? []), ...header.children].map((child) => [child.id, child.pseudonym]),
+    ),
+    plan: planOf(header) ?? { intervals: [], parts: [] },
+    sweep: rotation?.kind === 'sweep' ? { eachMs: rotation.eachMs } : null,
+    target: rotation?.kind === 'target' ? (header.children[0]?.id ?? null) : null,
+  };
 }

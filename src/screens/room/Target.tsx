@@ -15,7 +15,7 @@ interface Props {
   /** This is what the current interval holds. */
   readonly chosen: boolean;
   /** The key that does the same. */
-  readonly action: KeyAction;
+  readonly action?: KeyAction;
   /** Whether a touch that was taken was this target's. */
   readonly wasFelt?: (felt: Felt) => boolean;
   readonly onTouch: (at: PageMs) => void;
@@ -34,7 +34,7 @@ export function Target({ className = '', sign, children, chosen, action, wasFelt
       {wasFelt !== undefined && <FeltMark wasFelt={wasFelt} />}
       <span className="target-sign">{sign}</span>
       <span className="target-label">{children}</span>
-      <KeyHint action={action} />
+      {action !== undefined && <KeyHint action={action} />}
     </button>
   );
 }

@@ -15,6 +15,9 @@ export const keyActions: readonly KeyAction[] = [
   'undo',
   'silence',
   'flag',
+  'one more',
+  'one fewer',
+  'same again',
 ];
 
 /** What a key does, in words: "code 1", "cannot see". */

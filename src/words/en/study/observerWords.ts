@@ -9,6 +9,9 @@ const actionNames: Readonly<Record<string, string>> = {
   undo: 'undo',
   silence: 'silence the prompts',
   flag: 'flag',
+  'one more': 'one more (headcount)',
+  'one fewer': 'one fewer (headcount)',
+  'same again': 'same as last time (headcount)',
 };
 
 const keyNames: Readonly<Record<string, string>> = {
