@@ -66,7 +66,11 @@ export function ScheduleChart({ width, palette, label, rows, parts, heads, unit 
                   {parts[stretch.part]?.name}
                 </text>
               )}
-              <TimeAxis {...{ stretch, layout, palette, unit }} rows={rows.length} />
+              <TimeAxis
+                {...{ stretch, layout, palette }}
+                unit={stretch.fromMs === 0 ? ` ${unit}` : ''}
+                rows={rows.length}
+              />
               {rows.map((row, r) => (
                 <path
                   // biome-ignore lint/suspicious/noArrayIndexKey: rows stand by place
@@ -106,6 +110,7 @@ interface AxisProps {
   readonly stretch: Stretch;
   readonly layout: ScheduleLayout;
   readonly palette: Palette;
+  /** Stands after the first number. */
   readonly unit: string;
   readonly rows: number;
 }
@@ -145,7 +150,7 @@ function TimeAxis({ stretch, layout, palette, unit, rows }: AxisProps) {
           fill={palette.ink2}
           textAnchor={k === 0 && t * minute - stretch.fromMs < 1 ? 'start' : 'middle'}
         >
-          {k === 0 ? `${t} ${unit}` : t}
+          {k === 0 ? `${t}${unit}` : t}
         </text>
       ))}
     </>

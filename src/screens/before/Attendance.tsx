@@ -1,7 +1,7 @@
 import { useState } from 'react';
 import type { Classroom, Draw } from '../../model/classroom.ts';
 import type { Protocol } from '../../model/protocol.ts';
-import { looksAtEverybody, type OrderOfDay } from '../../schedule/orderOfDay.ts';
+import { looksAtEverybody, type OrderOfDay, watchesOne } from '../../schedule/orderOfDay.ts';
 import { drawTargets } from '../../tasks/index.ts';
 import { Button } from '../../ui/Button.tsx';
 import { Check } from '../../ui/Choice.tsx';
@@ -36,7 +36,13 @@ export function Attendance({ classroom, protocol, day, absent, onChange }: Props
   };
   return (
     <fieldset className="choice stack-tight">
-      <legend className="choice-legend">{everybody ? words.before.everybody : words.before.children}</legend>
+      <legend className="choice-legend">
+        {everybody
+          ? words.before.everybody
+          : watchesOne(protocol)
+            ? words.before.childrenDrawn
+            : words.before.children}
+      </legend>
       <p className="second small">{everybody ? words.before.everybodyHint : words.before.childrenHint}</p>
       <div className="choice-options">
         {listed.map((id) => (

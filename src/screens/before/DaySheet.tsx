@@ -67,6 +67,8 @@ export function DaySheet(props: Props) {
     if (looksAtEverybody(protocol))
       return words.before.meaningCounts({ counts: intervals, children: watched.length, minutes, parts });
     if (protocol.method === 'duration') return words.before.meaningDuration({ minutes, parts });
+    if (hasTarget(protocol) && !watchesOne(protocol))
+      return words.before.meaningTarget({ target: most, fewest, peers: watched.length - 1, minutes, parts });
     return words.before.meaning({ fewest, most, minutes, children: watched.length, parts });
   }
 }

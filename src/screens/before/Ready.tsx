@@ -9,9 +9,11 @@ import { PageHead } from '../../ui/PageHead.tsx';
 import { Sheet } from '../../ui/Sheet.tsx';
 import { say } from '../../words/say.ts';
 import { useServices } from '../services.ts';
+import { methodSentence } from '../study/methodSentence.ts';
 import { useSettings } from '../useCurrentStudy.ts';
 import { CheckRow } from './CheckRow.tsx';
 import { useTabletFacts } from './checks.ts';
+import { FrozenSchedule } from './FrozenSchedule.tsx';
 import { HandVisit } from './HandVisit.tsx';
 import { ObserverCheck, type Who } from './ObserverCheck.tsx';
 import { type Heard, SoundCheck } from './SoundCheck.tsx';
@@ -72,7 +74,7 @@ function Checks({ plan, role }: { readonly plan: VisitPlan; readonly role: Role 
         about={words.before.readyAbout({
           klass: plan.classroom.name,
           protocol: protocol.name,
-          seconds: protocol.intervalMs / 1000,
+          how: methodSentence(words, protocol),
           phases: plan.schedule.phases,
         })}
       >
@@ -113,6 +115,7 @@ function Checks({ plan, role }: { readonly plan: VisitPlan; readonly role: Role 
         </Button>
         {onHold.length > 0 && <p className="second small">{words.before.anywayNote}</p>}
       </div>
+      <FrozenSchedule plan={plan} />
     </div>
   );
 }

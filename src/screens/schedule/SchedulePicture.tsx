@@ -40,7 +40,10 @@ export function SchedulePicture({ protocol, phases, watched, turns }: Props) {
   const counts = looksAtEverybody(protocol) ? study.scheduleCounts : study.scheduleLooks;
   const timed = seen.some(({ watchedMs }) => watchedMs !== null);
   const looked = protocol.method !== 'duration';
-  const heads = [...(looked ? [counts] : []), ...(timed ? [study.scheduleWatched] : [])];
+  const heads = [
+    ...(looked ? [phases.length > 1 ? study.scheduleInAll : counts] : []),
+    ...(timed ? [study.scheduleWatched] : []),
+  ];
   const rows = byChild(seen, phases.length).map((parts) => ({
     label: nameOf(parts[0]?.child ?? null),
     ends: [

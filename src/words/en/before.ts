@@ -34,6 +34,7 @@ export const before = {
   phasesAllHint: 'One sitting: the break lies between, the children stay the same.',
   phasesOne: ({ phase }: { phase: string }) => `only ${phase}`,
   children: 'Children watched today',
+  childrenDrawn: 'Drawn children who are there today',
   childrenHint: 'Take the tick away from a child who is not there. A reserve steps in, in drawn order.',
   notDrawn: ({ klass }: { klass: string }) =>
     `The children of ${klass} to be watched have not been drawn yet.`,
@@ -80,6 +81,17 @@ export const before = {
     f: F,
   ) =>
     `${f.whole(counts)} ${f.plural(counts, { one: 'count', other: 'counts' })} of the class in ${inMinutes(minutes, f)}${parts > 1 ? ' in each phase' : ''}, ${f.whole(children)} ${f.plural(children, { one: 'child', other: 'children' })} present.`,
+  meaningTarget: (
+    {
+      target,
+      fewest,
+      peers,
+      minutes,
+      parts,
+    }: { target: number; fewest: number; peers: number; minutes: number; parts: number },
+    f: F,
+  ) =>
+    `${f.whole(target)} ${f.plural(target, { one: 'look', other: 'looks' })} at the target child and at least ${f.whole(fewest)} at ${peers === 1 ? 'its peer' : `each of ${f.whole(peers)} peers`} in ${inMinutes(minutes, f)}${parts > 1 ? ' in each phase' : ''}.`,
   meaningDuration: ({ minutes, parts }: { minutes: number; parts: number }, f: F) =>
     `One child, watched for all of ${inMinutes(minutes, f)}${parts > 1 ? ' in each phase' : ''}.`,
   secondTitle: 'You are the second observer?',
@@ -90,16 +102,17 @@ export const before = {
     'Consent and assent come first, under the rules of the school and the ethics board. A worry about a child goes to the school’s designated person, not into the record.',
 
   // the checks
-  readyAbout: (
-    {
-      klass,
-      protocol,
-      seconds,
-      phases,
-    }: { klass: string; protocol: string; seconds: number; phases: readonly string[] },
-    f: F,
-  ) =>
-    `${klass} · ${protocol} · every ${f.fixed(seconds, seconds % 1 === 0 ? 0 : 1)} s · ${phases.join(', break, ')}`,
+  readyAbout: ({
+    klass,
+    protocol,
+    how,
+    phases,
+  }: {
+    klass: string;
+    protocol: string;
+    how: string;
+    phases: readonly string[];
+  }) => `${klass} · ${protocol} · ${how} · ${phases.join(', break, ')}`,
   readyTitle: ({ n }: { n: number }, f: F) =>
     n === 0
       ? 'Everything is ready. Go in.'

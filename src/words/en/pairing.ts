@@ -68,7 +68,7 @@ export const pairing = {
   partMissing: ({ number }: { number: number }, f: F) => `Picture ${f.whole(number)}: still missing`,
   again: 'Begin again',
   preview: ({ klass, children, protocol, start }: VisitSaid, f: F) =>
-    `${klass}: ${f.list(children)}, by “${protocol}”, ${start === '' ? 'with no agreed start' : `to start on ${f.day(start)} at ${f.time(start)}`}.`,
+    `${klass}: ${f.list(children)}, in this order, by “${protocol}”, ${start === '' ? 'with no agreed start' : `to start on ${f.day(start)} at ${f.time(start)}`}.`,
   previewTitle: 'The card is read.',
   replaces: ({ klass }: { klass: string }) =>
     `It takes the place of the visit of ${klass} that is prepared here.`,

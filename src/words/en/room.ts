@@ -66,8 +66,6 @@ export const room = {
     'Count together: three, two, one. Both observers touch on “one”. A count-in follows on each tablet.',
   readyResuming: 'What was kept is here. Intervals in between are missing, with that reason.',
   readyFirst: ({ child }: { child: string }) => `First: ${child}`,
-  readyLooks: ({ n, minutes }: { n: number; minutes: number }, f: F) =>
-    `${looks(n, f)} in ${f.whole(minutes)} ${f.plural(minutes, { one: 'minute', other: 'minutes' })}`,
   readySilent: 'Sound is off; the cue is shown.',
   start: 'Start',
   goOn: 'Go on',
@@ -176,10 +174,6 @@ export const room = {
   childWhere: ({ child }: { child: string }) => `Where does ${child} sit now?`,
   childAway: ({ child, reason }: { child: string; reason: string }) => `${child} (${reason})`,
   endTitle: 'End the session now?',
-  endText: ({ n }: { n: number }, f: F) =>
-    n === 0
-      ? 'Every look has been made.'
-      : `${looks(n, f)} not made yet will be missing: ended early. What is kept stays kept.`,
   endWords: 'Why (may stay empty)',
   endDo: 'End the session',
   endNot: 'Go on recording',
@@ -200,18 +194,12 @@ export const room = {
     `Touch when the first task after the break is given: “${phase}” begins after three, two, one.`,
   breakStartedDo: 'Break started',
   firstTaskDo: 'First task given',
-  stillMissing: ({ n }: { n: number }, f: F) =>
-    n === 0 ? 'No look is missing so far.' : `${missingLooks(n, f)} so far.`,
   overTitle: 'The session is over.',
   overEarlyTitle: 'The session was ended early.',
   overKept: ({ kept, of }: { kept: number; of: number }, f: F) =>
     `All kept (${f.whole(kept)} of ${f.whole(of)}).`,
   overNotKept: ({ kept, of }: { kept: number; of: number }, f: F) =>
     `Kept ${f.whole(kept)} of ${f.whole(of)}. Stay here: the tablet is asked again.`,
-  overMissing: ({ n, of }: { n: number; of: number }, f: F) =>
-    n === 0
-      ? `All ${f.whole(of)} looks were made.`
-      : `${missingLooks(n, f)} of ${f.whole(of)}. The reasons stand with the figures.`,
   overAgain: 'Try again',
   overDo: 'Go to its figures',
 
@@ -223,7 +211,7 @@ export const room = {
   holdSoundTry: 'Try the sound',
   holdSoundOn: 'Sound on',
   holdAwake: 'The tablet may fall asleep. Touch the screen now and then.',
-  holdGap: ({ seconds, cause }: { seconds: number; cause: string }, f: F) =>
+  holdGap: ({ seconds, cause, continuous }: { seconds: number; cause: string; continuous: boolean }, f: F) =>
     `${
       (
         {
@@ -234,7 +222,11 @@ export const room = {
           clock: 'The clock jumped',
         } as Record<string, string>
       )[cause] ?? 'The tablet was away'
-    } for ${f.clock(seconds * 1000)} minutes. Cues that nobody got are missing: prompt failed.`,
+    } for ${f.clock(seconds * 1000)} minutes. ${
+      continuous
+        ? 'That time is missing. Touch what the child does now.'
+        : 'Cues that nobody got are missing: prompt failed.'
+    }`,
   holdLeave: 'Still recording. End the session first, then leave.',
   notTaken: ({ why }: { why: string }) =>
     (

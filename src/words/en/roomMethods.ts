@@ -4,8 +4,8 @@ import type { Format } from '../format.ts';
 
 type F = Pick<Format, 'whole' | 'plural' | 'clock' | 'list'>;
 
-/** What a session counts: looks at one child, scans of everybody, or time. `n` of it, or `ms` of it where it is time. */
-export interface Amount {
+/** What a session counts: looks at one child, scans of everybody, or time. */
+interface Amount {
   readonly unit: 'look' | 'scan' | 'time';
   readonly n: number;
   readonly ms: number;
@@ -119,7 +119,6 @@ export const roomMethods = {
       return `The last ${f.clock(some.ms)} minutes will be missing: ended early. What is kept stays kept.`;
     return `${amount(some, f)} not made yet will be missing: ended early. What is kept stays kept.`;
   },
-  gapTime: 'That time is missing. Touch what the child does now.',
   notTakenAfterLast: 'Not taken: the time is over.',
 
   // reserves

@@ -34,10 +34,11 @@ export function HeadsUpFields({ cues, withinMs, onChange }: Props) {
         }
         options={[
           { value: 'off', label: study.headsUpOff },
-          { value: 'child', label: study.headsUpChild, hint: study.headsUpHint },
-          { value: 'seat', label: study.headsUpSeat, hint: study.headsUpHint },
+          { value: 'child', label: study.headsUpChild },
+          { value: 'seat', label: study.headsUpSeat },
         ]}
       />
+      <p className="second small recipe-note">{study.headsUpHint}</p>
       {headsUp !== undefined && (
         <NumberField
           label={study.headsUpAhead}

@@ -47,15 +47,18 @@ export function MethodFields({ draft, change }: Props) {
         </div>
       )}
       {moments && (
-        <Choice
-          legend={draft.method === 'headcount' ? study.countAt : study.lookAt}
-          value={draft.lookAt}
-          onChange={(lookAt) => change({ lookAt })}
-          options={[
-            { value: 'end', label: study.lookAtEnd, hint: study.lookAtHint },
-            { value: 'start', label: study.lookAtStart, hint: study.lookAtHint },
-          ]}
-        />
+        <>
+          <Choice
+            legend={draft.method === 'headcount' ? study.countAt : study.lookAt}
+            value={draft.lookAt}
+            onChange={(lookAt) => change({ lookAt })}
+            options={[
+              { value: 'end', label: study.lookAtEnd },
+              { value: 'start', label: study.lookAtStart },
+            ]}
+          />
+          <p className="second small recipe-note">{study.lookAtHint}</p>
+        </>
       )}
     </>
   );

@@ -48,15 +48,18 @@ export function WhomFields({ draft, change }: { readonly draft: ProtocolDraft; r
       {hasTurns && <TurnFields draft={draft} change={change} />}
       <LengthFields draft={draft} change={change} />
       {!duration && (
-        <Choice<'missing' | 'repeat'>
-          legend={study.afterPause}
-          value={draft.afterPause ?? 'missing'}
-          onChange={(afterPause) => change({ afterPause })}
-          options={[
-            { value: 'missing', label: study.afterPauseMissing },
-            { value: 'repeat', label: study.afterPauseRepeat, hint: study.afterPauseHint },
-          ]}
-        />
+        <>
+          <Choice<'missing' | 'repeat'>
+            legend={study.afterPause}
+            value={draft.afterPause ?? 'missing'}
+            onChange={(afterPause) => change({ afterPause })}
+            options={[
+              { value: 'missing', label: study.afterPauseMissing },
+              { value: 'repeat', label: study.afterPauseRepeat },
+            ]}
+          />
+          <p className="second small recipe-note">{study.afterPauseHint}</p>
+        </>
       )}
     </div>
   );

@@ -100,7 +100,9 @@ export const glanceWords = {
         : observeSeconds === null
           ? `every ${short(seconds, f)} s`
           : `${short(observeSeconds, f)} s watched of ${short(seconds, f)} s`,
-      ...(lookAt === null ? [] : [`looked at the ${lookAt} of the interval`]),
+      ...(lookAt === null
+        ? []
+        : [`${turns === 'everybody' ? 'counted' : 'looked'} at the ${lookAt} of the interval`]),
       {
         next: 'next child',
         one: 'one child',

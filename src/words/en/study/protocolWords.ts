@@ -40,7 +40,7 @@ export const protocolWords = {
   countAt: 'When to count',
   lookAtEnd: 'when the interval ends',
   lookAtStart: 'when the interval starts',
-  lookAtHint: 'It stands beside every figure.',
+  lookAtHint: 'This is printed with every figure.',
   turns: 'Whose turn',
   turnsNext: 'the next child at each interval',
   turnsNextHint: 'Each child’s looks are spread over the whole lesson.',

@@ -12,7 +12,8 @@ export const scheduleWords = {
   scheduleMinutes: 'min',
   scheduleLooks: 'looks',
   scheduleCounts: 'counts',
-  scheduleWatched: 'min watched',
+  scheduleInAll: 'in all',
+  scheduleWatched: 'watched',
   scheduleTable: 'The same as a table',
   scheduleCaption: 'When each child is seen',
   scheduleChild: 'child',
@@ -21,5 +22,5 @@ export const scheduleWords = {
   scheduleLast: 'last',
   scheduleLongest: 'longest between looks',
   scheduleSeen: ({ ms }: { ms: number | null }, f: F) => (ms === null ? '–' : f.clock(ms)),
-  scheduleMinutesOf: ({ ms }: { ms: number }, f: F) => short(Math.round(ms / 6000) / 10, f),
+  scheduleMinutesOf: ({ ms }: { ms: number }, f: F) => `${short(Math.round(ms / 6000) / 10, f)} min`,
 } as const;
