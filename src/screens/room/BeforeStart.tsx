@@ -4,6 +4,7 @@ import { Button } from '../../ui/Button.tsx';
 import { Notice } from '../../ui/Notice.tsx';
 import { say } from '../../words/say.ts';
 import { useCoreServices } from '../coreServices.ts';
+import { partLengths } from './amounts.ts';
 import { useFacts } from './RoomFacts.tsx';
 import { useLive, useRoom } from './useRoom.ts';
 
@@ -12,7 +13,7 @@ export function BeforeStart() {
   const live = useLive();
   const { words } = useCoreServices();
   const { room, problems } = words;
-  const { header, pseudonyms } = useFacts();
+  const { header, pseudonyms, plan, unit } = useFacts();
   const [, go] = useLocation();
   const [starting, setStarting] = useState(false);
   const [problem, setProblem] = useState<string | null>(null);
@@ -33,7 +34,7 @@ export function BeforeStart() {
     setStarting(false);
   };
   const shared = header.role !== null;
-  const minutes = schedule.kind === 'laid' ? (s.looks * schedule.protocol.intervalMs) / 60_000 : 0;
+  const minutes = Math.round(partLengths(plan).reduce((sum, ms) => sum + ms, 0) / 60_000);
   return (
     <main className="room-page">
       <p className="second">
@@ -46,10 +47,18 @@ export function BeforeStart() {
       <h1 tabIndex={-1}>
         {s.resuming ? room.readyTitleResuming : shared ? room.readyTitleShared : room.readyTitle}
       </h1>
-      <p>{s.resuming ? room.readyResuming : shared ? room.readyShared : room.readyAlone}</p>
+      <p>
+        {s.resuming
+          ? unit === 'time'
+            ? room.readyResumingTime
+            : room.readyResuming
+          : shared
+            ? room.readyShared
+            : room.readyAlone}
+      </p>
       <p className="second">
         {name !== undefined && !s.resuming && `${room.readyFirst({ child: name })} · `}
-        {room.readyLooks({ n: s.looks, minutes: Math.round(minutes) })}
+        {room.readyAmount({ unit, n: s.looks, minutes })}
         {s.silent && ` · ${room.readySilent}`}
       </p>
       {problem !== null && <Notice kind="hold">{problem}</Notice>}

@@ -4,6 +4,7 @@ import { Button } from '../../ui/Button.tsx';
 import { Hold } from '../../ui/Sign.tsx';
 import { say } from '../../words/say.ts';
 import { useCoreWords } from '../coreServices.ts';
+import { useFacts } from './RoomFacts.tsx';
 import { useLive, useRoom } from './useRoom.ts';
 
 /** Which hold comes first; the others wait until it is gone or seen. */
@@ -28,6 +29,7 @@ function holdsOf(s: RoomSnapshot) {
 export function HoldLine({ leaving }: { readonly leaving: number }) {
   const live = useLive();
   const { room, problems } = useCoreWords();
+  const { unit } = useFacts();
   const s = useRoom(holdsOf);
   const [seen, setSeen] = useState(() => ({ gaps: 0, leaving: 0, awake: false }));
   const refusal = useFreshRefusal(s);
@@ -55,10 +57,19 @@ export function HoldLine({ leaving }: { readonly leaving: number }) {
   else if (s.output) content = line(room.holdOutput, sound(room.holdSoundOn));
   else if (s.stuck) content = line(room.holdSoundStuck, sound(room.holdSoundTry));
   else if (leaving > seen.leaving) content = line(room.holdLeave, dismiss({ leaving }));
-  else if (refusal !== null) content = line(room.notTaken({ why: refusal }));
+  else if (refusal !== null)
+    content = line(
+      unit !== 'look' && refusal === 'after the last interval'
+        ? room.notTakenAfterLast
+        : room.notTaken({ why: refusal }),
+    );
   else if (s.gap !== null && s.gaps > seen.gaps)
     content = line(
-      room.holdGap({ seconds: Math.round((s.gap.to - s.gap.from) / 1000), cause: s.gap.cause }),
+      room.holdGap({
+        seconds: Math.round((s.gap.to - s.gap.from) / 1000),
+        cause: s.gap.cause,
+        continuous: unit === 'time',
+      }),
       dismiss({ gaps: s.gaps }),
     );
   else if (s.awake && !seen.awake) content = line(room.holdAwake, dismiss({ awake: true }));

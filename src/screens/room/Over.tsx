@@ -4,6 +4,7 @@ import { Button } from '../../ui/Button.tsx';
 import { Hold, Tick } from '../../ui/Sign.tsx';
 import { say } from '../../words/say.ts';
 import { useCoreServices } from '../coreServices.ts';
+import { missingOf, partLengths } from './amounts.ts';
 import { useFacts } from './RoomFacts.tsx';
 import { useLive, useRoom } from './useRoom.ts';
 
@@ -12,15 +13,15 @@ export function Over() {
   const live = useLive();
   const { words, recorder } = useCoreServices();
   const { room, problems } = words;
-  const { header } = useFacts();
+  const { header, unit, plan } = useFacts();
   const [, go] = useLocation();
   const [asking, setAsking] = useState(false);
   const s = useRoom(({ kept, ended, intervals }) => ({
     ...kept,
     early: ended === 'early',
     of: kept.of,
-    intervals: intervals.length,
-    missing: intervals.filter(({ status }) => status === 'missing').length,
+    all: unit === 'time' ? 0 : intervals.length,
+    ...missingOf(intervals, unit),
   }));
   const allKept = s.kept === s.of;
   const again = async (): Promise<void> => {
@@ -42,7 +43,15 @@ export function Over() {
         </strong>
       </p>
       {!allKept && s.refused !== null && <p>{say(problems, s.refused)}</p>}
-      <p className="second">{room.overMissing({ n: s.missing, of: s.intervals })}</p>
+      <p className="second">
+        {room.missingAtEnd({
+          unit,
+          n: s.n,
+          ms: s.ms,
+          of: s.all,
+          ofMs: partLengths(plan).reduce((sum, ms) => sum + ms, 0),
+        })}
+      </p>
       <div className="row">
         {allKept ? (
           <Button look="main" onClick={leave}>

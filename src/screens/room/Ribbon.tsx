@@ -1,20 +1,28 @@
 import { type CSSProperties, memo } from 'react';
 import { useCoreWords } from '../coreServices.ts';
+import { useFacts } from './RoomFacts.tsx';
 import { ribbonText } from './ribbonText.ts';
+import { NowSign, TimeRibbon } from './TimeRibbon.tsx';
 import { useRoom } from './useRoom.ts';
 import './ribbon.css';
 
-/** The whole session: a tick an interval, ring = missing, dot above = late, brass = now, a thin line between parts. */
+/** The whole session: ticks of intervals, or strokes of time. */
 export function Ribbon() {
+  return useFacts().unit === 'time' ? <TimeRibbon /> : <TickRibbon />;
+}
+
+/** A tick an interval, ring = missing, dot above = late, brass = now, a thin line between parts. */
+function TickRibbon() {
   const words = useCoreWords();
-  const text = useRoom((s) => ribbonText(s.intervals));
+  const { sweep } = useFacts();
+  const text = useRoom((s) => ribbonText(s.intervals, sweep !== null));
   // Before the first cue the triangle stands just before the look that is coming.
   const now = useRoom((s) =>
     s.phase === 'ended'
       ? null
       : (s.current?.number ?? (s.upcoming === null ? null : s.upcoming.number - 0.5)),
   );
-  const places = [...text].filter((letter) => letter !== '|');
+  const places = [...text].filter((letter) => letter !== '|' && letter !== ' ');
   const missing = places.filter((letter) => letter === 'm').length;
   return (
     <div
@@ -24,7 +32,7 @@ export function Ribbon() {
       style={{ '--ticks': String(text.length) } as CSSProperties}
     >
       <Ticks text={text} />
-      {now !== null && <Now at={share(text, now)} />}
+      {now !== null && <NowSign at={share(text, now)} />}
     </div>
   );
 }
@@ -33,7 +41,7 @@ export function Ribbon() {
 function share(text: string, number: number): number {
   let seen = 0;
   for (let i = 0; i < text.length; i++) {
-    if (text[i] === '|') continue;
+    if (text[i] === '|' || text[i] === ' ') continue;
     seen += 1;
     if (seen >= number) return (i + 0.5 - (seen - number)) / text.length;
   }
@@ -45,6 +53,7 @@ const Ticks = memo(function Ticks({ text }: { readonly text: string }) {
   [...text].forEach((letter, i) => {
     const x = (i + 0.5) * 10;
     if (letter === '|') paths.parts += `M${x} 6V42`;
+    else if (letter === ' ') return;
     else if (letter === 'm') paths.missing += `M${x} 24h.01`;
     else if (letter === 'w') paths.waiting += `M${x} 19V29`;
     else paths.scored += letter === 'o' ? `M${x} 19V29` : `M${x} 13V35`;
@@ -66,18 +75,3 @@ const Ticks = memo(function Ticks({ text }: { readonly text: string }) {
     </svg>
   );
 });
-
-function Now({ at }: { readonly at: number }) {
-  return (
-    <svg
-      className="ribbon-now"
-      style={{ left: `${at * 100}%` }}
-      width="18"
-      height="48"
-      viewBox="0 0 18 48"
-      aria-hidden="true"
-    >
-      <path d="M0 0H18L10.5 12V46H7.5V12Z" />
-    </svg>
-  );
-}

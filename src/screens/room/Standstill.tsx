@@ -1,12 +1,15 @@
 import type { ReactNode } from 'react';
 import { Button } from '../../ui/Button.tsx';
 import { useCoreWords } from '../coreServices.ts';
+import { missingOf } from './amounts.ts';
+import { useFacts } from './RoomFacts.tsx';
 import { useLive, useRoom } from './useRoom.ts';
 
 /** States in which nothing is marked: what goes on, what is missing, one main button. */
 export function Standstill() {
   const live = useLive();
   const { room } = useCoreWords();
+  const { unit } = useFacts();
   const s = useRoom(({ phase, partPhase, nextPart, breakStarted }) => ({
     phase,
     partPhase: partPhase ?? '',
@@ -15,7 +18,16 @@ export function Standstill() {
   }));
   if (s.phase === 'interrupted')
     return (
-      <Still title={room.interruptedTitle} text={room.interruptedText}>
+      <Still
+        title={room.interruptedTitle}
+        text={
+          unit === 'look'
+            ? room.interruptedText
+            : unit === 'scan'
+              ? room.interruptedScans
+              : room.interruptedTime
+        }
+      >
         <Button look="main" onClick={() => live.continueClass()}>
           {room.interruptedDo}
         </Button>
@@ -23,7 +35,10 @@ export function Standstill() {
     );
   if (s.phase === 'paused')
     return (
-      <Still title={room.pausedTitle} text={room.pausedText}>
+      <Still
+        title={room.pausedTitle}
+        text={unit === 'look' ? room.pausedText : unit === 'scan' ? room.pausedScans : room.pausedTime}
+      >
         <Button look="main" onClick={() => live.resume()}>
           {room.pausedDo}
         </Button>
@@ -57,12 +72,13 @@ function Still({
   readonly children: ReactNode;
 }) {
   const { room } = useCoreWords();
-  const missing = useRoom((s) => s.intervals.filter(({ status }) => status === 'missing').length);
+  const { unit } = useFacts();
+  const missing = useRoom((s) => missingOf(s.intervals, unit));
   return (
     <div className="still">
       <h1>{title}</h1>
       <p>{text}</p>
-      <p className="second">{room.stillMissing({ n: missing })}</p>
+      <p className="second">{room.missingSoFar(missing)}</p>
       <div className="row">{children}</div>
     </div>
   );

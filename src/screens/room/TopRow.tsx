@@ -1,6 +1,7 @@
 import { Tick } from '../../ui/Sign.tsx';
 import { useCoreWords } from '../coreServices.ts';
 import { Ribbon } from './Ribbon.tsx';
+import { useFacts } from './RoomFacts.tsx';
 import { useRoom } from './useRoom.ts';
 
 /** How far the lesson is: time left, the ribbon, the round; and the small sign of what is on the disk. */
@@ -34,9 +35,15 @@ function TimeLeft() {
 
 function Round() {
   const words = useCoreWords();
+  const { unit } = useFacts();
   const { round, rounds } = useRoom((s) => ({ round: s.round, rounds: s.rounds }));
   return (
-    <p className="room-round">{round !== null && rounds !== null && words.room.round({ round, rounds })}</p>
+    <p className="room-round">
+      {round !== null &&
+        rounds !== null &&
+        unit !== 'time' &&
+        (unit === 'scan' ? words.room.scanOf({ round, rounds }) : words.room.round({ round, rounds }))}
+    </p>
   );
 }
 

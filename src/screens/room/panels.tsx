@@ -3,6 +3,7 @@ import { Button } from '../../ui/Button.tsx';
 import { Check } from '../../ui/Choice.tsx';
 import { TextArea, TextField } from '../../ui/Field.tsx';
 import { useCoreWords } from '../coreServices.ts';
+import { aheadOf } from './amounts.ts';
 import { Panel } from './Panel.tsx';
 import { useFacts } from './RoomFacts.tsx';
 import { useLive, useRoom } from './useRoom.ts';
@@ -79,7 +80,8 @@ export function EndPanel({ onClose }: Props) {
   const live = useLive();
   const { room } = useCoreWords();
   const form = useId();
-  const notMade = useRoom((s) => s.intervals.filter(({ status }) => status === 'waiting').length);
+  const { plan, unit } = useFacts();
+  const notMade = useRoom((s) => aheadOf(s, plan, unit));
   const [why, setWhy] = useState('');
   const end = (event: FormEvent): void => {
     event.preventDefault();
@@ -98,7 +100,7 @@ export function EndPanel({ onClose }: Props) {
       }
     >
       <form id={form} className="stack-tight" onSubmit={end}>
-        <p>{room.endText({ n: notMade })}</p>
+        <p>{room.endAmount(notMade)}</p>
         <TextField
           label={room.endWords}
           maxLength={500}
