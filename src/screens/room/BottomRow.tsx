@@ -1,10 +1,9 @@
-import type { ReactNode } from 'react';
 import { Button } from '../../ui/Button.tsx';
-import { CodeSign, Ring } from '../../ui/Sign.tsx';
 import { useCoreWords } from '../coreServices.ts';
 import { Panel } from './Panel.tsx';
 import { useFacts } from './RoomFacts.tsx';
 import type { PanelName } from './RoomPanel.tsx';
+import { Undo } from './Undo.tsx';
 import { useLive, useRoom } from './useRoom.ts';
 
 interface Props {
@@ -68,6 +67,9 @@ function RareThings({ onPanel, onDone }: Props & { readonly onDone?: () => void 
       <Button className="rare" onClick={() => onPanel('child')}>
         {room.child}
       </Button>
+      <Button className="rare" onClick={() => onPanel('correct')}>
+        {room.correct}
+      </Button>
       {running && (
         <>
           <Button className="rare" onClick={now(() => live.interruptClass())}>
@@ -97,43 +99,6 @@ function RareThings({ onPanel, onDone }: Props & { readonly onDone?: () => void 
         {room.end}
       </Button>
     </>
-  );
-}
-
-function Undo() {
-  const live = useLive();
-  const { room } = useCoreWords();
-  const { codes, pseudonyms } = useFacts();
-  const undo = useRoom(({ undo, intervals }) => ({
-    kind: undo?.kind ?? null,
-    code: undo?.code ?? null,
-    child: undo?.child ?? (undo?.interval == null ? null : (intervals[undo.interval - 1]?.child ?? null)),
-  }));
-  const what = undo.code === null ? undefined : codes.get(undo.code);
-  let sign: ReactNode = null;
-  let words: string = '';
-  if (undo.kind === 'missing') sign = <Ring size={18} />;
-  else if (what !== undefined) sign = <CodeSign kind={what.sign} size={18} />;
-  else if (undo.kind === 'marked') words = room.noneOfThese;
-  else if (undo.kind !== null) words = room.undoKind({ kind: undo.kind });
-  const name = undo.child === null ? '' : (pseudonyms.get(undo.child) ?? '');
-  return (
-    <Button className="rare rare-undo" aria-disabled={undo.kind === null} onClick={() => live.undo()}>
-      <svg width="18" height="18" viewBox="0 0 18 18" aria-hidden="true">
-        <path className="rare-flag" d="M7 2L2 7L7 12M2 7H11A5 5 0 0 1 11 17H8" />
-      </svg>
-      {room.undo}
-      {undo.kind === null ? (
-        <span className="visually-hidden">{room.undoNothing}</span>
-      ) : (
-        <span className="rare-what">
-          {sign}
-          {what !== undefined && <span className="visually-hidden">{what.code.label}</span>}
-          {undo.kind === 'missing' && <span className="visually-hidden">{room.cannotSee}</span>}
-          <span className="rare-who">{`${words} ${name}`.trim()}</span>
-        </span>
-      )}
-    </Button>
   );
 }
 

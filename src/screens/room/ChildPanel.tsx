@@ -1,6 +1,7 @@
 import { useState } from 'react';
 import type { AwayReason } from '../../journal/entry.ts';
 import type { SessionChild } from '../../model/session.ts';
+import { freeReserve } from '../../recorder/freeReserve.ts';
 import { Button } from '../../ui/Button.tsx';
 import { useCoreWords } from '../coreServices.ts';
 import { PlanView } from '../plan/PlanView.tsx';
@@ -8,27 +9,38 @@ import { usePlanNow } from './LessonPlan.tsx';
 import { Panel } from './Panel.tsx';
 import { useFacts } from './RoomFacts.tsx';
 import { useLive, useRoom } from './useRoom.ts';
+import { useStandIns } from './useStandIns.ts';
 
 /** A child left, came back, or sits elsewhere: first who, then what. */
 export function ChildPanel({ onClose }: { readonly onClose: () => void }) {
   const { room, missing } = useCoreWords();
-  const { header } = useFacts();
+  const { header, pseudonyms } = useFacts();
   const away = useRoom((s) => s.away);
+  const standIns = useStandIns();
   const [child, setChild] = useState<SessionChild | null>(null);
+  // A reserve counts while it stands in, and one who left meanwhile may come back.
+  const inPlace = new Set(standIns.values());
+  const reserves = (header.reserves ?? []).filter(({ id }) => inPlace.has(id) || away.has(id));
+  const nameOf = (id: string): string => pseudonyms.get(id) ?? id;
+  const label = ({ id, pseudonym }: SessionChild): string => {
+    const reason = away.get(id);
+    const by = standIns.get(id);
+    if (reason !== undefined)
+      return by === undefined
+        ? room.childAway({ child: pseudonym, reason: missing[reason] })
+        : room.awayStoodIn({ child: pseudonym, reason: missing[reason], by: nameOf(by) });
+    const instead = [...standIns].find(([, reserve]) => reserve === id)?.[0];
+    return instead === undefined ? pseudonym : room.standsIn({ child: pseudonym, instead: nameOf(instead) });
+  };
   if (child !== null) return <AboutChild child={child} onClose={onClose} />;
   return (
     <Panel title={room.childTitle} onClose={onClose}>
       <div className="panel-choices">
-        {header.children.map((one) => {
-          const reason = away.get(one.id);
-          return (
-            <Button key={one.id} onClick={() => setChild(one)}>
-              {reason === undefined
-                ? one.pseudonym
-                : room.childAway({ child: one.pseudonym, reason: missing[reason] })}
-            </Button>
-          );
-        })}
+        {[...header.children, ...reserves].map((one) => (
+          <Button key={one.id} onClick={() => setChild(one)}>
+            {label(one)}
+          </Button>
+        ))}
       </div>
     </Panel>
   );
@@ -83,6 +95,23 @@ function AboutChild({ child, onClose }: { readonly child: SessionChild; readonly
           <Button onClick={() => setMoving(true)}>{room.childMoved}</Button>
         )}
       </div>
+      {!isAway && <WhoStepsIn child={child.id} />}
     </Panel>
+  );
+}
+
+/** Who takes the child's turns if it leaves, where the protocol lets reserves step in. */
+function WhoStepsIn({ child }: { readonly child: string }) {
+  const { room } = useCoreWords();
+  const { header, pseudonyms, method } = useFacts();
+  const by = useRoom((s) => freeReserve(s.state, child));
+  const { schedule } = header;
+  if (schedule.kind !== 'laid' || schedule.protocol.reservesStepIn !== true || method === 'headcount')
+    return null;
+  const name = by === null ? undefined : pseudonyms.get(by);
+  return (
+    <p className="second steps-in">
+      {name === undefined ? room.nobodyStepsIn : room.stepsIn({ child: name })}
+    </p>
   );
 }

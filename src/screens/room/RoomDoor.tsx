@@ -137,21 +137,33 @@ function CutOff({ summary, first }: { readonly summary: SessionSummary; readonly
 }
 
 function Ahead({ ahead, words: { room } }: { readonly ahead: Outlook; readonly words: Words }) {
-  const { goesOn, scored, intervals, between } = ahead;
+  const { goesOn, scored, intervals, between, unit, time } = ahead;
   if (goesOn.kind === 'start') return <p>{room.doorStartsAt({ child: goesOn.child ?? '' })}</p>;
   return (
     <>
-      <p>{room.doorKept({ kept: scored, of: intervals })}</p>
+      <p>
+        {time !== null
+          ? room.doorKeptTime(time)
+          : unit === 'scan'
+            ? room.doorKeptScans({ kept: scored, of: intervals })
+            : room.doorKept({ kept: scored, of: intervals })}
+      </p>
       <p>
         {goesOn.kind === 'at'
-          ? room.doorGoesOnAt({ number: goesOn.number, child: goesOn.child ?? '', of: intervals })
-          : goesOn.kind === 'paused'
-            ? room.doorPausedAt({ number: goesOn.number })
-            : goesOn.kind === 'part'
-              ? room.doorGoesOnWith({ phase: goesOn.phase })
-              : room.doorTimeOver}
+          ? unit === 'scan'
+            ? room.doorGoesOnScan({ number: goesOn.number, of: intervals })
+            : room.doorGoesOnAt({ number: goesOn.number, child: goesOn.child ?? '', of: intervals })
+          : goesOn.kind === 'within'
+            ? room.doorGoesOnTime({ child: goesOn.child ?? '', left: goesOn.left })
+            : goesOn.kind === 'paused'
+              ? room.doorPausedAt({ number: goesOn.number })
+              : goesOn.kind === 'part'
+                ? room.doorGoesOnWith({ phase: goesOn.phase })
+                : room.doorTimeOver}
       </p>
-      <p className="second">{room.doorBetween({ n: between })}</p>
+      <p className="second">
+        {time === null ? room.doorBetween({ n: between }) : room.doorBetweenTime({ ms: time.lost })}
+      </p>
     </>
   );
 }

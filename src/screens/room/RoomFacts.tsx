@@ -6,6 +6,7 @@ import type { Method } from '../../model/protocol.ts';
 import type { SessionHeader } from '../../model/session.ts';
 import { type Plan, planOf } from '../../recorder/grid.ts';
 import { useCoreServices } from '../coreServices.ts';
+import { type Unit, unitOf } from './amounts.ts';
 import { codeSigns, type SignKind } from './codeEdges.ts';
 
 /** What stays the same through a session. */
@@ -13,7 +14,7 @@ export interface RoomFacts {
   readonly header: SessionHeader;
   readonly method: Method;
   /** What the session consists of, in the words of the room. */
-  readonly unit: 'look' | 'scan' | 'time';
+  readonly unit: Unit;
   readonly codes: ReadonlyMap<string, { readonly code: Code; readonly sign: SignKind }>;
   /** Several codes may be marked in one interval. */
   readonly latched: boolean;
@@ -80,7 +81,7 @@ function factsOf(header: SessionHeader): Omit<RoomFacts, 'keys' | 'keysChosen' |
   return {
     header,
     method,
-    unit: method === 'headcount' ? 'scan' : method === 'duration' ? 'time' : 'look',
+    unit: unitOf(method),
     codes: new Map(codes.map((code) => [code.id, { code, sign: signs.get(code.id) ?? 'other' }])),
     latched,
     withNone: latched || method === 'duration',

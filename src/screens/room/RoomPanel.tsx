@@ -1,9 +1,10 @@
 import { MorePanel } from './BottomRow.tsx';
 import { ChildPanel } from './ChildPanel.tsx';
+import { CorrectPanel } from './CorrectPanel.tsx';
 import { EndPanel, LessonPartPanel, NotePanel } from './panels.tsx';
 
 /** The panels of the room: each stands in the middle, while the targets at the edges stay live. */
-export type PanelName = 'note' | 'child' | 'part' | 'end' | 'more';
+export type PanelName = 'note' | 'child' | 'correct' | 'part' | 'end' | 'more';
 
 interface Props {
   readonly name: PanelName;
@@ -18,6 +19,8 @@ export function RoomPanel({ name, onPanel, onClose }: Props) {
       return <NotePanel onClose={onClose} />;
     case 'child':
       return <ChildPanel onClose={onClose} />;
+    case 'correct':
+      return <CorrectPanel onClose={onClose} />;
     case 'part':
       return <LessonPartPanel onClose={onClose} />;
     case 'end':

@@ -1,7 +1,13 @@
 import type { IntervalRecord } from '../../journal/readOut.ts';
+import type { Method } from '../../model/protocol.ts';
 import type { Plan } from '../../recorder/grid.ts';
 
+/** What a session consists of, in the words of the room. */
 export type Unit = 'look' | 'scan' | 'time';
+
+export function unitOf(method: Method): Unit {
+  return method === 'headcount' ? 'scan' : method === 'duration' ? 'time' : 'look';
+}
 
 /** How much of a session: `n` looks or scans; `ms` where it is time. */
 export interface Amount {

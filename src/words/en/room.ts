@@ -124,6 +124,9 @@ export const room = {
     (
       ({
         missing: 'cannot see',
+        corrected: 'correction',
+        swapped: 'swap',
+        unusable: 'stretch of no use',
         flagged: 'flag',
         interrupted: 'class interrupted',
         continued: 'class goes on',

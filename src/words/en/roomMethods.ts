@@ -122,9 +122,10 @@ export const roomMethods = {
   notTakenAfterLast: 'Not taken: the time is over.',
 
   // reserves
-  stepsIn: ({ child }: { child: string }) => `${child} steps in.`,
+  stepsIn: ({ child }: { child: string }) =>
+    `If it leaves or takes no part, ${child} steps in until it comes back.`,
   nobodyStepsIn: 'No reserve is left to step in.',
   awayStoodIn: ({ child, reason, by }: { child: string; reason: string; by: string }) =>
-    `${child} (${reason}; ${by} steps in)`,
+    `${child} (${reason}; ${by} stands in)`,
   standsIn: ({ child, instead }: { child: string; instead: string }) => `${child} (for ${instead})`,
 } as const;

@@ -18,6 +18,8 @@ test('it goes on at the next cue of its grid, and counts the cues that fell in b
   expect(after(50)).toEqual({
     scored: 1,
     intervals: 12,
+    unit: 'look',
+    time: null,
     between: 2,
     goesOn: { kind: 'at', number: 4, child: 'Otter-01' },
   });
@@ -37,4 +39,25 @@ test('a paused schedule has stood still', () => {
 
 test('one that never began starts with the first child', () => {
   expect(after(3600, [])).toMatchObject({ scored: 0, goesOn: { kind: 'start', child: 'Otter-01' } });
+});
+
+test('a duration record goes on within its time; what went by without the tablet is lost', () => {
+  const watching = headerOf({
+    method: 'duration',
+    rotation: { kind: 'one' },
+    partLength: { kind: 'minutes', minutes: 2 },
+  });
+  const entries = journal(
+    [10_000, { kind: 'marked', interval: 1, code: 'on' }],
+    [30_000, { kind: 'flagged', interval: null }],
+  );
+  expect(after(45, entries, watching)).toEqual({
+    scored: 1,
+    intervals: 1,
+    unit: 'time',
+    time: { kept: 20_000, of: 120_000, lost: 15_000 },
+    between: 0,
+    goesOn: { kind: 'within', child: 'Otter-01', left: 75_000 },
+  });
+  expect(after(130, entries, watching)).toMatchObject({ goesOn: { kind: 'nothing' } });
 });
