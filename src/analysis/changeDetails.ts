@@ -3,6 +3,7 @@ import type { ChangeAnalysis } from './changeReport.ts';
 import type { ChildLine } from './childChanges.ts';
 import type { ClassChange } from './classChange.ts';
 import { type Prediction, predictions } from './predictions.ts';
+import { type Way, waysOf } from './waysOf.ts';
 
 /**
  * What the design allows to be said. `describesOnly`: one class, no comparison; `classesDescribe`: several classes, no
@@ -30,6 +31,8 @@ export interface ClassChangeDetails {
 export interface ChangeDetails {
   readonly before: string;
   readonly after: string;
+  /** How all these records were made, each way once. */
+  readonly ways: readonly Way[];
   readonly stretchMinutes: number;
   readonly classes: readonly ClassChangeDetails[];
   readonly report: ChangeAnalysis['report'];
@@ -53,6 +56,7 @@ export function changeDetails(analysis: ChangeAnalysis): ChangeDetails {
   return {
     before,
     after,
+    ways: waysOf(data.flatMap(({ ways }) => ways.map((facts) => ({ facts })))),
     stretchMinutes,
     classes,
     report,

@@ -3,6 +3,7 @@ import { byChild } from './byChild.ts';
 import { byText } from './order.ts';
 import type { SessionRecord } from './sessionRecord.ts';
 import { addTallies, noLooks, percentOf, type Tally, tallyOf } from './tally.ts';
+import { type Way, waysOf } from './waysOf.ts';
 
 /** One child in both phases: percentages 0–100 of what was scored in all sessions of a phase together, and how many looks. */
 export interface ChildLine {
@@ -26,6 +27,7 @@ export interface ClassData {
   /** All looks of everybody in a phase together; the only figures that a headcount has. */
   readonly together: { readonly before: Tally; readonly after: Tally };
   readonly methods: readonly Method[];
+  readonly ways: readonly Way[];
   readonly sessions: readonly string[];
 }
 
@@ -91,6 +93,7 @@ function oneClass(
     lines,
     together,
     methods: [...new Set(records.map(({ method }) => method))].sort(),
+    ways: waysOf(records),
     sessions: [...new Set(records.map(({ session }) => session))],
   };
 }

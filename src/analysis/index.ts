@@ -54,4 +54,5 @@ export type { Share } from './tally.ts';
 export type { TimingFacts } from './timingFacts.ts';
 export { type Visit, visits } from './visits.ts';
 export { limits, type Warning, type WarningCode } from './warning.ts';
+export { type Way, waysOf } from './waysOf.ts';
 export type { Why, WhyCode } from './why.ts';

@@ -7,6 +7,7 @@ import { type RoundSheet, roundSheet } from './roundSheet.ts';
 import type { Look } from './sessionRecord.ts';
 import type { Visit } from './visits.ts';
 import { limits, type Warning, warning } from './warning.ts';
+import { type Way, waysOf } from './waysOf.ts';
 
 /** The study's own criterion for agreement, both 0–1. */
 export interface Criterion {
@@ -38,6 +39,8 @@ export interface PairDetails {
   /** Header ids, in the order of `row.observers`. */
   readonly sessionIds: readonly [string, string];
   readonly method: string;
+  /** How the two recorded: one way, unless they looked at different moments. */
+  readonly ways: readonly Way[];
   readonly date: string | null;
   readonly row: AgreementPair;
   /** An interval that both missed is counted with both observers. */
@@ -63,6 +66,7 @@ export function pairDetails(pair: ComparedPair, criterion: Criterion): PairDetai
     key: `${visit.key} ${a.session} ${b.session}`,
     sessionIds: [a.session, b.session],
     method: a.method,
+    ways: waysOf([a, b]),
     date: visit.date,
     row,
     excludedBy: [...excludedBy(pair, 'a'), ...excludedBy(pair, 'b')],

@@ -6,6 +6,7 @@ import {
   onTaskReport,
   recordsOf,
   visits,
+  waysOf,
 } from '../analysis/index.ts';
 import type { IncomingFile } from '../exchange/types.ts';
 import type { StoredSession } from '../journal/stored.ts';
@@ -74,12 +75,27 @@ function answerTo(
     err: [...problems, ...notices].map((remark) => remarkLine(remark, gathered.filesOf, words)),
     status: problems.length > 0 ? 1 : 0,
   });
+  // The documents have no place for it; people read a figure with how it came about.
+  const withWays =
+    <Report>(text: (report: Report, words: Words) => string) =>
+    (report: Report, all: Words): string => {
+      const ways = waysOf(records);
+      return ways.some(({ lookAt }) => lookAt !== null)
+        ? `${text(report, all)}\n\n${all.batch.recordedBy({ ways })}`
+        : text(report, all);
+    };
   const pairings = bundle.study?.pairings ?? [];
   switch (request.command) {
     case 'ontask':
-      return told(onTaskReport(records), textOfOnTask);
+      return told(onTaskReport(records), (report, all) =>
+        textOfOnTask(
+          report,
+          all,
+          (session) => records.find(({ label }) => label === session)?.facts.lookAt ?? null,
+        ),
+      );
     case 'agreement':
-      return told(agreementReport(visits(records, pairings)), textOfAgreement);
+      return told(agreementReport(visits(records, pairings)), withWays(textOfAgreement));
     case 'check':
       return { out: print(checkReport(gathered, request.practice, words), textOfCheck), err: [], status: 0 };
     case 'change': {
@@ -88,7 +104,7 @@ function answerTo(
       const studyControl = bundle.study?.control ?? null;
       const asked = { before, after, control, observer, studyControl };
       const answer = changeReport(visits(records, pairings), asked);
-      if (answer.ok) return told(answer.value, textOfChange);
+      if (answer.ok) return told(answer.value, withWays(textOfChange));
       const sentence = words.batch.general({ sentence: say(words.batch, answer.problem) });
       if (answer.problem.code !== 'tooFewPhases') return { out: '', err: [sentence], status: 2 };
       return { out: print(emptyChange, textOfChange), err: [sentence], status: 1 };

@@ -1,10 +1,18 @@
 import type { OnTaskReport, Share } from '../analysis/index.ts';
+import type { LookMoment } from '../model/protocol.ts';
 import type { Words } from '../words/words.ts';
 import { numbersFor } from './numbersFor.ts';
 import { type Column, textTable } from './textTable.ts';
 
-/** The on-task report as tables for people. */
-export function textOfOnTask({ sessions }: OnTaskReport, words: Words): string {
+/**
+ * The on-task report as tables for people.
+ * @param lookAt at which end of the interval a session looked; the report's document does not hold it
+ */
+export function textOfOnTask(
+  { sessions }: OnTaskReport,
+  words: Words,
+  lookAt: (session: string) => LookMoment | null = () => null,
+): string {
   const { batch } = words;
   if (sessions.length === 0) return batch.nothingToReport;
   const { whole, decimal, range } = numbersFor(words);
@@ -37,7 +45,12 @@ export function textOfOnTask({ sessions }: OnTaskReport, words: Words): string {
     batch.sessionsTitle,
     textTable(
       [...names, { head: batch.method }, ...shareColumns, { head: batch.classPercent, number: true }],
-      sessions.map((row) => [...nameCells(row), row.method, ...shareCells(row), decimal(row.classPercent)]),
+      sessions.map((row) => [
+        ...nameCells(row),
+        batch.methodCell({ method: row.method, lookAt: lookAt(row.session) }),
+        ...shareCells(row),
+        decimal(row.classPercent),
+      ]),
     ),
     ...(sets ? [batch.someOnTask] : []),
     '',

@@ -7,7 +7,7 @@ export interface RecordingFacts {
   readonly method: Method;
   readonly intervalMs: number | null;
   readonly observeMs: number | null;
-  /** null unless momentary and known. */
+  /** null unless looks are moments (momentary, headcount) and it is known. */
   readonly lookAt: LookMoment | null;
   readonly codeSet: CodeSet;
   readonly phases: readonly (string | null)[];
@@ -27,7 +27,7 @@ export function recordingFacts(header: SessionHeader): RecordingFacts {
       method: protocol.method,
       intervalMs: protocol.intervalMs,
       observeMs: protocol.observeMs,
-      lookAt: protocol.method === 'momentary' ? protocol.lookAt : null,
+      lookAt: protocol.method === 'momentary' || protocol.method === 'headcount' ? protocol.lookAt : null,
       codeSet: protocol.codeSet,
       phases: schedule.phases,
     };

@@ -95,7 +95,7 @@ export function AllChange({ details }: { readonly details: ChangeDetails }) {
         </Sheet>
       )}
       <p className="second small how">
-        {words.change.how({ before, after })}
+        {words.change.how({ before, after, ways: details.ways })}
         {comparison === null && why.comparison !== undefined && report.classes.length > 1
           ? ` ${words.change.notRandom({ reason: say(words.why, { code: why.comparison, values: {} }) })}`
           : ''}

@@ -46,7 +46,7 @@ export function ClassChangeView({ details, own }: Props) {
       <Sheet title={words.change.tableTitle}>
         <ChangeTable rows={own.map(({ row }) => row)} before={before} after={after} />
       </Sheet>
-      <p className="second small how">{words.change.how({ before, after })}</p>
+      <p className="second small how">{words.change.how({ before, after, ways: details.ways })}</p>
     </>
   );
 }

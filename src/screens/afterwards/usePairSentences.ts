@@ -46,7 +46,7 @@ export function usePairSentences(pairs: readonly PairDetails[]): {
     title,
     note: [...undefinedKappa, prevalence(), step()].filter((text) => text !== '').join(' '),
     how: words.agreement.how({
-      method: words.agreement.methodNames({ method: first?.method ?? '' }),
+      ways: first?.ways ?? [],
       compared,
       excluded: rows.reduce((sum, row) => sum + row.excluded, 0),
     }),

@@ -1,4 +1,5 @@
 import type { Format } from '../format.ts';
+import { upperFirst, wayText } from './ways.ts';
 
 type F = Format;
 
@@ -234,21 +235,17 @@ export const afterwards = {
     },
     f: F,
   ) => {
-    const name = {
-      momentary: 'Momentary time sampling',
-      partial: 'Partial interval',
-      whole: 'Whole interval',
-      headcount: 'Headcount',
-      duration: 'Continuous duration',
-    }[method];
-    const every = seconds === null ? '' : `, every ${f.fixed(seconds, Number.isInteger(seconds) ? 0 : 1)} s`;
+    const name = upperFirst(wayText({ method, lookAt }), f);
+    const every =
+      seconds === null || method === 'duration'
+        ? ''
+        : `, every ${f.fixed(seconds, Number.isInteger(seconds) ? 0 : 1)} s`;
     const part =
-      observed === null || seconds === null || observed === seconds
+      observed === null || seconds === null || observed === seconds || method === 'duration'
         ? ''
         : ` (${f.fixed(observed, Number.isInteger(observed) ? 0 : 1)} s observed)`;
-    const at = lookAt === null ? '' : `, looked at the ${lookAt} of the interval`;
     const whom = children === 0 ? '' : `, ${n(f, children, 'child', 'children')}`;
-    return `${name}${every}${part}${at}${whom}${codeSet === null ? '' : `; codes: ${codeSet}`}. Missing looks are left out, never counted as off-task.`;
+    return `${name}${every}${part}${whom}${codeSet === null ? '' : `; codes: ${codeSet}`}. Missing looks are left out, never counted as off-task.`;
   },
   caution: 'The figures describe a lesson and a group. They say nothing about any one child.',
   print: 'Print this page',

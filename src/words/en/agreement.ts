@@ -1,4 +1,5 @@
 import type { Format } from '../format.ts';
+import { upperFirst, type Way, waysText } from './ways.ts';
 
 type F = Format;
 
@@ -109,16 +110,8 @@ export const agreement = {
   interval: 'interval',
   counts: ({ on, present }: { on: number; present: number }, f: F) => `${f.whole(on)} of ${f.whole(present)}`,
   none: 'none',
-  how: ({ method, compared, excluded }: { method: string; compared: number; excluded: number }, f: F) =>
-    `${method}; the same child at the same interval, both scored: ${f.whole(compared)}, left out ${f.whole(excluded)}. Kappa after Cohen (1960) with the large-sample interval of Fleiss, Cohen and Everitt (1969); looks of one child follow one another, so it is rather too narrow.`,
-  methodNames: ({ method }: { method: string }) =>
-    ({
-      momentary: 'Momentary time sampling',
-      partial: 'Partial interval',
-      whole: 'Whole interval',
-      headcount: 'Headcount',
-      duration: 'Continuous duration',
-    })[method] ?? method,
+  how: ({ ways, compared, excluded }: { ways: readonly Way[]; compared: number; excluded: number }, f: F) =>
+    `${upperFirst(waysText(ways), f)}; the same child at the same interval, both scored: ${f.whole(compared)}, left out ${f.whole(excluded)}. Kappa after Cohen (1960) with the large-sample interval of Fleiss, Cohen and Everitt (1969); looks of one child follow one another, so it is rather too narrow.`,
 
   // all pairs
   allTitle: (

@@ -1,4 +1,5 @@
 import type { Format } from '../format.ts';
+import { type Way, waysText } from './ways.ts';
 
 /** What the command line says. */
 export const batch = {
@@ -77,6 +78,9 @@ Exit status: 0 done, 1 a file has problems, 2 wrong usage.
   observers: 'observers',
   session: 'session',
   method: 'method',
+  methodCell: ({ method, lookAt }: { method: string; lookAt: 'end' | 'start' | null }) =>
+    lookAt === null ? method : `${method}, look at ${lookAt}`,
+  recordedBy: ({ ways }: { ways: readonly Way[] }) => `Recorded by ${waysText(ways)}.`,
   child: 'child',
   scored: 'scored',
   missing: 'missing',

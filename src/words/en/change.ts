@@ -1,4 +1,5 @@
 import type { Format } from '../format.ts';
+import { upperFirst, type Way, waysText } from './ways.ts';
 
 type F = Format;
 
@@ -199,8 +200,8 @@ export const change = {
     ]
       .filter((s) => s !== '')
       .join('; '),
-  how: ({ before, after }: { before: string; after: string }) =>
-    `The unit is the child’s percentage: its sessions of “${before}” joined, and those of “${after}”; one record a visit, the primary observer’s. Paired t interval on the children’s changes; g is the mean change in standard deviations before, small-sample corrected (Becker 1988).`,
+  how: ({ before, after, ways }: { before: string; after: string; ways: readonly Way[] }, f: F) =>
+    `${ways.length === 0 ? '' : `${upperFirst(waysText(ways), f)}. `}The unit is the child’s percentage: its sessions of “${before}” joined, and those of “${after}”; one record a visit, the primary observer’s. Paired t interval on the children’s changes; g is the mean change in standard deviations before, small-sample corrected (Becker 1988).`,
   caution: 'The figures describe lessons and groups. They say nothing about any one child.',
 } as const;
 
