@@ -1,4 +1,7 @@
-import type { Page } from '@playwright/test';
+import { mkdtempSync, rmSync, writeFileSync } from 'node:fs';
+import { tmpdir } from 'node:os';
+import { join } from 'node:path';
+import type { Locator, Page } from '@playwright/test';
 import type { SessionHeader } from '../../src/model/session.ts';
 import { expectAccessible } from './support/accessible.ts';
 import { sessionOf } from './support/kept.ts';
@@ -46,7 +49,10 @@ async function headerOnDisk(page: Page, session: string): Promise<SessionHeader>
 }
 
 /** A screenshot of each picture of the card, stepped by hand. */
-async function photographs(page: Page): Promise<Buffer[]> {
+async function photographs(
+  page: Page,
+  take: (shown: Locator) => Promise<Buffer> = (shown) => shown.screenshot(),
+): Promise<Buffer[]> {
   const dialog = page.getByRole('dialog');
   const shown = dialog.getByRole('img');
   await expect(shown).toBeVisible();
@@ -54,7 +60,7 @@ async function photographs(page: Page): Promise<Buffer[]> {
   const of = Number(/ of (\d+)$/.exec((await shown.getAttribute('aria-label')) ?? '')?.[1]);
   const taken: Buffer[] = [];
   for (let i = 0; i < of; i++) {
-    taken.push(await shown.screenshot());
+    taken.push(await take(shown));
     const now = await shown.getAttribute('aria-label');
     await dialog.getByRole('button', { name: 'Next' }).click();
     await expect(shown).not.toHaveAttribute('aria-label', now ?? '');
@@ -112,7 +118,7 @@ test('a visit goes to a second tablet by pictures alone, with no network, and bo
   await picture(two, 'pairing-read');
   await give(pictures[0] as Buffer);
   await expect(two.getByText(/^Class Otter: Otter-01, /)).toContainText(
-    'by “Every three seconds”, with no agreed start.',
+    'in this order, by “Every three seconds”, with no agreed start.',
   );
   await picture(two, 'pairing-take');
   await two.getByRole('button', { name: 'Take this visit over' }).click();
@@ -176,4 +182,49 @@ test('a text does what the pictures do, and a camera that is not there is told',
   await page.getByLabel('Text of the card').fill(text.toLowerCase());
   await page.getByRole('button', { name: 'Read the text' }).click();
   await expect(page.getByRole('heading', { name: 'The card is read.' })).toBeVisible();
+});
+
+test('the camera of the second tablet reads the card, which is shown in turn', async ({
+  tablet,
+  anotherTablet,
+}) => {
+  const one = await tablet.openApp({ hash: '/before' });
+  await one.locator('input[type=file]').setInputFiles(await shortVisitFile({ key: 'film', children: 20 }));
+  await one.getByRole('button', { name: 'Choose' }).click();
+  await one
+    .getByRole('dialog')
+    .getByRole('radio', { name: /a second observer checks mine/ })
+    .check();
+  await one.getByRole('dialog').getByRole('button', { name: 'Done' }).click();
+  await one.getByRole('button', { name: 'Show the pairing card' }).click();
+  // What a camera before the first tablet would see: the square and some of what is around it.
+  const pictures = await photographs(one, async (shown) => {
+    const box = await shown.boundingBox();
+    if (box === null) throw new Error('no picture');
+    const clip = { x: Math.round(box.x) - 20, y: Math.round(box.y) - 20, width: 600, height: 640 };
+    return one.screenshot({ type: 'jpeg', quality: 80, clip });
+  });
+  expect(pictures.length).toBeGreaterThan(1);
+
+  // Motion JPEG: each picture stands for as long as on the glass, at the 30 pictures a second of Chromium's stand-in.
+  const folder = mkdtempSync(join(tmpdir(), 'film-'));
+  const film = join(folder, 'card.mjpeg');
+  writeFileSync(film, Buffer.concat(pictures.flatMap((frame) => Array<Buffer>(45).fill(frame))));
+  try {
+    const second = await anotherTablet({
+      switches: [
+        '--use-fake-ui-for-media-stream',
+        '--use-fake-device-for-media-stream',
+        `--use-file-for-fake-video-capture=${film}`,
+      ],
+    });
+    const two = await second.openApp({ hash: '/before/card' });
+    await two.getByRole('button', { name: 'Open the camera' }).click();
+    await expect(two.getByRole('heading', { name: 'The card is read.' })).toBeVisible({ timeout: 30_000 });
+    await expect(two.getByText(/^Class Otter: Otter-01, /)).toContainText('Otter-20, in this order');
+    await two.getByRole('button', { name: 'Take this visit over' }).click();
+    await expect(two.getByText('Say who records.')).toBeVisible();
+  } finally {
+    rmSync(folder, { recursive: true });
+  }
 });

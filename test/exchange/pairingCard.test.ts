@@ -239,7 +239,9 @@ describe('how large it is', () => {
   });
 
   it('keeps the dictionary of version 1 for good', () => {
-    expect(createHash('sha256').update(cardDictionary).digest('hex')).toMatchInlineSnapshot(`"a15fd4d12a048df8a16a26b8ad6f4ad5bbb6246b8c19b572bb5c9b6053d67950"`);
+    expect(createHash('sha256').update(cardDictionary).digest('hex')).toMatchInlineSnapshot(
+      `"a15fd4d12a048df8a16a26b8ad6f4ad5bbb6246b8c19b572bb5c9b6053d67950"`,
+    );
   });
 });
 

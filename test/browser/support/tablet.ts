@@ -13,6 +13,8 @@ export interface TabletOptions {
   locale?: string;
   /** Lets test code into the page that the app's content security policy would stop; for `listen`. */
   bypassPolicy?: boolean;
+  /** More switches of the browser, such as those of a camera that is none. */
+  switches?: string[];
   /** Called with every new browser, before a page is opened: init scripts, routes. */
   prepare?: (context: BrowserContext) => Promise<void>;
 }
@@ -50,7 +52,7 @@ export class Tablet {
     }
     const context = await chromium.launchPersistentContext(this.profile, {
       ...(path === undefined ? {} : { executablePath: path }),
-      args: chromiumFlags,
+      args: [...chromiumFlags, ...(this.options.switches ?? [])],
       viewport,
       hasTouch: true,
       timezoneId,
