@@ -27,7 +27,7 @@ export function Pages() {
           <Switch>
             <Route path="/before" component={Prepare} />
             <Route path="/before/ready/:as?">
-              {({ as }) => <Ready role={as === 'second' ? 'second' : null} />}
+              {({ as }) => <Ready as={as === 'second' ? 'second' : null} />}
             </Route>
             <Route path="/before/card" component={ReadCard} />
             <Route path="/room" component={RoomDoor} />

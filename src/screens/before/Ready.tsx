@@ -20,7 +20,7 @@ import { type Heard, SoundCheck } from './SoundCheck.tsx';
 import { TabletChecks, useTabletLines } from './TabletChecks.tsx';
 
 /** The last page before the classroom door: what would spoil the visit. */
-export function Ready({ role = null }: { readonly role?: Role | null }) {
+export function Ready({ as = null }: { readonly as?: Role | null }) {
   const { words } = useServices();
   const settings = useSettings();
   if (settings === undefined) return <p className="second">{words.common.loading}</p>;
@@ -34,15 +34,15 @@ export function Ready({ role = null }: { readonly role?: Role | null }) {
       </>
     );
   }
-  return <Checks key={settings.prepared.visit} plan={settings.prepared} role={role} />;
+  return <Checks key={settings.prepared.visit} plan={settings.prepared} as={as} />;
 }
 
-function Checks({ plan, role }: { readonly plan: VisitPlan; readonly role: Role | null }) {
+function Checks({ plan, as }: { readonly plan: VisitPlan; readonly as: Role | null }) {
   const { words, deps, store, recorder, useStored } = useServices();
   const [, go] = useLocation();
   const answer = useStored((reader) => reader.observers(plan.study.id), [plan.study.id]);
   const observers = answer?.ok ? answer.value : [];
-  const [who, setWho] = useState<Who>({ observer: null, role, practice: false });
+  const [who, setWho] = useState<Who>({ observer: null, role: as, practice: false });
   const [heard, setHeard] = useState<Heard>('not asked');
   const [present, setPresent] = useState(false);
   const [problem, setProblem] = useState<string | null>(null);
