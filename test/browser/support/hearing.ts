@@ -13,6 +13,8 @@ export interface Sound {
   sampleRate: number;
   /** Which audio context of the page, counted from 0: an app may make a new one. */
   context: number;
+  /** The onset on the page's clock (ms), as finely as the browser tells how the two clocks stand (some ms). */
+  page: number;
 }
 
 interface Heard {
@@ -41,7 +43,11 @@ function tapSpeakers({ ms, code }: { ms: number; code: string }): void {
     });
     node.port.onmessage = ({ data: { kind, ...sound } }) => {
       if (kind === 'listening') heard.listening[context] = true;
-      else heard.sounds.push({ ...sound, sampleRate: audio.sampleRate, context });
+      else {
+        const { contextTime = 0, performanceTime = 0 } = audio.getOutputTimestamp();
+        const page = performanceTime + 1000 * (sound.onset / audio.sampleRate - contextTime);
+        heard.sounds.push({ ...sound, sampleRate: audio.sampleRate, context, page });
+      }
     };
     // The listener itself is silent; a node is run only when it leads to the speakers.
     Reflect.apply(connect, hub, [node]);
