@@ -11,7 +11,10 @@ export type ProtocolWarning = 'longInterval' | 'longObserve' | 'fewLooks' | 'swe
 export interface ProtocolMeaning {
   /** Intervals of one part, all children together. */
   readonly intervals: number;
-  /** Milliseconds from the beginning of a part to the end of its last interval. */
+  /**
+   * Milliseconds from the beginning of a part to the end of its last full interval; a sweep that begins when that
+   * interval ends comes after it.
+   */
   readonly lengthMs: number;
   /** Children who are watched in one part; 0 for a headcount, which looks at everybody. */
   readonly watched: number;

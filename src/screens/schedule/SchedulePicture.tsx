@@ -52,7 +52,11 @@ export function SchedulePicture({ protocol, phases, watched, turns }: Props) {
     ],
     spans: parts.map(({ looks }) => looks),
   }));
-  const lengthMs = partMs(protocol.partLength, protocol, watched.length);
+  // The last sweep of a part may run on a little after its end.
+  const lengthMs = Math.max(
+    partMs(protocol.partLength, protocol, watched.length),
+    ...seen.map(({ looks }) => looks.at(-1)?.[1] ?? 0),
+  );
   return (
     <div className="schedule">
       <Chart>
