@@ -8,10 +8,12 @@ export const noSettings: Settings = {
   lastBackup: null,
   prepared: null,
   frozenProtocols: [],
+  sheets: [],
+  paper: null,
 };
 
 /** Settings that name people; the others are needed before anything is unlocked. */
-const sealedKeys: readonly string[] = ['prepared'] satisfies (keyof Settings)[];
+const sealedKeys: readonly string[] = ['prepared', 'sheets', 'paper'] satisfies (keyof Settings)[];
 
 /** Settings of this tablet. Those that nobody has set stand at their defaults. */
 export async function readSettings(core: Core): Promise<Settings> {

@@ -17,6 +17,16 @@ export {
 export { ensureInstallation } from './installation.ts';
 export { addNote, type NoteWish } from './notes.ts';
 export { addObserver, removeObserver, saveObserver } from './observers.ts';
+export type { PaperAnswer, PaperDraft, PaperOnset, PaperPart } from './paperDraft.ts';
+export {
+  beginPaper,
+  findSheet,
+  keepPaperSession,
+  keepSheet,
+  readPaper,
+  savePaper,
+  visitOfSession,
+} from './paperSessions.ts';
 export type { PlanPreset } from './planPresets.ts';
 export type * from './ports.ts';
 export { recipeProblem } from './protocolChecks.ts';

@@ -10,6 +10,7 @@ import type { Method, Protocol } from '../model/protocol.ts';
 import type { Role, SessionHeader } from '../model/session.ts';
 import type { Study } from '../model/study.ts';
 import type { VisitPlan } from '../model/visitPlan.ts';
+import type { PaperDraft } from './paperDraft.ts';
 
 /** What a use case is handed: the store, the wall clock, chance, and who and what writes. */
 export interface Deps {
@@ -60,6 +61,8 @@ export interface SessionSummary {
   readonly observer: { readonly id: string; readonly name: string };
   readonly role: Role | null;
   readonly practice: boolean;
+  /** Recorded on paper and typed in. */
+  readonly fromPaper?: boolean;
   readonly date: string | null;
   readonly plannedStart: string | null;
   readonly method: Method;
@@ -105,6 +108,10 @@ export interface Settings {
   readonly prepared: VisitPlan | null;
   /** Protocol versions (`id version`) that were prepared for a visit or have left the tablet: they stand. */
   readonly frozenProtocols: readonly string[];
+  /** Schedules that were printed as sheets, newest first. */
+  readonly sheets: readonly VisitPlan[];
+  /** The sheet that is being typed in. */
+  readonly paper: PaperDraft | null;
 }
 
 export interface StoreReader {

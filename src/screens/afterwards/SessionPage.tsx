@@ -71,6 +71,11 @@ function Session({ session, answer }: { readonly session: StoredSession; readonl
       <NotesSheet session={session} />
       {how}
       <p className="small">{words.afterwards.caution}</p>
+      {header.schedule.kind === 'laid' && (
+        <p className="not-in-print">
+          <a href={`#/before/paper/${encodeURIComponent(header.id)}`}>{words.paper.printAgain}</a>
+        </p>
+      )}
       <PageFoot />
     </>
   );
@@ -92,7 +97,7 @@ function Session({ session, answer }: { readonly session: StoredSession; readonl
           </div>
         </Sheet>
         <Completeness details={details} />
-        <Timing details={details} />
+        <Timing details={details} fromPaper={header.fromPaper === true} />
         {foot}
       </div>
     );
@@ -128,7 +133,7 @@ function Session({ session, answer }: { readonly session: StoredSession; readonl
           <PhaseFigures key={phase.row.phase ?? ''} phase={phase} alone={details.phases.length === 1} />
         ))}
       </div>
-      <Timing details={details} />
+      <Timing details={details} fromPaper={header.fromPaper === true} />
       {foot}
     </div>
   );

@@ -3,8 +3,13 @@ import type { GapCause } from '../../journal/entry.ts';
 import { Sheet } from '../../ui/Sheet.tsx';
 import { useWords } from '../services.ts';
 
+interface Props {
+  readonly details: SessionDetails;
+  readonly fromPaper: boolean;
+}
+
 /** How well the prompts kept their schedule, and when the tablet stood still. */
-export function Timing({ details: { timing } }: { readonly details: SessionDetails }) {
+export function Timing({ details: { timing }, fromPaper }: Props) {
   const words = useWords();
   const causes: Record<GapCause, string> = {
     closed: words.afterwards.gapClosed,
@@ -18,7 +23,7 @@ export function Timing({ details: { timing } }: { readonly details: SessionDetai
   return (
     <Sheet title={words.afterwards.timing} className="not-in-print">
       {timing === null || largest === null ? (
-        <p className="second">{words.afterwards.timingUnknown}</p>
+        <p className="second">{fromPaper ? words.paper.timing : words.afterwards.timingUnknown}</p>
       ) : (
         <ul className="stack-tight">
           <li>

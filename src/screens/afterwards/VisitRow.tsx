@@ -50,7 +50,7 @@ function Record({
   readonly onPair: () => void;
 }) {
   const words = useWords();
-  const { ended, role, practice, here, handedOver, own } = summary;
+  const { ended, role, practice, here, handedOver, own, fromPaper } = summary;
   const state =
     ended === 'complete' ? words.afterwards.complete : ended === 'early' ? words.afterwards.endedEarly : null;
   // A table never says that it ended; only a record made by a tablet can have been cut off.
@@ -58,6 +58,7 @@ function Record({
   const remarks = [
     role === null ? '' : words.afterwards.role({ role }),
     practice ? words.afterwards.practice : '',
+    fromPaper ? words.paper.fromPaper : '',
     table ? words.afterwards.fromFile : (state ?? words.afterwards.neverEnded),
     here && own > 0 && !handedOver ? words.afterwards.notHandedOver : '',
     byHand ? words.afterwards.moved : '',

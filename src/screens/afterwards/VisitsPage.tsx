@@ -109,6 +109,13 @@ export function VisitsPage() {
         <div className="stack-tight">
           <p className="second">{words.files.inText}</p>
           <BringIn study={study?.id ?? null} />
+          {study !== null && (
+            <p>
+              <a className="button" href="#/before/paper/type">
+                {words.paper.typeLink}
+              </a>
+            </p>
+          )}
         </div>
       </Sheet>
       {days.length > 0 && (

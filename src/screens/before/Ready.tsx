@@ -116,6 +116,11 @@ function Checks({ plan, as }: { readonly plan: VisitPlan; readonly as: Role | nu
         {onHold.length > 0 && <p className="second small">{words.before.anywayNote}</p>}
       </div>
       <FrozenSchedule plan={plan} />
+      <p>
+        <a className="button" href="#/before/paper">
+          {words.paper.printLink}
+        </a>
+      </p>
     </div>
   );
 }

@@ -8,6 +8,7 @@ import { corrections } from './corrections.ts';
 import { files } from './files.ts';
 import { methods } from './methods.ts';
 import { cardProblems, pairing } from './pairing.ts';
+import { paper, paperProblems } from './paper.ts';
 import { problems } from './problems.ts';
 import { refusals } from './refusals.ts';
 import { remarks, warnings } from './remarks.ts';
@@ -27,7 +28,8 @@ export const english = {
   files,
   methods,
   pairing,
-  problems: { ...core.problems, ...problems, ...cardProblems, ...refusals },
+  paper,
+  problems: { ...core.problems, ...problems, ...cardProblems, ...refusals, ...paperProblems },
   remarks,
   starter,
   study,

@@ -1,0 +1,153 @@
+import { useState } from 'react';
+import { clockTime } from '../../kernel/typedTime.ts';
+import type { PaperPart } from '../../tasks/index.ts';
+import { Check, Choice } from '../../ui/Choice.tsx';
+import { SelectField, TextField } from '../../ui/Field.tsx';
+import { useServices } from '../services.ts';
+import type { Typing } from './useTyping.ts';
+
+/** Who wrote the sheet, when it began, and when its parts did. */
+export function HeadFields({ typing, last }: { readonly typing: Typing; readonly last: number }) {
+  const { words, useStored } = useServices();
+  const { paper } = words;
+  const { draft, change } = typing;
+  const { plan } = draft;
+  const answer = useStored((store) => store.observers(plan.study.id), [plan.study.id]);
+  const observers = answer?.ok ? answer.value : [];
+  const part = (k: number, changes: Partial<PaperPart>) =>
+    change({ parts: draft.parts.map((one, at) => (at === k ? { ...one, ...changes } : one)) });
+  return (
+    <div className="stack">
+      <div className="typing-fields">
+        <SelectField
+          label={paper.observer}
+          value={draft.observer ?? ''}
+          onChange={(event) => change({ observer: event.target.value === '' ? null : event.target.value })}
+        >
+          <option value="">{paper.observerChoose}</option>
+          {observers.map(({ id, name }) => (
+            <option key={id} value={id}>
+              {name}
+            </option>
+          ))}
+        </SelectField>
+        <TextField
+          label={paper.date}
+          type="date"
+          value={draft.date}
+          onChange={(event) => change({ date: event.target.value })}
+        />
+        <ClockField
+          label={paper.start}
+          hint={paper.timeHint}
+          value={draft.start}
+          onValue={(start) => change({ start })}
+        />
+        {plan.schedule.protocol.method !== 'duration' && (
+          <NumberField
+            label={paper.stopped}
+            hint={paper.stoppedHint}
+            value={draft.stoppedAfter}
+            most={last}
+            onValue={(stoppedAfter) => change({ stoppedAfter })}
+          />
+        )}
+      </div>
+      {draft.parts.map((one, k) => {
+        const phase = plan.schedule.phases[k + 1] ?? '';
+        return (
+          <div className="typing-fields" key={phase}>
+            <ClockField
+              label={paper.breakStarted}
+              value={one.breakStarted}
+              onValue={(breakStarted) => part(k, { breakStarted })}
+            />
+            <ClockField
+              label={paper.firstTask({ phase })}
+              hint={paper.firstTaskHint}
+              value={one.firstTask}
+              onValue={(firstTask) => part(k, { firstTask })}
+            />
+          </div>
+        );
+      })}
+      <Choice
+        legend={paper.role}
+        value={draft.role ?? 'alone'}
+        onChange={(role) => change({ role: role === 'alone' ? null : role })}
+        options={[
+          { value: 'alone', label: paper.alone },
+          { value: 'primary', label: paper.primary, hint: words.before.rolePrimaryHint },
+          { value: 'second', label: paper.second, hint: words.before.roleSecondHint },
+        ]}
+      />
+      <div>
+        <Check
+          label={paper.practice}
+          hint={paper.practiceHint}
+          checked={draft.practice}
+          onChange={(practice) => change({ practice })}
+        />
+      </div>
+    </div>
+  );
+}
+
+interface ClockProps {
+  readonly label: string;
+  readonly hint?: string;
+  readonly value: string;
+  readonly onValue: (value: string) => void;
+}
+
+/** A time of the clock, typed as it stands on the sheet; what is no time is kept as it is and told. */
+function ClockField({ label, hint, value, onValue }: ClockProps) {
+  const { words } = useServices();
+  const [text, setText] = useState(value);
+  const [left, setLeft] = useState(true);
+  const wrong = left && text !== '' && clockTime(text) === null;
+  return (
+    <TextField
+      label={label}
+      hint={hint}
+      inputMode="numeric"
+      value={text}
+      problem={wrong ? words.problems['paper.badTime']({ found: text }) : undefined}
+      onChange={(event) => {
+        setText(event.target.value);
+        setLeft(false);
+        onValue(clockTime(event.target.value) ?? event.target.value.trim());
+      }}
+      onBlur={() => {
+        setLeft(true);
+        setText(clockTime(text) ?? text);
+      }}
+    />
+  );
+}
+
+interface NumberProps {
+  readonly label: string;
+  readonly hint: string;
+  readonly value: number | null;
+  readonly most: number;
+  readonly onValue: (value: number | null) => void;
+}
+
+function NumberField({ label, hint, value, most, onValue }: NumberProps) {
+  const { words } = useServices();
+  const wrong = value !== null && (value < 1 || value > most);
+  return (
+    <TextField
+      label={label}
+      hint={hint}
+      inputMode="numeric"
+      value={value === null ? '' : String(value)}
+      problem={wrong ? words.problems['paper.stoppedNowhere']({ found: value, last: most }) : undefined}
+      onChange={(event) => {
+        const digits = event.target.value.replace(/\D/g, '').slice(0, 4);
+        onValue(digits === '' ? null : Number(digits));
+      }}
+    />
+  );
+}
