@@ -2,6 +2,7 @@ import { drawn, type PictureData } from './pixelsOf.ts';
 
 export interface OpenCamera {
   frame(edge: number): PictureData | null;
+  lost(): boolean;
   stop(): void;
 }
 
@@ -44,6 +45,7 @@ export async function openCamera(
       const from = { x: (width - side) / 2, y: (height - side) / 2, width: side, height: side };
       return drawn(shown, from, edge);
     },
+    lost: () => stream.getVideoTracks().every((track) => track.readyState === 'ended'),
     stop,
   };
 }

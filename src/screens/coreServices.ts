@@ -19,6 +19,8 @@ export interface Pixels {
 export interface Camera {
   /** The square in the middle of what it sees now, at most `edge` a side; null until it sees something. */
   frame(edge: number): Pixels | null;
+  /** True when the tablet has taken the camera away meanwhile. */
+  lost(): boolean;
   stop(): void;
 }
 

@@ -1,7 +1,10 @@
 import { readFileSync } from 'node:fs';
 import { expect, test } from 'vitest';
+import { addParts } from '../../src/exchange/cardParts.ts';
+import { readPairingCard } from '../../src/exchange/pairingCard.ts';
 import { readIncoming } from '../../src/exchange/readIncoming.ts';
 import { writeIntervalTable } from '../../src/exchange/writeIntervalTable.ts';
+import { given } from '../storage/samples.ts';
 import { rowsOf } from './tableText.ts';
 
 // The files of version 1 were written once and are never written anew: they are what tablets have out there.
@@ -54,4 +57,28 @@ test('an interval table of the first form is read, with identifiers that stay th
   expect(session?.header.schedule).toMatchObject({
     intervals: [{}, {}, { startMs: 30_500, minutesFromBreak: 2 }],
   });
+});
+
+const readCard = async (name: string) => {
+  const text = readFileSync(new URL(`../frozen/v1/${name}`, import.meta.url), 'utf8');
+  return given(await readPairingCard(given(addParts(null, text))));
+};
+
+test('version 1 is read: pairing card', async () => {
+  const file = await read('visit.lookbell-visit.json');
+  expect(await readCard('pairing-card.txt')).toEqual(file.ok && file.bundle.visitPlans[0]);
+  const large = await readCard('pairing-card-pictures.txt');
+  expect(large).toMatchObject({
+    classroom: { name: 'Class Otter' },
+    plannedStart: '2026-11-03T10:40:00.000+00:00',
+  });
+  expect(large.children.map(({ pseudonym }) => pseudonym)).toEqual([
+    'Otter-12',
+    'Otter-05',
+    'Otter-29',
+    'Otter-20',
+    'Otter-09',
+    'Otter-07',
+  ]);
+  expect([large.plan?.seats.length, large.draw?.from.length]).toEqual([30, 30]);
 });

@@ -71,6 +71,7 @@ function Looking({ onFrame, onCannot, onClose }: LookingProps) {
     let rest = (): void => undefined;
     const look = async (): Promise<void> => {
       if (!here || camera === null) return;
+      if (camera.lost()) return latest.current.onCannot(words.pairing.cameraBusy);
       const pixels = camera.frame(edge);
       if (pixels !== null && (await latest.current.onFrame(pixels))) return;
       if (here) rest = device.wakeIn(restMs, () => void look());

@@ -162,6 +162,7 @@ describe('with the camera', () => {
       wakeIn: timer.wakeIn,
       openCamera: async () => ({
         frame: () => film.shift() ?? null,
+        lost: () => false,
         stop: () => {
           stopped++;
         },
@@ -184,7 +185,7 @@ describe('with the camera', () => {
     const view = reading({
       openCamera: async () => {
         open++;
-        return { frame: () => null, stop: () => open-- };
+        return { frame: () => null, lost: () => false, stop: () => open-- };
       },
     });
     await userEvent.click(screen.getByRole('button', { name: 'Open the camera' }));
@@ -194,6 +195,28 @@ describe('with the camera', () => {
     await screen.findByText('Looking for the square …');
     view.unmount();
     expect(open).toBe(0);
+  });
+
+  it('says it when the tablet takes the camera away', async () => {
+    const timer = handWound();
+    let lost = false;
+    let stopped = false;
+    reading({
+      wakeIn: timer.wakeIn,
+      openCamera: async () => ({
+        frame: () => null,
+        lost: () => lost,
+        stop: () => {
+          stopped = true;
+        },
+      }),
+    });
+    await userEvent.click(screen.getByRole('button', { name: 'Open the camera' }));
+    await screen.findByText('Looking for the square …');
+    lost = true;
+    await timer.next();
+    expect((await screen.findByRole('alert')).textContent).toContain('The camera does not answer');
+    expect([stopped, timer.waiting()]).toEqual([true, []]);
   });
 
   it.each([
