@@ -1,4 +1,3 @@
-import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
 import { layOut } from '../../src/schedule/layOut.ts';
 import { protocolOf } from '../support/session.ts';
@@ -53,48 +52,5 @@ describe('layOut', () => {
       ['c1', 2],
       ['c1', 3],
     ]);
-  });
-
-  it('tiles each part without gap or overlap, numbers through, and gives each child its looks give or take one block', () => {
-    const rotation = fc.oneof(
-      fc.constant({ kind: 'next' as const }),
-      fc.record({ kind: fc.constant('block' as const), intervals: fc.integer({ min: 1, max: 8 }) }),
-    );
-    fc.assert(
-      fc.property(
-        rotation,
-        fc.integer({ min: 3000, max: 60_000 }),
-        fc.integer({ min: 1, max: 12 }),
-        fc.integer({ min: 1, max: 3 }),
-        fc.constantFrom('end' as const, 'start' as const),
-        fc.integer({ min: 1, max: 60 }),
-        (rotation, intervalMs, n, parts, lookAt, minutes) => {
-          const phases = Array.from({ length: parts }, (_, i) => `p${i}`);
-          const lines = layOut(
-            protocolOf({
-              rotation,
-              intervalMs,
-              observeMs: intervalMs,
-              lookAt,
-              partLength: { kind: 'minutes', minutes },
-            }),
-            phases,
-            children(n),
-          );
-          for (const [i, line] of lines.entries()) expect(line.number).toBe(i + 1);
-          for (const phase of phases) {
-            const part = lines.filter((l) => l.phase === phase);
-            part.forEach((line, i) => {
-              expect(line.openMs).toBe(i * intervalMs);
-              const next = part[i + 1];
-              if (next) expect(line.closeMs).toBe(next.cueMs);
-            });
-            const looks = children(n).map((c) => part.filter((l) => l.child === c).length);
-            const inRow = rotation.kind === 'block' ? rotation.intervals : 1;
-            expect(Math.max(...looks) - Math.min(...looks)).toBeLessThanOrEqual(inRow);
-          }
-        },
-      ),
-    );
   });
 });

@@ -76,3 +76,17 @@ it('takes a protocol off the lists and leaves its versions', async () => {
   expect(given(await on.deps.store.protocol(made.protocol.id, 1))?.removed).toBe(true);
   expect(codeOf(await removeProtocol(on.deps, made.protocol.id))).toBe('task.noProtocol');
 });
+
+it('leaves a version alone that is older than a rule, until somebody changes it', async () => {
+  const on = await bench();
+  const { protocol } = await school(on);
+  const old: Protocol = { ...protocol, id: 'old', name: 'Old', method: 'partial', observeMs: 1500 };
+  given(await on.deps.store.put({ protocols: [{ record: old, previous: null }] }));
+  const before = await on.dump();
+  expect(given(await saveProtocol(on.deps, draftOf(old)))).toEqual(old);
+  expect(await on.dump()).toBe(before);
+  expect(codeOf(await saveProtocol(on.deps, { ...draftOf(old), graceMs: 300 }))).toBe(
+    'task.observeOutOfRange',
+  );
+  expect(given(await on.deps.store.protocol('old'))).toEqual(old);
+});
