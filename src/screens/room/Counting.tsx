@@ -62,8 +62,8 @@ export function CountingFrom({ children }: { readonly children: ReactNode }) {
         return;
       }
       live.count(next.on, next.present, at);
-      // Before the first cue nothing is taken, and the room says so.
-      if (now.current === null) return;
+      // Before the first cue nothing is taken, nor the echo of a touch: then the seats stay as they were.
+      if ((live.snapshot().felt?.count ?? 0) === (now.felt?.count ?? 0)) return;
       keep({ seats: new Map(latest.current.seats).set(markOf(live.snapshot()), next.tapped), present: null });
     },
     [live],

@@ -1,4 +1,5 @@
 import { problem } from '../../../src/kernel/result.ts';
+import type { LiveSession } from '../../../src/recorder/liveSession.ts';
 import type { RoomSnapshot } from '../../../src/recorder/roomSnapshot.ts';
 import { Room } from '../../../src/screens/room/Room.tsx';
 import { type RecorderDesk, ServicesContext } from '../../../src/screens/services.ts';
@@ -6,7 +7,7 @@ import { fakeServices, renderScreen } from '../support/renderScreen.tsx';
 import { FakeLive } from './fakeLive.ts';
 
 /** A desk on which one session lies. */
-export function deskWith(live: FakeLive, id = 'session-1'): RecorderDesk {
+export function deskWith(live: LiveSession, id = 'session-1'): RecorderDesk {
   let here = true;
   const listeners = new Set<() => void>();
   return {
