@@ -18,13 +18,27 @@ export function toBase32(bytes: Uint8Array): string {
   return bits === 0 ? text : text + alphabet.charAt((held << (5 - bits)) & 31);
 }
 
+/** The values of characters, 0 to 31; −1 for what is not in the alphabet. */
+export function base32Digits(letters: string): number[] {
+  return Array.from(letters, (letter) => alphabet.indexOf(letter));
+}
+
+/** The characters of values from 0 to 31. */
+export function base32Of(digits: readonly number[]): string {
+  return digits.map((digit) => alphabet.charAt(digit)).join('');
+}
+
+/** What somebody typed, in capitals; `0`, `1`, `8`, which are not in the alphabet, are read as O, I, B. */
+export function base32Letters(typed: string): string {
+  return typed.toUpperCase().replaceAll('0', 'O').replaceAll('1', 'I').replaceAll('8', 'B');
+}
+
 /**
  * Bytes of Base32 without padding; null when a character is strange, the length is none that can be, or bits are set
- * that stand for nothing. Lower case counts as capitals, and `0`, `1`, `8`, which are not in the alphabet, as the
- * letters that they were read for: O, I, B.
+ * that stand for nothing. Characters are read as `base32Letters` reads them.
  */
 export function fromBase32(text: string): Uint8Array | null {
-  const plain = text.toUpperCase().replaceAll('0', 'O').replaceAll('1', 'I').replaceAll('8', 'B');
+  const plain = base32Letters(text);
   if (![0, 2, 4, 5, 7].includes(plain.length % 8)) return null;
   const bytes = new Uint8Array(Math.floor((plain.length * 5) / 8));
   let held = 0;

@@ -1,5 +1,6 @@
 import { ok, type Result } from '../kernel/result.ts';
 import { fromBase32, toBase32 } from './base32.ts';
+import { fromCardLines, toCardLines } from './cardLines.ts';
 import { cardProblem } from './cardProblems.ts';
 import { excerpt } from './problemValues.ts';
 
@@ -31,6 +32,11 @@ export function missingParts({ of, parts }: CardParts): number[] {
  */
 export function writePart(card: string, number: number, of: number, content: Uint8Array): string {
   return `LB${cardVersion}.${card}.${number}.${of}.${toBase32(content)}.`;
+}
+
+/** All of a card in one text, in lines that somebody could type. */
+export function writeText(card: string, content: Uint8Array): string {
+  return `LB${cardVersion}.${card}.1.1.\n${toCardLines(toBase32(content))}.`;
 }
 
 /** The content in as many parts as it needs, as equal as can be. */
@@ -77,8 +83,10 @@ function add(
   of: number,
   content: string,
 ): Result<CardParts> {
+  const lines = fromCardLines(content);
+  if (!lines.ok) return cardProblem('card.line', { line: lines.line, found: excerpt(lines.found) });
   const card = fromBase32(written);
-  const bytes = fromBase32(content);
+  const bytes = fromBase32(lines.text);
   if (card?.length !== 5 || bytes === null || bytes.length === 0) return cardProblem('card.damaged', {});
   if (number < 1 || of < 1 || number > of || of > mostParts) return cardProblem('card.damaged', {});
   const name = toBase32(card);

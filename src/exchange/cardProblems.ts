@@ -13,6 +13,8 @@ export interface CardProblemValues {
   'card.newer': { version: number; known: number };
   'card.cutOff': None;
   'card.damaged': None;
+  /** A line of the text that is to be typed. */
+  'card.line': { line: number; found: string };
   'card.otherCard': None;
   /** The numbers of the pictures, joined by commas. */
   'card.missing': { missing: string; of: number };

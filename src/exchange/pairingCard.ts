@@ -3,7 +3,7 @@ import { canonicalJson } from '../kernel/canonicalJson.ts';
 import { ok, type Result } from '../kernel/result.ts';
 import { type VisitPlan, visitPlan } from '../model/visitPlan.ts';
 import { toBase32 } from './base32.ts';
-import { type CardParts, missingParts, mostParts, splitContent, writePart } from './cardParts.ts';
+import { type CardParts, missingParts, mostParts, splitContent, writePart, writeText } from './cardParts.ts';
 import { cardProblem } from './cardProblems.ts';
 import { currentVersion } from './envelope.ts';
 import { migrate } from './migrations.ts';
@@ -15,7 +15,7 @@ export interface PairingCard {
   readonly card: string;
   /** The text of each picture, in their order. */
   readonly parts: readonly string[];
-  /** All in one, to copy, paste or type. */
+  /** All in one, to copy, paste or type, in lines that check themselves. */
   readonly text: string;
 }
 
@@ -41,7 +41,7 @@ export async function writePairingCard(plan: VisitPlan): Promise<Result<PairingC
   return ok({
     card,
     parts: pieces.map((piece, i) => writePart(card, i + 1, pieces.length, piece)),
-    text: writePart(card, 1, 1, bytes),
+    text: writeText(card, bytes),
   });
 }
 

@@ -172,7 +172,8 @@ test('a text does what the pictures do, and a camera that is not there is told',
   await dialog.getByRole('button', { name: 'Done' }).click();
   await page.getByRole('button', { name: 'Show the pairing card' }).click();
   await dialog.getByRole('button', { name: 'Show the text' }).click();
-  const text = await dialog.getByLabel('The card as text').inputValue();
+  const text = (await dialog.getByLabel('The card as text').textContent()) ?? '';
+  await picture(page, 'pairing-text', { sizes: [{ width: 800, height: 1280 }], themes: ['light'] });
   await page.goto(address(page, '/before/card'));
   await page.getByRole('button', { name: 'Open the camera' }).click();
   await expect(page.getByRole('alert')).toContainText(/No camera can be used here|camera is not allowed/);

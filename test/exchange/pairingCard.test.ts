@@ -153,11 +153,38 @@ describe('what is broken is refused', () => {
             text.slice(kind === 'more' ? at : at + 1);
           const answer = await read(spoilt);
           if (answer.ok) expect(canonicalJson(answer.value)).toBe(canonicalJson(small));
-          else expect(answer.problem.code).toMatch(/^card\.(damaged|cutOff|otherCode|newer|missing)$/);
+          else expect(answer.problem.code).toMatch(/^card\.(damaged|line|cutOff|otherCode|newer|missing)$/);
         },
       ),
       { numRuns: 300 },
     );
+  });
+
+  it('says which line of a typed text is wrong', async () => {
+    const { text } = await cardOf(small);
+    const lines = text.split('\n');
+    const told = async (change: (lines: string[]) => void) => {
+      const typed = [...lines];
+      change(typed);
+      const answer = await read(typed.join('\n'));
+      return answer.ok ? null : { code: answer.problem.code, line: answer.problem.values.line };
+    };
+    const seventh = lines[7] ?? '';
+    const other = (character: string | undefined) => (character === 'A' ? 'C' : 'A');
+    const swapped = `${seventh.slice(0, 3)}${seventh[4]}${seventh[3]}${seventh.slice(5)}`;
+    expect(seventh[3]).not.toBe(seventh[4]);
+    const seen = { code: 'card.line', line: 7 };
+    expect(await told((typed) => typed.splice(7, 1, `${other(seventh[0])}${seventh.slice(1)}`))).toEqual(
+      seen,
+    );
+    expect(await told((typed) => typed.splice(7, 1, swapped))).toEqual(seen);
+    expect(await told((typed) => typed.splice(7, 1, seventh.slice(1)))).toEqual(seen);
+    expect(
+      await told((typed) => typed.splice(7, 1, seventh.replace(/.:$/, `${other(seventh.at(-2))}:`))),
+    ).toEqual(seen);
+    expect(await told((typed) => typed.splice(7, 1))).toEqual(seen);
+    expect(await told((typed) => typed.splice(7, 0, seventh))).toEqual({ code: 'card.line', line: 8 });
+    expect(await told(() => undefined)).toBeNull();
   });
 
   it('refuses numbers that cannot be, and one number with two contents', async () => {
@@ -207,7 +234,7 @@ describe('what is broken is refused', () => {
         | string
         | ((v: CardProblemValues[Code], f: Format) => string);
     } = cardProblems;
-    expect(Object.keys(all)).toHaveLength(9);
+    expect(Object.keys(all)).toHaveLength(10);
   });
 });
 

@@ -36,7 +36,7 @@ export const pairing = {
   textShow: 'Show the text',
   text: 'The card as text',
   textLength: ({ n }: { n: number }, f: F) =>
-    `${f.whole(n)} characters, made to be pasted; typing them is for a day when nothing else works.`,
+    `${f.whole(n)} characters, made to be pasted. Typing them is for a day when nothing else works; each line checks itself.`,
 
   // the second tablet
   read: 'Read a pairing card',
@@ -59,7 +59,7 @@ export const pairing = {
   picturesChoose: 'Choose pictures',
   textTitle: 'From the text',
   textLabel: 'Text of the card',
-  textHint: 'Spaces, line breaks and small letters do no harm.',
+  textHint: 'Spaces, line breaks and small letters do no harm. A line that is wrong is told.',
   textRead: 'Read the text',
   reading: 'Reading …',
   progress: ({ read, of }: { read: number; of: number }, f: F) =>
@@ -87,6 +87,8 @@ export const cardProblems = {
     `The card is of version ${v.version}, made by a newer Lookbell; this one reads version ${v.known}. Update Lookbell here, then read it again.`,
   'card.cutOff': 'The text of the card ends in the middle. Copy all of it, to the point at its end.',
   'card.damaged': 'The card was not read as it was written: a character is wrong or absent. Read it again.',
+  'card.line': (v: { line: number; found: string }) =>
+    `Line ${v.line} of the card is not as it was written: “${v.found}”. Compare it with the first tablet.`,
   'card.otherCard': 'This belongs to another card. Go on with the first one, or begin again.',
   'card.missing': (v: { missing: string; of: number }) =>
     `Not all is read: of ${v.of} pictures these are missing: ${v.missing}.`,

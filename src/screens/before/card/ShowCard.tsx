@@ -3,7 +3,6 @@ import type { VisitPlan } from '../../../model/visitPlan.ts';
 import { type ShownCard, showCard } from '../../../tasks/showCard.ts';
 import { Button } from '../../../ui/Button.tsx';
 import { Dialog } from '../../../ui/Dialog.tsx';
-import { TextArea } from '../../../ui/Field.tsx';
 import { Notice } from '../../../ui/Notice.tsx';
 import { say } from '../../../words/say.ts';
 import { useServices } from '../../services.ts';
@@ -82,6 +81,8 @@ function AsText({ text }: { readonly text: string }) {
   const { words, device } = useServices();
   const [copied, setCopied] = useState<boolean | null>(null);
   const [open, setOpen] = useState(false);
+  const [head = '', ...rest] = text.split('\n');
+  const [lines, end] = [rest.slice(0, -1), rest.at(-1)];
   const copy = async () => {
     const done = await device.copyText(text);
     setCopied(done);
@@ -103,15 +104,19 @@ function AsText({ text }: { readonly text: string }) {
         </Notice>
       )}
       {open ? (
-        <TextArea
-          className="field-input field-area card-text"
-          label={words.pairing.text}
-          hint={words.pairing.textLength({ n: text.length })}
-          readOnly
-          // In groups, so that the eye keeps its place; reading leaves the spaces out.
-          value={text.replace(/(.{5})(?=.)/g, '$1 ')}
-          onFocus={(event) => event.target.select()}
-        />
+        <>
+          <p className="second small">{words.pairing.textLength({ n: text.length })}</p>
+          {/* Its head and its end are lines of no number. */}
+          <figure className="card-text" aria-label={words.pairing.text}>
+            <p>{head}</p>
+            <ol>
+              {lines.map((line) => (
+                <li key={line}>{line.replace(/([^:]{5})(?=[^:])/g, '$1 ')}</li>
+              ))}
+            </ol>
+            <p>{end}</p>
+          </figure>
+        </>
       ) : (
         <p className="second small">{words.pairing.textLength({ n: text.length })}</p>
       )}

@@ -94,11 +94,24 @@ describe('from the text', () => {
   });
 
   it.each([
-    ['https://example.org', 'This is no pairing card of Lookbell: it says “https://example.org”.'],
-    [card.text.slice(0, 900), 'The text of the card ends in the middle.'],
-    [card.text.replace('LB1', 'LB3'), 'made by a newer Lookbell; this one reads version 1'],
-    [`${card.text.slice(0, 40)}${card.text.slice(44)}`, 'The card was not read as it was written'],
-  ])('refuses %.20s in a sentence', async (text, sentence) => {
+    [
+      'another text',
+      'https://example.org',
+      'This is no pairing card of Lookbell: it says “https://example.org”.',
+    ],
+    ['a text that is cut off', card.text.slice(0, 900), 'The text of the card ends in the middle.'],
+    ['a newer card', card.text.replace('LB1', 'LB3'), 'made by a newer Lookbell; this one reads version 1'],
+    [
+      'a wrong line',
+      `${card.text.slice(0, 60)}${card.text.slice(64)}`,
+      'Line 2 of the card is not as it was written: “',
+    ],
+    [
+      'wrong content',
+      card.parts.join('\n').replace(/.\.$/, (end) => (end === 'C.' ? 'E.' : 'C.')),
+      'a character is wrong or absent',
+    ],
+  ])('refuses %s in a sentence', async (_, text, sentence) => {
     const { services } = reading();
     await type(text);
     expect((await screen.findByRole('alert')).textContent).toContain(sentence);
