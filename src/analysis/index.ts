@@ -6,7 +6,7 @@ export {
   type ComparedPair,
   comparedPairs,
 } from './agreementReport.ts';
-export { type Apart, apart } from './apart.ts';
+export { type Apart, apart, type FarStretch } from './apart.ts';
 export {
   type ChangeDetails,
   type ChangeSentence,
@@ -25,6 +25,8 @@ export {
 export type { ChildLine, ClassData } from './childChanges.ts';
 export type { ClassChange } from './classChange.ts';
 export type { Comparison, NoComparison } from './compareConditions.ts';
+export { type InStep, inStep, type StepCode } from './inStep.ts';
+export type { LostPlace, LostPlaces, NotSearched, Signs } from './lostPlaces.ts';
 export type { CodeCount, MissingFor } from './makeUp.ts';
 export { type OnTaskChild, type OnTaskReport, type OnTaskSession, onTaskReport } from './onTaskReport.ts';
 export type { CodeAgreement, PairAgreement } from './pairAgreement.ts';
@@ -41,6 +43,7 @@ export type { PooledChange } from './pooledChange.ts';
 export type { Prediction } from './predictions.ts';
 export { type Choice, primaryRecord } from './primaryRecord.ts';
 export type { Analysed, Remark, RemarkCode } from './remark.ts';
+export type { ResponseTimes } from './responseTimes.ts';
 export { type CellMark, type RoundSheet, roundSheet, type SheetCell, type SheetRow } from './roundSheet.ts';
 export {
   type ChildDetails,
@@ -51,7 +54,8 @@ export {
 } from './sessionDetails.ts';
 export { type Counting, type Look, recordsOf, type SessionRecord, sessionRecords } from './sessionRecord.ts';
 export type { Share } from './tally.ts';
-export type { TimingFacts } from './timingFacts.ts';
+export type { TimingFacts, TimingGap } from './timingFacts.ts';
+export type { TimingReasonCode, TimingVerdict } from './timingVerdict.ts';
 export { type Visit, visits } from './visits.ts';
 export { limits, type Warning, type WarningCode } from './warning.ts';
 export { type Way, waysOf } from './waysOf.ts';

@@ -1,6 +1,6 @@
 import { type MissingReason, missingReasons } from '../model/missing.ts';
 import { type AgreementPair, agreementPair, type ComparedPair } from './agreementReport.ts';
-import { type Apart, apart } from './apart.ts';
+import { type InStep, inStep } from './inStep.ts';
 import { byText } from './order.ts';
 import { scoredAs } from './pairedLooks.ts';
 import { type RoundSheet, roundSheet } from './roundSheet.ts';
@@ -46,7 +46,8 @@ export interface PairDetails {
   /** An interval that both missed is counted with both observers. */
   readonly excludedBy: readonly ExcludedBy[];
   readonly differences: readonly Difference[];
-  readonly apart: Apart | null;
+  /** Whether the two ran in step, and in the same place of the schedule. */
+  readonly step: InStep;
   /** Percent on-task (0–100) of each observer in the compared intervals, and their mean; null where nothing counts. */
   readonly prevalence: { readonly a: number; readonly b: number; readonly mean: number } | null;
   /** null where agreement (or, with one code an interval, kappa) is undefined. */
@@ -61,7 +62,7 @@ export function pairDetails(pair: ComparedPair, criterion: Criterion): PairDetai
   const row = agreementPair(pair);
   const prevalence = prevalenceOf(pair);
   const met = criterionMet(row, criterion);
-  const distance = apart(a, b);
+  const step = inStep(a, b, met);
   return {
     key: `${visit.key} ${a.session} ${b.session}`,
     sessionIds: [a.session, b.session],
@@ -86,7 +87,7 @@ export function pairDetails(pair: ComparedPair, criterion: Criterion): PairDetai
         },
       ];
     }),
-    apart: distance,
+    step,
     prevalence,
     criterionMet: met,
     sheet: roundSheet(a, b),
@@ -98,9 +99,7 @@ export function pairDetails(pair: ComparedPair, criterion: Criterion): PairDetai
       ...(met === false
         ? [warning('underCriterion', { agreement: 100 * criterion.agreement, kappa: criterion.kappa })]
         : []),
-      ...(distance !== null && Math.abs(distance.median) >= limits.outOfStepSeconds
-        ? [warning('oftenOutOfStep', { seconds: Math.abs(distance.median) })]
-        : []),
+      ...(step.far === null ? [] : [warning('oftenOutOfStep', { seconds: Math.abs(step.far.seconds) })]),
     ],
   };
 }

@@ -71,7 +71,7 @@ export function sessionDetails(session: StoredSession): SessionDetails {
     late: looks.filter((look) => look.late).length,
     ended,
     phases: records.map(phaseDetails),
-    timing: first === undefined ? null : timingFacts(first),
+    timing: first === undefined ? null : timingFacts(first, looks),
     warnings: [
       ...(first === undefined ? [] : methodWarnings(first)),
       ...(ended || first?.laid !== true ? [] : [warning('neverEnded')]),

@@ -33,7 +33,8 @@ export const limits = {
   observedSeconds: 10,
   pairedIntervals: 50,
   prevalentPercent: 85,
-  outOfStepSeconds: 2,
+  /** From 1 s on two perfect observers of a lively class cannot reach a kappa over .88 (see `inStep`). */
+  outOfStepSeconds: 1,
   doubleCodedPercent: 20,
 } as const;
 

@@ -23,3 +23,12 @@ export function epochOf(wall: string): EpochMs {
 export function dateOf(wall: string): string {
   return wall.slice(0, 10);
 }
+
+/** The wall time so many milliseconds later, with the same offset; the text as it is when it is no date. */
+export function shiftedWall(wall: string, ms: number): string {
+  const epoch = epochOf(wall);
+  const [, sign, hours, minutes] = /([+-])(\d\d):(\d\d)$/.exec(wall) ?? [];
+  if (Number.isNaN(epoch)) return wall;
+  const size = sign === undefined ? 0 : Number(hours) * 60 + Number(minutes);
+  return toWallTime(epochMs(epoch + ms), sign === '-' ? -size : size);
+}

@@ -6,9 +6,6 @@ import {
   recordsOf,
   visits,
 } from '../../src/analysis/index.ts';
-import type { EntryBody } from '../../src/journal/entry.ts';
-import type { StoredSession } from '../../src/journal/stored.ts';
-import { headerOf, journalOf } from '../support/session.ts';
 import { looksOf, pairOf, sessionsFrom } from './sessionsFrom.ts';
 
 const criterion = { agreement: 0.8, kappa: 0.6 };
@@ -53,27 +50,6 @@ describe('pairDetails', () => {
     const { prevalence, warnings } = await detailsOf(pairOf([96, 6, 6, 2]));
     expect(prevalence?.mean).toBeCloseTo((100 * 102) / 110, 9);
     expect(warnings.map(({ code }) => code)).toEqual(['nearlyAlwaysOnTask', 'underCriterion']);
-  });
-
-  test('how far apart the cues came by the wall clocks', () => {
-    const recorded = (id: string, observer: string, lagsMs: readonly number[]): StoredSession => ({
-      header: headerOf({}, ['before'], { id, observer: { id: observer, name: observer } }),
-      journal: journalOf(
-        ...lagsMs.map((lag, i): [number, EntryBody] => {
-          const planned = 15_000 * (i + 1);
-          const delivered = planned + lag;
-          return [planned, { kind: 'cued', interval: i + 1, cue: 'look', planned, delivered, by: ['sound'] }];
-        }),
-      ),
-    });
-    const sessions = [recorded('m', 'Marsh', [0, 0, 10]), recorded('q', 'Quill', [2000, -3500, 2510])];
-    const [pair] = comparedPairs(visits(recordsOf(sessions)));
-    if (pair === undefined) throw new Error('no pair');
-    expect(pairDetails(pair, criterion).apart).toEqual({ cues: 3, median: 2, largest: -3.5 });
-  });
-
-  test('a table has no cues to compare', async () => {
-    expect((await detailsOf(pairOf([10, 1, 1, 10]))).apart).toBeNull();
   });
 });
 

@@ -10,6 +10,7 @@ import { Companions } from './Companions.tsx';
 import { Differences } from './Differences.tsx';
 import { PageFoot } from './PageFoot.tsx';
 import { SheetPicture } from './SheetPicture.tsx';
+import { StepSheet } from './StepSheet.tsx';
 import { usePairSentences } from './usePairSentences.ts';
 import { WarningLines } from './WarningLines.tsx';
 
@@ -19,7 +20,7 @@ interface Props {
   readonly children: ReactNode;
 }
 
-/** What the line under the heading has said already. */
+/** What the line under the heading and the verdict on their step have said already. */
 const saidInNote: ReadonlySet<string> = new Set([
   'nearlyAlwaysOnTask',
   'nearlyNeverOnTask',
@@ -53,6 +54,7 @@ export function PairPage({ pairs, children }: Props) {
       <WarningLines
         warnings={pairs.flatMap((pair) => pair.warnings).filter(({ code }) => !saidInNote.has(code))}
       />
+      <StepSheet pairs={pairs} />
       {codeSet !== null && first.method !== 'headcount' && first.method !== 'duration' && (
         <Sheet>
           <SheetPicture

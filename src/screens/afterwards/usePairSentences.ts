@@ -44,7 +44,7 @@ export function usePairSentences(pairs: readonly PairDetails[]): {
       observers: first?.row.observers ?? [],
     }),
     title,
-    note: [...undefinedKappa, prevalence(), step()].filter((text) => text !== '').join(' '),
+    note: [...undefinedKappa, prevalence()].filter((text) => text !== '').join(' '),
     how: words.agreement.how({
       ways: first?.ways ?? [],
       compared,
@@ -61,20 +61,5 @@ export function usePairSentences(pairs: readonly PairDetails[]): {
     return chance === null || fullest.row.kappa === null
       ? words.agreement.prevalenceOnly({ percent })
       : words.agreement.prevalence({ percent, chance });
-  }
-
-  function step(): string {
-    const known = pairs.flatMap((pair) => (pair.apart === null ? [] : [pair]));
-    const [worst] = [...known].sort(
-      (a, b) => Math.abs(b.apart?.median ?? 0) - Math.abs(a.apart?.median ?? 0),
-    );
-    if (worst === undefined || worst.apart === null) return words.agreement.stepUnknown;
-    const seconds = Math.abs(worst.apart.median);
-    const outOfStep = worst.warnings.some(({ code }) => code === 'oftenOutOfStep');
-    if (!outOfStep) return words.agreement.inStep({ seconds });
-    return words.agreement.outOfStep({
-      seconds,
-      later: worst.row.observers[worst.apart.median > 0 ? 1 : 0],
-    });
   }
 }

@@ -127,24 +127,6 @@ export const afterwards = {
   scoredIn: ({ phase }: { phase: string | null }) => (phase === null ? 'scored' : `scored ${phase}`),
   missingIn: ({ phase }: { phase: string | null }) => (phase === null ? 'missing' : `missing ${phase}`),
   completeness: 'What was recorded, child by child',
-  timing: 'How well the prompts kept time',
-  timingLargest: ({ ms }: { ms: number }, f: F) =>
-    `The prompt farthest from its planned moment was ${f.whole(ms)} ms away`,
-  timingMedian: ({ ms }: { ms: number }, f: F) => `; half of them were within ${f.whole(ms)} ms.`,
-  timingUnknown: 'This record holds no prompts, so their timing is not known.',
-  timingFailed: ({ failed }: { failed: number }, f: F) =>
-    failed === 0 ? '' : `${n(f, failed, 'prompt was', 'prompts were')} neither heard nor shown.`,
-  timingGap: (
-    { from, seconds, cause, estimated }: { from: number; seconds: number; cause: string; estimated: boolean },
-    f: F,
-  ) =>
-    `At ${f.clock(from)} the tablet stood still for ${f.whole(seconds)} s (${cause}${estimated ? ', estimated' : ''}).`,
-  gapClosed: 'closed or without power',
-  gapHidden: 'hidden',
-  gapAsleep: 'asleep',
-  gapSound: 'sound stuck',
-  gapClock: 'clock set',
-  timingNoGaps: 'The tablet never stood still.',
 
   // figures
   onTaskTitle: ({ method, phases }: { method: Method; phases: readonly PhaseFigure[] }, f: F) => {

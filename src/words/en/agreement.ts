@@ -56,11 +56,6 @@ export const agreement = {
   },
   prevalenceOnly: ({ percent }: { percent: number }, f: F) =>
     `On-task in ${f.percent(percent)} of these intervals.`,
-  inStep: ({ seconds }: { seconds: number }, f: F) =>
-    `In step: their schedules ran ${f.fixed(seconds, 1)} s apart.`,
-  outOfStep: ({ seconds, later }: { seconds: number; later: string }, f: F) =>
-    `Out of step: the schedule of ${later} ran ${f.fixed(seconds, 1)} s behind, by the tablets’ clocks; some of the differences may come from that.`,
-  stepUnknown: 'How far apart their schedules ran is not known: at least one record has no prompt times.',
   kappaUndefined: ({ phase, reason }: { phase: string | null; reason: string }) =>
     `Kappa is not defined${phase === null ? '' : ` ${phase}`}: ${reason}.`,
   keyDiffers: ({ first, second }: { first: string; second: string }) =>

@@ -6,6 +6,7 @@ import { change } from './change.ts';
 import { core } from './core.ts';
 import { corrections } from './corrections.ts';
 import { files } from './files.ts';
+import { inStepWords } from './inStep.ts';
 import { methods } from './methods.ts';
 import { cardProblems, pairing } from './pairing.ts';
 import { paper, paperProblems } from './paper.ts';
@@ -14,13 +15,14 @@ import { refusals } from './refusals.ts';
 import { remarks, warnings } from './remarks.ts';
 import { starter } from './starter.ts';
 import { study } from './study.ts';
+import { timing } from './timing.ts';
 import { figures, why } from './why.ts';
 
 /** The English catalogue, one file an area. */
 export const english = {
   ...core,
-  afterwards: { ...afterwards, ...corrections },
-  agreement,
+  afterwards: { ...afterwards, ...corrections, ...timing },
+  agreement: { ...agreement, ...inStepWords },
   batch,
   before,
   change,

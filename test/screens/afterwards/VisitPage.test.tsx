@@ -30,7 +30,10 @@ test('the sentence, the companions and the table of a published pair', async () 
   const heading = await screen.findByRole('heading', { level: 1 });
   expect(heading.textContent).toBe('They agree on 85 of 100 looks. Kappa .70, between .56 and .84.');
   expect(screen.getByText(/two people guessing would agree on 50 %/)).toBeTruthy();
-  expect(screen.getByText(/How far apart their schedules ran is not known/)).toBeTruthy();
+  expect(screen.getByRole('heading', { name: 'Whether they were in step cannot be told.' })).toBeTruthy();
+  expect(
+    screen.getByText(/^At least one record has no prompt times .* No shift of the marks agrees better/),
+  ).toBeTruthy();
   const companions = screen.getByRole('region', { name: 'Figures' });
   expect(companions.textContent).toContain('85.0\u202f%');
   expect(companions.textContent).toContain('72.7\u202f%');
