@@ -37,7 +37,7 @@ export function PaperPages({ plan, size, sheet }: Props) {
             style={{ width: `${width}mm`, height: `${height}mm` }}
           >
             {page.first ? (
-              <SheetHead {...{ plan, label, of }} page={page.number} height={sheet.headHeight} />
+              <SheetHead {...{ plan, label, of }} page={page.number} sheet={sheet} />
             ) : (
               <SheetHeadAgain {...{ plan, label, of }} page={page.number} />
             )}

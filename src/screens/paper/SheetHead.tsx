@@ -1,6 +1,7 @@
 import type { VisitPlan } from '../../model/visitPlan.ts';
 import { useWords } from '../services.ts';
 import { methodSentence } from '../study/methodSentence.ts';
+import type { PaperSheet } from './paperLayout.ts';
 import { howTo } from './paperTexts.ts';
 
 interface Props {
@@ -11,21 +12,20 @@ interface Props {
 }
 
 /** Head of the first page: what the sheet is, and what is to be filled in once. */
-export function SheetHead({ plan, label, page, of, height }: Props & { readonly height: number }) {
+export function SheetHead({ plan, label, page, of, sheet }: Props & { readonly sheet: PaperSheet }) {
   const { paper, ...words } = useWords();
   const { protocol, phases } = plan.schedule;
   const { name, version } = protocol;
   const method = methodSentence({ paper, ...words }, protocol);
   return (
-    <header className="paper-head" style={{ height: `${height}mm` }}>
+    <header className="paper-head" style={{ height: `${sheet.headHeight}mm` }}>
       <TopLine {...{ plan, label, page, of }} title />
       <p className="paper-clip">{paper.protocolLine({ name, version, method })}</p>
-      <p className="paper-strong paper-clip">{howTo({ paper, ...words }, protocol)}</p>
+      <p className="paper-strong paper-clip">{howTo({ paper, ...words }, protocol, sheet.form)}</p>
       <div className="paper-fields">
         <Blank label={paper.dateField} wide={3} />
         <Blank label={paper.observerField} wide={4} />
         <Blank label={paper.startField} wide={3} clock />
-        <Blank label={paper.stoppedField} wide={3} />
       </div>
       {phases.slice(1).map((phase) => (
         <div className="paper-fields" key={phase}>
@@ -33,13 +33,14 @@ export function SheetHead({ plan, label, page, of, height }: Props & { readonly 
           <Blank label={paper.firstTaskField({ phase })} wide={1} clock />
         </div>
       ))}
-      <p className="paper-roles">
+      <div className="paper-roles">
         {[paper.alone, paper.primary, paper.second].map((role) => (
           <span key={role}>
             <i className="paper-tick" /> {role}
           </span>
         ))}
-      </p>
+        {protocol.method !== 'duration' && <Blank label={paper.stoppedField} wide={1} />}
+      </div>
       <p className="paper-caution">{paper.cautions}</p>
     </header>
   );

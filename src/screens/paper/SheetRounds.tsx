@@ -14,7 +14,7 @@ export function SheetRounds({ band, parts }: { readonly band: Band; readonly par
       </colgroup>
       <thead>
         <tr style={{ height: `${roundHead}mm` }}>
-          <th className="paper-left">{parts > 1 ? band.phase : paper.child}</th>
+          <th className="paper-left">{parts > 1 ? paper.roundsOf(band) : paper.child}</th>
           {band.rounds.map(({ round }) => (
             <th key={round}>{paper.round({ round })}</th>
           ))}

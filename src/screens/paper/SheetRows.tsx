@@ -1,6 +1,6 @@
 import type { VisitPlan } from '../../model/visitPlan.ts';
 import { useWords } from '../services.ts';
-import { boxWidth, columnHead, type PaperItem, type PaperSheet, rowHeight } from './paperLayout.ts';
+import { boxWidth, columnHead, type PaperItem, type PaperSheet, rowHeight, widths } from './paperLayout.ts';
 import { boxNumbers, meaningText } from './paperTexts.ts';
 
 interface Props {
@@ -23,7 +23,7 @@ export function SheetRows({ plan, sheet, items }: Props) {
             paper.numbered({ number, text: meaningText(words, protocol, means) }),
           )
         : [paper.write];
-  const wide = method === 'headcount' ? 13 : sheet.boxes ? boxWidth : 18;
+  const wide = method === 'headcount' ? widths.count : sheet.boxes ? boxWidth : widths.write;
   const named = method !== 'headcount' && method !== 'duration';
   const pseudonyms = new Map(plan.children.map(({ id, pseudonym }) => [id, pseudonym]));
   const cannotSee = method !== 'headcount';
@@ -31,14 +31,14 @@ export function SheetRows({ plan, sheet, items }: Props) {
   return (
     <table className="paper-rows" style={{ width: `${sheet.columnWidth}mm` }}>
       <colgroup>
-        <col style={{ width: '10mm' }} />
-        <col style={{ width: method === 'duration' ? '26mm' : '15mm' }} />
+        <col style={{ width: `${widths.number}mm` }} />
+        <col style={{ width: `${method === 'duration' ? widths.onset : widths.time}mm` }} />
         {named && <col />}
         {heads.map((head) => (
           <col key={head} style={{ width: `${wide}mm` }} />
         ))}
         {cannotSee && <col style={{ width: `${boxWidth}mm` }} />}
-        <col style={{ width: named ? '12mm' : 'auto' }} />
+        <col style={{ width: named ? `${widths.reason}mm` : 'auto' }} />
       </colgroup>
       <thead>
         <tr style={{ height: `${columnHead}mm` }}>
@@ -49,7 +49,7 @@ export function SheetRows({ plan, sheet, items }: Props) {
             <Upright key={head}>{head}</Upright>
           ))}
           {cannotSee && <Upright>{paper.numbered({ number: 0, text: paper.cannotSee })}</Upright>}
-          <Upright>{paper.reason}</Upright>
+          {named ? <Upright>{paper.reason}</Upright> : <th>{paper.reason}</th>}
         </tr>
       </thead>
       <tbody>

@@ -11,9 +11,9 @@ export const papers: Readonly<Record<PaperSize, { readonly width: number; readon
   Letter: { width: 191, height: 254 },
 };
 
-const foot = 7;
+const foot = 2;
 const headLater = 17;
-const headFirst = 62;
+const headFirst = 46;
 const headPart = 10;
 const gutter = 6;
 export const rowHeight = 7.2;
@@ -26,6 +26,8 @@ export const childWidth = 28;
 export const boxWidth = 8;
 /** More codes than these do not fit side by side: then their numbers are written into one box. */
 const mostBoxes = 10;
+/** The other columns of a row; `child` is the least that a pseudonym gets. */
+export const widths = { number: 9, time: 13, onset: 26, child: 23, count: 13, write: 18, reason: 11 };
 
 export type PaperItem =
   | { readonly kind: 'part'; readonly part: number; readonly phase: string; readonly line: ScheduledInterval }
@@ -57,6 +59,7 @@ export interface LegendEntry {
 }
 
 export interface PaperSheet {
+  readonly form: PaperForm;
   readonly pages: readonly PaperPage[];
   readonly headHeight: number;
   /** Tick boxes for the codes; false = one box for their numbers. */
@@ -68,7 +71,7 @@ export interface PaperSheet {
 
 const lineHeight = 4.1;
 /** Characters that surely fit on one line: of a label, of a definition, of the whole width. */
-const fits = { label: 19, text: 74 };
+const fits = { label: 24, text: 84 };
 const mostLines = 14;
 
 /** How high a legend entry is, estimated from its length so that a page can be filled without measuring it. */
@@ -116,10 +119,11 @@ export function paperLayout(
   const headHeight = headFirst + headPart * (schedule.phases.length - 1);
   const boxes = boxesPerRow <= mostBoxes;
   const duration = schedule.protocol.method === 'duration';
-  const fixed = 10 + 15 + (boxes ? boxesPerRow * boxWidth : 18) + boxWidth + 12;
-  const withChild = fixed + (duration || schedule.protocol.method === 'headcount' ? 0 : 24);
+  const fixed =
+    widths.number + widths.time + (boxes ? boxesPerRow * boxWidth : widths.write) + boxWidth + widths.reason;
+  const withChild = fixed + (duration || schedule.protocol.method === 'headcount' ? 0 : widths.child);
   const across = Math.max(1, Math.min(2, Math.floor((width + gutter) / (withChild + gutter))));
-  const columnWidth = (width - gutter * (across - 1)) / across;
+  const columnWidth = Math.min((width - gutter * (across - 1)) / across, withChild + 30);
   const body = form === 'rounds' ? bandsOf(plan, intervals, size) : itemsOf(plan, intervals);
   const legendHeight =
     legendHead + legendFoot + legend.reduce((sum, entry) => sum + legendEntryHeight(entry), 0);
@@ -145,12 +149,20 @@ export function paperLayout(
   } else {
     let room = left - columnHead;
     page.columns.push([]);
+    let filled = false;
     for (const [k, item] of body.items.entries()) {
+      if (item.kind === 'part') filled = false;
+      if (filled) continue;
       // A heading stays with the first row under it.
       const needed = item.kind === 'part' ? partHeight + rowHeight : rowHeight;
       // A duration has each part on pages of its own.
       const newPart = duration && item.kind === 'part' && k > 0;
       if (needed > room || newPart) {
+        const full = page.columns.length >= across && !newPart;
+        if (full && item.kind === 'onset' && item.number > onsetsPerPart) {
+          filled = true;
+          continue;
+        }
         if (page.columns.length >= across || newPart) {
           page = turn();
         }
@@ -175,6 +187,7 @@ export function paperLayout(
     }
   }
   return {
+    form,
     pages: pages.map((one, k) => ({ ...one, number: k + 1 })),
     headHeight,
     boxes,
@@ -196,8 +209,9 @@ type Body =
   | { readonly kind: 'items'; readonly items: readonly PaperItem[] }
   | { readonly kind: 'bands'; readonly bands: readonly Band[] };
 
-/** Lines of a duration sheet: more changes than these in one part have a second sheet. */
-const onsetsPerPart = 48;
+/** A duration sheet has at least so many lines a part, and more where they fill its last page. */
+const onsetsPerPart = 40;
+const mostOnsets = 200;
 
 function itemsOf({ schedule }: VisitPlan, intervals: readonly ScheduledInterval[]): Body {
   const items: PaperItem[] = [];
@@ -207,7 +221,7 @@ function itemsOf({ schedule }: VisitPlan, intervals: readonly ScheduledInterval[
     if (newPart && (schedule.phases.length > 1 || schedule.protocol.method === 'duration'))
       items.push({ kind: 'part', part: line.part, phase: line.phase, line });
     if (schedule.protocol.method === 'duration')
-      for (let k = 1; k <= onsetsPerPart; k++) items.push({ kind: 'onset', number: k });
+      for (let k = 1; k <= mostOnsets; k++) items.push({ kind: 'onset', number: k });
     else items.push({ kind: 'row', line, newRound: !newPart && line.round !== before?.round });
     before = line;
   }

@@ -2,7 +2,7 @@ import type { Protocol } from '../../model/protocol.ts';
 import type { VisitPlan } from '../../model/visitPlan.ts';
 import { type PaperMeaning, type PaperNumber, paperNumbers } from '../../schedule/paperNumbers.ts';
 import type { Words } from '../../words/words.ts';
-import { type LegendEntry, legendEntry } from './paperLayout.ts';
+import { type LegendEntry, legendEntry, type PaperForm } from './paperLayout.ts';
 
 /** What a number on a sheet means, in words. */
 export function meaningText({ paper, missing }: Words, protocol: Protocol, means: PaperMeaning): string {
@@ -23,7 +23,7 @@ export function legendOf(words: Words, { schedule: { protocol } }: VisitPlan): L
     const definition =
       means.kind === 'code'
         ? (protocol.codeSet.codes.find(({ id }) => id === means.code)?.definition ?? '')
-        : '';
+        : words.paper.noneDefinition;
     return [legendEntry(number, meaningText(words, protocol, means), definition)];
   });
 }
@@ -37,11 +37,11 @@ export function reasonsLine(words: Words, protocol: Protocol): string {
 }
 
 /** What an observer with a pencil has to do, in one sentence. */
-export function howTo({ paper }: Words, protocol: Protocol): string {
+export function howTo({ paper }: Words, protocol: Protocol, form: PaperForm): string {
   const { method, observeMs, intervalMs } = protocol;
   if (method === 'duration') return paper.durationHow;
   if (method === 'headcount') return paper.countAtTime;
-  if (method === 'momentary') return paper.lookAtTime;
+  if (method === 'momentary') return form === 'rounds' ? paper.roundsHow : paper.lookAtTime;
   const parted =
     observeMs < intervalMs
       ? paper.recordPart({ observe: observeMs / 1000, record: (intervalMs - observeMs) / 1000 })

@@ -51,6 +51,8 @@ export const paper = {
   recordPart: ({ observe, record }: { observe: number; record: number }, f: F) =>
     `Watch for ${f.decimal(observe).replace(/\.0$/, '')} s from the time given, then write for ${f.decimal(record).replace(/\.0$/, '')} s.`,
   lookAtTime: 'Look at the time given, from the start; write what you saw at that moment.',
+  roundsHow:
+    'Go down each column, at the time given, from the start; write the number of what you see at that moment.',
   countAtTime: 'At the time given count the children present, and how many of them are on-task.',
   durationHow: 'Write a line whenever what the child does changes: the time from the start, and the code.',
   watchFrom: 'Watch from the time given, from the start, until the next one.',
@@ -59,7 +61,7 @@ export const paper = {
   dateField: 'Date',
   observerField: 'Observer',
   startField: 'Started at (clock)',
-  stoppedField: 'Stopped early after no.',
+  stoppedField: 'Stopped early, after no.',
   breakField: ({ phase }: { phase: string }) => `Break started, before “${phase}”`,
   firstTaskField: ({ phase }: { phase: string }) => `First task given: “${phase}” starts`,
   alone: 'alone',
@@ -72,14 +74,15 @@ export const paper = {
   numbered: ({ number, text }: { number: number; text: string }, f: F) => `${f.whole(number)} ${text}`,
   cannotSee: 'cannot see',
   none: 'none of them',
+  noneDefinition: 'Watched, and none of the codes occurred.',
   cautions:
     'Pseudonyms only, no names. A worry about a child goes to the designated person, not on this sheet.',
   number: 'no.',
   time: 'time',
   child: 'child',
   round: ({ round }: { round: number }, f: F) => `${f.whole(round)}`,
-  roundsFrom: ({ first, last }: { first: number; last: number }, f: F) =>
-    `rounds ${f.whole(first)} to ${f.whole(last)}`,
+  roundsOf: ({ phase, part }: { phase: string; part: number }) =>
+    part === 0 ? phase : `${phase}, from the first task`,
   everybody: 'all present',
   reason: 'why no mark',
   write: 'number',
