@@ -77,7 +77,7 @@ export function NumberEntry({ draft, line, at, numbers, onMean, go, empty, onUnd
   return (
     <div ref={field} className="typing-entry">
       <TextField
-        label={paper.number}
+        label={paper.numberField}
         hint={!single ? paper.keysLong : several ? paper.keysSeveral : paper.keysOne}
         inputMode="numeric"
         value={digits}

@@ -151,6 +151,7 @@ export const paper = {
   stopped: 'Stopped early after no.',
   stoppedHint: 'Stays empty when the sheet went on to its end.',
   linesTitle: 'Lines',
+  numberField: 'Number on this line',
   keysOne:
     'Type the number of each line: it is marked and the next line comes. Arrows move, Backspace empties.',
   keysSeveral: 'Type each number that is ticked, then Enter. Arrows move, Backspace empties.',
