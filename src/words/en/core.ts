@@ -2,6 +2,7 @@ import { common } from './common.ts';
 import { keeping } from './keeping.ts';
 import { missing } from './missing.ts';
 import { plan } from './plan.ts';
+import { recording } from './recording.ts';
 import { room } from './room.ts';
 import { roomCorrections } from './roomCorrections.ts';
 import { roomMethods } from './roomMethods.ts';
@@ -10,7 +11,7 @@ import { roomMethods } from './roomMethods.ts';
 export const core = {
   common,
   missing,
-  problems: keeping,
+  problems: { ...keeping, ...recording },
   plan,
   room: { ...room, ...roomMethods, ...roomCorrections },
 };
