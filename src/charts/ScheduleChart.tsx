@@ -7,6 +7,7 @@ import {
   type Stretch,
   scheduleLayout,
 } from './scheduleLayout.ts';
+import { textWidth } from './textWidth.ts';
 
 interface Props {
   /** px; the time axis shrinks with it, letters do not. */
@@ -54,9 +55,10 @@ export function ScheduleChart({ width, palette, label, rows, parts, heads, unit 
               y={middle(r)}
               dominantBaseline="central"
               fontSize={labelSize}
+              fontWeight={row.strong === true ? 680 : 400}
               fill={palette.ink}
             >
-              {row.label}
+              {cut(row.label, layout.labelWidth - 10)}
             </text>
           ))}
           {stretches.map((stretch) => (
@@ -175,6 +177,14 @@ function marks(looks: readonly Span[], { fromMs, toMs }: Stretch, layout: Schedu
       return [`M${round(x)} ${round(top)}h${round(width)}v${markHeight}h${round(-width)}z`];
     })
     .join('');
+}
+
+/** As much of a label as fits. */
+function cut(label: string, room: number): string {
+  if (textWidth(label, labelSize) <= room + 10) return label;
+  const letters = [...label];
+  while (letters.length > 1 && textWidth(`${letters.join('')}…`, labelSize) > room) letters.pop();
+  return `${letters.join('')}…`;
 }
 
 const round = (px: number): number => Math.round(px * 10) / 10;

@@ -5,6 +5,8 @@ export type Span = readonly [from: number, to: number];
 
 export interface ScheduleRow {
   readonly label: string;
+  /** The child that stands out: its label is bold. */
+  readonly strong?: boolean;
   /** What stands at the end of the row, column by column. */
   readonly ends: readonly string[];
   /** Part by part, in order of time. */
@@ -54,7 +56,8 @@ const clearPx = 4;
 /** A picture taller than this is scrolled, not seen. */
 const tallest = 1300;
 const minute = 60_000;
-const roundMinutes = [0.5, 1, 2, 3, 5, 10, 15, 20, 30, 45, 60, 90, 120, 180];
+const bandMinutes = [1, 2, 3, 4, 5, 6, 8, 10, 12, 15, 20, 25, 30, 35, 40, 45, 50, 60, 75, 90, 120, 180];
+const tickMinutes = [0.5, 1, 2, 3, 5, 10, 15, 20, 30, 45, 60, 90, 120, 180];
 
 /**
  * Where the rows of a schedule stand, in px of `width`: all parts side by side in proportion to their length where
@@ -69,7 +72,7 @@ export function scheduleLayout(
   endSize: number,
 ): ScheduleLayout {
   const longest = Math.max(0, ...rows.map(({ label }) => textWidth(label, labelSize)));
-  const labelWidth = Math.min(Math.ceil(longest) + 14, Math.round(width * 0.3));
+  const labelWidth = Math.min(Math.ceil(longest) + 14, Math.round(width * 0.34));
   const endAt = columnsFromRight(width, rows, heads, endSize);
   const room = Math.max(80, (endAt[0] ?? width) - columnWidth(rows, heads, 0, endSize) - 14 - labelWidth);
   const rowPitch = rows.length > 12 ? 22 : 26;
@@ -84,7 +87,8 @@ export function scheduleLayout(
   const most = Math.max(1, Math.floor(tallest / bandHeight / Math.max(1, parts.length)));
   const wanted = Number.isFinite(nearest) ? Math.ceil((longestPart * clearPx) / (room * nearest)) : 1;
   const bandsEach = Math.min(most, Math.max(1, wanted));
-  const bandMs = bandsEach === 1 ? longestPart : roundUp(longestPart / bandsEach / minute) * minute;
+  const bandMs =
+    bandsEach === 1 ? longestPart : roundUp(longestPart / bandsEach / minute, bandMinutes) * minute;
   const bands = parts.flatMap((part, p) =>
     Array.from({ length: Math.max(1, Math.ceil(part.lengthMs / bandMs - 1e-9)) }, (_, k): Stretch[] => [
       { part: p, fromMs: k * bandMs, toMs: Math.min(part.lengthMs, (k + 1) * bandMs), x: labelWidth },
@@ -117,10 +121,10 @@ function besideOneAnother(parts: readonly SchedulePart[], left: number, pxPerMs:
 }
 
 /** Numbers on the time axis need about this much room. */
-const minutesApart = (pxPerMs: number): number => roundUp(46 / (pxPerMs * minute));
+const minutesApart = (pxPerMs: number): number => roundUp(46 / (pxPerMs * minute), tickMinutes);
 
-const roundUp = (minutes: number): number =>
-  roundMinutes.find((one) => one >= minutes - 1e-9) ?? Math.ceil(minutes / 60) * 60;
+const roundUp = (minutes: number, among: readonly number[]): number =>
+  among.find((one) => one >= minutes - 1e-9) ?? Math.ceil(minutes / 60) * 60;
 
 function nearestLooks(rows: readonly ScheduleRow[]): number {
   let nearest = Number.POSITIVE_INFINITY;

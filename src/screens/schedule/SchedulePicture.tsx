@@ -1,4 +1,4 @@
-import { useMemo } from 'react';
+import { memo, useMemo } from 'react';
 import { screenPalette } from '../../charts/palette.ts';
 import { ScheduleChart } from '../../charts/ScheduleChart.tsx';
 import type { LaidSchedule } from '../../model/session.ts';
@@ -24,7 +24,7 @@ interface Props {
 }
 
 /** When each child is seen: the picture, and the same as a table. */
-export function SchedulePicture({ protocol, phases, watched, turns }: Props) {
+export const SchedulePicture = memo(function SchedulePicture({ protocol, phases, watched, turns }: Props) {
   const words = useWords();
   const { study } = words;
   const seen = useMemo(() => {
@@ -32,11 +32,11 @@ export function SchedulePicture({ protocol, phases, watched, turns }: Props) {
     return whenSeen(layOut(protocol, phases, ids, turns), protocol.method, ids, phases.length);
   }, [protocol, phases, watched, turns]);
   const target = protocol.rotation.kind === 'target' && !looksAtEverybody(protocol) && !watchesOne(protocol);
-  const nameOf = (id: string | null): string => {
-    if (id === null) return study.scheduleEverybody;
-    const name = watched.find((child) => child.id === id)?.label ?? id;
-    return target && id === watched[0]?.id ? study.scheduleTarget({ name }) : name;
-  };
+  const isTarget = (id: string | null): boolean => target && id === watched[0]?.id;
+  const nameOf = (id: string | null): string =>
+    id === null ? study.scheduleEverybody : (watched.find((child) => child.id === id)?.label ?? id);
+  const rowName = (id: string | null): string =>
+    isTarget(id) ? study.scheduleTarget({ name: nameOf(id) }) : nameOf(id);
   const counts = looksAtEverybody(protocol) ? study.scheduleCounts : study.scheduleLooks;
   const timed = seen.some(({ watchedMs }) => watchedMs !== null);
   const looked = protocol.method !== 'duration';
@@ -46,6 +46,7 @@ export function SchedulePicture({ protocol, phases, watched, turns }: Props) {
   ];
   const rows = byChild(seen, phases.length).map((parts) => ({
     label: nameOf(parts[0]?.child ?? null),
+    strong: isTarget(parts[0]?.child ?? null),
     ends: [
       ...(looked ? [words.f.whole(sum(parts, ({ looks }) => looks.length))] : []),
       ...(timed ? [study.scheduleMinutesOf({ ms: sum(parts, ({ watchedMs }) => watchedMs ?? 0) })] : []),
@@ -77,11 +78,11 @@ export function SchedulePicture({ protocol, phases, watched, turns }: Props) {
       </Chart>
       <details>
         <summary>{study.scheduleTable}</summary>
-        <ScheduleTable {...{ seen, phases, nameOf, looked, timed }} looksHead={counts} />
+        <ScheduleTable {...{ seen, phases, looked, timed }} nameOf={rowName} looksHead={counts} />
       </details>
     </div>
   );
-}
+});
 
 const sum = (parts: readonly Seen[], of: (part: Seen) => number): number =>
   parts.reduce((total, part) => total + of(part), 0);

@@ -1,5 +1,5 @@
 import type { Format } from '../format.ts';
-import { short } from './study/short.ts';
+import { peerLooks, short } from './study/short.ts';
 
 type F = Format;
 
@@ -91,7 +91,7 @@ export const before = {
     }: { target: number; fewest: number; peers: number; minutes: number; parts: number },
     f: F,
   ) =>
-    `${f.whole(target)} ${f.plural(target, { one: 'look', other: 'looks' })} at the target child and at least ${f.whole(fewest)} at ${peers === 1 ? 'its peer' : `each of ${f.whole(peers)} peers`} in ${inMinutes(minutes, f)}${parts > 1 ? ' in each phase' : ''}.`,
+    `${f.whole(target)} ${f.plural(target, { one: 'look', other: 'looks' })} at the target child and ${peerLooks(fewest, peers, f)} in ${inMinutes(minutes, f)}${parts > 1 ? ' in each phase' : ''}.`,
   meaningDuration: ({ minutes, parts }: { minutes: number; parts: number }, f: F) =>
     `One child, watched for all of ${inMinutes(minutes, f)}${parts > 1 ? ' in each phase' : ''}.`,
   secondTitle: 'You are the second observer?',

@@ -1,5 +1,5 @@
 import { useMemo } from 'react';
-import { intervalsInPart } from '../../../schedule/layOut.ts';
+import { intervalsInPart, type LayOutRecipe } from '../../../schedule/layOut.ts';
 import { looksAtEverybody, watchesOne } from '../../../schedule/orderOfDay.ts';
 import { drawTurns } from '../../../schedule/turns.ts';
 import type { ProtocolDraft } from '../../../tasks/index.ts';
@@ -12,6 +12,7 @@ const onePart = [''];
 /** One part of the schedule as a picture, with children without names, while the recipe is being changed. */
 export function SchedulePreview({ draft }: { readonly draft: ProtocolDraft }) {
   const { study } = useWords();
+  const recipe = useRecipe(draft);
   const count = watchesOne(draft) ? 1 : draft.childrenToDraw;
   const children = useMemo(
     () =>
@@ -36,8 +37,17 @@ export function SchedulePreview({ draft }: { readonly draft: ProtocolDraft }) {
         {count > 1 && !looksAtEverybody(draft) && (
           <p className="second small">{eachRound ? study.pictureNoteEachRound : study.pictureNote}</p>
         )}
-        <SchedulePicture protocol={draft} phases={onePart} watched={children} turns={turns} />
+        <SchedulePicture protocol={recipe} phases={onePart} watched={children} turns={turns} />
       </div>
     </Sheet>
+  );
+}
+
+/** What of a draft decides the picture: names and codes may be typed without drawing it anew. */
+function useRecipe(draft: ProtocolDraft): LayOutRecipe {
+  const { method, intervalMs, observeMs, lookAt, rotation, partLength } = draft;
+  return useMemo(
+    () => ({ method, intervalMs, observeMs, lookAt, rotation, partLength }),
+    [method, intervalMs, observeMs, lookAt, rotation, partLength],
   );
 }

@@ -1,5 +1,5 @@
 import type { Format } from '../../format.ts';
-import { short } from './short.ts';
+import { peerLooks, short } from './short.ts';
 
 type F = Format;
 
@@ -95,7 +95,7 @@ export const protocolWords = {
     { target, fewest, peers, minutes }: { target: number; fewest: number; peers: number; minutes: number },
     f: F,
   ) =>
-    `${f.whole(target)} ${f.plural(target, { one: 'look', other: 'looks' })} at the target child and at least ${f.whole(fewest)} at ${peers === 1 ? 'its peer' : `each of ${f.whole(peers)} peers`} in a part of ${short(minutes, f)} ${f.plural(minutes, { one: 'minute', other: 'minutes' })}.`,
+    `${f.whole(target)} ${f.plural(target, { one: 'look', other: 'looks' })} at the target child and ${peerLooks(fewest, peers, f)} in a part of ${short(minutes, f)} ${f.plural(minutes, { one: 'minute', other: 'minutes' })}.`,
   meansNothing: 'Not one interval fits into a part.',
   warnLongInterval:
     'More than 30 seconds between looks: short changes fall in between. Shorten the interval if you can.',

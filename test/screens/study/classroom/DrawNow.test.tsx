@@ -1,7 +1,7 @@
 // @vitest-environment happy-dom
 import { cleanup, screen } from '@testing-library/react';
 import { afterEach, expect, it } from 'vitest';
-import { ClassPage } from '../../../../src/screens/study/classroom/ClassPage.tsx';
+import { StudyPages } from '../../../../src/screens/study/StudyPages.tsx';
 import { removeProtocol, saveProtocol, switchMethod, undoDraw } from '../../../../src/tasks/index.ts';
 import { fakeServices, renderScreen } from '../../support/renderScreen.tsx';
 import { studyWithClass } from '../../support/study.ts';
@@ -21,7 +21,7 @@ async function classWithHeadcount({ only }: { only: boolean }) {
     }
     if (only) must(await removeProtocol(services.deps, protocol.id));
   }
-  renderScreen(<ClassPage id={classroom.id} />, services, `/study/class/${classroom.id}`);
+  renderScreen(<StudyPages />, services, `/study/class/${classroom.id}`);
 }
 
 it('draws for the protocols that watch single children, not for a headcount', async () => {
