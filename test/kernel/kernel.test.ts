@@ -6,7 +6,7 @@ import { idFromContent } from '../../src/kernel/idFromContent.ts';
 import { newId } from '../../src/kernel/ids.ts';
 import { seededRandom } from '../../src/kernel/random.ts';
 import { epochMs } from '../../src/kernel/units.ts';
-import { dateOf, epochOf, toWallTime } from '../../src/kernel/wallTime.ts';
+import { dateOf, epochOf, shiftedWall, toWallTime } from '../../src/kernel/wallTime.ts';
 
 describe('canonicalJson', () => {
   it('sorts members and writes no white space (the object-sorting rule of RFC 8785, section 3.2.3)', () => {
@@ -65,6 +65,13 @@ describe('wall time', () => {
 
   it('keeps the date of the place where it was written', () => {
     expect(dateOf('2026-11-03T00:10:00.000+13:00')).toBe('2026-11-03');
+  });
+
+  it('moves a wall time and keeps its offset', () => {
+    expect(shiftedWall('2026-11-03T10:42:07.000-03:30', -7500)).toBe('2026-11-03T10:41:59.500-03:30');
+    expect(shiftedWall('2026-03-29T00:59:59.000+00:00', 2000)).toBe('2026-03-29T01:00:01.000+00:00');
+    expect(shiftedWall('2026-11-03T10:00:00Z', 1000)).toBe('2026-11-03T10:00:01.000+00:00');
+    expect(shiftedWall('never', 5)).toBe('never');
   });
 });
 
