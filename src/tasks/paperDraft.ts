@@ -37,6 +37,8 @@ export interface PaperDraft {
   readonly parts: readonly PaperPart[];
   /** Number of the last interval that was observed, where the observer stopped early; null = went on to the end. */
   readonly stoppedAfter: number | null;
+  /** For durations: milliseconds from the beginning of the last part that began. */
+  readonly stoppedAt: number | null;
   /** By interval number. */
   readonly answers: Readonly<Record<number, PaperAnswer>>;
   readonly onsets: readonly PaperOnset[];

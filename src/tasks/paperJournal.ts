@@ -81,7 +81,16 @@ export function paperJournal(draft: PaperDraft, clock: PaperClock): Result<Paper
   const after = intervals.find(({ number }) => number === (draft.stoppedAfter ?? 0) + 1);
   const stopped = draft.stoppedAfter !== null && after !== undefined;
   if (stopped && after.part === last.part) at = last.origin + after.cueMs;
-  const early = stopped || last.part + 1 < phases.length;
+  const { stoppedAt } = draft;
+  if (stoppedAt !== null) {
+    const length = partDuration(intervals, last.part);
+    if (stoppedAt <= 0 || stoppedAt >= length)
+      return problem('paper.stoppedOutside', { at: stoppedAt, length });
+    const later = draft.onsets.find(({ part, atMs }) => part === last.part && atMs >= stoppedAt);
+    if (later !== undefined) return problem('paper.onsetAfterStop', { at: later.atMs, stoppedAt });
+    at = last.origin + stoppedAt;
+  }
+  const early = stopped || stoppedAt !== null || last.part + 1 < phases.length;
   said.push({ at, body: { kind: 'ended', reason: early ? 'early' : 'complete' } });
   return ok({ start, said });
 }

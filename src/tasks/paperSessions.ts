@@ -89,6 +89,7 @@ export async function beginPaper(deps: Deps, plan: VisitPlan): Promise<Result<Pa
     start: first?.firstWall?.slice(11, 19) ?? plan.plannedStart?.slice(11, 16) ?? '',
     parts: plan.schedule.phases.slice(1).map(() => ({ breakStarted: '', firstTask: '' })),
     stoppedAfter: null,
+    stoppedAt: null,
     answers: {},
     onsets: [],
   };

@@ -52,7 +52,7 @@ function planOf(made: School, protocol: Partial<Protocol> = {}, phases = ['befor
   };
 }
 
-const code = (...codes: string[]): PaperAnswer => ({ codes });
+const code = (...codes: string[]) => ({ codes });
 /** Twelve looks; 5 empty, 9 away. */
 const answers: Record<number, PaperAnswer> = {
   1: code('on'),
@@ -177,7 +177,7 @@ describe('A sheet that was typed in', () => {
       const { phases, planned, scored, missing, missingBy } = sessionDetails(session);
       return {
         counts: { planned, scored, missing, missingBy },
-        phases: phases.map(({ row: { session: _, observer: __, role: ___, ...row }, ...rest }) => ({
+        phases: phases.map(({ row: { session: _, observer: __, ...row }, ...rest }) => ({
           ...rest,
           row,
         })),
@@ -273,6 +273,19 @@ describe('A sheet that was typed in', () => {
     );
     // Six of ten minutes, by hand.
     expect(sessionDetails(await stored(on, watched.id)).phases[0]?.row.percentOnTask).toBe(60);
+    const stopped = given(
+      await typed(on, made, duration, {
+        ...plain,
+        answers: {},
+        onsets: [
+          { part: 0, atMs: 0, answer: code('on') },
+          { part: 0, atMs: 360_000, answer: code('off') },
+        ],
+        stoppedAt: 480_000,
+      }),
+    );
+    // Six of eight; the last two minutes were not observed.
+    expect(sessionDetails(await stored(on, stopped.id)).phases[0]?.row.percentOnTask).toBe(75);
   });
 
   it('is refused with one sentence for what cannot be, and nothing is kept of it', async () => {
@@ -300,6 +313,7 @@ describe('A sheet that was typed in', () => {
     expect(await refused({ answers: { 1: code('sings') } })).toBe('task.noSuchCode');
     expect(await refused({ answers: { 1: code('on', 'off') } })).toBe('task.oneCode');
     expect(await refused({ answers: { 1: { on: 1, present: 2 } } })).toBe('paper.otherMethod');
+    const noPart = { breakStarted: '', firstTask: '' };
     const counting = { method: 'headcount' as const };
     expect(await refused({ answers: { 1: { on: 9, present: 8 } } }, counting)).toBe('paper.onOverPresent');
     expect(await refused({ answers: { 1: { on: 9, present: Number.NaN } } }, counting)).toBe('paper.noCount');
@@ -308,6 +322,14 @@ describe('A sheet that was typed in', () => {
     const onset = (atMs: number) => ({ part: 0, atMs, answer: { codes: ['on'] } });
     expect(await refused({ answers: {}, onsets: [onset(120_000)] }, watching)).toBe('paper.onsetOutside');
     expect(await refused({ answers: {}, onsets: [onset(0), onset(0)] }, watching)).toBe('paper.onsetTwice');
+    const stop = (stoppedAt: number) => ({
+      answers: {},
+      onsets: [onset(30_000)],
+      stoppedAt,
+      parts: [noPart],
+    });
+    expect(await refused(stop(30_000), watching)).toBe('paper.onsetAfterStop');
+    expect(await refused(stop(120_000), watching)).toBe('paper.stoppedOutside');
     expect(given(await on.deps.store.listSessions(made.study.id))).toEqual([]);
   });
 

@@ -48,7 +48,7 @@ export function ChooseSheet({ settings }: { readonly settings: Settings }) {
   return (
     <div className="stack">
       <PageHead note={paper.chooseNote}>{paper.chooseTitle}</PageHead>
-      <form className="row" onSubmit={find}>
+      <form className="row typing-find" onSubmit={find}>
         <TextField
           label={paper.findLabel}
           value={label}

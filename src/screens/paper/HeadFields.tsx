@@ -1,5 +1,5 @@
 import { useState } from 'react';
-import { clockTime } from '../../kernel/typedTime.ts';
+import { clockTime, minutesAndSeconds } from '../../kernel/typedTime.ts';
 import type { PaperPart } from '../../tasks/index.ts';
 import { Check, Choice } from '../../ui/Choice.tsx';
 import { SelectField, TextField } from '../../ui/Field.tsx';
@@ -31,6 +31,11 @@ export function HeadFields({ typing, last }: { readonly typing: Typing; readonly
             </option>
           ))}
         </SelectField>
+        {observers.length === 0 && answer !== undefined && (
+          <a className="button" href="#/study/observers">
+            {paper.addObserver}
+          </a>
+        )}
         <TextField
           label={paper.date}
           type="date"
@@ -43,7 +48,14 @@ export function HeadFields({ typing, last }: { readonly typing: Typing; readonly
           value={draft.start}
           onValue={(start) => change({ start })}
         />
-        {plan.schedule.protocol.method !== 'duration' && (
+        {plan.schedule.protocol.method === 'duration' ? (
+          <MinutesField
+            label={paper.stoppedAt}
+            hint={paper.stoppedHint}
+            value={draft.stoppedAt}
+            onValue={(stoppedAt) => change({ stoppedAt })}
+          />
+        ) : (
           <NumberField
             label={paper.stopped}
             hint={paper.stoppedHint}
@@ -122,6 +134,36 @@ function ClockField({ label, hint, value, onValue }: ClockProps) {
         setLeft(true);
         setText(clockTime(text) ?? text);
       }}
+    />
+  );
+}
+
+interface MinutesProps {
+  readonly label: string;
+  readonly hint: string;
+  readonly value: number | null;
+  readonly onValue: (value: number | null) => void;
+}
+
+/** Minutes and seconds from the beginning of a part. */
+function MinutesField({ label, hint, value, onValue }: MinutesProps) {
+  const { words } = useServices();
+  const [text, setText] = useState(value === null ? '' : words.paper.clock({ ms: value }));
+  const [left, setLeft] = useState(true);
+  const wrong = left && text !== '' && minutesAndSeconds(text) === null;
+  return (
+    <TextField
+      label={label}
+      hint={hint}
+      inputMode="numeric"
+      value={text}
+      problem={wrong ? words.problems['paper.noOnset']({ found: text }) : undefined}
+      onChange={(event) => {
+        setText(event.target.value);
+        setLeft(false);
+        onValue(minutesAndSeconds(event.target.value));
+      }}
+      onBlur={() => setLeft(true)}
     />
   );
 }

@@ -64,7 +64,7 @@ export function Lines({ typing, intervals }: Props) {
   const numbers = paperNumbers(protocol);
   const headcount = protocol.method === 'headcount';
   return (
-    <div className="stack-tight">
+    <div className="typing-lines">
       <div className="typing-now">
         <p className="typing-where" aria-live="polite">
           {line === undefined
@@ -238,7 +238,7 @@ const Row = memo(function Row({ k, number, time, child, text, current, onLine }:
           onLine(k);
           // With a mouse there is a keyboard: it goes on with this line. A finger would only get the screen's keys.
           if ((event.nativeEvent as PointerEvent).pointerType === 'mouse')
-            event.currentTarget.closest('.stack-tight')?.querySelector('input')?.focus();
+            event.currentTarget.closest('.typing-lines')?.querySelector('input')?.focus();
         }}
       >
         <b>{number}</b>

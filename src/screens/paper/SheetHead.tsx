@@ -39,7 +39,11 @@ export function SheetHead({ plan, label, page, of, sheet }: Props & { readonly s
             <i className="paper-tick" /> {role}
           </span>
         ))}
-        {protocol.method !== 'duration' && <Blank label={paper.stoppedField} wide={1} />}
+        {protocol.method === 'duration' ? (
+          <Blank label={paper.stoppedAtField} wide={1} clock />
+        ) : (
+          <Blank label={paper.stoppedField} wide={1} />
+        )}
       </div>
       <p className="paper-caution">{paper.cautions}</p>
     </header>

@@ -15,8 +15,14 @@ import { Lines } from './Lines.tsx';
 import { Onsets } from './Onsets.tsx';
 import { useTyping } from './useTyping.ts';
 
+interface Props {
+  readonly first: PaperDraft;
+  /** The sheet was put away as it stood. */
+  readonly onAway: (draft: PaperDraft) => void;
+}
+
 /** One sheet, typed in: its head, its lines, and the session that it becomes. */
-export function TypeIn({ first }: { readonly first: PaperDraft }) {
+export function TypeIn({ first, onAway }: Props) {
   const { words, deps } = useServices();
   const { paper } = words;
   const [, go] = useLocation();
@@ -47,18 +53,22 @@ export function TypeIn({ first }: { readonly first: PaperDraft }) {
   const putAway = async () => {
     await typing.settled();
     const away = await savePaper(deps, null);
-    if (!away.ok) setProblem(say(words.problems, away.problem));
+    if (away.ok) onAway(draft);
+    else setProblem(say(words.problems, away.problem));
   };
   return (
     <div className="stack">
       <PageHead
-        about={paper.protocolLine({
-          name: protocol.name,
-          version: protocol.version,
-          method: methodSentence(words, protocol),
+        about={paper.typeAbout({
+          klass: plan.classroom.name,
+          protocol: paper.protocolLine({
+            name: protocol.name,
+            version: protocol.version,
+            method: methodSentence(words, protocol),
+          }),
         })}
       >
-        {paper.typeTitle({ klass: plan.classroom.name, label: sheetLabel(plan) })}
+        {paper.typeTitle({ label: sheetLabel(plan) })}
       </PageHead>
       <Sheet title={paper.headTitle}>
         <HeadFields typing={typing} last={intervals.length} />

@@ -38,7 +38,6 @@ export const paper = {
     `${f.whole(pages)} ${f.plural(pages, { one: 'page', other: 'pages' })}. Print at actual size (100 %).`,
   preview: ({ page, of }: { page: number; of: number }, f: F) => `Page ${f.whole(page)} of ${f.whole(of)}`,
   nothing: 'No visit is prepared, so there is no schedule to print.',
-  noSchedule: 'This session came from a table and has no schedule to print.',
   toReady: 'Back to the checks',
   toSession: 'Back to the session',
 
@@ -62,6 +61,7 @@ export const paper = {
   observerField: 'Observer',
   startField: 'Started at (clock)',
   stoppedField: 'Stopped early, after no.',
+  stoppedAtField: 'Stopped early, at (min:s)',
   breakField: ({ phase }: { phase: string }) => `Break started, before “${phase}”`,
   firstTaskField: ({ phase }: { phase: string }) => `First task given: “${phase}” starts`,
   alone: 'alone',
@@ -128,8 +128,8 @@ export const paper = {
   toPrepare: 'Prepare a visit',
 
   // typing in
-  typeTitle: ({ klass, label }: { klass: string; label: string }) => `Sheet ${label}, ${klass}.`,
-  typeAbout: ({ protocol }: { protocol: string }) => protocol,
+  typeTitle: ({ label }: { label: string }) => `Sheet ${label}.`,
+  typeAbout: ({ klass, protocol }: { klass: string; protocol: string }) => `${klass} · ${protocol}`,
   progress: ({ done, of }: { done: number; of: number }, f: F) =>
     `${f.whole(done)} of ${f.whole(of)} lines typed`,
   onsetsTyped: ({ n }: { n: number }, f: F) =>
@@ -149,6 +149,8 @@ export const paper = {
   firstTask: ({ phase }: { phase: string }) => `First task given, “${phase}”`,
   firstTaskHint: 'Stays empty when that part was not observed.',
   stopped: 'Stopped early after no.',
+  stoppedAt: 'Stopped early at (min:s)',
+  addObserver: 'Add an observer',
   stoppedHint: 'Stays empty when the sheet went on to its end.',
   linesTitle: 'Lines',
   numberField: 'Number on this line',
@@ -160,22 +162,18 @@ export const paper = {
   keysOnset: 'Type the time, Enter, the number, Enter.',
   now: ({ number, time, child }: { number: number; time: string; child: string }, f: F) =>
     `No. ${f.whole(number)} · ${time} · ${child}`,
-  typed: ({ digits }: { digits: string }) => `${digits} …`,
   empty: 'empty',
   counts: ({ on, present }: { on: number; present: number }, f: F) => `${f.whole(on)} of ${f.whole(present)}`,
   emptyLine: 'Empty this line',
   back: 'Line before',
   next: 'Next line',
   undo: 'Undo',
-  reasonField: 'Why no mark',
-  noReason: 'none given',
   onsetTime: 'From (min:s)',
   onsetWhat: 'What began',
   onsetChoose: 'choose',
   onsetPart: 'Part',
   addLine: 'Add the line',
   removeLine: ({ time }: { time: string }) => `Remove the line at ${time}`,
-  removed: ({ time }: { time: string }) => `The line at ${time} is removed.`,
   onsetSaid: ({ time, text }: { time: string; text: string }) => `${time} ${text}`,
   finishTitle: 'Keep it',
   finishText: ({ empty }: { empty: number }, f: F) =>
@@ -219,6 +217,10 @@ export const paperProblems = {
     `The sheet cannot have stopped after ${f.whole(v.found)}: its lines go from 1 to ${f.whole(v.last)}.`,
   'paper.markAfterStop': (v: { interval: number; stoppedAfter: number }, f: F) =>
     `Line ${f.whole(v.interval)} has a mark, but the sheet stopped after ${f.whole(v.stoppedAfter)}.`,
+  'paper.stoppedOutside': (v: { at: number; length: number }) =>
+    `The sheet cannot have stopped early at ${clock(v.at)} of its last part, which lasts until ${clock(v.length)}.`,
+  'paper.onsetAfterStop': (v: { at: number; stoppedAt: number }) =>
+    `A line begins at ${clock(v.at)}, but the sheet stopped at ${clock(v.stoppedAt)}.`,
   'paper.otherMethod': (v: { interval: number }, f: F) =>
     `Line ${f.whole(v.interval)} holds something that this method does not record.`,
   'paper.noCount': (v: { interval: number }, f: F) =>
