@@ -124,13 +124,14 @@ const bodies = {
     reason: z.enum(['complete', 'early']),
     words: z.optional(longText),
   }),
-  /** A correction after the session: `codes` or a missing reason, with why and by whom. */
+  /** A correction after the session: `codes` (with `counts` in a headcount) or a missing reason, with why and by whom. */
   amended: z.object({
     kind: z.literal('amended'),
     interval,
     child: ofChild,
     codes: z.nullable(z.array(shortText)),
     missing: z.nullable(missingReason),
+    counts: z.optional(counts),
     why: longText,
     by: shortText,
   }),

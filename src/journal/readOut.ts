@@ -77,7 +77,7 @@ function spoken(state: JournalState, line: PlannedInterval): Outcome | null {
   if (last.kind === 'amended') {
     return last.missing !== null
       ? { status: 'missing', missing: last.missing, amended: true }
-      : { status: 'scored', codes: last.codes ?? [], amended: true };
+      : { status: 'scored', codes: last.codes ?? [], counts: last.counts ?? null, amended: true };
   }
   if (last.kind === 'unusable') return { status: 'missing', missing: last.reason, corrected: true };
   if (last.kind === 'corrected') {

@@ -15,6 +15,8 @@ export interface Amendment {
   /** Code ids; empty = observed, none occurred (partial and whole interval). Null when `missing` is given. */
   readonly codes: readonly string[] | null;
   readonly missing: MissingReason | null;
+  /** Headcount: what was counted; then `codes` is empty. */
+  readonly counts?: { readonly on: number; readonly present: number };
   readonly why: string;
   readonly by: string;
 }
@@ -33,9 +35,12 @@ export function amendInterval(deps: Deps, session: string, wish: Amendment): Pro
     const signed = signature(stored, wish.interval, wish.codes, wish);
     if (!signed.ok) return signed;
     const codes = wish.codes === null ? null : [...wish.codes];
-    const { interval, missing } = wish;
+    const { interval, missing, counts } = wish;
+    const fault = countsFault(stored.header, wish);
+    if (fault !== null) return fault;
     const { at, why, by } = signed.value;
-    return ok({ at, body: { kind: 'amended', interval, codes, missing, why, by } });
+    const counted = counts === undefined ? {} : { counts };
+    return ok({ at, body: { kind: 'amended', interval, codes, missing, ...counted, why, by } });
   });
 }
 
@@ -97,5 +102,20 @@ function codesFault(header: SessionHeader, codes: readonly string[]): ReturnType
   if (strange !== undefined) return problem('task.noSuchCode', { code: strange });
   if (new Set(codes).size < codes.length) return problem('task.codeTwice');
   if (method === 'momentary' && codes.length !== 1) return problem('task.oneCode');
+  return null;
+}
+
+/** Counts belong to headcounts, and there a scan that is not missing has some; a recorded duration has no intervals to correct. */
+function countsFault(
+  header: SessionHeader,
+  { counts, missing }: Amendment,
+): ReturnType<typeof problem> | null {
+  const { method } = recordingFacts(header);
+  if (method === 'duration' && header.schedule.kind === 'laid') return problem('task.durationNotCorrected');
+  if ((counts !== undefined) !== (method === 'headcount' && missing === null))
+    return problem('task.countsOrReason');
+  const whole = (n: number): boolean => Number.isInteger(n) && n >= 0;
+  if (counts !== undefined && !(whole(counts.on) && whole(counts.present) && counts.on <= counts.present))
+    return problem('task.countsOutOfRange');
   return null;
 }

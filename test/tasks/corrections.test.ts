@@ -3,6 +3,7 @@ import { readOut } from '../../src/journal/readOut.ts';
 import { fold } from '../../src/journal/step.ts';
 import { type Amendment, addNote, amendInterval, pairVisit, settleInterval } from '../../src/tasks/index.ts';
 import { codeOf, given } from '../storage/samples.ts';
+import { headerOf, journalOf as sayings } from '../support/session.ts';
 import { type Bench, bench, recorded, school } from './bench.ts';
 
 async function interval(on: Bench, session: string, number: number) {
@@ -113,4 +114,51 @@ it('adds words to a flag after the session, and nothing while it runs', async ()
   expect(codeOf(await addNote(on.deps, id, { text: ' ' }))).toBe('task.noWords');
   expect(codeOf(await addNote(on.deps, running.id, { text: 'x' }))).toBe('task.sessionRuns');
   expect(await on.dump()).toBe(before);
+});
+
+/** A recorded session of this method whose journal says nothing but its end. */
+async function recordedBy(on: Bench, protocol: Parameters<typeof headerOf>[0]) {
+  const header = headerOf(protocol, ['before'], { id: 'session-1' });
+  given(await on.deps.store.createSession(header));
+  const journal = sayings(
+    [0, { kind: 'started', checks: [], anyway: false }],
+    [600_000, { kind: 'ended', reason: 'complete' }],
+  );
+  given(await on.deps.store.appendEntries(header.id, journal));
+  return header.id;
+}
+
+it('corrects a scan by two counts or a reason, and by counts that can be', async () => {
+  const on = await bench();
+  const id = await recordedBy(on, { method: 'headcount', partLength: { kind: 'minutes', minutes: 2 } });
+  const scan: Amendment = { ...wish, codes: [], counts: { on: 17, present: 22 } };
+  const said = async (changes: Partial<Amendment>) =>
+    codeOf(await amendInterval(on.deps, id, { ...scan, ...changes }));
+  expect(await said({})).toBe('ok');
+  expect(await interval(on, id, 2)).toMatchObject({
+    status: 'scored',
+    counts: { on: 17, present: 22 },
+    amended: true,
+  });
+  const { counts, ...without } = scan;
+  expect(codeOf(await amendInterval(on.deps, id, without))).toBe('task.countsOrReason');
+  expect(await said({ counts: { on: 23, present: 22 } })).toBe('task.countsOutOfRange');
+  expect(await said({ counts: { on: 1.5, present: 22 } })).toBe('task.countsOutOfRange');
+  expect(await said({ counts: { on: Number.NaN, present: 22 } })).toBe('task.countsOutOfRange');
+  expect(await said({ codes: null, missing: 'missed' })).toBe('task.countsOrReason');
+  expect(counts?.on).toBe(17);
+  expect(codeOf(await amendInterval(on.deps, id, { ...without, codes: null, missing: 'missed' }))).toBe('ok');
+  expect(await interval(on, id, 2)).toMatchObject({ missing: 'missed', counts: null });
+});
+
+it('gives no counts to a look, and corrects no stretch of a recorded duration', async () => {
+  const on = await bench();
+  const { id } = await recorded(on, await school(on));
+  expect(codeOf(await amendInterval(on.deps, id, { ...wish, counts: { on: 1, present: 2 } }))).toBe(
+    'task.countsOrReason',
+  );
+  const other = await recordedBy(on, { method: 'duration', rotation: { kind: 'one' } });
+  expect(codeOf(await amendInterval(on.deps, other, { ...wish, interval: 1, codes: ['on'] }))).toBe(
+    'task.durationNotCorrected',
+  );
 });

@@ -1,4 +1,5 @@
 import type { SessionDetails } from '../../analysis/index.ts';
+import type { Method } from '../../model/protocol.ts';
 import { Sheet } from '../../ui/Sheet.tsx';
 import { Table } from '../../ui/Table.tsx';
 import { useWords } from '../services.ts';
@@ -6,8 +7,21 @@ import { useWords } from '../services.ts';
 type Counted = Pick<SessionDetails['phases'][number]['children'][number], 'scored' | 'missing' | 'missingBy'>;
 
 /** What was recorded and what is missing, child by child; nothing of what the children did. */
-export function Completeness({ details }: { readonly details: SessionDetails }) {
+export function Completeness({
+  details,
+  method,
+}: {
+  readonly details: SessionDetails;
+  readonly method: Method;
+}) {
   const words = useWords();
+  const { afterwards } = words;
+  const heads =
+    method === 'headcount'
+      ? [afterwards.countedIn, afterwards.scansMissingIn]
+      : method === 'duration'
+        ? [afterwards.watchedIn, afterwards.timeMissingIn]
+        : [afterwards.scoredIn, afterwards.missingIn];
   const names = [
     ...new Set(
       details.phases.flatMap(({ children }) =>
@@ -24,11 +38,15 @@ export function Completeness({ details }: { readonly details: SessionDetails }) 
     }),
   }));
   const count = (value: number | null | undefined): string =>
-    value === null || value === undefined ? '' : words.f.whole(value);
+    value === null || value === undefined
+      ? ''
+      : method === 'duration'
+        ? words.f.clock(value * 1000)
+        : words.f.whole(value);
   return (
     <Sheet title={words.afterwards.completeness}>
       <div className="stack-tight">
-        <p>{words.afterwards.lateMarks({ late: details.late })}</p>
+        {method !== 'duration' && <p>{words.afterwards.lateMarks({ late: details.late })}</p>}
         <Table
           caption={words.afterwards.completeness}
           captionHidden
@@ -44,13 +62,13 @@ export function Completeness({ details }: { readonly details: SessionDetails }) 
             ...details.phases.flatMap(({ row: { phase } }, k) => [
               {
                 key: `scored ${k}`,
-                head: words.afterwards.scoredIn({ phase }),
+                head: heads[0]?.({ phase }),
                 number: true,
                 cell: (line: (typeof lines)[number]) => count(line.of[k]?.scored),
               },
               {
                 key: `missing ${k}`,
-                head: words.afterwards.missingIn({ phase }),
+                head: heads[1]?.({ phase }),
                 number: true,
                 cell: (line: (typeof lines)[number]) => count(line.of[k]?.missing),
               },
@@ -61,12 +79,14 @@ export function Completeness({ details }: { readonly details: SessionDetails }) 
               cell: (line) =>
                 line.of
                   .map((one) =>
-                    words.afterwards.reasonsShort({
-                      reasons: (one?.missingBy ?? []).map(({ reason, n }) => ({
-                        reason: words.missing[reason],
-                        n,
-                      })),
-                    }),
+                    method === 'duration'
+                      ? (one?.missingBy ?? []).map(({ reason }) => words.missing[reason]).join(', ')
+                      : words.afterwards.reasonsShort({
+                          reasons: (one?.missingBy ?? []).map(({ reason, n }) => ({
+                            reason: words.missing[reason],
+                            n,
+                          })),
+                        }),
                   )
                   .filter((text) => text !== '')
                   .join('; '),

@@ -28,13 +28,16 @@ export function LookCorrection({ session: { header }, sheets }: Props) {
   const [interval, setInterval_] = useState('');
   const [codes, setCodes] = useState<readonly string[]>([]);
   const [to, setTo] = useState('');
+  const [on, setOn] = useState('');
+  const [present, setPresent] = useState('');
   const [why, setWhy] = useState('');
   const [by, setBy] = useState('');
   const [said, setSaid] = useState<{ readonly done: boolean; readonly text: string } | null>(null);
   const observers = useStored((store) => store.observers(header.study), [header.study]);
   const { codeSet, method } = recordingFacts(header);
-  if (method === 'headcount' || method === 'duration') return null;
-  const several = method !== 'momentary';
+  if (method === 'duration') return header.schedule.kind === 'laid' ? <NotForDurations /> : null;
+  const scans = method === 'headcount';
+  const several = method === 'partial' || method === 'whole';
   const children = [...new Set(sheets.flatMap((sheet) => sheet.rows.map((row) => row.child ?? '')))];
   const looks = sheets.flatMap((sheet) =>
     sheet.rows
@@ -47,13 +50,16 @@ export function LookCorrection({ session: { header }, sheets }: Props) {
         ),
       ),
   );
-  const complete = interval !== '' && (several || to !== '') && why.trim() !== '' && by.trim() !== '';
+  const counts = scans && to === '' ? countsOf(on, present) : null;
+  const answered = scans ? to !== '' || counts !== null : several || to !== '';
+  const complete = interval !== '' && answered && why.trim() !== '' && by.trim() !== '';
   const keep = async () => {
     if (!complete) return setSaid({ done: false, text: words.afterwards.correctNeeds });
     const reason = missingReasons.find((one) => `missing ${one}` === to) ?? null;
     const kept = await amendInterval(deps, header.id, {
       interval: Number(interval),
-      codes: reason !== null ? null : several ? codes : [to],
+      codes: reason !== null ? null : scans ? [] : several ? codes : [to],
+      ...(counts === null ? {} : { counts }),
       missing: reason as MissingReason | null,
       why: why.trim(),
       by: by.trim(),
@@ -63,14 +69,25 @@ export function LookCorrection({ session: { header }, sheets }: Props) {
     setInterval_('');
     setTo('');
     setCodes([]);
+    setOn('');
+    setPresent('');
     setWhy('');
   };
   return (
-    <Sheet title={words.afterwards.correctTitle} className="not-in-print">
+    <Sheet
+      title={scans ? words.afterwards.correctScanTitle : words.afterwards.correctTitle}
+      className="not-in-print"
+    >
       <div className="stack-tight">
         <div className="row">
-          <p className="grow second">{words.afterwards.correctText}</p>
-          {!open && <Button onClick={() => setOpen(true)}>{words.afterwards.correctOpen}</Button>}
+          <p className="grow second">
+            {scans ? words.afterwards.correctScanText : words.afterwards.correctText}
+          </p>
+          {!open && (
+            <Button onClick={() => setOpen(true)}>
+              {scans ? words.afterwards.correctScanOpen : words.afterwards.correctOpen}
+            </Button>
+          )}
         </div>
         {said !== null && <Notice kind={said.done ? 'done' : 'hold'}>{said.text}</Notice>}
         {open && (
@@ -82,33 +99,53 @@ export function LookCorrection({ session: { header }, sheets }: Props) {
             }}
           >
             <div className="columns">
+              {!scans && (
+                <SelectField
+                  label={words.afterwards.correctChild}
+                  value={child}
+                  onChange={(event) => {
+                    setChild(event.target.value);
+                    setInterval_('');
+                  }}
+                >
+                  <option value="">{words.afterwards.choose}</option>
+                  {children.map((name) => (
+                    <option key={name}>{name}</option>
+                  ))}
+                </SelectField>
+              )}
               <SelectField
-                label={words.afterwards.correctChild}
-                value={child}
-                onChange={(event) => {
-                  setChild(event.target.value);
-                  setInterval_('');
-                }}
-              >
-                <option value="">{words.afterwards.choose}</option>
-                {children.map((name) => (
-                  <option key={name}>{name}</option>
-                ))}
-              </SelectField>
-              <SelectField
-                label={words.afterwards.correctWhich}
+                label={scans ? words.afterwards.correctWhichScan : words.afterwards.correctWhich}
                 value={interval}
-                disabled={child === ''}
+                disabled={!scans && child === ''}
                 onChange={(event) => setInterval_(event.target.value)}
               >
                 <option value="">{words.afterwards.choose}</option>
                 {looks.map(({ number, ...look }) => (
                   <option key={number} value={number}>
-                    {words.afterwards.correctLook(look)}
+                    {scans ? words.afterwards.correctScan(look) : words.afterwards.correctLook(look)}
                   </option>
                 ))}
               </SelectField>
             </div>
+            {scans && (
+              <div className="columns">
+                <TextField
+                  label={words.afterwards.correctOn}
+                  inputMode="numeric"
+                  value={on}
+                  disabled={to !== ''}
+                  onChange={(event) => setOn(event.target.value)}
+                />
+                <TextField
+                  label={words.afterwards.correctPresent}
+                  inputMode="numeric"
+                  value={present}
+                  disabled={to !== ''}
+                  onChange={(event) => setPresent(event.target.value)}
+                />
+              </div>
+            )}
             {several && (
               <fieldset className="choice">
                 <legend className="choice-legend">{words.afterwards.correctTo}</legend>
@@ -137,6 +174,7 @@ export function LookCorrection({ session: { header }, sheets }: Props) {
               >
                 <option value="">{words.afterwards.choose}</option>
                 {!several &&
+                  !scans &&
                   codeSet.codes.map((code) => (
                     <option key={code.id} value={code.id}>
                       {code.label}
@@ -177,6 +215,22 @@ export function LookCorrection({ session: { header }, sheets }: Props) {
           </form>
         )}
       </div>
+    </Sheet>
+  );
+}
+
+/** Two whole numbers, or null as long as both are not there; whether they fit is for the task to say. */
+function countsOf(on: string, present: string): { readonly on: number; readonly present: number } | null {
+  const [onTask, there] = [on.trim(), present.trim()];
+  return onTask === '' || there === '' ? null : { on: Number(onTask), present: Number(there) };
+}
+
+/** A recorded duration has no looks that could be corrected one by one. */
+function NotForDurations() {
+  const { words } = useServices();
+  return (
+    <Sheet title={words.afterwards.correctTitle} className="not-in-print">
+      <p className="second">{words.afterwards.correctNoDuration}</p>
     </Sheet>
   );
 }

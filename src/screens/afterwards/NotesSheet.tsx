@@ -70,9 +70,11 @@ export function NotesSheet({ session: { header, journal } }: { readonly session:
                     to:
                       one.missing !== null
                         ? words.missing[one.missing]
-                        : one.codes === null || one.codes.length === 0
-                          ? words.afterwards.keyNone
-                          : words.f.list(one.codes.map(labelOf)),
+                        : one.counts !== undefined
+                          ? words.afterwards.toCounts(one.counts)
+                          : one.codes === null || one.codes.length === 0
+                            ? words.afterwards.keyNone
+                            : words.f.list(one.codes.map(labelOf)),
                     by: one.by,
                     why: one.why,
                     wall: one.wall,

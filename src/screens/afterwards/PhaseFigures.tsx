@@ -18,18 +18,21 @@ export function PhaseFigures({ phase, alone }: { readonly phase: PhaseDetails; r
     figures.why.percentOnTask === undefined
       ? words.afterwards.undefinedHere
       : say(words.why, { code: figures.why.percentOnTask, values: {} });
+  const continuous = row.method === 'duration';
+  const size = (value: number | null): string =>
+    value === null ? '' : continuous ? words.f.clock(value * 1000) : words.f.whole(value);
   const shares = [
     {
       key: 'scored',
-      head: words.afterwards.scored,
+      head: continuous ? words.afterwards.watchedIn({ phase: null }) : words.afterwards.scored,
       number: true,
-      cell: (one: Shown) => (one.scored === null ? '' : words.f.whole(one.scored)),
+      cell: (one: Shown) => size(one.scored),
     },
     {
       key: 'missing',
-      head: words.afterwards.missing,
+      head: continuous ? words.afterwards.timeMissingIn({ phase: null }) : words.afterwards.missing,
       number: true,
-      cell: (one: Shown) => (one.missing === null ? '' : words.f.whole(one.missing)),
+      cell: (one: Shown) => size(one.missing),
     },
     {
       key: 'percent',
@@ -56,7 +59,7 @@ export function PhaseFigures({ phase, alone }: { readonly phase: PhaseDetails; r
   const off = offTask.reduce((sum, { n }) => sum + n, 0);
   return (
     <Sheet {...(!alone && row.phase !== null && { title: row.phase })} className="phase">
-      <WarningLines warnings={phase.warnings} />
+      <WarningLines warnings={phase.warnings} continuous={continuous} />
       {children.length > 0 && (
         <section className="stack-tight">
           <h3>{words.afterwards.perChild({ phase: null })}</h3>
@@ -95,7 +98,7 @@ export function PhaseFigures({ phase, alone }: { readonly phase: PhaseDetails; r
                 : []),
             ]}
           />
-          {row.classPercent !== null && (
+          {row.classPercent !== null && children.length > 1 && (
             <p className="second small">
               {words.afterwards.classMean({ percent: row.classPercent })}
               {row.method === 'momentary' ? ` ${words.afterwards.worthHint}` : ''}
@@ -103,7 +106,8 @@ export function PhaseFigures({ phase, alone }: { readonly phase: PhaseDetails; r
           )}
         </section>
       )}
-      {offTask.length > 1 && (
+      {/* Of a duration the stretches are counted, which says nothing of how long they were. */}
+      {offTask.length > 1 && !continuous && (
         <section className="stack-tight">
           <h3>{words.afterwards.makeUp({ phase: null })}</h3>
           {off === 0 ? (

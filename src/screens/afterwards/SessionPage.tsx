@@ -15,8 +15,10 @@ import { NotesSheet } from './NotesSheet.tsx';
 import { PageFoot } from './PageFoot.tsx';
 import { PhaseFigures } from './PhaseFigures.tsx';
 import { SheetPicture } from './SheetPicture.tsx';
+import { Stretches } from './Stretches.tsx';
 import { Timing } from './Timing.tsx';
 import { useFigures } from './useFigures.ts';
+import { useWatched } from './useWatched.ts';
 import { WarningLines } from './WarningLines.tsx';
 import { Working } from './Working.tsx';
 
@@ -79,15 +81,26 @@ function Session({ session, answer }: { readonly session: StoredSession; readonl
       <PageFoot />
     </>
   );
+  const time = useWatched(details);
+  // Stretches of a table may lack their times; then they are counted as intervals.
+  const continuous = method === 'duration' && time !== null;
   if (!shown) {
     const reasons = details.missingBy.map(({ reason, n }) => ({ reason: words.missing[reason], n }));
     return (
       <div className="stack">
-        <PageHead about={about} note={words.afterwards.missingBy({ reasons })}>
-          {words.afterwards.completeTitle({ scored: details.scored, planned: details.planned, method })}
+        <PageHead about={about} note={continuous ? time.note : words.afterwards.missingBy({ reasons })}>
+          {continuous
+            ? time.title
+            : method === 'headcount'
+              ? words.afterwards.completeScans(details)
+              : words.afterwards.completeTitle({
+                  scored: details.scored,
+                  planned: details.planned,
+                  method,
+                })}
         </PageHead>
         <HandOverNotice study={header.study} />
-        <WarningLines warnings={details.warnings} />
+        <WarningLines warnings={details.warnings} continuous={continuous} />
         <Sheet title={words.afterwards.figuresWaitTitle}>
           <div className="row">
             <p className="grow second">{words.afterwards.figuresWaitText}</p>
@@ -96,7 +109,7 @@ function Session({ session, answer }: { readonly session: StoredSession; readonl
             </Button>
           </div>
         </Sheet>
-        <Completeness details={details} />
+        <Completeness details={details} method={method} />
         <Timing details={details} fromPaper={header.fromPaper === true} />
         {foot}
       </div>
@@ -117,8 +130,9 @@ function Session({ session, answer }: { readonly session: StoredSession; readonl
       <div className="not-in-print">
         <Button onClick={() => setShown(false)}>{words.afterwards.hideFigures}</Button>
       </div>
-      <WarningLines warnings={details.warnings} />
-      {method !== 'headcount' && (
+      <WarningLines warnings={details.warnings} continuous={continuous} />
+      {continuous && <Stretches session={session} />}
+      {method !== 'headcount' && !continuous && (
         <Sheet title={words.afterwards.roundSheet}>
           <SheetPicture
             sheets={sheets}

@@ -7,13 +7,20 @@ import { useWords } from '../services.ts';
 export function WarningLines({
   warnings = [],
   remarks = [],
+  continuous = false,
 }: {
   readonly warnings?: readonly Problem[];
   readonly remarks?: readonly Problem[];
+  /** The record is time, not intervals. */
+  readonly continuous?: boolean;
 }) {
   const words = useWords();
   const lines = [
-    ...warnings.map((one) => say(words.warnings, one)),
+    ...warnings.map((one) =>
+      continuous && one.code === 'manyMissing'
+        ? say(words.afterwards, { code: 'manyMissingTime', values: one.values })
+        : say(words.warnings, one),
+    ),
     ...remarks.map((one) => sentence(say(words.remarks, one))),
   ];
   if (lines.length === 0) return null;

@@ -92,6 +92,10 @@ export const refusals = {
   'task.sessionEnded': 'This session has ended already.',
   'task.sessionRuns': 'A session has not ended yet. Resume it or close it first.',
   'task.codesOrReason': 'A correction is either codes or a reason why the interval is missing.',
+  'task.durationNotCorrected':
+    'A duration record has no single looks to correct: its stretches run from touch to touch.',
+  'task.countsOrReason': 'A correction of a scan is two counts or a reason why it is missing.',
+  'task.countsOutOfRange': 'Counts are whole numbers, and no more children are on-task than are present.',
   'task.oneCode': 'With momentary time sampling an interval has exactly one code.',
   'task.noSuchCode': 'This code is not in the session’s set.',
   'task.noSuchInterval': (v: { interval: number }, f: Numbers) =>

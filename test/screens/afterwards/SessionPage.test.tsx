@@ -2,9 +2,10 @@
 import { cleanup, screen } from '@testing-library/react';
 import userEvent from '@testing-library/user-event';
 import { afterEach, expect, test } from 'vitest';
-import { isKnown } from '../../../src/journal/entry.ts';
+import { type EntryBody, isKnown } from '../../../src/journal/entry.ts';
 import { Afterwards } from '../../../src/screens/afterwards/Afterwards.tsx';
 import type { Row } from '../../analysis/sessionsFrom.ts';
+import { headerOf, journalOf } from '../../support/session.ts';
 import { fakeServices, renderScreen } from '../support/renderScreen.tsx';
 import { emptyStudy, keepRecorded, must, studyOfTable } from '../support/studyOf.ts';
 
@@ -142,4 +143,76 @@ test.each(Object.entries(methods))('%s has a sentence of its own', async (_metho
   await userEvent.click(await screen.findByRole('button', { name: 'Show the figures' }));
   expect(screen.getByRole('heading', { level: 1 }).textContent).toBe(title);
   expect(document.body.textContent).not.toMatch(/NaN|null|undefined/);
+});
+
+/** The page of a session of another method, recorded on this tablet. */
+async function shownBy(
+  protocol: Parameters<typeof headerOf>[0],
+  ...said: readonly (readonly [number, EntryBody])[]
+) {
+  const services = fakeServices();
+  await emptyStudy(services);
+  const header = headerOf(protocol, ['before'], { id: 's1' });
+  const entries = journalOf([0, { kind: 'started', checks: [], anyway: false }], ...said);
+  must(await services.store.createSession(header));
+  must(
+    await services.store.appendEntries(
+      's1',
+      entries.map((entry) => ({ ...entry, session: 's1', writer: services.deps.writer })),
+    ),
+  );
+  renderScreen(<Afterwards />, services, '/afterwards/session/s1');
+  const heading = await screen.findByRole('heading', { level: 1, name: /counted\.$|watched\.$/ });
+  return { services, heading: heading.textContent };
+}
+
+test('a recorded headcount is told in scans, and a scan is corrected by counts', async () => {
+  const { services, heading } = await shownBy(
+    {
+      method: 'headcount',
+      intervalMs: 60_000,
+      observeMs: 60_000,
+      partLength: { kind: 'minutes', minutes: 2 },
+    },
+    [61_000, { kind: 'marked', interval: 1, code: null, counts: { on: 15, present: 20 } }],
+    [180_000, { kind: 'ended', reason: 'complete' }],
+  );
+  expect(heading).toBe('1 of 2 scans was counted.');
+  const user = userEvent.setup();
+  await user.click(screen.getByRole('button', { name: 'Correct a scan' }));
+  await user.selectOptions(screen.getByLabelText('Which scan'), '1');
+  await user.type(screen.getByLabelText('On-task'), '16');
+  await user.type(screen.getByLabelText('Present'), '20');
+  await user.type(screen.getByLabelText('Who corrects it'), 'Quill');
+  await user.type(screen.getByLabelText(/^Why/), 'one sat behind the pillar');
+  await user.click(screen.getByRole('button', { name: 'Keep the correction' }));
+  await screen.findByText(/is kept beside the mark/);
+  await screen.findByText(/Interval 1 → 16 of 20\. one sat behind the pillar/);
+  expect((await journal(services)).at(-1)).toMatchObject({
+    kind: 'amended',
+    codes: [],
+    counts: { on: 16, present: 20 },
+  });
+});
+
+test('a recorded duration is told in time, stretch by stretch, and says why none is corrected', async () => {
+  const { heading } = await shownBy(
+    { method: 'duration', rotation: { kind: 'one' }, partLength: { kind: 'minutes', minutes: 2 } },
+    [10_000, { kind: 'marked', interval: 1, code: 'on' }],
+    [70_000, { kind: 'marked', interval: 1, code: 'off' }],
+    [120_000, { kind: 'ended', reason: 'complete' }],
+  );
+  expect(heading).toBe('1:50 of 2:00 minutes were watched.');
+  screen.getByText('0:10 minutes are missing: missed.');
+  screen.getByText(/A recorded duration has no single looks/);
+  await userEvent.click(screen.getByRole('button', { name: 'Show the figures' }));
+  const table = screen.getByRole('table', { name: 'From touch to touch' });
+  const rows = [...table.querySelectorAll('tbody tr')].map((row) =>
+    [...row.querySelectorAll('td, th')].map((cell) => cell.textContent).join(' '),
+  );
+  expect(rows).toEqual([
+    '0:00 0:10 0:10 missed Otter-01',
+    '0:10 1:10 1:00 on-task Otter-01',
+    '1:10 2:00 0:50 off-task Otter-01',
+  ]);
 });
