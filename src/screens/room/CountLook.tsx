@@ -12,7 +12,7 @@ export function CountLook() {
   const notSeen = useRoom((s) => s.current?.status === 'missing');
   return (
     <Look lead={room.howMany} then={<Present />}>
-      <span className="visually-hidden">{count.on === null && !notSeen && room.countNone} </span>
+      {count.on === null && !notSeen && <span className="visually-hidden">{`${room.countNone} `}</span>}
       {notSeen ? room.notSeen : room.countOf(count)}
     </Look>
   );

@@ -45,7 +45,7 @@ const signs = {
   fewer: 'M6 17H28',
   all: 'M7 27V15M13.7 27V11M20.3 27V11M27 27V15',
   same: 'M7 12H27M7 22H27',
-  nobody: 'M7 27H27',
+  nobody: 'M8 8H26V26H8Z',
 };
 
 interface StepProps {

@@ -12,7 +12,7 @@ interface Wish {
   readonly children?: number;
 }
 
-/** A visit that is over in a minute: three-second intervals, the shortest there are, seats in one row. */
+/** A visit that is over in a minute: three-second intervals, the shortest there are, seats in rows of five. */
 export function shortVisit({ key, protocol = {}, phases = ['before'], children = 3 }: Wish): VisitPlan {
   const id = (...parts: string[]) => idFromContent('browser test', key, ...parts);
   const names = Array.from({ length: children }, (_, i) => `Otter-${String(i + 1).padStart(2, '0')}`);
@@ -30,14 +30,14 @@ export function shortVisit({ key, protocol = {}, phases = ['before'], children =
     plannedStart: null,
     children: names.map((pseudonym) => ({ id: id(pseudonym), pseudonym, stratum: null })),
     plan: {
-      columns: Math.max(children, 2),
-      rows: 1,
+      columns: Math.min(Math.max(children, 2), 5),
+      rows: Math.ceil(children / 5),
       observerSide: 'back',
-      seats: names.map((pseudonym, column) => ({
-        id: `seat-${column}`,
-        column,
-        row: 0,
-        table: column,
+      seats: names.map((pseudonym, i) => ({
+        id: `seat-${i}`,
+        column: i % 5,
+        row: Math.floor(i / 5),
+        table: i,
         child: id(pseudonym),
       })),
     },
