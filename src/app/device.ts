@@ -4,6 +4,7 @@ import { disk } from '../devices/disk.ts';
 import { tellsOutputChanges } from '../devices/outputChanges.ts';
 import { recordingLock } from '../devices/recordingLock.ts';
 import { share } from '../devices/share.ts';
+import { speech } from '../devices/speech.ts';
 import { timer } from '../devices/timer.ts';
 import { vibration } from '../devices/vibration.ts';
 import { wakeLock } from '../devices/wakeLock.ts';
@@ -15,6 +16,7 @@ import type { Device } from '../screens/services.ts';
 /** What screens ask of the tablet, from the adapters. */
 export function device(): Device {
   const testSound = audio();
+  const voice = speech('en');
   return {
     playTestTone: async (cues) => {
       testSound.settle(cues);
@@ -22,6 +24,11 @@ export function device(): Device {
       if (!unlocked.ok) return { played: false, output: null, latencyMs: null };
       testSound.play(cuePattern('look'));
       return { played: true, output: unlocked.value.output, latencyMs: unlocked.value.latencyMs };
+    },
+    sayAloud: (words, volume) => {
+      const here = voice.available();
+      if (here) voice.speak(words, volume);
+      return here;
     },
     tellsOutputChanges: tellsOutputChanges(),
     wakeLock: tryWakeLock,

@@ -65,7 +65,7 @@ export async function openLookbell(root: Root): Promise<void> {
     deps,
     ask: startWorker(),
     device: tablet,
-    recorder: recorderDesk(store, () => ({
+    recorder: recorderDesk(store, words, () => ({
       page: pageClock,
       wall: wallClock,
       timer,

@@ -3,14 +3,20 @@ import type { SessionHeader } from '../model/session.ts';
 import { createLiveSession } from '../recorder/createLiveSession.ts';
 import type { LiveOptions, LiveSession } from '../recorder/liveSession.ts';
 import type { RecorderPorts } from '../recorder/ports.ts';
+import { headsUpWords } from '../screens/room/headsUpWords.ts';
 import type { OpenOptions, RecorderDesk } from '../screens/services.ts';
 import type { Store } from '../tasks/ports.ts';
+import type { CoreWords } from '../words/coreWords.ts';
 
 /**
  * The one recorder of this tab, outside React. `makePorts` gives everything but where the session's journal is kept,
  * freshly for each session (an audio context is not used twice).
  */
-export function recorderDesk(store: Store, makePorts: () => Omit<RecorderPorts, 'store'>): RecorderDesk {
+export function recorderDesk(
+  store: Store,
+  words: CoreWords,
+  makePorts: () => Omit<RecorderPorts, 'store'>,
+): RecorderDesk {
   let live: { readonly session: LiveSession; readonly id: string } | null = null;
   const listeners = new Set<() => void>();
   const tell = (): void => {
@@ -26,7 +32,8 @@ export function recorderDesk(store: Store, makePorts: () => Omit<RecorderPorts, 
         pack: () => store.pack(header.id),
       },
     };
-    live = { session: createLiveSession(header, ports, options), id: header.id };
+    const headsUp = headsUpWords(header, words);
+    live = { session: createLiveSession(header, ports, { headsUp, ...options }), id: header.id };
     tell();
     return ok(live.session);
   };

@@ -19,6 +19,7 @@ export function defaultKeyMap(): KeyMap {
     Backspace: 'undo',
     s: 'silence',
     f: 'flag',
+    c: 'cover',
     '+': 'one more',
     '-': 'one fewer',
     '=': 'same again',

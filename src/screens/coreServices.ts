@@ -33,6 +33,8 @@ export interface Device {
     readonly output: string | null;
     readonly latencyMs: number | null;
   }>;
+  /** Says a word at once by a voice that is on the tablet itself; false where there is none. */
+  sayAloud(words: string, volume: number): boolean;
   /** True where the browser tells when an earpiece is pulled out. */
   readonly tellsOutputChanges: boolean;
   wakeLock(): Promise<'held' | 'refused' | 'missing'>;

@@ -1,6 +1,6 @@
 import { newId } from '../kernel/ids.ts';
 import { ok, type Problem, problem, type Result } from '../kernel/result.ts';
-import { type KeyMap, keyMap as keyMapSchema, type Observer } from '../model/observer.ts';
+import { type KeyMap, keyMap as keyMapSchema, type Manner, type Observer } from '../model/observer.ts';
 import { nextRevision } from '../model/revision.ts';
 import { editObserver, requireStudy } from './edits.ts';
 import type { Deps } from './ports.ts';
@@ -27,14 +27,15 @@ export async function addObserver(deps: Deps, study: string, name: string): Prom
 export function saveObserver(
   deps: Deps,
   observer: string,
-  changes: { readonly name?: string; readonly keyMap?: KeyMap | null },
+  changes: { readonly name?: string; readonly keyMap?: KeyMap | null; readonly manner?: Manner },
 ): Promise<Result<Observer>> {
   return editObserver(deps, observer, async (before) => {
     const name = await checkedName(deps, before.study, changes.name ?? before.name, before.id);
     if (!name.ok) return name;
     const keyMap = changes.keyMap === undefined ? before.keyMap : changes.keyMap;
     if (keyMap !== null && !keyMapSchema.safeParse(keyMap).success) return problem('task.keysOutOfRange');
-    return ok({ name: name.value, keyMap });
+    const manner = changes.manner ?? before.manner;
+    return ok({ name: name.value, keyMap, ...(manner === undefined ? {} : { manner }) });
   });
 }
 

@@ -17,6 +17,7 @@ interface Props {
 export function SoundCheck({ cues, heard, onHeard }: Props) {
   const { words, device } = useServices();
   const [output, setOutput] = useState('');
+  const [spoken, setSpoken] = useState<'not asked' | 'said' | 'no voice'>('not asked');
   const [lateMs, setLateMs] = useState<number | null>(null);
   const play = async () => {
     const tone = await device.playTestTone(cues);
@@ -52,6 +53,19 @@ export function SoundCheck({ cues, heard, onHeard }: Props) {
     >
       <p>{text}</p>
       {lateMs !== null && lateMs >= 80 && <p className="small">{words.before.soundLate({ ms: lateMs })}</p>}
+      {cues.headsUp !== undefined && (
+        <p className="small">
+          {words.before.voice({ state: spoken })}{' '}
+          <Button
+            look="quiet"
+            onClick={() =>
+              setSpoken(device.sayAloud(words.before.voiceSample, cues.volume) ? 'said' : 'no voice')
+            }
+          >
+            {words.before.voiceTry}
+          </Button>
+        </p>
+      )}
       {!device.tellsOutputChanges && <p className="small">{words.before.soundBlind}</p>}
     </CheckRow>
   );

@@ -10,8 +10,12 @@ interface Props {
   readonly onPanel: (panel: PanelName) => void;
 }
 
+interface RowProps extends Props {
+  readonly onCover: () => void;
+}
+
 /** The rare things, in one row: undo says what it would undo; silence stands at its end. */
-export function BottomRow({ onPanel }: Props) {
+export function BottomRow({ onPanel, onCover }: RowProps) {
   const live = useLive();
   const { room } = useCoreWords();
   return (
@@ -29,6 +33,12 @@ export function BottomRow({ onPanel }: Props) {
       </div>
       <Button className="rare rare-more" onClick={() => onPanel('more')}>
         {room.more}
+      </Button>
+      <Button className="rare rare-cover" onClick={onCover}>
+        <svg width="20" height="20" viewBox="0 0 20 20" aria-hidden="true">
+          <path className="rare-flag" d="M2 5H18V15H2ZM2 10H18" />
+        </svg>
+        <span className="rare-word">{room.cover}</span>
       </Button>
       <Silence />
     </fieldset>
@@ -94,6 +104,9 @@ function RareThings({ onPanel, onDone }: Props & { readonly onDone?: () => void 
       )}
       <Button className="rare" onClick={() => onPanel('note')}>
         {room.note}
+      </Button>
+      <Button className="rare" onClick={() => onPanel('manner')}>
+        {room.manner}
       </Button>
       <Button className="rare" onClick={() => onPanel('end')}>
         {room.end}

@@ -3,6 +3,7 @@ import { useCoreWords } from '../coreServices.ts';
 import type { EdgeTarget } from './codeEdges.ts';
 import { useFacts } from './RoomFacts.tsx';
 import { Target } from './Target.tsx';
+import { useManner } from './useManner.ts';
 import { useLive, useRoom } from './useRoom.ts';
 
 interface Props {
@@ -24,15 +25,28 @@ export function Edge({ side, targets, withChildBefore = false }: Props) {
   );
 }
 
-function OneTarget({ target }: { readonly target: EdgeTarget }) {
-  if (target.kind === 'code') return <CodeTarget target={target} />;
+interface OneProps {
+  readonly target: EdgeTarget;
+  /** It lies where nobody looks: how its answer is felt is said with it. */
+  readonly inZone?: boolean;
+}
+
+/** One target of a session, by what it says. */
+export function OneTarget({ target, inZone = false }: OneProps) {
+  if (target.kind === 'code') return <CodeTarget target={target} inZone={inZone} />;
   return target.kind === 'nothing' ? <NoneOfThese /> : <CannotSee />;
 }
 
-function CodeTarget({ target }: { readonly target: Extract<EdgeTarget, { kind: 'code' }> }) {
+interface CodeProps {
+  readonly target: Extract<EdgeTarget, { kind: 'code' }>;
+  readonly inZone: boolean;
+}
+
+function CodeTarget({ target, inZone }: CodeProps) {
   const live = useLive();
   const { room } = useCoreWords();
   const { method } = useFacts();
+  const { confirm } = useManner().manner;
   const { id, label } = target.code;
   const chosen = useRoom((s) => s.current?.codes?.includes(id) ?? false);
   return (
@@ -46,6 +60,7 @@ function CodeTarget({ target }: { readonly target: Extract<EdgeTarget, { kind: '
     >
       {label}
       {method === 'whole' && <span className="target-hint">{room.throughout}</span>}
+      {inZone && confirm && <span className="target-hint">{room.pulse({ place: target.position - 1 })}</span>}
       {method === 'duration' && chosen && <InForceFor />}
     </Target>
   );

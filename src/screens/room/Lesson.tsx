@@ -1,6 +1,10 @@
 import { type MouseEvent, type SyntheticEvent, useCallback, useState } from 'react';
 import { BeforeStart } from './BeforeStart.tsx';
 import { BottomRow } from './BottomRow.tsx';
+import { Cover } from './eyesUp/Cover.tsx';
+import { EyesUpTop } from './eyesUp/EyesUp.tsx';
+import { Recalled } from './eyesUp/Recalled.tsx';
+import { ZoneTargets } from './eyesUp/ZoneTargets.tsx';
 import { Flash } from './Flash.tsx';
 import { HoldLine } from './HoldLine.tsx';
 import { LessonPlan } from './LessonPlan.tsx';
@@ -11,9 +15,11 @@ import { type PanelName, RoomPanel } from './RoomPanel.tsx';
 import { Standstill } from './Standstill.tsx';
 import { Targets } from './Targets.tsx';
 import { TopRow } from './TopRow.tsx';
+import { useDimGlass } from './useDimGlass.ts';
 import { useKeyAct } from './useKeyAct.ts';
 import { useKeys } from './useKeys.ts';
 import { useLeaveGuard } from './useLeaveGuard.ts';
+import { useManner } from './useManner.ts';
 import { useRoom } from './useRoom.ts';
 import './room.css';
 import './targets.css';
@@ -41,7 +47,7 @@ const keepFocus = (event: MouseEvent): void => {
 };
 
 function OnTheGlass({ leaving }: { readonly leaving: number }) {
-  const { keys, keysChosen } = useFacts();
+  const { keys, keysChosen, zones } = useFacts();
   const [panel, setPanel] = useState<PanelName | null>(null);
   const [keysSeen, setKeysSeen] = useState(false);
   const close = useCallback(() => setPanel(null), []);
@@ -51,15 +57,46 @@ function OnTheGlass({ leaving }: { readonly leaving: number }) {
       phase === 'running' || phase === 'counting in' || (phase === 'between parts' && current !== null),
   );
   const still = useRoom(({ phase }) => phase !== 'running' && phase !== 'counting in');
+  const [covered, setCovered] = useState(false);
+  const { manner, change } = useManner();
   const act = useKeyAct(useCallback(() => setKeysSeen(true), []));
-  useKeys(keys, panel !== null, act);
+  const actOrCover = useCallback<typeof act>(
+    (action, at) => (action === 'cover' ? setCovered((before) => !before) : act(action, at)),
+    [act],
+  );
+  useKeys(keys, panel !== null && !covered, actOrCover);
+  const glass = {
+    'data-keys': keysChosen || keysSeen,
+    'data-hand': manner.hand,
+    onContextMenu: noMenu,
+    onMouseDown: keepFocus,
+  };
+  const dim = useDimGlass();
+  if (covered)
+    return (
+      <main className={`room room-covered ${dim}`} {...glass}>
+        <Cover zones={marking ? zones : null} onUncover={() => setCovered(false)} />
+        <Recalled />
+        <Flash />
+      </main>
+    );
+  const bottom = <BottomRow onPanel={setPanel} onCover={() => setCovered(true)} />;
+  if (manner.layout === 'eyes-up' && zones !== null && !still)
+    return (
+      <main className={`room room-eyes-up ${dim}`} {...glass}>
+        <EyesUpTop onLeave={() => change({ ...manner, layout: 'plan' })} />
+        <ZoneTargets zones={zones} />
+        <div className="eyes-up-over">
+          {panel !== null && <RoomPanel name={panel} onPanel={setPanel} onClose={close} />}
+          <HoldLine leaving={leaving} />
+        </div>
+        {bottom}
+        <Recalled />
+        <Flash />
+      </main>
+    );
   return (
-    <main
-      className={`room ${marking ? '' : 'room-still'}`}
-      data-keys={keysChosen || keysSeen}
-      onContextMenu={noMenu}
-      onMouseDown={keepFocus}
-    >
+    <main className={`room ${marking ? '' : 'room-still'}`} {...glass}>
       <TopRow />
       {marking && <Targets side="left" />}
       <div className="room-centre">
@@ -76,7 +113,8 @@ function OnTheGlass({ leaving }: { readonly leaving: number }) {
         <HoldLine leaving={leaving} />
       </div>
       {marking && <Targets side="right" />}
-      <BottomRow onPanel={setPanel} />
+      {bottom}
+      <Recalled />
       <Flash />
     </main>
   );

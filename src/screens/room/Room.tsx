@@ -4,6 +4,7 @@ import { say } from '../../words/say.ts';
 import { useCoreServices } from '../coreServices.ts';
 import { CountingFrom } from './Counting.tsx';
 import { Lesson } from './Lesson.tsx';
+import { MannerFrom } from './MannerFrom.tsx';
 import { RoomFactsFrom } from './RoomFacts.tsx';
 import { LiveContext } from './useRoom.ts';
 
@@ -46,9 +47,11 @@ export function Room({ session }: { readonly session: string }) {
   return (
     <LiveContext value={live}>
       <RoomFactsFrom header={live.snapshot().state.header}>
-        <CountingFrom>
-          <Lesson />
-        </CountingFrom>
+        <MannerFrom>
+          <CountingFrom>
+            <Lesson />
+          </CountingFrom>
+        </MannerFrom>
       </RoomFactsFrom>
     </LiveContext>
   );

@@ -1,13 +1,14 @@
 import { createContext, type ReactNode, useContext, useMemo } from 'react';
 import type { Code } from '../../model/codeSet.ts';
 import { defaultKeyMap } from '../../model/keyMap.ts';
-import type { KeyMap } from '../../model/observer.ts';
+import type { KeyMap, Manner } from '../../model/observer.ts';
 import type { Method } from '../../model/protocol.ts';
 import type { SessionHeader } from '../../model/session.ts';
 import { type Plan, planOf } from '../../recorder/grid.ts';
 import { useCoreServices } from '../coreServices.ts';
 import { type Unit, unitOf } from './amounts.ts';
 import { codeSigns, type SignKind } from './codeEdges.ts';
+import { eyesUpZones, type Zones } from './eyesUp/zones.ts';
 
 /** What stays the same through a session. */
 export interface RoomFacts {
@@ -30,6 +31,10 @@ export interface RoomFacts {
   readonly sweep: { readonly eachMs: number } | null;
   /** The one whose looks alternate with those at peers; null for other rotations. */
   readonly target: string | null;
+  /** Where the targets lie in eyes-up and under the cover; null where there are too many. */
+  readonly zones: Zones | null;
+  /** null where the observer has chosen nothing. */
+  readonly observersManner: Manner | null;
   readonly keys: KeyMap;
   /** The observer chose the keys, so they are shown from the start. */
   readonly keysChosen: boolean;
@@ -56,20 +61,24 @@ export function RoomFactsFrom({
   const observer = useStored((store) => store.observer(header.observer.id), [header.observer.id]);
   const study = useStored((store) => store.study(header.study), [header.study]);
   const chosen = (observer?.ok ? observer.value?.keyMap : null) ?? null;
+  const observersManner = (observer?.ok ? observer.value?.manner : null) ?? null;
   const lessonParts = (study?.ok ? study.value?.lessonParts : null) ?? null;
   const facts = useMemo(
     (): RoomFacts => ({
       ...factsOf(header),
+      observersManner,
       keys: chosen ?? defaultKeyMap(),
       keysChosen: chosen?.on === true,
       lessonParts: lessonParts ?? [],
     }),
-    [header, chosen, lessonParts],
+    [header, chosen, observersManner, lessonParts],
   );
   return <FactsContext value={facts}>{children}</FactsContext>;
 }
 
-function factsOf(header: SessionHeader): Omit<RoomFacts, 'keys' | 'keysChosen' | 'lessonParts'> {
+function factsOf(
+  header: SessionHeader,
+): Omit<RoomFacts, 'keys' | 'keysChosen' | 'observersManner' | 'lessonParts'> {
   const { schedule } = header;
   const protocol = schedule.kind === 'laid' ? schedule.protocol : null;
   const { codes } = schedule.kind === 'laid' ? schedule.protocol.codeSet : schedule.codeSet;
@@ -86,6 +95,7 @@ function factsOf(header: SessionHeader): Omit<RoomFacts, 'keys' | 'keysChosen' |
     latched,
     withNone: latched || method === 'duration',
     withBefore: inTurns,
+    zones: method === 'headcount' ? null : eyesUpZones(codes, latched || method === 'duration'),
     pseudonyms: new Map(
       [...(header.reserves ?? []), ...header.children].map((child) => [child.id, child.pseudonym]),
     ),

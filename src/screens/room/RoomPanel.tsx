@@ -1,10 +1,11 @@
 import { MorePanel } from './BottomRow.tsx';
 import { ChildPanel } from './ChildPanel.tsx';
 import { CorrectPanel } from './CorrectPanel.tsx';
+import { MannerPanel } from './MannerPanel.tsx';
 import { EndPanel, LessonPartPanel, NotePanel } from './panels.tsx';
 
 /** The panels of the room: each stands in the middle, while the targets at the edges stay live. */
-export type PanelName = 'note' | 'child' | 'correct' | 'part' | 'end' | 'more';
+export type PanelName = 'note' | 'child' | 'correct' | 'part' | 'manner' | 'end' | 'more';
 
 interface Props {
   readonly name: PanelName;
@@ -23,6 +24,8 @@ export function RoomPanel({ name, onPanel, onClose }: Props) {
       return <CorrectPanel onClose={onClose} />;
     case 'part':
       return <LessonPartPanel onClose={onClose} />;
+    case 'manner':
+      return <MannerPanel onClose={onClose} />;
     case 'end':
       return <EndPanel onClose={onClose} />;
     case 'more':

@@ -48,7 +48,7 @@ function Round() {
 }
 
 /** What is on the disk, of what was entered. */
-function KeptSign() {
+export function KeptSign() {
   const { room } = useCoreWords();
   const { kept, of } = useRoom((s) => ({ kept: s.kept.kept, of: s.kept.of }));
   return (

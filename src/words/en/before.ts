@@ -151,6 +151,14 @@ export const before = {
     'You did not hear it. Look at the silent switch, the volume and the plug; the screen cue goes on without sound.',
   soundLoud: 'The class could hear it. Plug the earpiece in, or silence the prompts: the screen cue goes on.',
   soundStuck: 'The tablet gave no sound. The screen cue goes on without it.',
+  voice: ({ state }: { state: 'not asked' | 'said' | 'no voice' }) =>
+    state === 'no voice'
+      ? 'No voice is on this tablet: a soft tone comes ahead of each look instead.'
+      : state === 'said'
+        ? 'A word is spoken ahead of each look, in both ears; the prompt itself stays a tone.'
+        : 'A word is to be spoken ahead of each look.',
+  voiceTry: 'Try the voice',
+  voiceSample: 'Otter 7',
   soundBlind:
     'This browser cannot tell when the earpiece is pulled out: keep the volume low and the silence button in mind.',
   soundLate: ({ ms }: { ms: number }, f: F) =>

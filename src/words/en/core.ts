@@ -5,6 +5,7 @@ import { plan } from './plan.ts';
 import { recording } from './recording.ts';
 import { room } from './room.ts';
 import { roomCorrections } from './roomCorrections.ts';
+import { roomLayout } from './roomLayout.ts';
 import { roomMethods } from './roomMethods.ts';
 
 /** What the recording screen says, and what is said everywhere: loaded before anything else, so it is kept small. */
@@ -13,5 +14,5 @@ export const core = {
   missing,
   problems: { ...keeping, ...recording },
   plan,
-  room: { ...room, ...roomMethods, ...roomCorrections },
+  room: { ...room, ...roomMethods, ...roomCorrections, ...roomLayout },
 };

@@ -102,6 +102,8 @@ export type Call = readonly [name: string, ...args: unknown[]];
 /** A session without clocks: it writes down what it is told and shows what it is given. */
 export class FakeLive implements LiveSession {
   readonly calls: Call[] = [];
+  /** How it was told to behave, latest last. */
+  readonly manners: Parameters<LiveSession['behave']>[0][] = [];
   begun: Result<{ readonly sound: boolean }> = ok({ sound: true });
   private readonly listeners = new Set<() => void>();
 
@@ -133,7 +135,7 @@ export class FakeLive implements LiveSession {
   swap = (pairs: readonly (readonly [number, number])[]) => this.told('swap', pairs);
   correct = (interval: number, to: Correction) => this.told('correct', interval, to);
   unusable = (...said: Parameters<LiveSession['unusable']>) => this.told('unusable', ...said);
-  behave = (...said: Parameters<LiveSession['behave']>) => this.told('behave', ...said);
+  behave = (manner: Parameters<LiveSession['behave']>[0]) => void this.manners.push(manner);
   childBefore = () => this.told('childBefore');
   undo = () => this.told('undo');
   childLeft = (child: string, reason: string) => this.told('childLeft', child, reason);

@@ -1,8 +1,10 @@
 import { useState } from 'react';
+import { usualManner } from '../../../model/manners.ts';
 import type { Observer } from '../../../model/observer.ts';
 import { saveObserver } from '../../../tasks/index.ts';
 import { Button } from '../../../ui/Button.tsx';
 import { TextField } from '../../../ui/Field.tsx';
+import { MannerFields } from '../../manner/MannerFields.tsx';
 import { useServices } from '../../services.ts';
 import { useDoing } from '../useDoing.tsx';
 import { KeyMapEditor } from './KeyMapEditor.tsx';
@@ -16,7 +18,7 @@ interface Props {
 export function ObserverRow({ observer, onRemove }: Props) {
   const { words } = useServices();
   const { study } = words;
-  const [open, setOpen] = useState<'name' | 'keys' | null>(null);
+  const [open, setOpen] = useState<'name' | 'keys' | 'manner' | null>(null);
   const { name } = observer;
   return (
     <li>
@@ -32,6 +34,13 @@ export function ObserverRow({ observer, onRemove }: Props) {
           >
             {open === 'keys' ? study.keysHide : study.keys}
           </Button>
+          <Button
+            aria-label={study.mannerOf({ name })}
+            aria-expanded={open === 'manner'}
+            onClick={() => setOpen(open === 'manner' ? null : 'manner')}
+          >
+            {open === 'manner' ? study.mannerHide : study.manner}
+          </Button>
           <Button look="quiet" aria-label={study.renameOf({ name })} onClick={() => setOpen('name')}>
             {study.rename}
           </Button>
@@ -39,9 +48,24 @@ export function ObserverRow({ observer, onRemove }: Props) {
             {words.common.remove}
           </Button>
           {open === 'keys' && <KeyMapEditor observer={observer} />}
+          {open === 'manner' && <MannerOf observer={observer} />}
         </>
       )}
     </li>
+  );
+}
+
+function MannerOf({ observer }: { readonly observer: Observer }) {
+  const { deps } = useServices();
+  const { run, notice } = useDoing();
+  return (
+    <div className="stack-tight grow">
+      <MannerFields
+        manner={observer.manner ?? usualManner}
+        onChange={(manner) => void run(saveObserver(deps, observer.id, { manner }))}
+      />
+      {notice}
+    </div>
   );
 }
 

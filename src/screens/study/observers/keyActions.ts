@@ -15,6 +15,7 @@ export const keyActions: readonly KeyAction[] = [
   'undo',
   'silence',
   'flag',
+  'cover',
   'one more',
   'one fewer',
   'same again',

@@ -9,6 +9,7 @@ const actionNames: Readonly<Record<string, string>> = {
   undo: 'undo',
   silence: 'silence the prompts',
   flag: 'flag',
+  cover: 'cover the glass',
   'one more': 'one more (headcount)',
   'one fewer': 'one fewer (headcount)',
   'same again': 'same as last time (headcount)',
@@ -43,6 +44,9 @@ export const observerWords = {
   keysHide: 'Close the keys',
   keysNote:
     'For a keyboard or a page-turner. They work only while a lesson is recorded, and never while you type.',
+  manner: 'Layout and hand',
+  mannerHide: 'Hide layout and hand',
+  mannerOf: ({ name }: { name: string }) => `Layout and hand of ${name}`,
   keysOn: 'Keys work in the room',
   keyAction: ({ action }: { action: string }) => actionNames[action] ?? action,
   keyCode: ({ n }: { n: number }, f: F) => `code ${f.whole(n)}`,

@@ -1,0 +1,31 @@
+import { useState } from 'react';
+import { say } from '../../words/say.ts';
+import { useCoreServices } from '../coreServices.ts';
+import { MannerFields } from '../manner/MannerFields.tsx';
+import { Panel } from './Panel.tsx';
+import { useFacts } from './RoomFacts.tsx';
+import { useManner } from './useManner.ts';
+
+/** Layout, hand and answers, changed in the room: at once, and kept for the observer. */
+export function MannerPanel({ onClose }: { readonly onClose: () => void }) {
+  const { words } = useCoreServices();
+  const { room, common } = words;
+  const { method, zones } = useFacts();
+  const { manner, change } = useManner();
+  const [said, setSaid] = useState('');
+  const noEyesUp = method === 'headcount' ? room.eyesUpNotCount : zones === null ? room.eyesUpNot : null;
+  return (
+    <Panel title={room.mannerTitle} closeLabel={common.close} onClose={onClose}>
+      <MannerFields
+        manner={manner}
+        noEyesUp={noEyesUp}
+        onChange={(next) =>
+          change(next, (kept) => setSaid(kept.ok ? room.mannerKept : say(words.problems, kept.problem)))
+        }
+      />
+      <p className="second small" role="status">
+        {said}
+      </p>
+    </Panel>
+  );
+}

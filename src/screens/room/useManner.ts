@@ -1,0 +1,20 @@
+import { createContext, useContext } from 'react';
+import type { Result } from '../../kernel/result.ts';
+import { usualManner } from '../../model/manners.ts';
+import type { Manner } from '../../model/observer.ts';
+
+interface MannerOfObserver {
+  readonly manner: Manner;
+  /** Changes it at once and keeps it for the observer; says how the keeping went. */
+  readonly change: (manner: Manner, kept?: (answer: Result<unknown>) => void) => void;
+}
+
+export const MannerContext = createContext<MannerOfObserver>({
+  manner: usualManner,
+  change: () => undefined,
+});
+
+/** How the observer of this session likes the room to be. */
+export function useManner(): MannerOfObserver {
+  return useContext(MannerContext);
+}
