@@ -55,8 +55,11 @@ export function CountEntry({
   };
   const onKeyDown = (event: KeyboardEvent<HTMLInputElement>, second: boolean) => {
     const { key } = event;
-    if (key === 'Enter' && !second && on !== '') fields.current?.querySelectorAll('input')[1]?.select();
-    else if (key === 'Enter' || key === 'ArrowDown') move(at + 1);
+    if (key === 'Enter' && !second && on !== '') {
+      const other = fields.current?.querySelectorAll('input')[1];
+      other?.focus();
+      other?.select();
+    } else if (key === 'Enter' || key === 'ArrowDown') move(at + 1);
     else if (key === 'ArrowUp') move(at - 1);
     else if (key === 'Backspace' && !second && on === '') empty();
     else if (key === 'z' && (event.ctrlKey || event.metaKey)) onUndo();

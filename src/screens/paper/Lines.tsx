@@ -47,7 +47,7 @@ export function Lines({ typing, intervals }: Props) {
     if (given !== undefined || answer !== undefined) typing.answer(line.number, given);
   };
   const mean = (means: PaperMeaning) => {
-    if (line === undefined) return;
+    if (line === undefined) return setProblem(words.problems['paper.pastEnd']({ last: intervals.length }));
     put(answerOf(protocol, means, answer));
     if (!severalCodes(protocol)) setAt(at + 1);
   };
@@ -75,20 +75,20 @@ export function Lines({ typing, intervals }: Props) {
             {answer === undefined ? paper.empty : answerText(words, protocol, answer)}
           </span>
         </p>
-        {line !== undefined &&
-          (headcount ? (
-            <CountEntry
-              {...entry}
-              key={line.number}
-              line={line.number}
-              answer={answer}
-              carried={presentBefore(intervals, answers, at)}
-              onAnswer={put}
-              draft={draft}
-            />
-          ) : (
-            <NumberEntry {...entry} line={line.number} draft={draft} numbers={numbers} onMean={mean} />
-          ))}
+        {!headcount && (
+          <NumberEntry {...entry} line={line?.number ?? null} draft={draft} numbers={numbers} onMean={mean} />
+        )}
+        {headcount && line !== undefined && (
+          <CountEntry
+            {...entry}
+            key={line.number}
+            line={line.number}
+            answer={answer}
+            carried={presentBefore(intervals, answers, at)}
+            onAnswer={put}
+            draft={draft}
+          />
+        )}
         <div className="row">
           {numbers.map(({ number, means }) => (
             <Button

@@ -8,7 +8,8 @@ import { useServices } from '../services.ts';
 
 interface Props {
   readonly draft: PaperDraft;
-  readonly line: number;
+  /** null past the last line. */
+  readonly line: number | null;
   readonly at: number;
   readonly numbers: readonly PaperNumber[];
   readonly onMean: (means: PaperMeaning) => void;

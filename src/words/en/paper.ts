@@ -230,6 +230,8 @@ export const paperProblems = {
   'paper.onOverPresent': (v: { interval: number; on: number; present: number }, f: F) =>
     `Line ${f.whole(v.interval)} has ${f.whole(v.on)} on-task of ${f.whole(v.present)} present: no more can be on-task than are there.`,
   'paper.noNumber': (v: { found: string }) => `${v.found} means nothing on this sheet.`,
+  'paper.pastEnd': (v: { last: number }, f: F) =>
+    `The schedule ends with line ${f.whole(v.last)}. Go back to the line that you mean.`,
   'paper.noOnset': (v: { found: string }) => `“${v.found}” is no time from the start. Give it as 3:20.`,
   'paper.onsetOutside': (v: { at: number; length: number }) =>
     `${clock(v.at)} is outside of the part, which lasts until ${clock(v.length)}.`,
