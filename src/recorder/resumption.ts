@@ -29,7 +29,8 @@ export function resumption(
   const ordered = inOrder(journal);
   const last = ordered.at(-1);
   if (last === undefined) return null;
-  const from = state.read > 1 ? Math.max(state.at, last.at) : last.at;
+  // While both observers wait for their second, session time is still below 0, and the journal has spoken of no later one.
+  const from = state.at > 0 ? Math.max(state.at, last.at) : last.at;
   if (isCovered(state, 'paused')) return { from, now: from };
   // An entry may be written down later than what it tells of (a busy page), never earlier: the smallest distance holds.
   const since = Math.max(
