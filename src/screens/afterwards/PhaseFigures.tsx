@@ -107,7 +107,7 @@ export function PhaseFigures({ phase, alone }: { readonly phase: PhaseDetails; r
         </section>
       )}
       {/* Of a duration the stretches are counted, which says nothing of how long they were. */}
-      {offTask.length > 1 && !continuous && (
+      {offTask.length > 1 && !continuous && row.method !== 'headcount' && (
         <section className="stack-tight">
           <h3>{words.afterwards.makeUp({ phase: null })}</h3>
           {off === 0 ? (

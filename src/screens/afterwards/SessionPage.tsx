@@ -14,6 +14,7 @@ import { LookCorrection } from './LookCorrection.tsx';
 import { NotesSheet } from './NotesSheet.tsx';
 import { PageFoot } from './PageFoot.tsx';
 import { PhaseFigures } from './PhaseFigures.tsx';
+import { Scans } from './Scans.tsx';
 import { SheetPicture } from './SheetPicture.tsx';
 import { Stretches } from './Stretches.tsx';
 import { Timing } from './Timing.tsx';
@@ -132,6 +133,7 @@ function Session({ session, answer }: { readonly session: StoredSession; readonl
       </div>
       <WarningLines warnings={details.warnings} continuous={continuous} />
       {continuous && <Stretches session={session} />}
+      {method === 'headcount' && <Scans session={session} />}
       {method !== 'headcount' && !continuous && (
         <Sheet title={words.afterwards.roundSheet}>
           <SheetPicture

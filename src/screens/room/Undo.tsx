@@ -5,6 +5,7 @@ import { CodeSign, Ring } from '../../ui/Sign.tsx';
 import { useCoreWords } from '../coreServices.ts';
 import { useFacts } from './RoomFacts.tsx';
 import { useLive, useRoom } from './useRoom.ts';
+import './undo.css';
 
 /** What undo would take back, with whose look it is. A duration record has stretches: its mark is the watched child's. */
 function lastDeed({ undo, intervals, current, state }: RoomSnapshot, continuous: boolean) {
@@ -53,7 +54,9 @@ export function Undo() {
           {sign}
           {what !== undefined && <span className="visually-hidden">{what.code.label}</span>}
           {undo.kind === 'missing' && <span className="visually-hidden">{room.cannotSee}</span>}
-          <span className="rare-who">{`${words} ${name}`.trim()}</span>
+          <span className={words !== '' && name !== '' ? 'rare-deed' : 'rare-who'}>
+            {`${words} ${name}`.trim()}
+          </span>
         </span>
       )}
     </Button>

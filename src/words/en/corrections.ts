@@ -48,6 +48,11 @@ export const corrections = {
   watchedIn: ({ phase }: { phase: string | null }) => `watched (min:s)${phase === null ? '' : ` ${phase}`}`,
   timeMissingIn: ({ phase }: { phase: string | null }) =>
     `missing (min:s)${phase === null ? '' : ` ${phase}`}`,
+  scans: 'Scan by scan',
+  scan: 'scan',
+  scanPhase: 'phase',
+  scanOn: 'on-task',
+  scanPresent: 'present',
   stretches: 'From touch to touch',
   stretchFrom: 'from',
   stretchTo: 'to',

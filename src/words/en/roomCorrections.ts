@@ -34,16 +34,16 @@ export const roomCorrections = {
   heldNothing: 'nothing yet',
   heldMissing: ({ reason }: { reason: string }) => `missing: ${reason}`,
   onTask: ({ on }: { on: number }, f: F) => `${f.whole(on)} on-task`,
-  onTaskFewer: 'One fewer on-task',
-  onTaskMore: 'One more on-task',
+  onTaskFewer: 'fewer on-task',
+  onTaskMore: 'more on-task',
 
   // two children
   swapFirst: 'Who was watched by mistake?',
   swapSecond: ({ child }: { child: string }) => `${child}, taken for whom?`,
   swapTitle: ({ one, other }: { one: string; other: string }) => `${one} and ${other}`,
   swapOver: ({ n }: { n: number }, f: F) => `Over the last ${looks(n, false, f)}`,
-  swapFewer: 'Fewer looks',
-  swapMore: 'More looks',
+  swapFewer: 'fewer looks',
+  swapMore: 'more looks',
   swapNothing: 'In these looks they have no turns to change. Take more looks.',
   swapPair: (
     {

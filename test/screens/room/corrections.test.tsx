@@ -91,7 +91,7 @@ describe('one of the last looks', () => {
     room.touch(/^all on-task/);
     await room.until(31);
     fireEvent.click(button('correct …'));
-    inPanel('one of the last scans …', /^1/, 'One fewer on-task', 'One more present');
+    inPanel('one of the last scans …', /^1/, 'fewer on-task', 'more present');
     panel().getByText('3 of 3 → 2 of 4');
     inPanel('Correct it');
     expect(room.lesson.session.snapshot().intervals[0]?.counts).toEqual({ on: 2, present: 4 });
@@ -104,10 +104,10 @@ describe('two children taken for each other', () => {
     fireEvent.click(button('correct …'));
     inPanel('two children taken for each other …', 'Otter-01', 'Otter-02');
     panel().getByText('Otter-01, look 1 → off-task; Otter-02, look 2 → on-task');
-    inPanel('Fewer looks');
+    inPanel('fewer looks');
     panel().getByText(/no turns to change/);
     expect((button('Swap 0 pairs') as HTMLButtonElement).disabled).toBe(true);
-    inPanel('More looks', 'Swap 1 pair');
+    inPanel('more looks', 'Swap 1 pair');
     expect(outcomes(room).slice(0, 3)).toEqual(['off', 'on', 'open']);
     fireEvent.click(button(/^undo\s*swap$/));
     expect(outcomes(room).slice(0, 3)).toEqual(['on', 'off', 'open']);
