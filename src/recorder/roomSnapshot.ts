@@ -108,7 +108,7 @@ export interface RoomSnapshot {
   readonly intervals: readonly IntervalRecord[];
   /** The looks of the last round whose cues have come, oldest first: what may be corrected at once. */
   readonly lastRound: readonly IntervalRecord[];
-  /** Headcount: children present, as the last count said, or as many as are expected and not away. */
+  /** Headcount: children present, as the last count said, or as many as are expected, less those who left since. */
   readonly present: number;
   /** Milliseconds until the second at which both observers agreed to begin; null when none is awaited. */
   readonly startsIn: number | null;

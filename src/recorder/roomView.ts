@@ -6,6 +6,7 @@ import { sessionMs } from '../kernel/units.ts';
 import type { SessionHeader } from '../model/session.ts';
 import type { ScheduledInterval } from '../schedule/layOut.ts';
 import { type GridCue, type Plan, timedIntervals } from './grid.ts';
+import { presentNow } from './presentNow.ts';
 import type { RoomPhase, RoomSnapshot, UpcomingLook } from './roomSnapshot.ts';
 import { countInMs, type Standing } from './standing.ts';
 import { undoable } from './undoable.ts';
@@ -42,6 +43,7 @@ export class RoomView {
   private basis: Pick<JournalState, 'origins' | 'closed'> | null = null;
 
   private readonly continuous: boolean;
+  private readonly counting: boolean;
 
   constructor(
     private readonly header: SessionHeader,
@@ -49,6 +51,7 @@ export class RoomView {
   ) {
     const { schedule } = header;
     this.continuous = schedule.kind === 'laid' && schedule.protocol.method === 'duration';
+    this.counting = schedule.kind === 'laid' && schedule.protocol.method === 'headcount';
   }
 
   /** The interval whose cue came last, while it may still be marked. */
@@ -107,7 +110,7 @@ export class RoomView {
       armedBefore: input.armedBefore,
       intervals,
       lastRound: this.continuous ? [] : this.lastRound(intervals, part),
-      present: this.present(state, away),
+      present: this.counting ? presentNow(state) : this.header.children.length,
       part,
       partPhase: this.plan.parts[part]?.phase ?? null,
       nextPart: next === null ? null : { part: next, phase: this.plan.parts[next]?.phase ?? null },
@@ -172,14 +175,6 @@ export class RoomView {
     return intervals
       .filter((line) => line.part === part && line.status !== 'waiting')
       .slice(-Math.min(mostToCorrect, Math.max(fewestToCorrect, length)));
-  }
-
-  private present(state: JournalState, away: ReadonlyMap<string, AwayReason>): number {
-    const last = state.entries.findLast(
-      (entry) => (entry.kind === 'marked' || entry.kind === 'corrected') && entry.counts !== undefined,
-    );
-    if (last !== undefined && 'counts' in last && last.counts !== undefined) return last.counts.present;
-    return this.header.children.filter(({ id }) => !away.has(id)).length;
   }
 
   private away(state: JournalState): ReadonlyMap<string, AwayReason> {

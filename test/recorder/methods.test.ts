@@ -86,6 +86,25 @@ describe('headcount', () => {
     ]);
   });
 
+  it('carries the number present along: who leaves is one fewer, and old scans that are corrected change nothing', async () => {
+    const lesson = await lessonOf({ ...scans, partLength: { kind: 'minutes', minutes: 5 } });
+    const present = () => lesson.session.snapshot().present;
+    await lesson.until(10_000);
+    lesson.session.childLeft('c2', 'left the room');
+    expect(present()).toBe(2);
+    await lesson.until(61_000);
+    count(lesson, 2, 20); // the others of the class are there, too
+    await lesson.until(70_000);
+    lesson.session.childReturned('c2');
+    expect(present()).toBe(21);
+    lesson.session.undo();
+    expect(present()).toBe(20);
+    await lesson.until(121_000);
+    count(lesson, 2, 19);
+    lesson.session.correct(1, { counts: { on: 5, present: 22 } });
+    expect(present()).toBe(19);
+  });
+
   it('needs no drawn children', async () => {
     const lesson = await lessonOf(scans, ['before'], { children: [] });
     await lesson.until(61_000);
