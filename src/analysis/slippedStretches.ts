@@ -28,7 +28,7 @@ const mostStretches = 4;
 /** How much more of the shifted stretch must agree than of the stretch as it stands (0–1). */
 const clearlyBetter = 0.15;
 /** See `neededGain`. */
-const beyondChance = 4.7;
+const beyondChance = 4.1;
 const forLasting = 13;
 
 /**

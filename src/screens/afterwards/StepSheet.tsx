@@ -34,7 +34,13 @@ export function StepSheet({ pairs }: { readonly pairs: readonly PairDetails[] })
           </ul>
         )}
         {said.todo !== null && <p>{said.todo}</p>}
-        {said.figures.length > 0 && <p className="second small">{said.figures.join(' ')}</p>}
+        {said.figures.length > 0 && (
+          <ul className="second small">
+            {said.figures.map((line) => (
+              <li key={line}>{line}</li>
+            ))}
+          </ul>
+        )}
       </div>
     </Sheet>
   );

@@ -92,7 +92,9 @@ export function useStepWords(pairs: readonly PairDetails[]): StepWords | null {
 
   function figures(): string[] {
     const lines = pairs.flatMap(({ step: { apart }, row: { phase: own } }) =>
-      apart === null ? [] : [words.stepFigures({ ...apart, phase: pairs.length === 1 ? null : own })],
+      apart === null
+        ? []
+        : [words.stepFigures({ ...apart, first, second, phase: pairs.length === 1 ? null : own })],
     );
     const course = step.apart?.course ?? [];
     const [begin, end] = [course[0]?.median ?? 0, course.at(-1)?.median ?? 0];

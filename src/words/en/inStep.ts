@@ -127,10 +127,20 @@ export const inStepWords = {
       largest,
       by,
       phase,
-    }: { cues: number; median: number; largest: number; by: 'cues' | 'starts'; phase: string | null },
+      first,
+      second,
+    }: {
+      cues: number;
+      median: number;
+      largest: number;
+      by: 'cues' | 'starts';
+      phase: string | null;
+      first: string;
+      second: string;
+    },
     f: F,
   ) =>
-    `${phase === null ? '' : `${phase}: `}${f.whole(cues)} ${by === 'cues' ? f.plural(cues, { one: 'prompt', other: 'prompts' }) : f.plural(cues, { one: 'start', other: 'starts' })} compared, median ${f.fixed(median, 1)} s, farthest ${f.fixed(largest, 1)} s (second observer less first).`,
+    `${phase === null ? '' : `${phase}: `}${f.whole(cues)} ${by === 'cues' ? f.plural(cues, { one: 'prompt', other: 'prompts' }) : f.plural(cues, { one: 'start', other: 'starts' })} compared, median ${f.fixed(median, 1)} s, farthest ${f.fixed(largest, 1)} s (${second} less ${first}).`,
   stepCourse: ({ first, last }: { first: number; last: number }, f: F) =>
     `It went from ${f.fixed(first, 1)} s in the first five minutes to ${f.fixed(last, 1)} s in the last.`,
   stepNudges: ({ nudges }: { nudges: readonly { observer: string; ms: number }[] }, f: F) =>

@@ -29,7 +29,7 @@ test('in step', async () => {
   const sheet = await verdict('In step.', { looks: seen }, { looks: seen, lag: () => -120 });
   expect(text(sheet)).toContain('By the tablets’ clocks their prompts came 0.1 s apart.');
   expect(text(sheet)).toContain('nobody seems to have lost the place');
-  expect(text(sheet)).toContain('40 prompts compared, median −0.1 s, farthest −0.1 s');
+  expect(text(sheet)).toContain('40 prompts compared, median −0.1 s, farthest −0.1 s (Quill less Marsh).');
   // Nothing to do, so nothing is asked for.
   expect(within(sheet).queryByText(/tick check/)).toBeNull();
 });
