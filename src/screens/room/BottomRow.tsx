@@ -1,8 +1,8 @@
 import { Button } from '../../ui/Button.tsx';
 import { useCoreWords } from '../coreServices.ts';
 import { Panel } from './Panel.tsx';
+import type { PanelName } from './panelName.ts';
 import { useFacts } from './RoomFacts.tsx';
-import type { PanelName } from './RoomPanel.tsx';
 import { Undo } from './Undo.tsx';
 import { useLive, useRoom } from './useRoom.ts';
 

@@ -2,10 +2,10 @@ import { MorePanel } from './BottomRow.tsx';
 import { ChildPanel } from './ChildPanel.tsx';
 import { CorrectPanel } from './CorrectPanel.tsx';
 import { MannerPanel } from './MannerPanel.tsx';
+import type { PanelName } from './panelName.ts';
 import { EndPanel, LessonPartPanel, NotePanel } from './panels.tsx';
 
-/** The panels of the room: each stands in the middle, while the targets at the edges stay live. */
-export type PanelName = 'note' | 'child' | 'correct' | 'part' | 'manner' | 'end' | 'more';
+export type { PanelName };
 
 interface Props {
   readonly name: PanelName;
