@@ -2,6 +2,7 @@ import { audio } from '../devices/audio.ts';
 import { battery } from '../devices/battery.ts';
 import { disk } from '../devices/disk.ts';
 import { tellsOutputChanges } from '../devices/outputChanges.ts';
+import { pageClock } from '../devices/pageClock.ts';
 import { recordingLock } from '../devices/recordingLock.ts';
 import { share } from '../devices/share.ts';
 import { speech } from '../devices/speech.ts';
@@ -11,6 +12,7 @@ import { wakeLock } from '../devices/wakeLock.ts';
 import { wallClock } from '../devices/wallClock.ts';
 import { toWallTime } from '../kernel/wallTime.ts';
 import { cuePattern } from '../recorder/cuePatterns.ts';
+import { TickCheck } from '../recorder/tickCheck.ts';
 import type { Device } from '../screens/services.ts';
 
 /** What screens ask of the tablet, from the adapters. */
@@ -47,6 +49,8 @@ export function device(): Device {
     openCamera: async (shown) => (await import('../devices/camera.ts')).openCamera(shown),
     pixelsOf: async (picture, edge) => (await import('../devices/pixelsOf.ts')).pixelsOf(picture, edge),
     copyText: async (text) => (await import('../devices/copyText.ts')).copyText(text),
+    tickCheck: (nudgeMs) =>
+      new TickCheck({ audio: audio(), page: pageClock, wall: wallClock, timer }, nudgeMs),
     wakeIn: timer.wakeIn,
   };
 }

@@ -6,6 +6,10 @@ import { say } from '../../words/say.ts';
 import { useCoreServices } from '../coreServices.ts';
 import { partLengths } from './amounts.ts';
 import { useFacts } from './RoomFacts.tsx';
+import { secondOfDay } from './together/agreedSecond.ts';
+import { StartTogether } from './together/StartTogether.tsx';
+import { TickCheckPage } from './together/TickCheckPage.tsx';
+import { useTogether } from './together/useTogether.ts';
 import { useLive, useRoom } from './useRoom.ts';
 
 /** The page of the one tap that begins (or goes on with) a session; the tap also unlocks the sound. */
@@ -25,16 +29,28 @@ export function BeforeStart() {
   }));
   const { schedule } = header;
   const name = s.child === null ? undefined : pseudonyms.get(s.child);
+  const together = useTogether(header.plannedStart);
+  const shared = header.role !== null;
+  const settling = shared && !s.resuming;
+  const bySecond = settling && together.by === 'second';
   const begin = async (): Promise<void> => {
     setStarting(true);
     setProblem(null);
-    const begun = await live.begin();
+    const begun = await live.begin(settling ? together.how : {});
     if (begun.ok) return;
     setProblem(say(problems, begun.problem));
     setStarting(false);
   };
-  const shared = header.role !== null;
   const minutes = Math.round(partLengths(plan).reduce((sum, ms) => sum + ms, 0) / 60_000);
+  if (settling && together.checking && schedule.kind === 'laid')
+    return (
+      <TickCheckPage
+        nudgeMs={together.nudgeMs}
+        volume={schedule.protocol.cues.volume}
+        onKeep={together.keep}
+        onLeave={together.leave}
+      />
+    );
   return (
     <main className="room-page">
       <p className="second">
@@ -45,25 +61,40 @@ export function BeforeStart() {
         })}
       </p>
       <h1 tabIndex={-1}>
-        {s.resuming ? room.readyTitleResuming : shared ? room.readyTitleShared : room.readyTitle}
+        {s.resuming
+          ? room.readyTitleResuming
+          : bySecond
+            ? room.readyTitleSecond
+            : shared
+              ? room.readyTitleShared
+              : room.readyTitle}
       </h1>
       <p>
         {s.resuming
           ? unit === 'time'
             ? room.readyResumingTime
             : room.readyResuming
-          : shared
-            ? room.readyShared
-            : room.readyAlone}
+          : bySecond
+            ? room.readySecond
+            : shared
+              ? room.readyShared
+              : room.readyAlone}
       </p>
       <p className="second">
         {name !== undefined && !s.resuming && `${room.readyFirst({ child: name })} · `}
         {room.readyAmount({ unit, n: s.looks, minutes })}
         {s.silent && ` · ${room.readySilent}`}
       </p>
+      {settling && <StartTogether together={together} />}
       {problem !== null && <Notice kind="hold">{problem}</Notice>}
       <Button look="main" className="start" disabled={starting} onClick={begin}>
-        {starting ? room.starting : s.resuming ? room.goOn : room.start}
+        {starting
+          ? room.starting
+          : s.resuming
+            ? room.goOn
+            : bySecond
+              ? room.startAt({ time: secondOfDay(together.at, together.now) })
+              : room.start}
       </Button>
       <div>
         <Button look="quiet" disabled={starting} onClick={() => go('/room')}>

@@ -7,6 +7,7 @@ import { room } from './room.ts';
 import { roomCorrections } from './roomCorrections.ts';
 import { roomLayout } from './roomLayout.ts';
 import { roomMethods } from './roomMethods.ts';
+import { startTogether } from './startTogether.ts';
 
 /** What the recording screen says, and what is said everywhere: loaded before anything else, so it is kept small. */
 export const core = {
@@ -14,5 +15,5 @@ export const core = {
   missing,
   problems: { ...keeping, ...recording },
   plan,
-  room: { ...room, ...roomMethods, ...roomCorrections, ...roomLayout },
+  room: { ...room, ...roomMethods, ...roomCorrections, ...roomLayout, ...startTogether },
 };

@@ -2,7 +2,7 @@ import { problem } from '../../../src/kernel/result.ts';
 import type { LiveSession } from '../../../src/recorder/liveSession.ts';
 import type { RoomSnapshot } from '../../../src/recorder/roomSnapshot.ts';
 import { Room } from '../../../src/screens/room/Room.tsx';
-import { type RecorderDesk, ServicesContext } from '../../../src/screens/services.ts';
+import { type RecorderDesk, type Services, ServicesContext } from '../../../src/screens/services.ts';
 import { fakeServices, renderScreen } from '../support/renderScreen.tsx';
 import { FakeLive } from './fakeLive.ts';
 
@@ -26,10 +26,10 @@ export function deskWith(live: LiveSession, id = 'session-1'): RecorderDesk {
   };
 }
 
-export function renderRoom(snapshot: RoomSnapshot) {
+export function renderRoom(snapshot: RoomSnapshot, changes: Partial<Services> = {}) {
   const live = new FakeLive(snapshot);
   const recorder = deskWith(live);
-  const services = fakeServices({ recorder });
+  const services = fakeServices({ recorder, ...changes });
   // The recording screen has the core's words only.
   const room = (
     <ServicesContext value={null}>

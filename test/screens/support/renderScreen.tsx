@@ -32,6 +32,9 @@ export function fakeDevice(changes: Partial<Device> = {}): Device {
     openCamera: async () => 'missing',
     pixelsOf: async () => null,
     copyText: async () => true,
+    tickCheck: () => {
+      throw new Error('no tick check in this test');
+    },
     wakeIn: () => () => {},
     ...changes,
   };
