@@ -54,7 +54,8 @@ export {
 } from './sessionDetails.ts';
 export { type Counting, type Look, recordsOf, type SessionRecord, sessionRecords } from './sessionRecord.ts';
 export type { Share } from './tally.ts';
-export type { TimingFacts, TimingGap } from './timingFacts.ts';
+export type { TimingFacts } from './timingFacts.ts';
+export type { TimingGap } from './timingGaps.ts';
 export type { TimingReasonCode, TimingVerdict } from './timingVerdict.ts';
 export { type Visit, visits } from './visits.ts';
 export { limits, type Warning, type WarningCode } from './warning.ts';

@@ -1,20 +1,8 @@
-import type { GapCause } from '../journal/entry.ts';
-import { shiftedWall } from '../kernel/wallTime.ts';
 import { medianOfSorted } from './medianOfSorted.ts';
 import { type ResponseTimes, responseTimes } from './responseTimes.ts';
 import type { Look, SessionRecord } from './sessionRecord.ts';
+import { type TimingGap, timingGaps } from './timingGaps.ts';
 import { type TimingVerdict, timingVerdict } from './timingVerdict.ts';
-
-/** A stretch in which the tablet did not run as it should. */
-export interface TimingGap {
-  /** Session ms; equal where no prompt was lost in it. */
-  readonly from: number;
-  readonly to: number;
-  /** The tablet's clock when it began. */
-  readonly wall: string;
-  readonly cause: GapCause;
-  readonly estimated: boolean;
-}
 
 /** How well the cues kept their schedule, and how soon the observer answered. Milliseconds. */
 export interface TimingFacts {
@@ -49,11 +37,7 @@ export function timingFacts(record: SessionRecord, looks: readonly Look[]): Timi
   const deviations = cues
     .flatMap(({ planned, delivered }) => (delivered === null ? [] : Math.abs(delivered - planned)))
     .sort((a, b) => a - b);
-  const gaps = state.entries.flatMap((entry): TimingGap[] => {
-    if (entry.kind !== 'gap') return [];
-    const { from, to, cause, estimated, at, wall } = entry;
-    return [{ from, to, wall: shiftedWall(wall, from - at), cause, estimated }];
-  });
+  const gaps = timingGaps(state);
   return {
     cues: cues.length,
     bySound: cues.filter(({ by }) => by.includes('sound')).length,

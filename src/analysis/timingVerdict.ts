@@ -1,6 +1,6 @@
 import type { Problem } from '../kernel/result.ts';
 import type { SessionRecord } from './sessionRecord.ts';
-import type { TimingGap } from './timingFacts.ts';
+import type { TimingGap } from './timingGaps.ts';
 
 export type TimingReasonCode =
   | 'timingLost'
