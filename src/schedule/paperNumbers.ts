@@ -44,11 +44,11 @@ export function paperNumbers(protocol: Pick<Protocol, 'method' | 'codeSet'>): Pa
   return [
     ...before.map((means, k) => ({ number: k + 1, means })),
     { number: 0, means: { kind: 'missing', reason: 'out of view' } },
-    ...paperReasons.map(
-      (reason, k): PaperNumber => ({
-        number: first + k,
-        means: { kind: 'missing', reason },
-      }),
+    // A child who is away keeps nobody from counting the others.
+    ...paperReasons.flatMap((reason, k): PaperNumber[] =>
+      protocol.method === 'headcount' && k < 3
+        ? []
+        : [{ number: first + k, means: { kind: 'missing', reason } }],
     ),
   ];
 }

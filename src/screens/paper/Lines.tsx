@@ -193,7 +193,7 @@ function List({ intervals, answers, at, protocol, childOf, onGo }: ListProps) {
     const list = here.current;
     const current = list?.children[at];
     if (!(list instanceof HTMLElement) || !(current instanceof HTMLElement)) return;
-    list.scrollTop = current.offsetTop - list.offsetTop - list.clientHeight / 2;
+    list.scrollTop = current.offsetTop - (list.clientHeight - current.offsetHeight) / 2;
   }, [at]);
   return (
     <ol className="typing-list" ref={here}>
@@ -205,7 +205,7 @@ function List({ intervals, answers, at, protocol, childOf, onGo }: ListProps) {
             k={k}
             number={line.number}
             time={words.paper.clock({ ms: line.cueMs })}
-            child={childOf(line)}
+            child={line.child === null ? '' : childOf(line)}
             text={answer === undefined ? '' : answerText(words, protocol, answer)}
             current={k === at}
             onLine={onLine}

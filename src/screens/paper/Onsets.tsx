@@ -80,7 +80,9 @@ export function Onsets({ typing, intervals }: Props) {
           value={number}
           onChange={(event) => setNumber(event.target.value)}
           onKeyDown={(event) => {
-            if (event.key === 'Enter') form.current?.requestSubmit();
+            if (event.key !== 'Enter') return;
+            event.preventDefault();
+            form.current?.requestSubmit();
           }}
         >
           <option value="">{paper.onsetChoose}</option>
