@@ -34,15 +34,14 @@ function TimeLeft() {
 }
 
 function Round() {
-  const words = useCoreWords();
-  const { unit } = useFacts();
+  const { room } = useCoreWords();
+  const { unit, sweep } = useFacts();
   const { round, rounds } = useRoom((s) => ({ round: s.round, rounds: s.rounds }));
+  const said = unit === 'scan' ? room.scanOf : sweep === null ? room.round : room.sweepOf;
+  // A duration record has no rounds.
   return (
     <p className="room-round">
-      {round !== null &&
-        rounds !== null &&
-        unit !== 'time' &&
-        (unit === 'scan' ? words.room.scanOf({ round, rounds }) : words.room.round({ round, rounds }))}
+      {round !== null && rounds !== null && unit !== 'time' && said({ round, rounds })}
     </p>
   );
 }

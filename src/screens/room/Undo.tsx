@@ -46,7 +46,7 @@ export function Undo() {
       <svg width="18" height="18" viewBox="0 0 18 18" aria-hidden="true">
         <path className="rare-flag" d="M7 2L2 7L7 12M2 7H11A5 5 0 0 1 11 17H8" />
       </svg>
-      {room.undo}
+      <span className="undo-word">{room.undo}</span>
       {undo.kind === null ? (
         <span className="visually-hidden">{room.undoNothing}</span>
       ) : (

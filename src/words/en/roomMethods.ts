@@ -89,6 +89,8 @@ export const roomMethods = {
   firstScan: ({ n }: { n: number }, f: F) => `${f.whole(n)} present`,
   scanOf: ({ round, rounds }: { round: number; rounds: number }, f: F) =>
     `scan ${f.whole(round)} of ${f.whole(rounds)}`,
+  sweepOf: ({ round, rounds }: { round: number; rounds: number }, f: F) =>
+    `sweep ${f.whole(round)} of ${f.whole(rounds)}`,
   countSaid: ({ on, present }: { on: number; present: number }, f: F) =>
     `${f.whole(on)} of ${f.whole(present)}`,
 
