@@ -13,7 +13,6 @@ export const roomCorrections = {
   correctScan: 'one of the last scans …',
   correctSwap: 'two children taken for each other …',
   correctStretch: 'a stretch is of no use …',
-  correctBack: 'Back',
   correctNothing: 'No look has been made yet.',
   correctNotTime:
     'What is in force is changed by touching it; an onset is taken back by undo. A stretch can be said to be of no use.',

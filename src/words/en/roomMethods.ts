@@ -83,10 +83,8 @@ export const roomMethods = {
   nobodyOnTask: 'nobody on-task',
   becomes: ({ on }: { on: number }, f: F) => `→ ${f.whole(on)}`,
   noLastTime: 'no scan before',
-  noScan: 'cannot see',
   noScanHint: 'no scan possible',
   planCount: 'Seating plan: touch a child who is on-task',
-  firstScan: ({ n }: { n: number }, f: F) => `${f.whole(n)} present`,
   scanOf: ({ round, rounds }: { round: number; rounds: number }, f: F) =>
     `scan ${f.whole(round)} of ${f.whole(rounds)}`,
   sweepOf: ({ round, rounds }: { round: number; rounds: number }, f: F) =>
