@@ -76,7 +76,9 @@ export async function findSheet(deps: Deps, study: string, typed: string): Promi
 export async function beginPaper(deps: Deps, plan: VisitPlan): Promise<Result<PaperDraft>> {
   const sessions = await deps.store.listSessions(plan.study.id);
   if (!sessions.ok) return sessions;
-  const beside = sessions.value.filter(({ visit, practice }) => visit === plan.visit && !practice);
+  const beside = sessions.value.filter(
+    ({ visit, practice, familiarisation }) => visit === plan.visit && !practice && familiarisation !== true,
+  );
   const first = beside.find(({ date }) => date !== null);
   const draft: PaperDraft = {
     session: newId(deps.random),
@@ -143,7 +145,10 @@ export async function keepPaperSession(deps: Deps, draft: PaperDraft): Promise<R
   };
   if (!sessionHeader.safeParse(header).success) return problem('task.visitOutOfRange');
   const created = await store.createSession(header);
-  if (!created.ok) return created;
+  if (!created.ok)
+    return (await isEmptyShell(deps, created.problem.code, header.id))
+      ? keepPaperSession(deps, { ...draft, session: newId(deps.random), writer: newId(deps.random) })
+      : created;
   const appended = await store.appendEntries(header.id, entriesOf(deps, draft, journal.value));
   if (!appended.ok) return appended;
   const packed = await store.pack(header.id);
@@ -161,4 +166,11 @@ function entriesOf(deps: Deps, { session, writer }: PaperDraft, { start, said }:
     const wall = wallIn(epochMs(start + at), deps.timeZone, fallback);
     return { session, writer, seq, at: at as SessionMs, wall, ...body } as KnownEntry;
   });
+}
+
+/** True where an earlier try kept the header and no entry, and the sheet's head was changed since: it takes another id. */
+async function isEmptyShell({ store }: Deps, code: string, session: string): Promise<boolean> {
+  if (code !== 'store.sessionExists') return false;
+  const found = await store.session(session);
+  return found.ok && found.value?.entries === 0;
 }

@@ -362,6 +362,28 @@ describe('The draft and the schedule of a sheet', () => {
     expect(given(await on.deps.store.settings())).toMatchObject({ paper: null, prepared: null });
   });
 
+  it('can be kept after all when the disk refused the first time, also with another head', async () => {
+    const on = await bench();
+    const made = await school(on);
+    const { store } = on.deps;
+    const begun = given(await beginPaper(on.deps, planOf(made)));
+    const draft = { ...begun, ...head, observer: made.observer };
+    const append = store.appendEntries;
+    store.appendEntries = async () => ({ ok: false, problem: { code: 'store.full', values: {} } });
+    expect(codeOf(await keepPaperSession(on.deps, draft))).toBe('store.full');
+    store.appendEntries = append;
+    const kept = given(await keepPaperSession(on.deps, { ...draft, role: 'second' }));
+    expect(kept.id).not.toBe(begun.session);
+    expect(sessionDetails(await stored(on, kept.id)).scored).toBe(9);
+    // The same draft once more, as after a refusal at the very end: nothing is doubled.
+    const whole = await stored(
+      on,
+      given(await keepPaperSession(on.deps, { ...draft, session: 'session-9' })).id,
+    );
+    given(await keepPaperSession(on.deps, { ...draft, session: 'session-9' }));
+    expect(await stored(on, 'session-9')).toEqual(whole);
+  });
+
   it('finds the schedule by its label: printed, or recorded; the second record is meant as second', async () => {
     const on = await bench();
     const made = await school(on);

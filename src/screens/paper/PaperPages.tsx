@@ -15,6 +15,7 @@ import { SheetHead, SheetHeadAgain } from './SheetHead.tsx';
 import { SheetRounds } from './SheetRounds.tsx';
 import { SheetRows } from './SheetRows.tsx';
 import './paperSheet.css';
+import './paperPrint.css';
 
 interface Props {
   readonly plan: VisitPlan;
