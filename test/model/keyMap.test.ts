@@ -19,6 +19,7 @@ describe('the keys to begin with', () => {
         'undo',
         'silence',
         'flag',
+        'cover',
         'one more',
         'one fewer',
         'same again',

@@ -4,6 +4,7 @@ import { Panel } from './Panel.tsx';
 import type { PanelName } from './panelName.ts';
 import { useFacts } from './RoomFacts.tsx';
 import { Undo } from './Undo.tsx';
+import { useEyesUp } from './useManner.ts';
 import { useLive, useRoom } from './useRoom.ts';
 
 interface Props {
@@ -16,31 +17,29 @@ interface RowProps extends Props {
 
 /** The rare things, in one row: undo says what it would undo; silence stands at its end. */
 export function BottomRow({ onPanel, onCover }: RowProps) {
-  const live = useLive();
   const { room } = useCoreWords();
   return (
     <fieldset className="room-bottom">
       <legend className="visually-hidden">{room.rare}</legend>
-      <Undo />
-      <Button className="rare" onClick={() => live.flag()}>
-        <svg width="16" height="20" viewBox="0 0 16 20" aria-hidden="true">
-          <path className="rare-flag" d="M2 19V2H13L10 6L13 10H2" />
-        </svg>
-        <span className="rare-word">{room.flag}</span>
-      </Button>
-      <div className="rare-wide">
-        <RareThings onPanel={onPanel} />
+      <div className="rare-first">
+        <Undo />
+        <Flag className="rare-flag-here" />
+        <div className="rare-wide">
+          <RareThings onPanel={onPanel} />
+        </div>
+        <Button className="rare rare-more" onClick={() => onPanel('more')}>
+          {room.more}
+        </Button>
       </div>
-      <Button className="rare rare-more" onClick={() => onPanel('more')}>
-        {room.more}
-      </Button>
-      <Button className="rare rare-cover" onClick={onCover}>
-        <svg width="20" height="20" viewBox="0 0 20 20" aria-hidden="true">
-          <path className="rare-flag" d="M2 5H18V15H2ZM2 10H18" />
-        </svg>
-        <span className="rare-word">{room.cover}</span>
-      </Button>
-      <Silence />
+      <div className="rare-last">
+        <Button className="rare rare-cover" onClick={onCover}>
+          <svg width="20" height="20" viewBox="0 0 20 20" aria-hidden="true">
+            <path className="rare-flag" d="M3 2H17V12L11 18H3ZM11 18V12H17" />
+          </svg>
+          <span className="rare-word">{room.cover}</span>
+        </Button>
+        <Silence />
+      </div>
     </fieldset>
   );
 }
@@ -51,9 +50,55 @@ export function MorePanel({ onPanel, onClose }: Props & { readonly onClose: () =
   return (
     <Panel title={room.moreTitle} closeLabel={common.close} onClose={onClose}>
       <div className="panel-choices">
+        <Flag onDone={onClose} />
+        <ChildBefore onDone={onClose} />
         <RareThings onPanel={onPanel} onDone={onClose} />
       </div>
     </Panel>
+  );
+}
+
+interface DoneProps {
+  readonly className?: string;
+  readonly onDone?: () => void;
+}
+
+function Flag({ className = '', onDone }: DoneProps) {
+  const live = useLive();
+  const { room } = useCoreWords();
+  return (
+    <Button
+      className={`rare ${className}`}
+      onClick={() => {
+        live.flag();
+        onDone?.();
+      }}
+    >
+      <svg width="16" height="20" viewBox="0 0 16 20" aria-hidden="true">
+        <path className="rare-flag" d="M2 19V2H13L10 6L13 10H2" />
+      </svg>
+      <span className="rare-word">{room.flag}</span>
+    </Button>
+  );
+}
+
+/** In eyes-up it has no place of its own on the glass. */
+function ChildBefore({ onDone }: DoneProps) {
+  const live = useLive();
+  const { room } = useCoreWords();
+  const { withBefore } = useFacts();
+  const eyesUp = useEyesUp();
+  if (!withBefore || !eyesUp) return null;
+  return (
+    <Button
+      className="rare"
+      onClick={() => {
+        live.childBefore();
+        onDone?.();
+      }}
+    >
+      {room.childBefore}
+    </Button>
   );
 }
 

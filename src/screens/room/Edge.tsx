@@ -34,7 +34,14 @@ interface OneProps {
 /** One target of a session, by what it says. */
 export function OneTarget({ target, inZone = false }: OneProps) {
   if (target.kind === 'code') return <CodeTarget target={target} inZone={inZone} />;
-  return target.kind === 'nothing' ? <NoneOfThese /> : <CannotSee />;
+  return target.kind === 'nothing' ? <NoneOfThese inZone={inZone} /> : <CannotSee inZone={inZone} />;
+}
+
+/** How the answer to this target is felt, where it is said at all: only where nobody looks, and while touches are answered. */
+function Pulse({ place, inZone }: { readonly place: number | null; readonly inZone: boolean }) {
+  const { room } = useCoreWords();
+  const { confirm } = useManner().manner;
+  return inZone && confirm && <span className="target-hint target-pulse">{room.pulse({ place })}</span>;
 }
 
 interface CodeProps {
@@ -46,7 +53,6 @@ function CodeTarget({ target, inZone }: CodeProps) {
   const live = useLive();
   const { room } = useCoreWords();
   const { method } = useFacts();
-  const { confirm } = useManner().manner;
   const { id, label } = target.code;
   const chosen = useRoom((s) => s.current?.codes?.includes(id) ?? false);
   return (
@@ -60,8 +66,11 @@ function CodeTarget({ target, inZone }: CodeProps) {
     >
       {label}
       {method === 'whole' && <span className="target-hint">{room.throughout}</span>}
-      {inZone && confirm && <span className="target-hint">{room.pulse({ place: target.position - 1 })}</span>}
-      {method === 'duration' && chosen && <InForceFor />}
+      {method === 'duration' && chosen ? (
+        <InForceFor />
+      ) : (
+        <Pulse place={target.position - 1} inZone={inZone} />
+      )}
     </Target>
   );
 }
@@ -73,7 +82,7 @@ function InForceFor() {
   return <span className="target-hint">{room.inForceFor({ ms: seconds * 1000 })}</span>;
 }
 
-function NoneOfThese() {
+function NoneOfThese({ inZone }: { readonly inZone: boolean }) {
   const live = useLive();
   const { room } = useCoreWords();
   const { method } = useFacts();
@@ -88,13 +97,13 @@ function NoneOfThese() {
       onTouch={(at) => live.touch(null, at)}
     >
       {method === 'whole' ? room.noneThroughout : room.noneOfThese}
-      {method === 'duration' && chosen && <InForceFor />}
+      {method === 'duration' && chosen ? <InForceFor /> : <Pulse place={null} inZone={inZone} />}
     </Target>
   );
 }
 
 /** What cannot be seen is missing, and never off-task. */
-export function CannotSee() {
+export function CannotSee({ inZone = false }: { readonly inZone?: boolean }) {
   const live = useLive();
   const { room } = useCoreWords();
   const { method } = useFacts();
@@ -110,7 +119,7 @@ export function CannotSee() {
     >
       {room.cannotSee}
       {method === 'headcount' && <span className="target-hint">{room.noScanHint}</span>}
-      {method === 'duration' && chosen && <InForceFor />}
+      {method === 'duration' && chosen ? <InForceFor /> : <Pulse place={null} inZone={inZone} />}
     </Target>
   );
 }

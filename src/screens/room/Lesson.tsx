@@ -2,24 +2,19 @@ import { type MouseEvent, type SyntheticEvent, useCallback, useState } from 'rea
 import { BeforeStart } from './BeforeStart.tsx';
 import { BottomRow } from './BottomRow.tsx';
 import { Cover } from './eyesUp/Cover.tsx';
-import { EyesUpTop } from './eyesUp/EyesUp.tsx';
+import { EyesUpGlass } from './eyesUp/EyesUpGlass.tsx';
 import { Recalled } from './eyesUp/Recalled.tsx';
-import { ZoneTargets } from './eyesUp/ZoneTargets.tsx';
 import { Flash } from './Flash.tsx';
-import { HoldLine } from './HoldLine.tsx';
-import { LessonPlan } from './LessonPlan.tsx';
-import { LookAt } from './LookAt.tsx';
 import { Over } from './Over.tsx';
+import { PlanGlass } from './PlanGlass.tsx';
 import { useFacts } from './RoomFacts.tsx';
 import { type PanelName, RoomPanel } from './RoomPanel.tsx';
 import { Standstill } from './Standstill.tsx';
-import { Targets } from './Targets.tsx';
-import { TopRow } from './TopRow.tsx';
 import { useDimGlass } from './useDimGlass.ts';
 import { useKeyAct } from './useKeyAct.ts';
 import { useKeys } from './useKeys.ts';
 import { useLeaveGuard } from './useLeaveGuard.ts';
-import { useManner } from './useManner.ts';
+import { useEyesUp, useManner } from './useManner.ts';
 import { useRoom } from './useRoom.ts';
 import './room.css';
 import './targets.css';
@@ -30,9 +25,11 @@ export function Lesson() {
   const phase = useRoom((s) => s.phase);
   const settled = useRoom((s) => s.phase === 'ready' || (s.phase === 'ended' && s.kept.kept === s.kept.of));
   const leaving = useLeaveGuard(!settled);
+  const [covered, setCovered] = useState(false);
   if (phase === 'ready') return <BeforeStart />;
-  if (phase === 'ended') return <Over />;
-  return <OnTheGlass leaving={leaving} />;
+  // What was covered stays covered, also when the session is over.
+  if (phase === 'ended' && !covered) return <Over />;
+  return <OnTheGlass leaving={leaving} covered={covered} onCover={setCovered} />;
 }
 
 const inPanel = (target: EventTarget | null): boolean =>
@@ -46,8 +43,16 @@ const keepFocus = (event: MouseEvent): void => {
   if (!inPanel(event.target)) event.preventDefault();
 };
 
-function OnTheGlass({ leaving }: { readonly leaving: number }) {
+interface GlassProps {
+  readonly leaving: number;
+  readonly covered: boolean;
+  readonly onCover: (covered: boolean) => void;
+}
+
+function OnTheGlass({ leaving, covered, onCover }: GlassProps) {
   const { keys, keysChosen, zones } = useFacts();
+  const { manner, change } = useManner();
+  const dim = useDimGlass();
   const [panel, setPanel] = useState<PanelName | null>(null);
   const [keysSeen, setKeysSeen] = useState(false);
   const close = useCallback(() => setPanel(null), []);
@@ -57,63 +62,42 @@ function OnTheGlass({ leaving }: { readonly leaving: number }) {
       phase === 'running' || phase === 'counting in' || (phase === 'between parts' && current !== null),
   );
   const still = useRoom(({ phase }) => phase !== 'running' && phase !== 'counting in');
-  const [covered, setCovered] = useState(false);
-  const { manner, change } = useManner();
-  const act = useKeyAct(useCallback(() => setKeysSeen(true), []));
-  const actOrCover = useCallback<typeof act>(
-    (action, at) => (action === 'cover' ? setCovered((before) => !before) : act(action, at)),
-    [act],
-  );
-  useKeys(keys, panel !== null && !covered, actOrCover);
-  const glass = {
-    'data-keys': keysChosen || keysSeen,
-    'data-hand': manner.hand,
-    onContextMenu: noMenu,
-    onMouseDown: keepFocus,
-  };
-  const dim = useDimGlass();
-  if (covered)
-    return (
-      <main className={`room room-covered ${dim}`} {...glass}>
-        <Cover zones={marking ? zones : null} onUncover={() => setCovered(false)} />
-        <Recalled />
-        <Flash />
-      </main>
-    );
-  const bottom = <BottomRow onPanel={setPanel} onCover={() => setCovered(true)} />;
-  if (manner.layout === 'eyes-up' && zones !== null && !still)
-    return (
-      <main className={`room room-eyes-up ${dim}`} {...glass}>
-        <EyesUpTop onLeave={() => change({ ...manner, layout: 'plan' })} />
-        <ZoneTargets zones={zones} />
-        <div className="eyes-up-over">
-          {panel !== null && <RoomPanel name={panel} onPanel={setPanel} onClose={close} />}
-          <HoldLine leaving={leaving} />
-        </div>
-        {bottom}
-        <Recalled />
-        <Flash />
-      </main>
-    );
+  const act = useKeyAct({
+    onKey: useCallback(() => setKeysSeen(true), []),
+    onCover: useCallback(() => onCover(!covered), [onCover, covered]),
+  });
+  useKeys(keys, panel !== null && !covered, act);
+  const eyesUp = useEyesUp();
+  const middle =
+    panel !== null ? (
+      <RoomPanel name={panel} onPanel={setPanel} onClose={close} />
+    ) : still ? (
+      <Standstill />
+    ) : null;
+  const row = <BottomRow onPanel={setPanel} onCover={() => onCover(true)} />;
+  const look = covered ? `room-covered ${dim}` : eyesUp ? `room-eyes-up ${dim}` : marking ? '' : 'room-still';
   return (
-    <main className={`room ${marking ? '' : 'room-still'}`} {...glass}>
-      <TopRow />
-      {marking && <Targets side="left" />}
-      <div className="room-centre">
-        {!still && <LookAt />}
-        <div className="room-middle">
-          {panel !== null ? (
-            <RoomPanel name={panel} onPanel={setPanel} onClose={close} />
-          ) : still ? (
-            <Standstill />
-          ) : (
-            <LessonPlan />
-          )}
-        </div>
-        <HoldLine leaving={leaving} />
-      </div>
-      {marking && <Targets side="right" />}
-      {bottom}
+    <main
+      className={`room ${look}`}
+      data-keys={keysChosen || keysSeen}
+      data-hand={manner.hand}
+      onContextMenu={noMenu}
+      onMouseDown={keepFocus}
+    >
+      {covered ? (
+        <Cover zones={marking ? zones : null} still={still} onUncover={() => onCover(false)} />
+      ) : eyesUp ? (
+        <EyesUpGlass
+          zones={marking ? zones : null}
+          still={still}
+          middle={middle}
+          leaving={leaving}
+          onLeave={() => change({ ...manner, layout: 'plan' })}
+        />
+      ) : (
+        <PlanGlass marking={marking} still={still} middle={middle} leaving={leaving} />
+      )}
+      {!covered && row}
       <Recalled />
       <Flash />
     </main>

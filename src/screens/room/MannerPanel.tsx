@@ -23,6 +23,7 @@ export function MannerPanel({ onClose }: { readonly onClose: () => void }) {
           change(next, (kept) => setSaid(kept.ok ? room.mannerKept : say(words.problems, kept.problem)))
         }
       />
+      <p className="second small">{room.coverAbout({ places: zones !== null })}</p>
       <p className="second small" role="status">
         {said}
       </p>

@@ -16,8 +16,15 @@ const countSteps: Partial<Record<KeyAction, CountStep>> = {
   nothing: { kind: 'nobody' },
 };
 
+interface Ends {
+  /** Some key acted. */
+  readonly onKey: () => void;
+  /** The key that covers, and uncovers. */
+  readonly onCover: () => void;
+}
+
 /** What the keys do: the same as the targets and buttons of that name. */
-export function useKeyAct(onKey: () => void): (action: KeyAction, at: PageMs) => void {
+export function useKeyAct({ onKey, onCover }: Ends): (action: KeyAction, at: PageMs) => void {
   const live = useLive();
   const { codes, method, withNone, withBefore } = useFacts();
   const { step } = useCounting();
@@ -26,6 +33,7 @@ export function useKeyAct(onKey: () => void): (action: KeyAction, at: PageMs) =>
       onKey();
       const counting = method === 'headcount' ? countSteps[action] : undefined;
       if (counting !== undefined) step(counting, at);
+      else if (action === 'cover') onCover();
       else if (action === 'cannot see') live.cannotSee(at);
       else if (action === 'child before') {
         if (withBefore) live.childBefore();
@@ -40,6 +48,6 @@ export function useKeyAct(onKey: () => void): (action: KeyAction, at: PageMs) =>
         if (code !== undefined) live.touch(code, at);
       }
     },
-    [live, codes, method, withNone, withBefore, step, onKey],
+    [live, codes, method, withNone, withBefore, step, onKey, onCover],
   );
 }

@@ -2,6 +2,7 @@ import { createContext, useContext } from 'react';
 import type { Result } from '../../kernel/result.ts';
 import { usualManner } from '../../model/manners.ts';
 import type { Manner } from '../../model/observer.ts';
+import { useFacts } from './RoomFacts.tsx';
 
 interface MannerOfObserver {
   readonly manner: Manner;
@@ -17,4 +18,10 @@ export const MannerContext = createContext<MannerOfObserver>({
 /** How the observer of this session likes the room to be. */
 export function useManner(): MannerOfObserver {
   return useContext(MannerContext);
+}
+
+/** Whether the glass is laid out eyes-up: the observer wants it, and the code set has a place for each target. */
+export function useEyesUp(): boolean {
+  const { zones } = useFacts();
+  return useManner().manner.layout === 'eyes-up' && zones !== null;
 }

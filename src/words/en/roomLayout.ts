@@ -9,8 +9,8 @@ const pulses = [
   'one short pulse',
   'two short pulses',
   'one long pulse',
-  'short, long',
-  'long, short',
+  'a short and a long pulse',
+  'a long and a short pulse',
   'three short pulses',
 ];
 
@@ -38,17 +38,21 @@ export const roomLayout = {
   // eyes-up
   leaveEyesUp: 'leave eyes-up',
   zones: 'Places to touch',
-  thenChild: ({ child }: { child: string }) => `then ${child}`,
-  startsWith: ({ n }: { n: number }, f: F) => `begins in ${f.whole(n)}`,
-  pulse: ({ place }: { place: number }) => pulses[place] ?? '',
+  pulse: ({ place }: { place: number | null }) =>
+    (place === null ? undefined : pulses[place]) ?? 'one low, long pulse',
 
   // the cover
   cover: 'cover',
   covered: 'Covered. Prompts go on.',
   coveredZones: 'Places to touch, without words',
   coveredKeys: 'This session has too many codes to be touched without words: mark by keys, or uncover.',
-  uncover: 'Uncover: touch twice',
-  uncoverAgain: 'Touch once more to uncover',
+  coveredStill: 'Nobody is to be looked at now.',
+  uncover: 'Uncover: hold',
+  uncoverHold: 'hold',
+  coverAbout: ({ places }: { places: boolean }) =>
+    places
+      ? 'Under the cover nothing can be read, prompts go on, and each code lies where eyes-up has it. Hold the folded corner to uncover.'
+      : 'Under the cover nothing can be read and prompts go on. Here it has no places to touch: mark by keys, or uncover. Hold the folded corner to uncover.',
 
   // ahead of a look
   spokenSeat: ({ row, place }: { row: number; place: number }, f: F) =>

@@ -1,4 +1,5 @@
 import { useCoreWords } from '../../coreServices.ts';
+import type { EdgeTarget } from '../codeEdges.ts';
 import { OneTarget } from '../Edge.tsx';
 import type { Zones } from './zones.ts';
 import './zones.css';
@@ -12,19 +13,20 @@ interface Props {
 /** The fixed places: a touch anywhere in one counts. */
 export function ZoneTargets({ zones, covered = false }: Props) {
   const { room } = useCoreWords();
+  const { left, right, foot } = zones;
+  const one = (target: EdgeTarget, place: string) => (
+    <div key={place} className={`zone zone-${place}`}>
+      <OneTarget target={target} inZone />
+    </div>
+  );
   return (
     <section
       className={`zones zones-${zones.kind} ${covered ? 'zones-covered' : ''}`}
       aria-label={covered ? room.coveredZones : room.zones}
     >
-      {zones.zones.map((target) => (
-        <OneTarget key={target.kind === 'code' ? target.code.id : target.kind} target={target} inZone />
-      ))}
-      {zones.middle !== null && (
-        <div className="zone-middle">
-          <OneTarget target={zones.middle} inZone />
-        </div>
-      )}
+      {left.map((target, i) => one(target, `left-${i + 1}`))}
+      {right.map((target, i) => one(target, `right-${i + 1}`))}
+      {foot !== null && one(foot, 'foot')}
     </section>
   );
 }

@@ -1,0 +1,32 @@
+import type { ReactNode } from 'react';
+import { HoldLine } from './HoldLine.tsx';
+import { LessonPlan } from './LessonPlan.tsx';
+import { LookAt } from './LookAt.tsx';
+import { Targets } from './Targets.tsx';
+import { TopRow } from './TopRow.tsx';
+
+interface Props {
+  /** A touch can mark something. */
+  readonly marking: boolean;
+  /** Nobody is to be looked at now. */
+  readonly still: boolean;
+  /** What takes the place of the seating plan; null for the plan. */
+  readonly middle: ReactNode;
+  readonly leaving: number;
+}
+
+/** The ordinary layout: the seating plan in the middle, the targets at both edges. */
+export function PlanGlass({ marking, still, middle, leaving }: Props) {
+  return (
+    <>
+      <TopRow />
+      {marking && <Targets side="left" />}
+      <div className="room-centre">
+        {!still && <LookAt />}
+        <div className="room-middle">{middle ?? <LessonPlan />}</div>
+        <HoldLine leaving={leaving} />
+      </div>
+      {marking && <Targets side="right" />}
+    </>
+  );
+}
