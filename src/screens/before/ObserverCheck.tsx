@@ -3,7 +3,7 @@ import type { Observer } from '../../model/observer.ts';
 import type { Role } from '../../model/session.ts';
 import { addObserver } from '../../tasks/index.ts';
 import { Button } from '../../ui/Button.tsx';
-import { Check, Choice } from '../../ui/Choice.tsx';
+import { Choice } from '../../ui/Choice.tsx';
 import { Dialog } from '../../ui/Dialog.tsx';
 import { TextField } from '../../ui/Field.tsx';
 import { say } from '../../words/say.ts';
@@ -14,8 +14,11 @@ import { CheckRow } from './CheckRow.tsx';
 export interface Who {
   readonly observer: string | null;
   readonly role: Role | null;
-  readonly practice: boolean;
+  readonly purpose: Purpose;
 }
+
+/** A session counts, or is practice, or lets the class get used to the observer. */
+export type Purpose = 'record' | 'practice' | 'familiarisation';
 
 interface Props {
   readonly study: string;
@@ -41,7 +44,7 @@ export function ObserverCheck({ study, observers, who, onChange }: Props) {
     >
       {observer === undefined
         ? words.before.observerNobody
-        : words.before.observerWho({ name: observer.name, role, practice: who.practice })}
+        : words.before.observerWho({ name: observer.name, role, purpose: who.purpose })}
       {open && (
         <WhoDialog
           study={study}
@@ -104,11 +107,19 @@ function WhoDialog({ study, observers, who, onChange, onClose }: Props & { reado
           { value: 'second', label: words.before.roleSecond, hint: words.before.roleSecondHint },
         ]}
       />
-      <Check
-        label={words.before.practice}
-        hint={words.before.practiceHint}
-        checked={who.practice}
-        onChange={(practice) => onChange({ ...who, practice })}
+      <Choice
+        legend={words.before.purpose}
+        value={who.purpose}
+        onChange={(purpose) => onChange({ ...who, purpose })}
+        options={[
+          { value: 'record', label: words.before.purposeRecord, hint: words.before.purposeRecordHint },
+          { value: 'practice', label: words.before.purposePractice, hint: words.before.practiceHint },
+          {
+            value: 'familiarisation',
+            label: words.before.purposeFamiliarisation,
+            hint: words.before.purposeFamiliarisationHint,
+          },
+        ]}
       />
     </Dialog>
   );

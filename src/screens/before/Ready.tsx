@@ -42,7 +42,7 @@ function Checks({ plan, as }: { readonly plan: VisitPlan; readonly as: Role | nu
   const [, go] = useLocation();
   const answer = useStored((reader) => reader.observers(plan.study.id), [plan.study.id]);
   const observers = answer?.ok ? answer.value : [];
-  const [who, setWho] = useState<Who>({ observer: null, role: as, practice: false });
+  const [who, setWho] = useState<Who>({ observer: null, role: as, purpose: 'record' });
   const [heard, setHeard] = useState<Heard>('not asked');
   const [present, setPresent] = useState(false);
   const [problem, setProblem] = useState<string | null>(null);
@@ -57,10 +57,15 @@ function Checks({ plan, as }: { readonly plan: VisitPlan; readonly as: Role | nu
     ...lines.filter((line) => line.state === 'hold').map((line) => line.check),
   ];
 
-  const goIn = async (practice: boolean) => {
+  const goIn = async () => {
     if (who.observer === null) return;
     setProblem(null);
-    const header = await startSession(deps, plan, { observer: who.observer, role: who.role, practice });
+    const header = await startSession(deps, plan, {
+      observer: who.observer,
+      role: who.role,
+      practice: who.purpose === 'practice',
+      familiarisation: who.purpose === 'familiarisation',
+    });
     if (!header.ok) return setProblem(say(words.problems, header.problem));
     const opened = await recorder.open(header.value, { checks: onHold, anyway: onHold.length > 0 });
     if (!opened.ok) return setProblem(say(words.problems, opened.problem));
@@ -107,7 +112,7 @@ function Checks({ plan, as }: { readonly plan: VisitPlan; readonly as: Role | nu
       </Sheet>
       {problem !== null && <Notice kind="hold">{problem}</Notice>}
       <div className="row">
-        <Button look="main" disabled={who.observer === null} onClick={() => goIn(who.practice)}>
+        <Button look="main" disabled={who.observer === null} onClick={goIn}>
           {onHold.length === 0 ? words.before.goIn : words.before.goInAnyway}
         </Button>
         <Button look="quiet" onClick={again}>

@@ -58,6 +58,7 @@ export function BeforeStart() {
           klass: header.classroom.name,
           protocol: schedule.kind === 'laid' ? schedule.protocol.name : '',
           practice: header.practice,
+          familiarisation: header.familiarisation === true,
         })}
       </p>
       <h1 tabIndex={-1}>

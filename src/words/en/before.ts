@@ -1,6 +1,8 @@
 import type { Format } from '../format.ts';
 import { peerLooks, short } from './study/short.ts';
 
+type Purpose = 'record' | 'practice' | 'familiarisation';
+
 type F = Format;
 
 const inMinutes = (minutes: number, f: F): string =>
@@ -124,8 +126,8 @@ export const before = {
   toPrepare: 'Prepare one',
 
   observer: 'Observer',
-  observerWho: ({ name, role, practice }: { name: string; role: string; practice: boolean }) =>
-    `${name}, ${role}${practice ? '; this one is practice' : ''}.`,
+  observerWho: ({ name, role, purpose }: { name: string; role: string; purpose: Purpose }) =>
+    `${name}, ${role}${purpose === 'practice' ? '; this one is practice' : purpose === 'familiarisation' ? '; a familiarisation visit' : ''}.`,
   observerNobody: 'Say who records.',
   observerChoose: 'Choose',
   observerDialog: 'Who records on this tablet?',
@@ -139,7 +141,6 @@ export const before = {
   roleShortAlone: 'alone',
   roleShortPrimary: 'primary: this record counts',
   roleShortSecond: 'second: this record checks',
-  practice: 'Practice',
   practiceHint: 'Kept and marked as practice; left out of all results.',
 
   sound: 'Earpiece',

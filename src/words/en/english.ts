@@ -11,6 +11,7 @@ import { methods } from './methods.ts';
 import { cardProblems, pairing } from './pairing.ts';
 import { paper, paperProblems } from './paper.ts';
 import { problems } from './problems.ts';
+import { purpose } from './purpose.ts';
 import { refusals } from './refusals.ts';
 import { remarks, warnings } from './remarks.ts';
 import { starter } from './starter.ts';
@@ -24,7 +25,7 @@ export const english = {
   afterwards: { ...afterwards, ...corrections, ...timing },
   agreement: { ...agreement, ...inStepWords },
   batch,
-  before,
+  before: { ...before, ...purpose },
   change,
   figures,
   files,

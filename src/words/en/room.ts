@@ -56,8 +56,18 @@ export const room = {
   toDoor: 'In the room',
 
   // before the tap that begins
-  readyAbout: ({ klass, protocol, practice }: { klass: string; protocol: string; practice: boolean }) =>
-    `${klass} · ${protocol}${practice ? ' · practice' : ''}`,
+  readyAbout: ({
+    klass,
+    protocol,
+    practice,
+    familiarisation,
+  }: {
+    klass: string;
+    protocol: string;
+    practice: boolean;
+    familiarisation: boolean;
+  }) =>
+    `${klass} · ${protocol}${practice ? ' · practice' : ''}${familiarisation ? ' · familiarisation visit' : ''}`,
   readyTitle: 'Start when the lesson does.',
   readyTitleShared: 'Start on a shared count.',
   readyTitleResuming: 'Go on where the schedule is now.',

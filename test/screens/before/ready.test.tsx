@@ -45,10 +45,11 @@ async function atTheDoor(device: Partial<Device> = {}) {
   return { services, opened, view };
 }
 
-async function choose(role: RegExp) {
+async function choose(role: RegExp, purpose?: RegExp) {
   await userEvent.click(screen.getByRole('button', { name: 'Choose' }));
   await userEvent.click(await screen.findByRole('radio', { name: 'Quill' }));
   await userEvent.click(screen.getByRole('radio', { name: role }));
+  if (purpose !== undefined) await userEvent.click(screen.getByRole('radio', { name: purpose }));
   await userEvent.click(screen.getByRole('button', { name: 'Done' }));
 }
 
@@ -69,6 +70,7 @@ describe('Before the visit: the checks', () => {
     await waitFor(() => expect(opened).toHaveLength(1));
     expect(opened[0]?.options).toEqual({ checks: [], anyway: false });
     expect(opened[0]?.header).toMatchObject({ role: null, practice: false, observer: { name: 'Quill' } });
+    expect(opened[0]?.header).not.toHaveProperty('familiarisation');
     await waitFor(() => expect(view.visited.at(-1)).toBe(`/room/${opened[0]?.header.id}`));
   });
 
@@ -88,6 +90,18 @@ describe('Before the visit: the checks', () => {
       checks: ['sound', 'children', 'awake', 'room', 'battery', 'offline', 'onlyHere'],
       anyway: true,
     });
+  });
+
+  it.each([
+    [/^practice/, /this one is practice/, { practice: true }],
+    [/^familiarisation visit/, /a familiarisation visit/, { practice: false, familiarisation: true }],
+  ])('says on the page and in the header what the session is for: %s', async (purpose, said, kept) => {
+    const { opened } = await atTheDoor();
+    await choose(/nobody/, purpose);
+    screen.getByText(said);
+    await userEvent.click(screen.getByRole('button', { name: 'Go in anyway' }));
+    await waitFor(() => expect(opened).toHaveLength(1));
+    expect(opened[0]?.header).toMatchObject(kept);
   });
 
   it('holds when the class could hear the tone, or nobody did', async () => {

@@ -48,6 +48,11 @@ test('a session that is taken up again begins by its own journal', async () => {
   expect(live.calls).toEqual([['begin']]);
 });
 
+test('a familiarisation visit is called one', () => {
+  before({ familiarisation: true });
+  screen.getByText('Class Otter · Next child, every 15 seconds · familiarisation visit');
+});
+
 test('two observers begin on a shared count unless they say otherwise', async () => {
   const { live } = before();
   await press('Start');
