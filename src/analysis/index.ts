@@ -25,6 +25,7 @@ export {
 export type { ChildLine, ClassData } from './childChanges.ts';
 export type { ClassChange } from './classChange.ts';
 export type { Comparison, NoComparison } from './compareConditions.ts';
+export { type CodeDurations, type DurationAgreement, durationAgreement } from './durationAgreement.ts';
 export { type InStep, inStep, type StepCode } from './inStep.ts';
 export type { LostPlace, LostPlaces, NotSearched, Signs } from './lostPlaces.ts';
 export type { CodeCount, MissingFor } from './makeUp.ts';

@@ -1,5 +1,6 @@
 import { type MissingReason, missingReasons } from '../model/missing.ts';
 import { type AgreementPair, agreementPair, type ComparedPair } from './agreementReport.ts';
+import { type DurationAgreement, durationAgreement } from './durationAgreement.ts';
 import { type InStep, inStep } from './inStep.ts';
 import { byText } from './order.ts';
 import { scoredAs } from './pairedLooks.ts';
@@ -52,6 +53,8 @@ export interface PairDetails {
   readonly prevalence: { readonly a: number; readonly b: number; readonly mean: number } | null;
   /** null where agreement (or, with one code an interval, kappa) is undefined. */
   readonly criterionMet: boolean | null;
+  /** Second by second; null unless both recorded durations. */
+  readonly durations: DurationAgreement | null;
   readonly sheet: RoundSheet;
   readonly warnings: readonly Warning[];
 }
@@ -90,6 +93,7 @@ export function pairDetails(pair: ComparedPair, criterion: Criterion): PairDetai
     step,
     prevalence,
     criterionMet: met,
+    durations: durationAgreement(a, b),
     sheet: roundSheet(a, b),
     warnings: [
       ...(row.compared < limits.pairedIntervals

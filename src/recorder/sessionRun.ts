@@ -183,8 +183,9 @@ export class SessionRun {
         ...(latency === null ? {} : { audioLatencyMs: latency }),
         ...(how.at === undefined ? {} : { agreedStart: toWallTime(how.at, wall.offsetMinutes(how.at)) }),
       });
-      if ((how.nudgeMs ?? 0) !== 0)
-        this.book.write(-wait, { kind: 'clockNudged', by: Math.round(how.nudgeMs ?? 0) });
+      // A check that found nothing to nudge is a finding, too.
+      if (how.nudgeMs !== undefined)
+        this.book.write(-wait, { kind: 'clockNudged', by: Math.round(how.nudgeMs) });
       return;
     }
     this.time.clock.start(page.now(), stand.now);

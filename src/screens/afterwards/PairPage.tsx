@@ -8,6 +8,7 @@ import { useServices } from '../services.ts';
 import { CodeTables } from './CodeTables.tsx';
 import { Companions } from './Companions.tsx';
 import { Differences } from './Differences.tsx';
+import { DurationSheet } from './DurationSheet.tsx';
 import { PageFoot } from './PageFoot.tsx';
 import { SheetPicture } from './SheetPicture.tsx';
 import { StepSheet } from './StepSheet.tsx';
@@ -66,6 +67,7 @@ export function PairPage({ pairs, children }: Props) {
         </Sheet>
       )}
       <Companions pairs={pairs} />
+      <DurationSheet pairs={pairs} />
       {differences.length > 0 && (
         <div className="not-in-print">
           <Button onClick={toList}>{words.agreement.differencesOpen({ n: differences.length })}</Button>

@@ -66,6 +66,14 @@ export const agreement = {
   onTaskAgreed: 'on-task agreed',
   offTaskAgreed: 'off-task agreed',
   kappa: 'kappa',
+  durations: ({ phase }: { phase: string | null }) =>
+    phase === null ? 'Second by second' : `Second by second, ${phase}`,
+  secondBySecond: 'same code in the same second',
+  secondsCompared: ({ compared, excluded }: { compared: number; excluded: number }, f: F) =>
+    `${f.whole(compared)} ${f.plural(compared, { one: 'second', other: 'seconds' })} that both watched; ${f.whole(excluded)} that not both did. Neighbouring seconds are no separate looks, so kappa has no range here.`,
+  totals: 'How long each saw it, in minutes and seconds',
+  totalRatio: 'smaller of larger',
+  totalsFlatter: 'Totals may agree although the moments do not: believe the seconds first.',
   highestKappa: 'kappa, the highest it could be',
   ac1: 'AC1',
   notDefined: 'not defined',

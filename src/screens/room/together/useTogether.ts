@@ -55,6 +55,6 @@ export function useTogether(plannedStart: string | null): Together {
       setChecking(false);
     },
     leave: () => setChecking(false),
-    how: { ...(by === 'second' ? { at } : {}), ...(nudgeMs === 0 ? {} : { nudgeMs }) },
+    how: { ...(by === 'second' ? { at } : {}), ...(nudge === null ? {} : { nudgeMs: nudge }) },
   };
 }
