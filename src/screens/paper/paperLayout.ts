@@ -1,5 +1,6 @@
 import type { VisitPlan } from '../../model/visitPlan.ts';
 import { layOutSchedule, type ScheduledInterval } from '../../schedule/layOut.ts';
+import { intervalsInRound } from '../../schedule/turns.ts';
 
 export type PaperSize = 'A4' | 'Letter';
 /** `rows`: one row an interval; `rounds`: one row a child, one column a round. */
@@ -213,7 +214,9 @@ type Body =
 const onsetsPerPart = 40;
 const mostOnsets = 200;
 
-function itemsOf({ schedule }: VisitPlan, intervals: readonly ScheduledInterval[]): Body {
+function itemsOf({ schedule, children }: VisitPlan, intervals: readonly ScheduledInterval[]): Body {
+  // A line after every row would set nothing apart.
+  const rounds = intervalsInRound(schedule.protocol, children.length) > 1;
   const items: PaperItem[] = [];
   let before: ScheduledInterval | null = null;
   for (const line of intervals) {
@@ -222,7 +225,7 @@ function itemsOf({ schedule }: VisitPlan, intervals: readonly ScheduledInterval[
       items.push({ kind: 'part', part: line.part, phase: line.phase, line });
     if (schedule.protocol.method === 'duration')
       for (let k = 1; k <= mostOnsets; k++) items.push({ kind: 'onset', number: k });
-    else items.push({ kind: 'row', line, newRound: !newPart && line.round !== before?.round });
+    else items.push({ kind: 'row', line, newRound: rounds && !newPart && line.round !== before?.round });
     before = line;
   }
   return { kind: 'items', items };
