@@ -1,4 +1,5 @@
 import type { Problem } from '../kernel/result.ts';
+import type { Method } from '../model/protocol.ts';
 import type { SessionRecord } from './sessionRecord.ts';
 
 /** What should be said beside a figure; it never blocks. Sentences: `words/en/why.ts`. */
@@ -56,13 +57,16 @@ export function shareWarnings(share: {
   readonly scored: number | null;
   readonly missing: number | null;
   readonly percentOnTask: number | null;
+  readonly method: Method;
 }): Warning[] {
-  const { scored, missing, percentOnTask } = share;
+  const { scored, missing, percentOnTask, method } = share;
   const warnings: Warning[] = [];
   if (scored !== null && missing !== null && scored + missing > 0) {
     const percent = (100 * missing) / (scored + missing);
     if (percent > limits.missingPercent) warnings.push(warning('manyMissing', { percent, missing }));
   }
+  // What is plausible is known of classes; a duration record is of one child.
+  if (method === 'duration') return warnings;
   if (percentOnTask !== null && percentOnTask < limits.classLow) {
     warnings.push(warning('underFortyPercent', { percent: percentOnTask }));
   }
