@@ -5,6 +5,7 @@ import { fold } from '../journal/step.ts';
 import type { StoredSession } from '../journal/stored.ts';
 import { dateOf } from '../kernel/wallTime.ts';
 import type { CodeSet } from '../model/codeSet.ts';
+import { isForTheRecord, type TakenIn } from '../model/forTheRecord.ts';
 import type { Method } from '../model/protocol.ts';
 import type { Role } from '../model/session.ts';
 
@@ -40,6 +41,7 @@ export interface SessionRecord {
   readonly observer: string;
   readonly role: Role | null;
   readonly practice: boolean;
+  readonly familiarisation: boolean;
   readonly date: string | null;
   readonly start: string | null;
   readonly method: Method;
@@ -83,6 +85,7 @@ export function sessionRecords(session: StoredSession): SessionRecord[] {
     observer: header.observer.name,
     role: header.role,
     practice: header.practice,
+    familiarisation: header.familiarisation === true,
     date: header.date ?? (start === null ? null : dateOf(start)),
     start,
     method: facts.method,
@@ -94,14 +97,9 @@ export function sessionRecords(session: StoredSession): SessionRecord[] {
   }));
 }
 
-/** The records of many sessions; practice sessions are left out unless asked for. */
-export function recordsOf(
-  sessions: readonly StoredSession[],
-  options: { readonly practice?: boolean } = {},
-): SessionRecord[] {
-  return sessions
-    .filter(({ header }) => options.practice === true || !header.practice)
-    .flatMap(sessionRecords);
+/** The records of many sessions; practice and familiarisation visits are left out unless asked for. */
+export function recordsOf(sessions: readonly StoredSession[], taken: TakenIn = {}): SessionRecord[] {
+  return sessions.filter(({ header }) => isForTheRecord(header, taken)).flatMap(sessionRecords);
 }
 
 function lookOf(interval: IntervalRecord, facts: RecordingFacts): Look {

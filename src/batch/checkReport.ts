@@ -1,5 +1,6 @@
 import { recordsOf, visits } from '../analysis/index.ts';
 import { byCodePoint } from '../kernel/compare.ts';
+import type { TakenIn } from '../model/forTheRecord.ts';
 import type { Words } from '../words/words.ts';
 import type { Gathered } from './gather.ts';
 import { fileProblemLine } from './problemLines.ts';
@@ -23,9 +24,9 @@ export interface CheckReport {
   readonly conditions: readonly string[];
 }
 
-export function checkReport({ outcomes, merged }: Gathered, practice: boolean, words: Words): CheckReport {
+export function checkReport({ outcomes, merged }: Gathered, taken: TakenIn, words: Words): CheckReport {
   const { bundle } = merged;
-  const records = recordsOf(bundle.sessions, { practice });
+  const records = recordsOf(bundle.sessions, taken);
   const distinct = (of: (record: (typeof records)[number]) => string | null): string[] =>
     [...new Set(records.flatMap((record) => of(record) ?? []))].sort(byCodePoint);
   return {

@@ -9,6 +9,7 @@ export interface Request {
   readonly files: readonly string[];
   readonly json: boolean;
   readonly practice: boolean;
+  readonly familiarisation: boolean;
   readonly on: readonly string[];
   readonly off: readonly string[];
   readonly before?: string | undefined;
@@ -17,7 +18,7 @@ export interface Request {
   readonly observer?: string | undefined;
 }
 
-const flags = ['--json', '--practice'];
+const flags = ['--json', '--practice', '--with-familiarisation'];
 const lists = ['--on', '--off'];
 const ofChange = ['--before', '--after', '--control', '--observer'];
 
@@ -80,6 +81,7 @@ function requestOf(plain: readonly string[], given: ReadonlyMap<string, string[]
       files,
       json: given.has('--json'),
       practice: given.has('--practice'),
+      familiarisation: given.has('--with-familiarisation'),
       on,
       off,
       before: single('--before'),

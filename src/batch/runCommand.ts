@@ -64,7 +64,7 @@ function answerTo(
   words: Words,
 ): Outcome {
   const { bundle } = gathered.merged;
-  const records = recordsOf(sessions, { practice: request.practice });
+  const records = recordsOf(sessions, request);
   const print = <Report>(report: Report, text: (report: Report, words: Words) => string): string =>
     request.json ? jsonDocument(report, words) : `${text(report, words)}\n`;
   const told = <Report>(
@@ -97,7 +97,7 @@ function answerTo(
     case 'agreement':
       return told(agreementReport(visits(records, pairings)), withWays(textOfAgreement));
     case 'check':
-      return { out: print(checkReport(gathered, request.practice, words), textOfCheck), err: [], status: 0 };
+      return { out: print(checkReport(gathered, request, words), textOfCheck), err: [], status: 0 };
     case 'change': {
       if (records.length === 0) return { out: print(emptyChange, textOfChange), err: [], status: 0 };
       const { before, after, control, observer } = request;

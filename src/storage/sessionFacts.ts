@@ -65,6 +65,7 @@ export function headerFactsOf(header: SessionHeader): HeaderFacts {
     observer: { id: header.observer.id, name: header.observer.name },
     role: header.role,
     practice: header.practice,
+    ...(header.familiarisation === true ? { familiarisation: true } : {}),
     ...(header.fromPaper === true ? { fromPaper: true } : {}),
     date: header.date,
     plannedStart: header.plannedStart,

@@ -2,6 +2,7 @@ import { writeIntervalTable } from '../exchange/writeIntervalTable.ts';
 import { writeStudyFile } from '../exchange/writeStudyFile.ts';
 import { writeVisitFile } from '../exchange/writeVisitFile.ts';
 import { ok, problem, type Result } from '../kernel/result.ts';
+import { isForTheRecord } from '../model/forTheRecord.ts';
 import type { VisitPlan } from '../model/visitPlan.ts';
 import { fileName, secretWords } from './fileNames.ts';
 import { toBundle } from './joinBundles.ts';
@@ -50,11 +51,11 @@ export async function exportVisit(deps: Deps, plan: VisitPlan): Promise<Result<E
   return ok({ name, type: 'application/json', bytes: new Uint8Array(bytes), covers: [] });
 }
 
-/** The interval table: one row an interval, practice left out. It loses the journal, so it hands nothing over. */
+/** The interval table: one row an interval, practice and familiarisation visits left out. It loses the journal, so it hands nothing over. */
 export async function exportTable(deps: Deps, study: string): Promise<Result<ExportedFile>> {
   const found = await requireBundle(deps, study);
   if (!found.ok) return found;
-  const sessions = found.value.sessions.filter(({ header }) => !header.practice);
+  const sessions = found.value.sessions.filter(({ header }) => isForTheRecord(header));
   if (sessions.length === 0) return problem('task.noSessions');
   const bytes = new TextEncoder().encode(writeIntervalTable(sessions));
   return ok({

@@ -61,6 +61,8 @@ export interface SessionSummary {
   readonly observer: { readonly id: string; readonly name: string };
   readonly role: Role | null;
   readonly practice: boolean;
+  /** A visit to let the class get used to the observer; left out of results. */
+  readonly familiarisation?: boolean;
   /** Recorded on paper and typed in. */
   readonly fromPaper?: boolean;
   readonly date: string | null;

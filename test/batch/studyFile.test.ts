@@ -138,6 +138,22 @@ describe('figures from a study file', () => {
     expect(await pairs([{ session: 'q', visit: 'visit-1' }])).toMatchObject({ pairs: 1, visits: 1 });
   });
 
+  test('familiarisation visits only when asked for, in every command', async () => {
+    const sessions = [
+      quill,
+      recorded('f', 'Reed', ['on'], { familiarisation: true, visit: 'visit-3' }),
+      recorded('g', 'Marsh', ['on'], { familiarisation: true, visit: 'visit-3' }),
+    ];
+    const with_ = '--with-familiarisation';
+    expect((await run('ontask', { sessions })).document.sessions).toHaveLength(1);
+    expect((await run(`ontask ${with_}`, { sessions })).document.sessions).toHaveLength(3);
+    expect((await run('ontask --practice', { sessions })).document.sessions).toHaveLength(1);
+    expect((await run('agreement', { sessions })).document.pairs).toEqual([]);
+    expect((await run(`agreement ${with_}`, { sessions })).document.pairs).toHaveLength(1);
+    expect((await run('check', { sessions })).document.sessions).toBe(1);
+    expect((await run(`check ${with_}`, { sessions })).document.sessions).toBe(3);
+  });
+
   test('practice sessions only when asked for', async () => {
     const sessions = [quill, recorded('p', 'Reed', ['on'], { practice: true, visit: 'visit-3' })];
     expect((await run('ontask', { sessions })).document.sessions).toHaveLength(1);

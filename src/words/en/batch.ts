@@ -19,6 +19,7 @@ FILE is a study file, an interval table (.csv), or a folder; of a folder its
 Options
   --json                 one JSON document instead of tables
   --practice             take practice sessions too
+  --with-familiarisation take familiarisation visits too
   --on LABEL,LABEL       labels of a table that count as on-task
   --off LABEL,LABEL      labels of a table that count as off-task
   --before PHASE         (change) the phase to start from
