@@ -13,7 +13,9 @@ import {
   type Visit,
   visits,
 } from '../analysis/index.ts';
+import { heldBack } from '../journal/heldBack.ts';
 import { ok, problem, type Result } from '../kernel/result.ts';
+import { isForTheRecord } from '../model/forTheRecord.ts';
 import type { Study } from '../model/study.ts';
 import type { SessionSummary, StoreReader } from '../tasks/ports.ts';
 import type { Answer, Question, QuestionKind, VisitLine } from './questions.ts';
@@ -32,20 +34,25 @@ const answerers: Answerers = {
     const found = await store.readSession(session);
     if (!found.ok) return found;
     if (found.value === null) return problem('task.noSession', { id: session });
+    const held = await heldBackIn(store, found.value.header.study);
+    if (!held.ok) return held;
+    if (held.value.has(session)) return problem('task.heldBack');
     const sheets = sessionRecords(found.value).map((record) => roundSheet(record));
     return ok({ details: sessionDetails(found.value), sheets });
   },
 
   study: async (store, { study }, along) => {
-    const found = await gathered(store, study, forTheRecord, along);
+    const found = await gathered(store, study, isForTheRecord, along);
     if (!found.ok) return found;
     const { all, records } = found.value;
     const { report, notices } = onTaskReport(records);
     return ok({ onTask: report, visits: all.map(visitLine), doubleCoded: doubleCodedShares(all), notices });
   },
 
-  agreement: async (store, { study, visit, practice = false }, along) => {
-    const found = await gathered(store, study, (session) => session.practice === practice, along);
+  agreement: async (store, { study, visit, practice = false, familiarisation = false }, along) => {
+    const wanted = (session: SessionSummary): boolean =>
+      session.practice === practice && isForTheRecord(session, { practice, familiarisation });
+    const found = await gathered(store, study, wanted, along);
     if (!found.ok) return found;
     const all = found.value.all.filter((one) => visit === undefined || isVisit(one, visit));
     const { report, problems, notices } = agreementReport(all);
@@ -54,7 +61,7 @@ const answerers: Answerers = {
   },
 
   change: async (store, { study, before, after, control, observer }, along) => {
-    const found = await gathered(store, study, forTheRecord, along);
+    const found = await gathered(store, study, isForTheRecord, along);
     if (!found.ok) return found;
     const studyControl = found.value.study.control;
     const analysis = changeReport(found.value.all, { before, after, control, observer, studyControl });
@@ -72,8 +79,6 @@ export function answerFrom<Kind extends QuestionKind>(
   return answerer(store, question, along);
 }
 
-const forTheRecord = (session: SessionSummary): boolean => !session.practice;
-
 interface Gathered {
   readonly study: Study;
   readonly records: ReturnType<typeof recordsOf>;
@@ -89,10 +94,22 @@ async function gathered(
   const study = await store.study(id);
   if (!study.ok) return study;
   if (study.value === null || study.value.removed) return problem('task.noStudy', { id });
-  const sessions = await readSessions(store, id, which, along);
+  const held = await heldBackIn(store, id);
+  if (!held.ok) return held;
+  const wanted = (session: SessionSummary): boolean => which(session) && !held.value.has(session.id);
+  const sessions = await readSessions(store, id, wanted, along);
   if (!sessions.ok) return sessions;
-  const records = recordsOf(sessions.value, { practice: true });
+  const records = recordsOf(sessions.value, { practice: true, familiarisation: true });
   return ok({ study: study.value, records, all: visits(records, study.value.pairings) });
+}
+
+/** The sessions of a study of which nothing may be seen yet. */
+async function heldBackIn(store: StoreReader, id: string): Promise<Result<ReadonlySet<string>>> {
+  const study = await store.study(id);
+  if (!study.ok) return study;
+  const listed = await store.listSessions(id);
+  if (!listed.ok) return listed;
+  return ok(heldBack(listed.value, study.value?.pairings ?? []));
 }
 
 const isVisit = (visit: Visit, wanted: string): boolean =>

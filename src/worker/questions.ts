@@ -59,6 +59,8 @@ export interface Questions {
       readonly visit?: string;
       /** Practice sessions alone, instead of those for the record. */
       readonly practice?: boolean;
+      /** Familiarisation visits, too. */
+      readonly familiarisation?: boolean;
     };
     readonly answer: AgreementAnswer;
   };

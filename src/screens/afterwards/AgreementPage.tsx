@@ -1,7 +1,7 @@
 import { useState } from 'react';
 import type { PairDetails } from '../../analysis/index.ts';
 import type { Study } from '../../model/study.ts';
-import { Choice } from '../../ui/Choice.tsx';
+import { Check, Choice } from '../../ui/Choice.tsx';
 import { PageHead } from '../../ui/PageHead.tsx';
 import { Sheet } from '../../ui/Sheet.tsx';
 import { Hold, Ring, Tick } from '../../ui/Sign.tsx';
@@ -9,8 +9,10 @@ import { Table } from '../../ui/Table.tsx';
 import type { AgreementAnswer } from '../../worker/questions.ts';
 import { useServices } from '../services.ts';
 import { useCurrentStudy } from '../useCurrentStudy.ts';
+import { HeldBackNote } from './HeldBack.tsx';
 import { PageFoot } from './PageFoot.tsx';
 import { useFigures } from './useFigures.ts';
+import { useListed } from './useListed.ts';
 import { useStamp } from './useStamp.ts';
 import { WarningLines } from './WarningLines.tsx';
 import { Working } from './Working.tsx';
@@ -21,8 +23,10 @@ export function AgreementPage() {
   const study = useCurrentStudy();
   const stamp = useStamp(study?.id);
   const [practice, setPractice] = useState(false);
+  const [familiarisation, setFamiliarisation] = useState(false);
+  const listed = useListed(study?.id);
   const figures = useFigures(
-    { kind: 'agreement', study: study?.id ?? '', practice },
+    { kind: 'agreement', study: study?.id ?? '', practice, familiarisation },
     study ? stamp : undefined,
   );
   if (study === undefined) return <p className="second">{words.common.loading}</p>;
@@ -30,6 +34,7 @@ export function AgreementPage() {
   return (
     <div className="stack">
       <Working figures={figures}>{(answer) => <AllPairs answer={answer} study={study} />}</Working>
+      <HeldBackNote listed={listed} />
       <Choice
         legend={words.agreement.whichSessions}
         value={practice ? 'practice' : 'record'}
@@ -39,6 +44,14 @@ export function AgreementPage() {
         ]}
         onChange={(value) => setPractice(value === 'practice')}
       />
+      {!practice && listed?.sessions.some((one) => one.familiarisation === true) && (
+        <Check
+          label={words.afterwards.withFamiliarisation}
+          hint={words.afterwards.withFamiliarisationHint}
+          checked={familiarisation}
+          onChange={setFamiliarisation}
+        />
+      )}
       <PageFoot />
     </div>
   );

@@ -1,5 +1,6 @@
 import { useState } from 'react';
 import type { Problem } from '../../kernel/result.ts';
+import { isForTheRecord } from '../../model/forTheRecord.ts';
 import { Notice } from '../../ui/Notice.tsx';
 import { PageHead } from '../../ui/PageHead.tsx';
 import { Sheet } from '../../ui/Sheet.tsx';
@@ -10,22 +11,23 @@ import { useCurrentStudy } from '../useCurrentStudy.ts';
 import { AllChange } from './AllChange.tsx';
 import { ChangeChoices, type Chosen } from './ChangeChoices.tsx';
 import { ClassChangeView } from './ClassChangeView.tsx';
+import { HeldBackNote } from './HeldBack.tsx';
 import { PageFoot } from './PageFoot.tsx';
 import { useFigures } from './useFigures.ts';
+import { useListed } from './useListed.ts';
 import { useStamp } from './useStamp.ts';
 import { Working } from './Working.tsx';
 
 /** Change from one phase to another: all classes, or the one that the address names. */
 export function ChangePage({ klass }: { readonly klass: string | null }) {
-  const { words, useStored } = useServices();
+  const { words } = useServices();
   const study = useCurrentStudy();
   const stamp = useStamp(study?.id);
   const [chosen, setChosen] = useState<Chosen>({ before: '', after: '', control: '' });
-  const listed = useStored(
-    (store) => (study ? store.listSessions(study.id) : Promise.resolve({ ok: true as const, value: [] })),
-    [study?.id],
+  const listed = useListed(study?.id);
+  const sessions = (listed?.sessions ?? []).filter(
+    (one) => isForTheRecord(one) && listed?.held.has(one.id) !== true,
   );
-  const sessions = listed?.ok ? listed.value.filter(({ practice }) => !practice) : [];
   const inData = [...new Set(sessions.flatMap(({ phases }) => phases.flatMap((phase) => phase ?? [])))];
   const phases = [...new Set([...(study?.phases ?? []), ...inData])].filter((phase) =>
     inData.includes(phase),
@@ -33,8 +35,8 @@ export function ChangePage({ klass }: { readonly klass: string | null }) {
   const classes = [...new Set(sessions.map(({ classroom }) => classroom.name))].sort();
   const conditions = [...new Set(sessions.flatMap(({ condition }) => condition ?? []))];
   const figures = useFigures(questionOf(study?.id ?? '', chosen), study ? stamp : undefined);
-  if (study === undefined || listed === undefined) return <p className="second">{words.common.loading}</p>;
   if (study === null) return <PageHead>{words.afterwards.noStudy}</PageHead>;
+  if (study === undefined || listed === undefined) return <p className="second">{words.common.loading}</p>;
   const instead = (problem: Problem) => (
     <Undecided problem={problem} phases={phases.length} sessions={sessions.length} />
   );
@@ -50,6 +52,7 @@ export function ChangePage({ klass }: { readonly klass: string | null }) {
           );
         }}
       </Working>
+      <HeldBackNote listed={listed} />
       {phases.length > 1 && (
         <Sheet title={words.change.choices} className="not-in-print">
           <ChangeChoices

@@ -10,15 +10,18 @@ import type { SessionAnswer } from '../../worker/questions.ts';
 import { HandOverNotice } from '../files/HandOverNotice.tsx';
 import { useServices } from '../services.ts';
 import { Completeness } from './Completeness.tsx';
+import { HeldBackPage } from './HeldBack.tsx';
 import { LookCorrection } from './LookCorrection.tsx';
 import { NotesSheet } from './NotesSheet.tsx';
 import { PageFoot } from './PageFoot.tsx';
 import { PhaseFigures } from './PhaseFigures.tsx';
+import { PurposeLines } from './PurposeLines.tsx';
 import { Scans } from './Scans.tsx';
 import { SheetPicture } from './SheetPicture.tsx';
 import { Stretches } from './Stretches.tsx';
 import { Timing } from './Timing.tsx';
 import { useFigures } from './useFigures.ts';
+import { useListed } from './useListed.ts';
 import { useWatched } from './useWatched.ts';
 import { WarningLines } from './WarningLines.tsx';
 import { Working } from './Working.tsx';
@@ -27,8 +30,10 @@ import { Working } from './Working.tsx';
 export function SessionPage({ id }: { readonly id: string }) {
   const { words, useStored } = useServices();
   const stored = useStored((store) => store.readSession(id), [id]);
+  const listed = useListed(stored?.ok ? stored.value?.header.study : undefined);
   const entries = stored?.ok ? stored.value?.journal.length : undefined;
-  const figures = useFigures({ kind: 'session', session: id }, entries?.toString());
+  const open = listed?.held.has(id) === false;
+  const figures = useFigures({ kind: 'session', session: id }, open ? entries?.toString() : undefined);
   if (stored === undefined) return <p className="second">{words.common.loading}</p>;
   if (!stored.ok) return <Notice kind="hold">{say(words.problems, stored.problem)}</Notice>;
   if (stored.value === null) {
@@ -39,6 +44,8 @@ export function SessionPage({ id }: { readonly id: string }) {
       </div>
     );
   }
+  if (listed === undefined) return <p className="second">{words.common.loading}</p>;
+  if (!open) return <HeldBackPage />;
   const session = stored.value;
   return <Working figures={figures}>{(answer) => <Session session={session} answer={answer} />}</Working>;
 }
@@ -100,6 +107,7 @@ function Session({ session, answer }: { readonly session: StoredSession; readonl
                   method,
                 })}
         </PageHead>
+        <PurposeLines header={header} />
         <HandOverNotice study={header.study} />
         <WarningLines warnings={details.warnings} continuous={continuous} />
         <Sheet title={words.afterwards.figuresWaitTitle}>
@@ -128,6 +136,7 @@ function Session({ session, answer }: { readonly session: StoredSession; readonl
           ? words.afterwards.nothingTitle
           : words.afterwards.onTaskTitle({ method, phases })}
       </PageHead>
+      <PurposeLines header={header} />
       <div className="not-in-print">
         <Button onClick={() => setShown(false)}>{words.afterwards.hideFigures}</Button>
       </div>

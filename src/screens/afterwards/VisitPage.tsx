@@ -4,9 +4,11 @@ import { Choice } from '../../ui/Choice.tsx';
 import { PageHead } from '../../ui/PageHead.tsx';
 import { useServices } from '../services.ts';
 import { useCurrentStudy } from '../useCurrentStudy.ts';
+import { HeldBackPage } from './HeldBack.tsx';
 import { PageFoot } from './PageFoot.tsx';
 import { PairPage } from './PairPage.tsx';
 import { useFigures } from './useFigures.ts';
+import { useListed } from './useListed.ts';
 import { useStamp } from './useStamp.ts';
 import { Working } from './Working.tsx';
 
@@ -17,12 +19,19 @@ export function VisitPage({ id }: { readonly id: string }) {
   const session = useStored((store) => store.session(id), [id]);
   const stamp = useStamp(study?.id);
   const [chosen, setChosen] = useState<string | null>(null);
-  const practice = session?.ok === true && session.value?.practice === true;
+  const listed = useListed(study?.id);
+  const own = session?.ok === true ? session.value : null;
+  const practice = own?.practice === true;
+  const familiarisation = own?.familiarisation === true;
   const figures = useFigures(
-    { kind: 'agreement', study: study?.id ?? '', visit: id, practice },
+    { kind: 'agreement', study: study?.id ?? '', visit: id, practice, familiarisation },
     session === undefined || !study ? undefined : stamp,
   );
   if (study === null) return <PageHead>{words.afterwards.noStudy}</PageHead>;
+  if (listed === undefined) return <p className="second">{words.common.loading}</p>;
+  const visit = own === null ? id : listed.visitOf(own);
+  if (listed.sessions.some((one) => listed.visitOf(one) === visit && listed.held.has(one.id)))
+    return <HeldBackPage />;
   return (
     <Working figures={figures}>
       {({ pairs }) => {

@@ -5,12 +5,14 @@ import type { ListedSession, VisitGroup } from './visitGroups.ts';
 
 interface Props {
   readonly visit: VisitGroup;
+  /** Sessions that stay closed for now. */
+  readonly held: ReadonlySet<string>;
   readonly byHand: (session: string) => boolean;
   readonly onPair: (session: string, observer: string) => void;
 }
 
 /** One visit: its class and phases, and each observer's record with how complete it is. */
-export function VisitRow({ visit, byHand, onPair }: Props) {
+export function VisitRow({ visit, held, byHand, onPair }: Props) {
   const words = useWords();
   const first = visit.sessions[0]?.summary.id ?? '';
   return (
@@ -24,13 +26,14 @@ export function VisitRow({ visit, byHand, onPair }: Props) {
           <Record
             key={session.summary.id}
             session={session}
+            held={held.has(session.summary.id)}
             byHand={byHand(session.summary.id)}
             onPair={() => onPair(session.summary.id, session.summary.observer.name)}
           />
         ))}
       </ul>
       <div className="visit-way">
-        {visit.sessions.length > 1 && (
+        {visit.sessions.length > 1 && !visit.sessions.some(({ summary }) => held.has(summary.id)) && (
           <a className="button" href={`#/afterwards/visit/${encodeURIComponent(first)}`}>
             {words.afterwards.openAgreement({ records: visit.sessions.length })}
           </a>
@@ -42,15 +45,17 @@ export function VisitRow({ visit, byHand, onPair }: Props) {
 
 function Record({
   session: { summary, counts },
+  held,
   byHand,
   onPair,
 }: {
   readonly session: ListedSession;
+  readonly held: boolean;
   readonly byHand: boolean;
   readonly onPair: () => void;
 }) {
   const words = useWords();
-  const { ended, role, practice, here, handedOver, own, fromPaper } = summary;
+  const { ended, role, practice, here, handedOver, own, fromPaper, familiarisation } = summary;
   const state =
     ended === 'complete' ? words.afterwards.complete : ended === 'early' ? words.afterwards.endedEarly : null;
   // A table never says that it ended; only a record made by a tablet can have been cut off.
@@ -58,10 +63,12 @@ function Record({
   const remarks = [
     role === null ? '' : words.afterwards.role({ role }),
     practice ? words.afterwards.practice : '',
+    familiarisation ? words.afterwards.familiarisation : '',
     fromPaper ? words.paper.fromPaper : '',
     table ? words.afterwards.fromFile : (state ?? words.afterwards.neverEnded),
     here && own > 0 && !handedOver ? words.afterwards.notHandedOver : '',
     byHand ? words.afterwards.moved : '',
+    held ? words.afterwards.heldBack : '',
   ].filter((text) => text !== '');
   return (
     <li className="record">

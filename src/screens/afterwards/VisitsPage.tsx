@@ -1,4 +1,5 @@
 import { useState } from 'react';
+import { heldBack } from '../../journal/heldBack.ts';
 import { pairVisit } from '../../tasks/index.ts';
 import { Button } from '../../ui/Button.tsx';
 import { Notice } from '../../ui/Notice.tsx';
@@ -41,6 +42,7 @@ export function VisitsPage() {
   const lines = pending.state === 'answered' && pending.answer.ok ? pending.answer.value.visits : [];
   const pairings = study?.pairings ?? [];
   const days = visitDays(listed.value, lines, pairings);
+  const held = heldBack(listed.value, pairings);
   const visits = days.flatMap((day) => day.visits);
   const latest = days.find(({ date }) => date !== null)?.date ?? null;
 
@@ -129,6 +131,7 @@ export function VisitsPage() {
                     <VisitRow
                       key={visit.key}
                       visit={visit}
+                      held={held}
                       byHand={(session) => pairings.some((one) => one.session === session)}
                       onPair={(session, observer) => setAsked({ session, observer, visit })}
                     />

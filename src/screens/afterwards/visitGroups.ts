@@ -31,14 +31,18 @@ export function visitDays(
   pairings: Study['pairings'],
 ): Day[] {
   const placeOf = new Map<string, string>();
+  const placeOfVisit = new Map<string, string>();
   for (const line of lines) {
     const key = line.sessions.map((id) => placeOf.get(id)).find((known) => known !== undefined) ?? line.key;
     for (const id of line.sessions) placeOf.set(id, key);
+    for (const visit of line.visitIds) placeOfVisit.set(visit, placeOfVisit.get(visit) ?? key);
   }
   const hand = new Map(pairings.map(({ session, visit }) => [session, visit]));
   const groups = new Map<string, SessionSummary[]>();
   for (const session of sessions) {
-    const key = placeOf.get(session.id) ?? hand.get(session.id) ?? session.visit;
+    // What no line tells of (practice, or closed for now) stands beside the others of its visit.
+    const visit = hand.get(session.id) ?? session.visit;
+    const key = placeOf.get(session.id) ?? placeOfVisit.get(visit) ?? visit;
     groups.set(key, [...(groups.get(key) ?? []), session]);
   }
   const visits = [...groups].map(([key, own]) => groupOf(key, own, lines, hand));

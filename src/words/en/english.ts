@@ -17,12 +17,13 @@ import { remarks, warnings } from './remarks.ts';
 import { starter } from './starter.ts';
 import { study } from './study.ts';
 import { timing } from './timing.ts';
+import { twoRecords } from './twoRecords.ts';
 import { figures, why } from './why.ts';
 
 /** The English catalogue, one file an area. */
 export const english = {
   ...core,
-  afterwards: { ...afterwards, ...corrections, ...timing },
+  afterwards: { ...afterwards, ...corrections, ...timing, ...twoRecords },
   agreement: { ...agreement, ...inStepWords },
   batch,
   before: { ...before, ...purpose },

@@ -1,0 +1,24 @@
+import { Notice } from '../../ui/Notice.tsx';
+import { PageHead } from '../../ui/PageHead.tsx';
+import { useWords } from '../services.ts';
+import { PageFoot } from './PageFoot.tsx';
+import type { Listed } from './useListed.ts';
+
+/** Instead of the other observer's record, while one's own of the same visit has not ended. */
+export function HeldBackPage() {
+  const { afterwards } = useWords();
+  return (
+    <div className="stack">
+      <PageHead>{afterwards.heldBackTitle}</PageHead>
+      <p className="second">{afterwards.heldBackText}</p>
+      <PageFoot />
+    </div>
+  );
+}
+
+/** On pages of many visits: how many records are left out for that reason. */
+export function HeldBackNote({ listed }: { readonly listed: Listed | undefined }) {
+  const { afterwards } = useWords();
+  const n = listed?.held.size ?? 0;
+  return n === 0 ? null : <Notice kind="hold">{afterwards.heldBackSome({ n })}</Notice>;
+}
