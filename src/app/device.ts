@@ -11,7 +11,7 @@ import { vibration } from '../devices/vibration.ts';
 import { wakeLock } from '../devices/wakeLock.ts';
 import { wallClock } from '../devices/wallClock.ts';
 import { toWallTime } from '../kernel/wallTime.ts';
-import { cuePattern } from '../recorder/cuePatterns.ts';
+import { cuePattern, headsUpPattern } from '../recorder/cuePatterns.ts';
 import { TickCheck } from '../recorder/tickCheck.ts';
 import type { Device } from '../screens/services.ts';
 
@@ -27,10 +27,17 @@ export function device(): Device {
       testSound.play(cuePattern('look'));
       return { played: true, output: unlocked.value.output, latencyMs: unlocked.value.latencyMs };
     },
-    sayAloud: (words, volume) => {
-      const here = voice.available();
-      if (here) voice.speak(words, volume);
-      return here;
+    hasVoice: voice.available,
+    tryHeadsUp: async (words, cues) => {
+      if (voice.available()) {
+        voice.speak(words, cues.volume);
+        return 'voice';
+      }
+      testSound.settle(cues);
+      const unlocked = await testSound.unlock();
+      if (!unlocked.ok) return 'nothing';
+      testSound.play(headsUpPattern);
+      return 'tones';
     },
     tellsOutputChanges: tellsOutputChanges(),
     wakeLock: tryWakeLock,

@@ -1,9 +1,11 @@
 import { ok, problem, type Result } from '../kernel/result.ts';
+import { usualManner } from '../model/manners.ts';
+import type { Manner } from '../model/observer.ts';
 import type { SessionHeader } from '../model/session.ts';
 import { createLiveSession } from '../recorder/createLiveSession.ts';
 import type { LiveOptions, LiveSession } from '../recorder/liveSession.ts';
 import type { RecorderPorts } from '../recorder/ports.ts';
-import { headsUpWords } from '../screens/room/headsUpWords.ts';
+import { headsUpWords } from '../screens/plan/headsUpWords.ts';
 import type { OpenOptions, RecorderDesk } from '../screens/services.ts';
 import type { Store } from '../tasks/ports.ts';
 import type { CoreWords } from '../words/coreWords.ts';
@@ -23,6 +25,11 @@ export function recorderDesk(
     for (const listener of listeners) listener();
   };
 
+  const mannerOf = async ({ observer }: SessionHeader): Promise<Manner> => {
+    const found = await store.observer(observer.id);
+    return (found.ok ? found.value?.manner : undefined) ?? usualManner;
+  };
+
   const begin = (header: SessionHeader, options: LiveOptions): Result<LiveSession> => {
     live?.session.dispose();
     const ports: RecorderPorts = {
@@ -32,18 +39,23 @@ export function recorderDesk(
         pack: () => store.pack(header.id),
       },
     };
-    const headsUp = headsUpWords(header, words);
-    live = { session: createLiveSession(header, ports, { headsUp, ...options }), id: header.id };
+    const says = header.schedule.kind === 'laid' ? header.schedule.protocol.cues.headsUp?.says : undefined;
+    const session = createLiveSession(header, ports, {
+      ...(says === undefined ? {} : { headsUp: headsUpWords(says, header, words) }),
+      ...options,
+    });
+    live = { session, id: header.id };
     tell();
-    return ok(live.session);
+    return ok(session);
   };
 
   return {
     current: () => live?.session ?? null,
     currentId: () => live?.id ?? null,
     open: async (header: SessionHeader, { checks, anyway }: OpenOptions) => {
+      const manner = await mannerOf(header);
       if (live !== null && live.session.snapshot().phase !== 'ended') return problem('session.running');
-      return begin(header, { checks, anyway });
+      return begin(header, { manner, checks, anyway });
     },
     resume: async (session) => {
       if (live?.id === session) return ok(live.session);
@@ -52,7 +64,9 @@ export function recorderDesk(
       if (read.value === null) return problem('session.notThere');
       const { header, journal } = read.value;
       if (journal.some((entry) => entry.kind === 'ended')) return problem('session.ended');
-      return begin(header, { checks: [], anyway: false, resumeFrom: journal });
+      const manner = await mannerOf(header);
+      if (live?.id === session) return ok(live.session);
+      return begin(header, { manner, checks: [], anyway: false, resumeFrom: journal });
     },
     close: () => {
       live?.session.dispose();

@@ -34,8 +34,10 @@ export interface Device {
     readonly output: string | null;
     readonly latencyMs: number | null;
   }>;
-  /** Says a word at once by a voice that is on the tablet itself; false where there is none. */
-  sayAloud(words: string, volume: number): boolean;
+  /** True where a voice is on the tablet itself. Some browsers know their voices only a moment after the start. */
+  hasVoice(): boolean;
+  /** What comes ahead of a look: these words by that voice, or else the soft tones. Called in a tap. */
+  tryHeadsUp(words: string, cues: CueSettings): Promise<'voice' | 'tones' | 'nothing'>;
   /** True where the browser tells when an earpiece is pulled out. */
   readonly tellsOutputChanges: boolean;
   wakeLock(): Promise<'held' | 'refused' | 'missing'>;

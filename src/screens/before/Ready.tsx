@@ -15,6 +15,7 @@ import { CheckRow } from './CheckRow.tsx';
 import { useTabletFacts } from './checks.ts';
 import { FrozenSchedule } from './FrozenSchedule.tsx';
 import { HandVisit } from './HandVisit.tsx';
+import { HeadsUpCheck } from './HeadsUpCheck.tsx';
 import { ObserverCheck, type Who } from './ObserverCheck.tsx';
 import { type Heard, SoundCheck } from './SoundCheck.tsx';
 import { TabletChecks, useTabletLines } from './TabletChecks.tsx';
@@ -88,7 +89,12 @@ function Checks({ plan, as }: { readonly plan: VisitPlan; readonly as: Role | nu
       <Sheet flush>
         <ul>
           <ObserverCheck study={plan.study.id} observers={observers} who={who} onChange={setWho} />
-          <SoundCheck cues={protocol.cues} heard={heard} onHeard={setHeard} />
+          <SoundCheck
+            cues={protocol.cues}
+            heard={heard}
+            onHeard={setHeard}
+            headsUp={<HeadsUpCheck visit={plan} />}
+          />
           <CheckRow
             name={words.before.present}
             state={present ? 'ready' : 'hold'}

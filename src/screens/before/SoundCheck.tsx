@@ -1,4 +1,4 @@
-import { useState } from 'react';
+import { type ReactNode, useState } from 'react';
 import type { CueSettings } from '../../model/protocol.ts';
 import { Button } from '../../ui/Button.tsx';
 import { useServices } from '../services.ts';
@@ -11,13 +11,14 @@ interface Props {
   readonly cues: CueSettings;
   readonly heard: Heard;
   readonly onHeard: (heard: Heard) => void;
+  /** What is said of the words ahead of a look. */
+  readonly headsUp?: ReactNode;
 }
 
 /** Only the observer's ear can tell whether the sound comes out where it should. */
-export function SoundCheck({ cues, heard, onHeard }: Props) {
+export function SoundCheck({ cues, heard, onHeard, headsUp }: Props) {
   const { words, device } = useServices();
   const [output, setOutput] = useState('');
-  const [spoken, setSpoken] = useState<'not asked' | 'said' | 'no voice'>('not asked');
   const [lateMs, setLateMs] = useState<number | null>(null);
   const play = async () => {
     const tone = await device.playTestTone(cues);
@@ -53,19 +54,7 @@ export function SoundCheck({ cues, heard, onHeard }: Props) {
     >
       <p>{text}</p>
       {lateMs !== null && lateMs >= 80 && <p className="small">{words.before.soundLate({ ms: lateMs })}</p>}
-      {cues.headsUp !== undefined && (
-        <p className="small">
-          {words.before.voice({ state: spoken })}{' '}
-          <Button
-            look="quiet"
-            onClick={() =>
-              setSpoken(device.sayAloud(words.before.voiceSample, cues.volume) ? 'said' : 'no voice')
-            }
-          >
-            {words.before.voiceTry}
-          </Button>
-        </p>
-      )}
+      {headsUp}
       {!device.tellsOutputChanges && <p className="small">{words.before.soundBlind}</p>}
     </CheckRow>
   );

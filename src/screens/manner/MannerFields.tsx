@@ -1,3 +1,4 @@
+import { changedManner } from '../../model/manners.ts';
 import type { Manner } from '../../model/observer.ts';
 import { Check, Choice } from '../../ui/Choice.tsx';
 import { useCoreWords } from '../coreServices.ts';
@@ -17,8 +18,7 @@ export function MannerFields({ manner, onChange, noEyesUp = null }: Props) {
       <Choice<Manner['layout']>
         legend={room.layout}
         value={noEyesUp === null ? manner.layout : 'plan'}
-        // Without a glance at the glass a prompt is easily passed over: with eyes-up it is recalled, until somebody says no.
-        onChange={(layout) => onChange({ ...manner, layout, remind: layout === 'eyes-up' || manner.remind })}
+        onChange={(layout) => onChange(changedManner(manner, { layout }))}
         options={[
           { value: 'plan', label: room.layoutPlan, hint: room.layoutPlanHint },
           {
@@ -34,8 +34,8 @@ export function MannerFields({ manner, onChange, noEyesUp = null }: Props) {
         value={manner.hand}
         onChange={(hand) => onChange({ ...manner, hand })}
         options={[
-          { value: 'right', label: room.handRight },
-          { value: 'left', label: room.handLeft },
+          { value: 'right', label: room.handRight, hint: room.handRightHint },
+          { value: 'left', label: room.handLeft, hint: room.handLeftHint },
         ]}
       />
       <div className="choice-options">

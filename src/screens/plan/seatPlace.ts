@@ -1,9 +1,9 @@
 import type { SeatingPlan } from '../../model/seatingPlan.ts';
 import { turned } from './turned.ts';
 
-/** A seat as somebody would say where it is: aisles do not count. */
+/** A seat as its observer would say where it is: aisles do not count. */
 export interface SeatPlace {
-  /** From the far end of the room, 1-based, as the plan shows it to the observer. */
+  /** The row nearest to the observer is 1. */
   readonly row: number;
   /** From the left of its row, 1-based, free seats included. */
   readonly place: number;
@@ -16,7 +16,7 @@ export function seatPlace(plan: SeatingPlan, seat: string): SeatPlace | null {
   const { seats } = turned(plan);
   const found = seats.find(({ id }) => id === seat);
   if (found === undefined) return null;
-  const rows = [...new Set(seats.map(({ y }) => y))];
+  const nearest = [...new Set(seats.map(({ y }) => y))].reverse();
   const row = seats.filter(({ y }) => y === found.y);
-  return { row: rows.indexOf(found.y) + 1, place: row.indexOf(found) + 1, of: row.length };
+  return { row: nearest.indexOf(found.y) + 1, place: row.indexOf(found) + 1, of: row.length };
 }

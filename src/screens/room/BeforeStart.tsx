@@ -10,6 +10,7 @@ import { secondOfDay } from './together/agreedSecond.ts';
 import { StartTogether } from './together/StartTogether.tsx';
 import { TickCheckPage } from './together/TickCheckPage.tsx';
 import { useTogether } from './together/useTogether.ts';
+import { useWhyNoEyesUp } from './useManner.ts';
 import { useLive, useRoom } from './useRoom.ts';
 
 /** The page of the one tap that begins (or goes on with) a session; the tap also unlocks the sound. */
@@ -41,6 +42,7 @@ export function BeforeStart() {
     setProblem(say(problems, begun.problem));
     setStarting(false);
   };
+  const noEyesUp = useWhyNoEyesUp();
   const minutes = Math.round(partLengths(plan).reduce((sum, ms) => sum + ms, 0) / 60_000);
   if (settling && together.checking && schedule.kind === 'laid')
     return (
@@ -86,6 +88,7 @@ export function BeforeStart() {
         {room.readyAmount({ unit, n: s.looks, minutes })}
         {s.silent && ` · ${room.readySilent}`}
       </p>
+      {noEyesUp !== null && <p className="second">{noEyesUp}</p>}
       {settling && <StartTogether together={together} />}
       {problem !== null && <Notice kind="hold">{problem}</Notice>}
       <Button look="main" className="start" disabled={starting} onClick={begin}>

@@ -2,6 +2,7 @@ import { createContext, useContext } from 'react';
 import type { Result } from '../../kernel/result.ts';
 import { usualManner } from '../../model/manners.ts';
 import type { Manner } from '../../model/observer.ts';
+import { useCoreWords } from '../coreServices.ts';
 import { useFacts } from './RoomFacts.tsx';
 
 interface MannerOfObserver {
@@ -24,4 +25,13 @@ export function useManner(): MannerOfObserver {
 export function useEyesUp(): boolean {
   const { zones } = useFacts();
   return useManner().manner.layout === 'eyes-up' && zones !== null;
+}
+
+/** Why an observer who wants eyes-up cannot have it in this session; null for all others. */
+export function useWhyNoEyesUp(): string | null {
+  const { room } = useCoreWords();
+  const { method, zones } = useFacts();
+  const { layout } = useManner().manner;
+  if (layout !== 'eyes-up' || zones !== null) return null;
+  return method === 'headcount' ? room.eyesUpNotCount : room.eyesUpNot;
 }

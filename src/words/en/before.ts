@@ -152,14 +152,13 @@ export const before = {
     'You did not hear it. Look at the silent switch, the volume and the plug; the screen cue goes on without sound.',
   soundLoud: 'The class could hear it. Plug the earpiece in, or silence the prompts: the screen cue goes on.',
   soundStuck: 'The tablet gave no sound. The screen cue goes on without it.',
-  voice: ({ state }: { state: 'not asked' | 'said' | 'no voice' }) =>
-    state === 'no voice'
-      ? 'No voice is on this tablet: a soft tone comes ahead of each look instead.'
-      : state === 'said'
-        ? 'A word is spoken ahead of each look, in both ears; the prompt itself stays a tone.'
-        : 'A word is to be spoken ahead of each look.',
-  voiceTry: 'Try the voice',
-  voiceSample: 'Otter 7',
+  headsUpVoice: ({ example }: { example: string }) =>
+    `Ahead of each look a voice on this tablet says it, for example “${example}”, in both ears, also where the tones go to one. The prompt itself stays a tone.`,
+  headsUpRows: 'The row nearest to you is the first; places count from the left.',
+  headsUpNoVoice:
+    'No voice is on this tablet itself, and none is fetched: ahead of each look two soft rising tones take its place.',
+  headsUpTry: ({ voice }: { voice: boolean }) => (voice ? 'Hear the voice' : 'Hear the two tones'),
+  headsUpStuck: 'The tablet gave no sound.',
   soundBlind:
     'This browser cannot tell when the earpiece is pulled out: keep the volume low and the silence button in mind.',
   soundLate: ({ ms }: { ms: number }, f: F) =>

@@ -4,6 +4,29 @@ import type { Format } from '../format.ts';
 
 type F = Pick<Format, 'whole'>;
 
+const nth = [
+  'first',
+  'second',
+  'third',
+  'fourth',
+  'fifth',
+  'sixth',
+  'seventh',
+  'eighth',
+  'ninth',
+  'tenth',
+  'eleventh',
+  'twelfth',
+  'thirteenth',
+  'fourteenth',
+  'fifteenth',
+  'sixteenth',
+  'seventeenth',
+  'eighteenth',
+  'nineteenth',
+  'twentieth',
+];
+
 /** How each code's answer is felt and heard, in the order of the code set. */
 const pulses = [
   'one short pulse',
@@ -22,12 +45,15 @@ export const roomLayout = {
   layoutPlan: 'seating plan in the middle',
   layoutPlanHint: 'For any number of codes.',
   layoutEyesUp: 'eyes-up',
-  layoutEyesUpHint: 'Large fixed places, felt and heard: your eyes stay with the children.',
-  eyesUpNot: 'Eyes-up has room for four targets; this session has more, so the seating plan stays.',
-  eyesUpNotCount: 'A headcount needs its figures in view, so the seating plan stays.',
+  layoutEyesUpHint: 'Two halves or four corners, felt and heard: your eyes stay with the children.',
+  eyesUpNot: 'Eyes-up has five places at most; this session needs more, so the seating plan stays.',
+  eyesUpNotCount:
+    'Eyes-up is not for headcounts: counting needs its figures in view, so the seating plan stays.',
   hand: 'Hand',
   handRight: 'right-handed',
-  handLeft: 'left-handed (mirrored)',
+  handRightHint: 'On-task and undo lie on the left, under the thumb that holds the tablet.',
+  handLeft: 'left-handed',
+  handLeftHint: 'The same, mirrored.',
   confirm: 'Answer each touch',
   confirmHint:
     'By a low click in the earpiece and a short vibration, different for each code. Off if the class can hear.',
@@ -54,7 +80,15 @@ export const roomLayout = {
       ? 'Under the cover nothing can be read, prompts go on, and each code lies where eyes-up has it. Hold the folded corner to uncover.'
       : 'Under the cover nothing can be read and prompts go on. Here it has no places to touch: mark by keys, or uncover. Hold the folded corner to uncover.',
 
-  // ahead of a look
-  spokenSeat: ({ row, place }: { row: number; place: number }, f: F) =>
-    `row ${f.whole(row)}, place ${f.whole(place)}`,
+  // spoken ahead of a look
+  spokenChild: ({ child }: { child: string }) =>
+    child
+      .replace(/[-_./]+/g, ' ')
+      .replace(/(^|\D)0+(?=\d)/g, '$1')
+      .replace(/(\p{L})(\d)/gu, '$1 $2')
+      .trim(),
+  spokenSeat: ({ row, place, of }: { row: number; place: number; of: number }, f: F) =>
+    of === 1
+      ? `row ${f.whole(row)}`
+      : `row ${f.whole(row)}, ${nth[place - 1] ?? f.whole(place)} from the left`,
 };

@@ -18,7 +18,8 @@ const wall = '2026-11-03T10:41:00.000+00:00' as WallTime;
 export function fakeDevice(changes: Partial<Device> = {}): Device {
   return {
     playTestTone: async () => ({ played: true, output: null, latencyMs: 20 }),
-    sayAloud: () => false,
+    hasVoice: () => false,
+    tryHeadsUp: async () => 'tones',
     tellsOutputChanges: true,
     wakeLock: async () => 'held',
     room: async () => ({ free: 2_000_000_000, kept: true }),
