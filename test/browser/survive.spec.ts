@@ -1,12 +1,11 @@
 import type { Page } from '@playwright/test';
 import { seededRandom } from '../../src/kernel/random.ts';
+import type { Method, Protocol } from '../../src/model/protocol.ts';
 import { durabilities, journalOnDisk, sessionOf, watchDurability } from './support/kept.ts';
 import { goIn, start } from './support/observing.ts';
 import { picture } from './support/picture.ts';
 import { shortVisitFile } from './support/shortVisit.ts';
 import { expect, test } from './support/test.ts';
-
-const kills = 20;
 
 test.use({ tabletOptions: { prepare: watchDurability } });
 
@@ -33,12 +32,11 @@ async function shownAsKept(page: Page): Promise<{ most: number }> {
 }
 
 /** Touches one target after the other until the browser is gone, faster than any observer. */
-function hammer(page: Page): Promise<unknown> {
+function hammer(page: Page, targets: readonly string[]): Promise<unknown> {
   return page
-    .evaluate(async () => {
-      const targets = ['off-task', 'on-task'];
+    .evaluate(async (names) => {
       for (let i = 0; ; i++) {
-        const name = targets[i % 2] ?? '';
+        const name = names[i % names.length] ?? '';
         const button = [...document.querySelectorAll('button')].find((b) => b.textContent?.startsWith(name));
         const box = button?.getBoundingClientRect();
         if (button && box) {
@@ -55,57 +53,88 @@ function hammer(page: Page): Promise<unknown> {
         }
         await new Promise((next) => setTimeout(next, 40));
       }
-    })
+    }, targets)
     .catch(() => undefined);
 }
 
-test(`nothing that was shown as kept is lost when the browser is killed at ${kills} random moments`, async ({
-  tablet,
-}) => {
-  test.setTimeout(240_000);
-  const random = seededRandom('kills');
-  let page = await tablet.visitOnce();
-  await goIn(
-    page,
-    await shortVisitFile({ key: 'kills', protocol: { partLength: { kind: 'rounds', rounds: 400 } } }),
-  );
-  const session = sessionOf(page);
-  let written = 0;
-  let before = 0;
-  for (let kill = 0; kill < kills; kill++) {
-    const shown = await shownAsKept(page);
-    if (kill === 0) await start(page);
-    else await page.getByRole('button', { name: 'Go on' }).click();
-    // Only once the schedule runs are there marks to lose.
-    await expect(page.locator('.look-lead', { hasText: 'look at' })).toBeVisible({ timeout: 20_000 });
-    void hammer(page);
-    const from = shown.most;
-    await expect.poll(() => shown.most, { intervals: [5] }).toBeGreaterThan(from + Math.floor(random() * 12));
-    const durability = await durabilities(page);
-    expect(new Set(durability)).toEqual(new Set(['strict']));
-    await tablet.kill();
-    const promised = shown.most;
+interface Killed {
+  readonly method: Method;
+  readonly kills: number;
+  readonly targets: readonly string[];
+  /** What stands above the name once the schedule runs. */
+  readonly lead: RegExp;
+  readonly protocol?: Partial<Protocol>;
+}
 
-    await tablet.launch();
-    page = await tablet.openApp({ hash: `/room/${session}` });
-    await expect(page.getByRole('button', { name: 'Go on' })).toBeVisible();
+const codes = ['off-task', 'on-task'];
+const everyMethod: readonly Killed[] = [
+  { method: 'momentary', kills: 20, targets: codes, lead: /look at/ },
+  { method: 'partial', kills: 3, targets: codes, lead: /watch/ },
+  { method: 'whole', kills: 3, targets: codes, lead: /watch/ },
+  { method: 'headcount', kills: 3, targets: ['one more', 'all on-task', 'one fewer'], lead: /How many/ },
+  {
+    method: 'duration',
+    kills: 3,
+    targets: codes,
+    lead: /watch/,
+    protocol: { rotation: { kind: 'one' }, partLength: { kind: 'minutes', minutes: 60 } },
+  },
+];
+
+for (const { method, kills, targets, lead, protocol = {} } of everyMethod)
+  test(`nothing of a ${method} record that was shown as kept is lost when the browser is killed at ${kills} random moments`, async ({
+    tablet,
+  }) => {
+    test.setTimeout(240_000);
+    const random = seededRandom(`kills ${method}`);
+    let page = await tablet.visitOnce();
+    await goIn(
+      page,
+      await shortVisitFile({
+        key: `kills ${method}`,
+        protocol: { method, partLength: { kind: 'rounds', rounds: 400 }, ...protocol },
+      }),
+    );
+    const session = sessionOf(page);
+    let before = 0;
+    for (let kill = 0; kill < kills; kill++) {
+      const shown = await shownAsKept(page);
+      if (kill === 0) await start(page);
+      else await page.getByRole('button', { name: 'Go on' }).click();
+      // Only once the schedule runs are there marks to lose.
+      await expect(page.locator('.look-lead', { hasText: lead })).toBeVisible({ timeout: 20_000 });
+      void hammer(page, targets);
+      const from = shown.most;
+      await expect
+        .poll(() => shown.most, { intervals: [5] })
+        .toBeGreaterThan(from + Math.floor(random() * 12));
+      expect(new Set(await durabilities(page))).toEqual(new Set(['strict']));
+      await tablet.kill();
+      const promised = shown.most;
+
+      await tablet.launch();
+      page = await tablet.openApp({ hash: `/room/${session}` });
+      await expect(page.getByRole('button', { name: 'Go on' })).toBeVisible();
+      const journal = await journalOnDisk(page, session);
+      expect(journal.length).toBeGreaterThanOrEqual(promised);
+      expect(journal.length).toBeGreaterThan(before);
+      expect(journal.map((entry) => entry.seq)).toEqual(journal.map((_, i) => i));
+      before = journal.length;
+    }
     const journal = await journalOnDisk(page, session);
-    expect(journal.length).toBeGreaterThanOrEqual(promised);
-    expect(journal.length).toBeGreaterThan(before);
-    expect(journal.map((entry) => entry.seq)).toEqual(journal.map((_, i) => i));
-    before = journal.length;
-    written += 1;
-  }
-  expect(written).toBe(kills);
-  const journal = await journalOnDisk(page, session);
-  // The schedule never shifted: every cue was planned on the grid of three seconds.
-  const planned = journal.flatMap((entry) =>
-    entry.kind === 'cued' ? [entry.planned - entry.interval * 3000] : [],
-  );
-  expect(new Set(planned)).toEqual(new Set([0]));
-  // What fell in between is written down as gaps.
-  expect(journal.filter((entry) => entry.kind === 'gap' && entry.cause === 'closed').length).toBe(kills - 1);
-});
+    // The schedule never shifted: every cue was planned on the grid of three seconds.
+    const first = method === 'momentary' || method === 'headcount' ? 1 : 0;
+    const planned = journal.flatMap((entry) =>
+      entry.kind === 'cued' && entry.cue !== 'record'
+        ? [entry.planned - (entry.interval - 1 + first) * 3000]
+        : [],
+    );
+    expect(new Set(planned)).toEqual(new Set([0]));
+    // What fell in between is written down as gaps.
+    expect(journal.filter((entry) => entry.kind === 'gap' && entry.cause === 'closed').length).toBe(
+      kills - 1,
+    );
+  });
 
 test('a session that was cut off is offered on the next start and can be closed for good', async ({
   tablet,
