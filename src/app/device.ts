@@ -12,7 +12,6 @@ import { wakeLock } from '../devices/wakeLock.ts';
 import { wallClock } from '../devices/wallClock.ts';
 import { toWallTime } from '../kernel/wallTime.ts';
 import { cuePattern, headsUpPattern } from '../recorder/cuePatterns.ts';
-import { TickCheck } from '../recorder/tickCheck.ts';
 import type { Device } from '../screens/services.ts';
 
 /** What screens ask of the tablet, from the adapters. */
@@ -56,8 +55,7 @@ export function device(): Device {
     openCamera: async (shown) => (await import('../devices/camera.ts')).openCamera(shown),
     pixelsOf: async (picture, edge) => (await import('../devices/pixelsOf.ts')).pixelsOf(picture, edge),
     copyText: async (text) => (await import('../devices/copyText.ts')).copyText(text),
-    tickCheck: (nudgeMs) =>
-      new TickCheck({ audio: audio(), page: pageClock, wall: wallClock, timer }, nudgeMs),
+    tickPorts: () => ({ audio: audio(), page: pageClock, wall: wallClock, timer }),
     wakeIn: timer.wakeIn,
   };
 }

@@ -36,7 +36,8 @@ interface LaidTick {
   readonly stop: Stop;
 }
 
-type Ports = Pick<RecorderPorts, 'audio' | 'page' | 'wall' | 'timer'>;
+/** What a tick check is handed; its audio is its own, and is let go of with it. */
+export type TickPorts = Pick<RecorderPorts, 'audio' | 'page' | 'wall' | 'timer'>;
 
 /**
  * Ticks on each second of this tablet's wall clock, as the nudge says that it is to be read, so that two tablets can be
@@ -54,7 +55,7 @@ export class TickCheck {
   private readonly listeners = new Set<() => void>();
 
   constructor(
-    private readonly ports: Ports,
+    private readonly ports: TickPorts,
     nudgeMs = 0,
   ) {
     this.nudgedBy = nudgeMs;

@@ -4,7 +4,7 @@ import type { WallTime } from '../kernel/units.ts';
 import type { CueSettings } from '../model/protocol.ts';
 import type { SessionHeader } from '../model/session.ts';
 import type { LiveSession } from '../recorder/liveSession.ts';
-import type { TickCheck } from '../recorder/tickCheck.ts';
+import type { TickPorts } from '../recorder/tickCheck.ts';
 import type { Deps, ExportedFile, Store, StoreReader } from '../tasks/ports.ts';
 import type { CoreWords } from '../words/coreWords.ts';
 import type { Ask } from '../worker/questions.ts';
@@ -60,8 +60,8 @@ export interface Device {
   pixelsOf(picture: Blob, edge: number): Promise<Pixels | null>;
   /** False where the browser does not let it. */
   copyText(text: string): Promise<boolean>;
-  /** Ticks on each second of this tablet's wall clock, read so many ms later than it shows. Silent until it is started. */
-  tickCheck(nudgeMs: number): TickCheck;
+  /** Sound and clocks for one tick check; silent until it is started. */
+  tickPorts(): TickPorts;
   /** Calls once, after about so long. Returns the way to stop it. */
   wakeIn(ms: number, wake: () => void): () => void;
 }

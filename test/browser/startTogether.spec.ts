@@ -33,11 +33,12 @@ test('two tablets whose clocks are apart are nudged into one and begin at the ag
 }) => {
   test.setTimeout(150_000);
   const slow = await anotherTablet({
-    prepare: (context) =>
-      context.addInitScript((ms) => {
+    prepare: async (context) => {
+      await context.addInitScript((ms) => {
         const real = Date.now;
         Date.now = () => real() - ms;
-      }, slowMs),
+      }, slowMs);
+    },
   });
   const [one, two] = [await tablet.openApp(), await slow.openApp()];
   const file = await shortVisitFile({

@@ -19,8 +19,8 @@ export const startTogether = {
   agreedNotATime: 'This is no time of day. Type it as 10:42:00.',
   secondEarlier: '10 s earlier',
   secondLater: '10 s later',
-  clockNow: ({ time }: { time: string }) => `It is ${time} on this tablet.`,
-  secondIn: ({ ms }: { ms: number }, f: F) => `${f.clock(ms)} from now`,
+  secondIn: ({ time, ms }: { time: string; ms: number }, f: F) =>
+    `It is ${time} now: ${f.clock(ms)} minutes are left.`,
   secondGone: 'This second is too near or gone. Agree on a later one.',
   startAt: ({ time }: { time: string }) => `Start at ${time}`,
 
@@ -31,7 +31,7 @@ export const startTogether = {
   tickCheck: 'Tick check with the other tablet',
   tickOpen: 'Tick check …',
   tickNone: 'The clocks of the two tablets have not been compared.',
-  tickKept: ({ ms }: { ms: number }, f: F) => `Tick check kept: ${readAs(ms, f)}`,
+  tickKept: ({ ms }: { ms: number }, f: F) => `Tick check kept. ${readAs(ms, f)}`,
   tickHow:
     'Start the ticks on both tablets and hold them, or the earpieces, together. Nudge one of them, and only one, until the ticks are one.',
   tickTenth: 'Each tenth second has a lower tone after its tick: these have to fall together, too.',
@@ -53,7 +53,7 @@ export const startTogether = {
 
 /** How this tablet's clock is read after a nudge. */
 function readAs(ms: number, f: F): string {
-  if (ms === 0) return 'this tablet’s clock is read as it shows.';
+  if (ms === 0) return 'This tablet’s clock is read as it shows.';
   const by = `${f.fixed(Math.abs(ms) / 1000, 2)} s`;
-  return `this tablet’s clock is read ${by} ${ms > 0 ? 'later' : 'earlier'} than it shows.`;
+  return `This tablet’s clock is read ${by} ${ms > 0 ? 'later' : 'earlier'} than it shows.`;
 }

@@ -288,7 +288,7 @@ test('the frame of the visual cue is shown once a cue, where it is asked for', (
 
 test('the start waits for a tap, and tells two observers when to touch', async () => {
   const { live } = renderRoom(snapshotOf(header, [], -1, { phase: 'ready' }));
-  screen.getByText(/Both observers touch on “one”/);
+  await screen.findByText(/Both observers touch on “one”/);
   live.begun = problem('session.otherTab');
   await userEvent.setup().click(button('Start'));
   expect(live.calls).toEqual([['begin']]);

@@ -6,7 +6,6 @@ import type { EntryBody } from '../../../src/journal/entry.ts';
 import { problem } from '../../../src/kernel/result.ts';
 import type { WallTime } from '../../../src/kernel/units.ts';
 import type { SessionHeader } from '../../../src/model/session.ts';
-import { TickCheck } from '../../../src/recorder/tickCheck.ts';
 import { likelySecond, secondOfDay, typedSecond } from '../../../src/screens/room/together/agreedSecond.ts';
 import { FakeAudio } from '../../recorder/fakes/fakeAudio.ts';
 import { HandClock } from '../../recorder/fakes/handClock.ts';
@@ -23,50 +22,51 @@ const press = (name: string | RegExp) => userEvent.setup().click(button(name));
 const clock = (time: string) => Date.parse(`2026-11-03T${time}+00:00`);
 
 /** Before the tap that begins, with a tick check whose clock the test turns. */
-function before(more: Partial<SessionHeader> = {}, resuming = false) {
+async function before(more: Partial<SessionHeader> = {}, resuming = false) {
   const hand = new HandClock();
   const audio = new FakeAudio(hand);
   const device = fakeDevice({
-    tickCheck: (nudgeMs) =>
-      new TickCheck({ audio, page: hand.pageClock, wall: hand.wallClock, timer: hand.timer }, nudgeMs),
+    tickPorts: () => ({ audio, page: hand.pageClock, wall: hand.wallClock, timer: hand.timer }),
   });
   const header = headerOf({}, ['before'], { plan, ...more });
   const view = renderRoom(snapshotOf(header, [], -1, { phase: 'ready', resuming }), { device });
+  // What two observers need is loaded when it is needed.
+  await screen.findByRole('button', { name: /^(Start|Go on)/ });
   return { ...view, hand, audio };
 }
 
-test('alone there is nobody to begin with: no tick check, no agreed second', () => {
-  before({ role: null });
+test('alone there is nobody to begin with: no tick check, no agreed second', async () => {
+  await before({ role: null });
   expect(screen.queryByRole('button', { name: /Tick check/ })).toBeNull();
   expect(screen.queryByRole('radio')).toBeNull();
 });
 
 test('a session that is taken up again begins by its own journal', async () => {
-  const { live } = before({}, true);
+  const { live } = await before({}, true);
   expect(screen.queryByRole('radio')).toBeNull();
   await press('Go on');
   expect(live.calls).toEqual([['begin']]);
 });
 
-test('a familiarisation visit is called one', () => {
-  before({ familiarisation: true });
+test('a familiarisation visit is called one', async () => {
+  await before({ familiarisation: true });
   screen.getByText('Class Otter · Next child, every 15 seconds · familiarisation visit');
 });
 
 test('two observers begin on a shared count unless they say otherwise', async () => {
-  const { live } = before();
+  const { live } = await before();
   await press('Start');
   expect(live.calls).toEqual([['begin']]);
 });
 
 test('an agreed second is offered, stepped and typed, and is what the button says', async () => {
   const user = userEvent.setup();
-  const { live } = before({ role: 'second' });
+  const { live } = await before({ role: 'second' });
   await user.click(screen.getByRole('radio', { name: /agreed second/ }));
   expect(button('Start at 10:42:00').textContent).toBe('Start at 10:42:00');
   await press('10 s later');
   button('Start at 10:42:10');
-  screen.getByText(/1:10 from now/);
+  screen.getByText('It is 10:41:00 now: 1:10 minutes are left.');
   await press('10 s earlier');
   await press('10 s earlier');
   button('Start at 10:41:50');
@@ -80,13 +80,13 @@ test('an agreed second is offered, stepped and typed, and is what the button say
 });
 
 test('the planned start is offered where it is near', async () => {
-  before({ plannedStart: '2026-11-03T10:50:00.000+00:00' as WallTime });
+  await before({ plannedStart: '2026-11-03T10:50:00.000+00:00' as WallTime });
   await userEvent.setup().click(screen.getByRole('radio', { name: /agreed second/ }));
   button('Start at 10:50:00');
 });
 
 test('a second that is too near is refused in words, and may be chosen anew', async () => {
-  const { live } = before();
+  const { live } = await before();
   live.begun = problem('recorder.startTooNear', { seconds: 4 });
   await userEvent.setup().click(screen.getByRole('radio', { name: /agreed second/ }));
   await press('Start at 10:42:00');
@@ -95,31 +95,31 @@ test('a second that is too near is refused in words, and may be chosen anew', as
 });
 
 test('tick check: started, nudged by touch and by key, kept, and handed to the session', async () => {
-  const { live, audio, hand } = before();
+  const { live, audio, hand } = await before();
   await press(/Tick check/);
   await press('Start the ticks');
   await hand.advance(2500);
   expect(audio.heard().length).toBe(2);
   for (let i = 0; i < 4; i++) await press('1 s earlier');
   await press('1 s later');
-  screen.getByText('this tablet’s clock is read 3.00 s later than it shows.');
+  screen.getByText('This tablet’s clock is read 3.00 s later than it shows.');
   for (const key of ['ArrowRight', 'ArrowRight', 'ArrowLeft', 'ArrowUp', 'ArrowDown', 'ArrowRight'])
     fireEvent.keyDown(screen.getByRole('heading', { level: 1 }), { key });
-  screen.getByText('this tablet’s clock is read 3.04 s later than it shows.');
+  screen.getByText('This tablet’s clock is read 3.04 s later than it shows.');
   await press('The ticks are one');
   expect(audio.closed).toBe(true);
-  screen.getByText(/Tick check kept: .* 3\.04 s later/);
+  screen.getByText(/Tick check kept\. .* 3\.04 s later/);
   // The clock of 10:41:00 is read as 10:41:03.04: both tablets offer the same minute.
   await press('Start at 10:42:00');
   expect(live.calls).toEqual([['begin', { at: clock('10:42:00'), nudgeMs: 3040 }]]);
 });
 
 test('tick check: back to 0, and left as it was', async () => {
-  const { live, audio } = before();
+  const { live, audio } = await before();
   await press(/Tick check/);
   await press('20 ms later');
   await press('Back to 0');
-  screen.getByText('this tablet’s clock is read as it shows.');
+  screen.getByText('This tablet’s clock is read as it shows.');
   await press('20 ms later');
   await press('Leave as it was');
   expect(audio.laid).toEqual([]);
@@ -129,7 +129,7 @@ test('tick check: back to 0, and left as it was', async () => {
 });
 
 test('tick check: sound that stays locked is said', async () => {
-  const { audio } = before();
+  const { audio } = await before();
   audio.unlocks = false;
   await press(/Tick check/);
   await press('Start the ticks');

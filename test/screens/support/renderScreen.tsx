@@ -33,7 +33,7 @@ export function fakeDevice(changes: Partial<Device> = {}): Device {
     openCamera: async () => 'missing',
     pixelsOf: async () => null,
     copyText: async () => true,
-    tickCheck: () => {
+    tickPorts: () => {
       throw new Error('no tick check in this test');
     },
     wakeIn: () => () => {},

@@ -45,8 +45,7 @@ export function AgreedSecond({ now, at, onChange }: Props) {
         <Button onClick={() => step(10_000)}>{room.secondLater}</Button>
       </div>
       <p className="second">
-        {room.clockNow({ time: now.slice(11, 19) })}{' '}
-        {left < tooNearMs ? room.secondGone : room.secondIn({ ms: left })}
+        {left < tooNearMs ? room.secondGone : room.secondIn({ time: now.slice(11, 19), ms: left })}
       </p>
     </div>
   );

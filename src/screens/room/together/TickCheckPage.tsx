@@ -1,4 +1,5 @@
 import { type KeyboardEvent, useEffect, useState, useSyncExternalStore } from 'react';
+import { TickCheck } from '../../../recorder/tickCheck.ts';
 import { Button } from '../../../ui/Button.tsx';
 import { Notice } from '../../../ui/Notice.tsx';
 import { useCoreServices } from '../../coreServices.ts';
@@ -26,7 +27,7 @@ const byKey: Record<string, number> = {
 export function TickCheckPage({ nudgeMs, volume, onKeep, onLeave }: Props) {
   const { words, device } = useCoreServices();
   const { room } = words;
-  const [check] = useState(() => device.tickCheck(nudgeMs));
+  const [check] = useState(() => new TickCheck(device.tickPorts(), nudgeMs));
   const [silent, setSilent] = useState(false);
   useEffect(() => () => check.stop(), [check]);
   const subscribe = (listener: () => void) => check.subscribe(listener);
