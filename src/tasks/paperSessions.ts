@@ -4,10 +4,11 @@ import { ok, problem, type Result } from '../kernel/result.ts';
 import { epochMs, type SessionMs } from '../kernel/units.ts';
 import { dateOf } from '../kernel/wallTime.ts';
 import { offsetOf, wallIn } from '../kernel/zoneTime.ts';
-import { type SessionHeader, sessionHeader } from '../model/session.ts';
+import type { SessionHeader } from '../model/session.ts';
 import type { VisitPlan } from '../model/visitPlan.ts';
 import { sheetLabel, tidyLabel } from '../schedule/sheetLabel.ts';
-import { requireObserver, requireStudy } from './edits.ts';
+import { requireStudy } from './edits.ts';
+import { headerOfVisit } from './headerOfVisit.ts';
 import type { PaperDraft } from './paperDraft.ts';
 import { type PaperJournal, paperJournal } from './paperJournal.ts';
 import type { Deps } from './ports.ts';
@@ -115,35 +116,18 @@ export async function keepPaperSession(deps: Deps, draft: PaperDraft): Promise<R
   const { store } = deps;
   const { plan } = draft;
   if (draft.observer === null) return problem('paper.noObserver');
-  const observer = await requireObserver(deps, draft.observer);
-  if (!observer.ok) return observer;
-  if (observer.value.study !== plan.study.id) return problem('task.noObserver', { id: draft.observer });
   const journal = readPaper(deps, draft);
   if (!journal.ok) return journal;
-  const header: SessionHeader = {
+  const made = await headerOfVisit(deps, plan, {
     id: draft.session,
-    study: plan.study.id,
-    classroom: plan.classroom,
-    condition: plan.condition,
-    visit: plan.visit,
-    visitLabel: null,
-    observer: { id: observer.value.id, name: observer.value.name },
+    observer: draft.observer,
     role: draft.role,
     practice: draft.practice,
-    fromPaper: true,
     date: draft.date,
-    plannedStart: plan.plannedStart,
-    children: plan.children,
-    ...(plan.reserves === undefined ? {} : { reserves: plan.reserves }),
-    plan: plan.plan,
-    draw: plan.draw,
-    orderSeed: plan.orderSeed,
-    schedule: plan.schedule,
-    app: deps.app,
-    device: deps.device,
-    timeZone: deps.timeZone,
-  };
-  if (!sessionHeader.safeParse(header).success) return problem('task.visitOutOfRange');
+    fromPaper: true,
+  });
+  if (!made.ok) return made;
+  const header = made.value;
   const created = await store.createSession(header);
   if (!created.ok)
     return (await isEmptyShell(deps, created.problem.code, header.id))

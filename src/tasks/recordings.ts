@@ -2,10 +2,10 @@ import { fold } from '../journal/step.ts';
 import { newId } from '../kernel/ids.ts';
 import { ok, problem, type Result } from '../kernel/result.ts';
 import { dateOf } from '../kernel/wallTime.ts';
-import { type Role, type SessionHeader, sessionHeader } from '../model/session.ts';
+import type { Role, SessionHeader } from '../model/session.ts';
 import type { VisitPlan } from '../model/visitPlan.ts';
 import { appendAfterwards } from './appendAfterwards.ts';
-import { requireObserver } from './edits.ts';
+import { headerOfVisit } from './headerOfVisit.ts';
 import type { Deps, SessionSummary } from './ports.ts';
 
 export interface SessionWish {
@@ -22,33 +22,13 @@ export async function startSession(
   plan: VisitPlan,
   wish: SessionWish,
 ): Promise<Result<SessionHeader>> {
-  const observer = await requireObserver(deps, wish.observer);
-  if (!observer.ok) return observer;
-  if (observer.value.study !== plan.study.id) return problem('task.noObserver', { id: wish.observer });
-  const header: SessionHeader = {
+  const made = await headerOfVisit(deps, plan, {
+    ...wish,
     id: newId(deps.random),
-    study: plan.study.id,
-    classroom: plan.classroom,
-    condition: plan.condition,
-    visit: plan.visit,
-    visitLabel: null,
-    observer: { id: observer.value.id, name: observer.value.name },
-    role: wish.role,
-    practice: wish.practice,
-    ...(wish.familiarisation === true ? { familiarisation: true } : {}),
     date: dateOf(deps.clock.wall()),
-    plannedStart: plan.plannedStart,
-    children: plan.children,
-    ...(plan.reserves === undefined ? {} : { reserves: plan.reserves }),
-    plan: plan.plan,
-    draw: plan.draw,
-    orderSeed: plan.orderSeed,
-    schedule: plan.schedule,
-    app: deps.app,
-    device: deps.device,
-    timeZone: deps.timeZone,
-  };
-  if (!sessionHeader.safeParse(header).success) return problem('task.visitOutOfRange');
+  });
+  if (!made.ok) return made;
+  const header = made.value;
   const kept = await deps.store.createSession(header);
   return kept.ok ? ok(header) : kept;
 }

@@ -36,7 +36,7 @@ const answerers: Answerers = {
     if (found.value === null) return problem('task.noSession', { id: session });
     const held = await heldBackIn(store, found.value.header.study);
     if (!held.ok) return held;
-    if (held.value.has(session)) return problem('task.heldBack');
+    if (held.value.has(session)) return problem('ask.heldBack');
     const sheets = sessionRecords(found.value).map((record) => roundSheet(record));
     return ok({ details: sessionDetails(found.value), sheets });
   },

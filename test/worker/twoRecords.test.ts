@@ -39,7 +39,7 @@ describe('the other observer’s record', () => {
       ofVisit: given(await ask({ kind: 'agreement', study, visit: 'marsh' })).pairs.length,
     });
     expect(await answers()).toEqual({
-      session: 'task.heldBack',
+      session: 'ask.heldBack',
       own: 'ok',
       observers: ['Quill'],
       onTask: 1,

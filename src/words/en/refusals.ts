@@ -34,7 +34,7 @@ export const refusals = {
   'task.noObserver': 'This observer is not in the study. Choose another one.',
   'task.noProtocol': 'This protocol is not in the study any more. Choose another one.',
   'task.noSession': 'This session is not kept on this tablet.',
-  'task.heldBack':
+  'ask.heldBack':
     'This record of the other observer stays closed until your own of the same visit has ended.',
   'task.noSessions': 'There is no session for the record yet.',
   'task.noVisit': 'This visit is not in the study.',

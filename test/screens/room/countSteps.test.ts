@@ -4,10 +4,9 @@ import { type Count, type CountStep, counted } from '../../../src/screens/room/c
 const empty: Count = { on: null, present: 4, last: 3, tapped: new Set() };
 /** What several touches one after the other come to. */
 function steps(start: Count, ...all: CountStep[]) {
-  const { on, present, tapped } = all.reduce<Count>(
-    (count, step) => ({ ...count, ...counted(count, step) }),
-    start,
-  );
+  let count = start;
+  for (const step of all) count = { ...count, ...counted(count, step) };
+  const { on, present, tapped } = count;
   return { on, present, tapped: [...tapped].sort() };
 }
 const seat = (child: string): CountStep => ({ kind: 'seat', child });
