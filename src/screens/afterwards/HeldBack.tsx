@@ -1,7 +1,6 @@
 import { Notice } from '../../ui/Notice.tsx';
 import { PageHead } from '../../ui/PageHead.tsx';
 import { useWords } from '../services.ts';
-import { PageFoot } from './PageFoot.tsx';
 import type { Listed } from './useListed.ts';
 
 /** Instead of the other observer's record, while one's own of the same visit has not ended. */
@@ -9,9 +8,13 @@ export function HeldBackPage() {
   const { afterwards } = useWords();
   return (
     <div className="stack">
-      <PageHead>{afterwards.heldBackTitle}</PageHead>
-      <p className="second">{afterwards.heldBackText}</p>
-      <PageFoot />
+      <PageHead note={afterwards.heldBackText}>{afterwards.heldBackTitle}</PageHead>
+      <div className="row">
+        <a className="button" href="#/room">
+          {afterwards.heldBackGo}
+        </a>
+        <a href="#/afterwards">{afterwards.toVisits}</a>
+      </div>
     </div>
   );
 }

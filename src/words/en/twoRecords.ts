@@ -15,6 +15,7 @@ export const twoRecords = {
   heldBackTitle: 'This record stays closed for now.',
   heldBackText:
     'Your own record of the same visit has not ended. What the other observer marked is shown once it has.',
+  heldBackGo: 'Go to your own record',
   heldBackSome: ({ n }: { n: number }, f: F) =>
     `${f.plural(n, { one: 'A record of another observer is', other: `${f.whole(n)} records of other observers are` })} left out until your own of the same visit has ended.`,
 } as const;
