@@ -6,22 +6,24 @@ import { type CountStep, counted } from './countSteps.ts';
 import { CannotSee } from './Edge.tsx';
 import { useFacts } from './RoomFacts.tsx';
 import { Target } from './Target.tsx';
+import { useEdgeLabel } from './useManner.ts';
 import { useRoom } from './useRoom.ts';
 
 /** A headcount's targets: whole answers on the left, steps on the right. Each says what the figure becomes. */
 export function CountTargets({ side }: { readonly side: 'left' | 'right' }) {
   const { room } = useCoreWords();
+  const label = useEdgeLabel(side);
   const seated = useSeated();
   if (side === 'left')
     return (
-      <section className="edge edge-left" aria-label={room.codesLeft}>
+      <section className="edge edge-left" aria-label={label}>
         <Step sign="all" step={{ kind: 'all', seated }} label={room.allOnTask} />
         <Step sign="same" step={{ kind: 'same' }} label={room.sameAgain} action="same again" />
         <Step sign="nobody" step={{ kind: 'nobody' }} label={room.nobodyOnTask} />
       </section>
     );
   return (
-    <section className="edge edge-right" aria-label={room.codesRight}>
+    <section className="edge edge-right" aria-label={label}>
       <Step sign="more" step={{ kind: 'more' }} label={room.oneMore} action="one more" />
       <Step sign="fewer" step={{ kind: 'fewer' }} label={room.oneFewer} action="one fewer" />
       <CannotSee />

@@ -3,7 +3,7 @@ import { useCoreWords } from '../coreServices.ts';
 import type { EdgeTarget } from './codeEdges.ts';
 import { useFacts } from './RoomFacts.tsx';
 import { Target } from './Target.tsx';
-import { useManner } from './useManner.ts';
+import { useEdgeLabel, useManner } from './useManner.ts';
 import { useLive, useRoom } from './useRoom.ts';
 
 interface Props {
@@ -14,9 +14,8 @@ interface Props {
 
 /** The targets at one edge of the glass, always in the same places. */
 export function Edge({ side, targets, withChildBefore = false }: Props) {
-  const { room } = useCoreWords();
   return (
-    <section className={`edge edge-${side}`} aria-label={side === 'left' ? room.codesLeft : room.codesRight}>
+    <section className={`edge edge-${side}`} aria-label={useEdgeLabel(side)}>
       {targets.map((target) => (
         <OneTarget key={target.kind === 'code' ? target.code.id : target.kind} target={target} />
       ))}

@@ -1,4 +1,4 @@
-import { type ReactNode, useCallback, useEffect, useMemo, useState } from 'react';
+import { type ReactNode, useCallback, useEffect, useMemo, useRef, useState } from 'react';
 import type { Result } from '../../kernel/result.ts';
 import { usualManner } from '../../model/manners.ts';
 import type { Manner } from '../../model/observer.ts';
@@ -18,13 +18,17 @@ export function MannerFrom({ children }: { readonly children: ReactNode }) {
     live.behave({ confirm: manner.confirm, remind: manner.remind });
   }, [live, manner.confirm, manner.remind]);
   const observer = header.observer.id;
+  const keeping = useRef(Promise.resolve());
   const change = useCallback(
     (next: Manner, kept?: (answer: Result<unknown>) => void) => {
       setChanged(next);
       // Rare, and so not part of what has to be loaded before a lesson can be recorded.
-      void import('../../tasks/observers.ts')
-        .then(({ saveObserver }) => saveObserver(deps, observer, { manner: next }))
-        .then((answer) => kept?.(answer));
+      const keep = async (): Promise<void> => {
+        const { saveObserver } = await import('../../tasks/observers.ts');
+        kept?.(await saveObserver(deps, observer, { manner: next }));
+      };
+      // One after the other: each is an edit of what the one before has kept.
+      keeping.current = keeping.current.then(keep, keep);
     },
     [deps, observer],
   );

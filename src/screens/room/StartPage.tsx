@@ -7,6 +7,7 @@ import { say } from '../../words/say.ts';
 import { useCoreServices } from '../coreServices.ts';
 import { partLengths } from './amounts.ts';
 import { useFacts } from './RoomFacts.tsx';
+import { useWhyNoEyesUp } from './useManner.ts';
 import { useLive, useRoom } from './useRoom.ts';
 
 interface Props {
@@ -25,6 +26,7 @@ export function StartPage({ title, text, start, how = {}, children }: Props) {
   const { room, problems } = words;
   const { header, pseudonyms, plan, unit } = useFacts();
   const [, go] = useLocation();
+  const noEyesUp = useWhyNoEyesUp();
   const [starting, setStarting] = useState(false);
   const [problem, setProblem] = useState<string | null>(null);
   const s = useRoom(({ resuming, upcoming, intervals, sound }) => ({
@@ -61,6 +63,7 @@ export function StartPage({ title, text, start, how = {}, children }: Props) {
         {room.readyAmount({ unit, n: s.looks, minutes })}
         {s.silent && ` · ${room.readySilent}`}
       </p>
+      {noEyesUp !== null && <p className="second">{noEyesUp}</p>}
       {children}
       {problem !== null && <Notice kind="hold">{problem}</Notice>}
       <Button look="main" className="start" disabled={starting} onClick={begin}>

@@ -35,3 +35,10 @@ export function useWhyNoEyesUp(): string | null {
   if (layout !== 'eyes-up' || zones !== null) return null;
   return method === 'headcount' ? room.eyesUpNotCount : room.eyesUpNot;
 }
+
+/** What an edge of the glass is called: the observer's hand decides where it is. */
+export function useEdgeLabel(side: 'left' | 'right'): string {
+  const { room } = useCoreWords();
+  const isLeft = (side === 'left') === (useManner().manner.hand === 'right');
+  return isLeft ? room.codesLeft : room.codesRight;
+}

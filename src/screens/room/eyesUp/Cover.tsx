@@ -2,6 +2,7 @@ import { useEffect, useId, useRef, useState } from 'react';
 import { Hold } from '../../../ui/Sign.tsx';
 import { useCoreServices } from '../../coreServices.ts';
 import { LookAt } from '../LookAt.tsx';
+import { useFacts } from '../RoomFacts.tsx';
 import { useRoom } from '../useRoom.ts';
 import { ZoneTargets } from './ZoneTargets.tsx';
 import type { Zones } from './zones.ts';
@@ -22,12 +23,13 @@ interface Props {
 export function Cover({ zones, still, onUncover }: Props) {
   const { words } = useCoreServices();
   const { room } = words;
+  const { method } = useFacts();
   return (
     <>
       <EmptyPage />
       <div className="visually-hidden">
         <p>{room.covered}</p>
-        {still ? <h1>{room.coveredStill}</h1> : <LookAt />}
+        {still ? <h1>{room.coveredStill}</h1> : method === 'headcount' ? <h1>{room.howMany}</h1> : <LookAt />}
         {zones === null && !still && <p>{room.coveredKeys}</p>}
       </div>
       {zones !== null && <ZoneTargets zones={zones} covered />}
