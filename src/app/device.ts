@@ -8,6 +8,7 @@ import { share } from '../devices/share.ts';
 import { speech } from '../devices/speech.ts';
 import { timer } from '../devices/timer.ts';
 import { vibration } from '../devices/vibration.ts';
+import { visibility } from '../devices/visibility.ts';
 import { wakeLock } from '../devices/wakeLock.ts';
 import { wallClock } from '../devices/wallClock.ts';
 import { toWallTime } from '../kernel/wallTime.ts';
@@ -55,7 +56,7 @@ export function device(): Device {
     openCamera: async (shown) => (await import('../devices/camera.ts')).openCamera(shown),
     pixelsOf: async (picture, edge) => (await import('../devices/pixelsOf.ts')).pixelsOf(picture, edge),
     copyText: async (text) => (await import('../devices/copyText.ts')).copyText(text),
-    tickPorts: () => ({ audio: audio(), page: pageClock, wall: wallClock, timer }),
+    tickPorts: () => ({ audio: audio(), page: pageClock, wall: wallClock, timer, visibility }),
     wakeIn: timer.wakeIn,
   };
 }

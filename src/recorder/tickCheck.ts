@@ -37,12 +37,15 @@ interface LaidTick {
 }
 
 /** What a tick check is handed; its audio is its own, and is let go of with it. */
-export type TickPorts = Pick<RecorderPorts, 'audio' | 'page' | 'wall' | 'timer'>;
+export type TickPorts = Pick<RecorderPorts, 'audio' | 'page' | 'wall' | 'timer' | 'visibility'>;
 
 /**
  * Ticks on each second of this tablet's wall clock, as the nudge says that it is to be read, so that two tablets can be
  * brought together by ear. Ticks are laid on the audio clock (wall → page → audio, the median of the latest readings);
  * a timer only wakes the laying.
+ *
+ * What is brought together is what is heard: the delay of a wireless earpiece is part of the nudge, as it is part of each
+ * prompt. So the check is done with the earpieces that the observers will wear.
  */
 export class TickCheck {
   private nudgedBy: number;
@@ -52,6 +55,7 @@ export class TickCheck {
   private generation = -1;
   private laid: LaidTick[] = [];
   private wake: Stop | null = null;
+  private unsee: Stop | null = null;
   private readonly listeners = new Set<() => void>();
 
   constructor(
@@ -84,8 +88,10 @@ export class TickCheck {
   /** Called in a tap, since sound starts locked; ok only when the ticks are heard. In both ears. */
   async start({ volume }: Pick<CueSettings, 'volume'>): Promise<Result<null>> {
     if (this.running) return ok(null);
-    const { audio } = this.ports;
+    const { audio, visibility } = this.ports;
     this.running = true;
+    // Nobody nudges what they do not see, and a tablet that was laid aside must not tick on in a classroom.
+    this.unsee = visibility.subscribe(() => visibility.hidden() && this.stop());
     audio.settle({ channel: 'both', volume });
     const unlocked = await audio.unlock();
     // Stopped meanwhile: what was just made is let go of, too.
@@ -98,6 +104,7 @@ export class TickCheck {
   stop(): void {
     this.running = false;
     this.wake?.();
+    this.unsee?.();
     this.takeBack();
     this.forget();
     this.ports.audio.close();

@@ -9,7 +9,20 @@ function tablet(fastMs = 0) {
   clock.wall += fastMs;
   const audio = new FakeAudio(clock);
   const { pageClock: page, wallClock: wall, timer } = clock;
-  return { clock, audio, check: new TickCheck({ audio, page, wall, timer }) };
+  const seen = { hidden: false, listeners: new Set<() => void>() };
+  const visibility = {
+    hidden: () => seen.hidden,
+    subscribe: (listener: () => void) => {
+      seen.listeners.add(listener);
+      return () => seen.listeners.delete(listener);
+    },
+  };
+  const see = (visible: boolean) => {
+    seen.hidden = !visible;
+    for (const listener of [...seen.listeners]) listener();
+  };
+  const check = new TickCheck({ audio, page, wall, timer, visibility });
+  return { clock, audio, check, see, watched: () => seen.listeners.size };
 }
 
 /** The wall time (ms after the test's beginning) at which each sound came out, by a clock that is right. */
@@ -107,6 +120,24 @@ describe('the tick check', () => {
     expect(one.audio.closed).toBe(true);
     expect(one.clock.pendingTimers).toBe(0);
     expect([one.check.ticking, one.check.nudgeMs]).toEqual([false, -40]);
+  });
+
+  it('stops by itself when the page is hidden, and begins again only when it is asked to', async () => {
+    const one = tablet();
+    await one.check.start({ volume: 0.4 });
+    await one.clock.advance(2500);
+    one.check.nudge(60);
+    one.see(true);
+    expect(one.check.ticking).toBe(true);
+    one.see(false);
+    expect([one.check.ticking, one.check.nudgeMs, one.watched()]).toEqual([false, 60, 0]);
+    one.see(true);
+    await one.clock.advance(5000);
+    expect(heard(one).length).toBe(2);
+    expect(one.clock.pendingTimers).toBe(0);
+    await one.check.start({ volume: 0.4 });
+    await one.clock.advance(2000);
+    expect(heard(one).length).toBe(4);
   });
 
   it('does not tick where sound stays locked', async () => {

@@ -47,7 +47,7 @@ export const before = {
   nobodyStepsIn: ({ absent }: { absent: string }) =>
     `No reserve is left for ${absent}: one child fewer is watched.`,
   start: 'Agreed start (may stay empty)',
-  startHint: 'Only written down. You start by hand, on a shared count.',
+  startHint: 'Two observers may begin at this second by themselves; alone it is only written down.',
   prepare: 'Prepare the visit',
   everybody: 'Children of the class today',
   everybodyHint:

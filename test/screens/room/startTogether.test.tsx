@@ -26,7 +26,13 @@ async function before(more: Partial<SessionHeader> = {}, resuming = false) {
   const hand = new HandClock();
   const audio = new FakeAudio(hand);
   const device = fakeDevice({
-    tickPorts: () => ({ audio, page: hand.pageClock, wall: hand.wallClock, timer: hand.timer }),
+    tickPorts: () => ({
+      audio,
+      page: hand.pageClock,
+      wall: hand.wallClock,
+      timer: hand.timer,
+      visibility: { hidden: () => false, subscribe: () => () => {} },
+    }),
   });
   const header = headerOf({}, ['before'], { plan, ...more });
   const view = renderRoom(snapshotOf(header, [], -1, { phase: 'ready', resuming }), { device });
