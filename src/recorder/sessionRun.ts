@@ -8,7 +8,7 @@ import type { Protocol } from '../model/protocol.ts';
 import type { SessionHeader } from '../model/session.ts';
 import { Book } from './book.ts';
 import type { Reading } from './clock.ts';
-import { confirmationClick, confirmationRhythm, reminder, reminderRhythm } from './cuePatterns.ts';
+import { confirmationClick, confirmationRhythm } from './cuePatterns.ts';
 import { CuePlayer } from './cuePlayer.ts';
 import { CueRound } from './cueRound.ts';
 import * as deeds from './deeds.ts';
@@ -17,19 +17,18 @@ import { Grip } from './grip.ts';
 import { HeadsUp } from './headsUp.ts';
 import type { Beginning, LiveOptions } from './liveSession.ts';
 import type { RecorderPorts, Stop } from './ports.ts';
+import { Recall } from './recall.ts';
 import { resumption } from './resumption.ts';
 import type { RoomSnapshot } from './roomSnapshot.ts';
 import { RoomView } from './roomView.ts';
 import { SoundDesk } from './soundDesk.ts';
 import { countInMs, cuesGiven, type Standing, standing } from './standing.ts';
+import { Telling } from './telling.ts';
 import { Timekeeper } from './timekeeper.ts';
 import { TouchDesk, type TouchWord } from './touchDesk.ts';
 
 /** Wired outputs take 10 to 60 ms; from here on the sound goes through the air. From memory, no source. */
 const wirelessFromMs = 100;
-
-/** So long before its interval is lost a prompt is recalled, or a quarter of its time where that is shorter. */
-const remindMs = 3000;
 
 /** A clock that seems to stand still has to be watched for a while before it can be believed again. */
 const lookAgainMs: Partial<Record<Reading, number>> = { doubtful: 50, lost: 250 };
@@ -43,14 +42,14 @@ export class SessionRun {
   private readonly view: RoomView;
   private readonly cues: CueRound;
   private readonly grip: Grip;
-  private readonly listeners = new Set<() => void>();
+  private readonly telling = new Telling();
   private wake: Stop | null = null;
   private beginning: Promise<Result<{ readonly sound: boolean }>> | null = null;
   private disposed = false;
   private shown: RoomSnapshot | null = null;
   private readonly headsUp: HeadsUp;
-  private manner: Pick<Manner, 'confirm' | 'remind'>;
-  private reminded = { count: 0, interval: 0 };
+  private confirms = true;
+  private readonly recall: Recall;
 
   constructor(
     header: SessionHeader,
@@ -70,7 +69,6 @@ export class SessionRun {
     this.view = new RoomView(header, plan);
     const player = new CuePlayer(ports.audio, this.time.clock);
     const leadIn = (): boolean => options.leadIn ?? (ports.audio.facts()?.latencyMs ?? 0) >= wirelessFromMs;
-    this.manner = options.manner ?? { confirm: true, remind: false };
     this.headsUp = new HeadsUp({
       protocol,
       plan,
@@ -88,14 +86,21 @@ export class SessionRun {
       headsUpMs: () => this.headsUp.toneAheadMs,
       continuous: protocol.method === 'duration',
     });
+    this.recall = new Recall({
+      method: protocol.method,
+      view: this.view,
+      book: this.book,
+      sound: this.sound,
+      vibration: ports.vibration,
+    });
+    if (options.manner !== undefined) this.behave(options.manner);
     // The session may have come to its end while the tablet was dead: nothing is left to begin.
     const stand = resumption(this.book.state, before, ports.wall.now());
     if (stand !== null && this.placeAt(stand.now).phase === 'over') this.goOn({});
   }
 
   subscribe(listener: () => void): Stop {
-    this.listeners.add(listener);
-    return () => this.listeners.delete(listener);
+    return this.telling.subscribe(listener);
   }
 
   snapshot(): RoomSnapshot {
@@ -137,13 +142,14 @@ export class SessionRun {
     if (this.disposed) return;
     this.disposed = true;
     this.letGo();
-    this.listeners.clear();
+    this.telling.forget();
     // Another tab may go on with this journal only when all of it is there.
     this.book.keeper.whenAllKept(() => this.grip.giveBack());
   }
 
   behave(manner: Pick<Manner, 'confirm' | 'remind'>): void {
-    this.manner = manner;
+    this.confirms = manner.confirm;
+    this.recall.wanted = manner.remind;
   }
 
   private async reallyBegin(how: Beginning): Promise<Result<{ readonly sound: boolean }>> {
@@ -226,7 +232,7 @@ export class SessionRun {
     }
     if (cuesGiven(place) && this.sound.on) this.cues.layAhead(now);
     this.headsUp.speak(this.cues.all(), now, cuesGiven(place) && this.sound.on);
-    this.remind(now, place);
+    if (place.phase === 'running') this.recall.due(now);
     this.sleepUntilNext(now, place, news.reading);
     this.changed();
   }
@@ -238,47 +244,25 @@ export class SessionRun {
     const given = cuesGiven(place);
     const cue = given ? this.cues.nextAfter(now) : Number.POSITIVE_INFINITY;
     const words = given ? this.headsUp.nextAfter(this.cues.all(), now) : Number.POSITIVE_INFINITY;
-    const recall = this.recallAt(now);
+    const recall = this.recall.nextAfter(now);
     const due = place.phase === 'paused' ? 1000 : Math.min(second, cue, words, recall) - now;
     // A strange reading of the audio clock is looked at again soon, before a cue comes out at a wrong moment or not at all.
     const ms = Math.min(due, lookAgainMs[reading] ?? due);
     this.wake = this.ports.timer.wakeIn(Math.max(1, Math.ceil(ms)), () => this.tick());
   }
 
-  /** A prompt that waits for its mark is felt and heard once more before its interval is lost. */
-  private remind(now: number, place: Standing): void {
-    if (place.phase !== 'running') return;
-    const waiting = this.waiting(now);
-    if (waiting === null || now < waiting.recallAt) return;
-    this.reminded = { count: this.reminded.count + 1, interval: waiting.number };
-    this.sound.play(reminder);
-    if (this.ports.vibration.available) this.ports.vibration.vibrate(reminderRhythm);
-  }
-
-  private recallAt(now: number): number {
-    const at = this.waiting(now)?.recallAt ?? Number.POSITIVE_INFINITY;
-    return at > now ? at : Number.POSITIVE_INFINITY;
-  }
-
-  /** The interval that waits for its mark and was not recalled yet; null where none does, or nobody wants to be reminded. */
-  private waiting(now: number): { readonly number: number; readonly recallAt: number } | null {
-    if (!this.manner.remind || this.protocol.method === 'duration') return null;
-    const current = this.view.currentAt(this.book.state, now);
-    if (current?.status !== 'open' || current.number === this.reminded.interval) return null;
-    const left = Math.min(remindMs, (current.closeAt - current.cueAt) / 4);
-    return { number: current.number, recallAt: current.closeAt - left };
-  }
-
   /** Something that the observer did: time is brought up to the present before and after it. */
   act(what: (present: deeds.Present) => void): void {
     if (!this.time.clock.started) return;
-    this.tick();
-    if (this.disposed || this.book.state.ended !== null) return;
-    const page = this.ports.page.now();
-    const now = this.time.clock.at(page);
-    what({ now, page, place: this.placeAt(now) });
-    this.shown = null;
-    this.tick();
+    this.telling.together(() => {
+      this.tick();
+      if (this.disposed || this.book.state.ended !== null) return;
+      const page = this.ports.page.now();
+      const now = this.time.clock.at(page);
+      what({ now, page, place: this.placeAt(now) });
+      this.shown = null;
+      this.tick();
+    });
   }
 
   deed(deed: deeds.Deed): void {
@@ -300,16 +284,18 @@ export class SessionRun {
       this.changed();
       return;
     }
-    // A touch that went down before the end is taken even when it is told after it.
-    this.tick(false);
-    const at = this.time.clock.at(page);
-    const { state } = this.book;
-    const before = this.touches.felt;
-    const body = this.touches.take(word, { page, at }, state, this.view.timedIn(state));
-    if (body !== null) this.book.write(at, body);
-    if (this.touches.felt !== before && this.manner.confirm) this.confirm(word);
-    this.tick();
-    this.changed();
+    this.telling.together(() => {
+      // A touch that went down before the end is taken even when it is told after it.
+      this.tick(false);
+      const at = this.time.clock.at(page);
+      const { state } = this.book;
+      const before = this.touches.felt;
+      const body = this.touches.take(word, { page, at }, state, this.view.timedIn(state));
+      if (body !== null) this.book.write(at, body);
+      if (this.touches.felt !== before && this.confirms) this.confirm(word);
+      this.tick();
+      this.changed();
+    });
   }
 
   /** The answer to a touch that was taken, in ear and hand, different for each code. */
@@ -343,7 +329,7 @@ export class SessionRun {
 
   private changed(): void {
     this.shown = null;
-    for (const listener of this.listeners) listener();
+    this.telling.tell();
   }
 
   private lookAround(): RoomSnapshot {
@@ -364,7 +350,7 @@ export class SessionRun {
       sound,
       wakeLock: this.ports.wakeLock.state(),
       vibrates: this.protocol.cues.vibration && this.ports.vibration.available,
-      reminded: this.reminded.count,
+      reminded: this.recall.count,
       flash: this.cues.flash,
       flashStrongly: this.protocol.cues.flash || !sound.heard,
       felt: this.touches.felt,
