@@ -2,7 +2,6 @@ import type { EntryBody } from '../journal/entry.ts';
 import { isCovered } from '../journal/state.ts';
 import { problem, type Result } from '../kernel/result.ts';
 import type { PageMs } from '../kernel/units.ts';
-import { toWallTime } from '../kernel/wallTime.ts';
 import type { Manner } from '../model/observer.ts';
 import type { Protocol } from '../model/protocol.ts';
 import type { SessionHeader } from '../model/session.ts';
@@ -11,18 +10,19 @@ import type { Reading } from './clock.ts';
 import { confirmationClick, confirmationRhythm } from './cuePatterns.ts';
 import { CuePlayer } from './cuePlayer.ts';
 import { CueRound } from './cueRound.ts';
-import * as deeds from './deeds.ts';
+import type * as deeds from './deeds.ts';
 import type { Plan } from './grid.ts';
 import { Grip } from './grip.ts';
 import { HeadsUp } from './headsUp.ts';
 import type { Beginning, LiveOptions } from './liveSession.ts';
+import { openAnew, tooNear } from './openAnew.ts';
 import type { RecorderPorts, Stop } from './ports.ts';
 import { Recall } from './recall.ts';
 import { resumption } from './resumption.ts';
 import type { RoomSnapshot } from './roomSnapshot.ts';
 import { RoomView } from './roomView.ts';
 import { SoundDesk } from './soundDesk.ts';
-import { countInMs, cuesGiven, type Standing, standing } from './standing.ts';
+import { cuesGiven, type Standing, standing } from './standing.ts';
 import { Telling } from './telling.ts';
 import { Timekeeper } from './timekeeper.ts';
 import { TouchDesk, type TouchWord } from './touchDesk.ts';
@@ -154,8 +154,8 @@ export class SessionRun {
 
   private async reallyBegin(how: Beginning): Promise<Result<{ readonly sound: boolean }>> {
     if (this.book.state.ended !== null) return problem('recorder.ended');
-    if (how.at !== undefined && how.at - this.nudgedWall(how) < countInMs + deeds.headStartMs)
-      return problem('recorder.startTooNear', { seconds: Math.ceil((countInMs + deeds.headStartMs) / 1000) });
+    const near = tooNear(this.ports, how);
+    if (near !== null) return { ok: false, problem: near };
     const taken = await this.grip.take(this.protocol.cues, {
       wakeLock: () => this.changed(),
       visibility: () => {
@@ -176,22 +176,10 @@ export class SessionRun {
 
   /** Starts session time: counting in, or where the grid of a session that was cut off stands now. */
   private goOn(how: Beginning): void {
-    const { page, wall, audio } = this.ports;
+    const { page, wall } = this.ports;
     const stand = resumption(this.book.state, this.options.resumeFrom ?? [], wall.now());
     if (stand === null) {
-      const wait = how.at === undefined ? countInMs + deeds.headStartMs : how.at - this.nudgedWall(how);
-      this.time.clock.start(page.now(), -wait);
-      const latency = audio.facts()?.latencyMs ?? null;
-      this.book.write(-wait, {
-        kind: 'started',
-        checks: [...this.options.checks],
-        anyway: this.options.anyway,
-        ...(latency === null ? {} : { audioLatencyMs: latency }),
-        ...(how.at === undefined ? {} : { agreedStart: toWallTime(how.at, wall.offsetMinutes(how.at)) }),
-      });
-      // A check that found nothing to nudge is a finding, too.
-      if (how.nudgeMs !== undefined)
-        this.book.write(-wait, { kind: 'clockNudged', by: Math.round(how.nudgeMs) });
+      openAnew(this.book, this.time.clock, this.ports, this.options, how);
       return;
     }
     this.time.clock.start(page.now(), stand.now);
@@ -202,11 +190,6 @@ export class SessionRun {
     const to = Math.round(place.phase === 'over' ? Math.max(place.at, stand.from) : stand.now);
     this.book.write(to, { kind: 'gap', from: stand.from, to, cause: 'closed', estimated: true });
     if (place.phase === 'over') this.finish(to, { reason: 'complete' });
-  }
-
-  /** The wall clock as the tick check says it is to be read. */
-  private nudgedWall(how: Beginning): number {
-    return this.ports.wall.now() + (how.nudgeMs ?? 0);
   }
 
   private placeAt(now: number): Standing {
