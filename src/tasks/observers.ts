@@ -1,6 +1,12 @@
 import { newId } from '../kernel/ids.ts';
 import { ok, type Problem, problem, type Result } from '../kernel/result.ts';
-import { type KeyMap, keyMap as keyMapSchema, type Manner, type Observer } from '../model/observer.ts';
+import {
+  type KeyMap,
+  keyMap as keyMapSchema,
+  type Manner,
+  manner as mannerSchema,
+  type Observer,
+} from '../model/observer.ts';
 import { nextRevision } from '../model/revision.ts';
 import { editObserver, requireStudy } from './edits.ts';
 import type { Deps } from './ports.ts';
@@ -35,6 +41,8 @@ export function saveObserver(
     const keyMap = changes.keyMap === undefined ? before.keyMap : changes.keyMap;
     if (keyMap !== null && !keyMapSchema.safeParse(keyMap).success) return problem('task.keysOutOfRange');
     const manner = changes.manner ?? before.manner;
+    if (manner !== undefined && !mannerSchema.safeParse(manner).success)
+      return problem('task.mannerOutOfRange');
     return ok({ name: name.value, keyMap, ...(manner === undefined ? {} : { manner }) });
   });
 }

@@ -152,7 +152,12 @@ it('adds, renames and removes observers, with keys of their own', async () => {
   expect(codeOf(await saveObserver(deps, quill.id, { keyMap: { on: true, keys: { a: 'sing' } } }))).toBe(
     'task.keysOutOfRange',
   );
+  const manner = { layout: 'eyes-up', hand: 'left', confirm: true, remind: true } as const;
+  const odd = { ...manner, hand: 'both' } as unknown as typeof manner;
+  expect(codeOf(await saveObserver(deps, quill.id, { manner: odd }))).toBe('task.mannerOutOfRange');
   expect(await dump()).toBe(before);
+  given(await saveObserver(deps, quill.id, { manner }));
+  expect(given(await saveObserver(deps, quill.id, { name: 'Quill' }))).toMatchObject({ manner, keyMap });
   given(await removeObserver(deps, quill.id));
   expect(given(await deps.store.observers(study.id)).map(({ name }) => name)).toEqual(['Marsh']);
 });

@@ -62,6 +62,7 @@ export const refusals = {
   'task.seatTaken': 'A seat stands in this place already, or it is outside of the room.',
   'task.seatedTwice': 'A child sits on two seats. Empty one of them.',
   'task.keysOutOfRange': 'A key is set to something that no key can do.',
+  'task.mannerOutOfRange': 'Layout, hand or answers are set to something that there is not.',
   'task.observeLongerThanInterval':
     'Watching takes longer than the interval. Shorten it, or make the interval longer.',
   'task.intervalOutOfRange': 'An interval takes from 3 seconds to 10 minutes, in whole seconds.',

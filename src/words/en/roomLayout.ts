@@ -45,7 +45,8 @@ export const roomLayout = {
   layoutPlan: 'seating plan in the middle',
   layoutPlanHint: 'For any number of codes.',
   layoutEyesUp: 'eyes-up',
-  layoutEyesUpHint: 'Two halves or four corners, felt and heard: your eyes stay with the children.',
+  layoutEyesUpHint:
+    'Two halves or four corners, felt and heard: your eyes stay with the children. For up to four codes, not for headcounts.',
   eyesUpNot: 'Eyes-up has five places at most; this session needs more, so the seating plan stays.',
   eyesUpNotCount:
     'Eyes-up is not for headcounts: counting needs its figures in view, so the seating plan stays.',

@@ -98,7 +98,7 @@ export class Lesson {
       .filter((kind) => kind !== 'cued');
   }
 
-  private ports(): RecorderPorts {
+  ports(): RecorderPorts {
     return {
       page: this.clock.pageClock,
       wall: this.clock.wallClock,

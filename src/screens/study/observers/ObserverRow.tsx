@@ -1,20 +1,19 @@
 import { useState } from 'react';
-import { usualManner } from '../../../model/manners.ts';
 import type { Observer } from '../../../model/observer.ts';
 import { saveObserver } from '../../../tasks/index.ts';
 import { Button } from '../../../ui/Button.tsx';
 import { TextField } from '../../../ui/Field.tsx';
-import { MannerFields } from '../../manner/MannerFields.tsx';
 import { useServices } from '../../services.ts';
 import { useDoing } from '../useDoing.tsx';
 import { KeyMapEditor } from './KeyMapEditor.tsx';
+import { MannerEditor } from './MannerEditor.tsx';
 
 interface Props {
   readonly observer: Observer;
   readonly onRemove: () => void;
 }
 
-/** One observer: name, keys, and the way off the list. */
+/** One observer: name, keys, layout and hand, and the way off the list. */
 export function ObserverRow({ observer, onRemove }: Props) {
   const { words } = useServices();
   const { study } = words;
@@ -48,24 +47,10 @@ export function ObserverRow({ observer, onRemove }: Props) {
             {words.common.remove}
           </Button>
           {open === 'keys' && <KeyMapEditor observer={observer} />}
-          {open === 'manner' && <MannerOf observer={observer} />}
+          {open === 'manner' && <MannerEditor observer={observer} />}
         </>
       )}
     </li>
-  );
-}
-
-function MannerOf({ observer }: { readonly observer: Observer }) {
-  const { deps } = useServices();
-  const { run, notice } = useDoing();
-  return (
-    <div className="stack-tight grow">
-      <MannerFields
-        manner={observer.manner ?? usualManner}
-        onChange={(manner) => void run(saveObserver(deps, observer.id, { manner }))}
-      />
-      {notice}
-    </div>
   );
 }
 

@@ -45,7 +45,8 @@ export const observerWords = {
   keysNote:
     'For a keyboard or a page-turner. They work only while a lesson is recorded, and never while you type.',
   manner: 'Layout and hand',
-  mannerHide: 'Hide layout and hand',
+  mannerHide: 'Close layout and hand',
+  mannerChanged: 'Layout and answers are changed.',
   mannerOf: ({ name }: { name: string }) => `Layout and hand of ${name}`,
   keysOn: 'Keys work in the room',
   keyAction: ({ action }: { action: string }) => actionNames[action] ?? action,

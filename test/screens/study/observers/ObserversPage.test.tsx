@@ -50,4 +50,32 @@ describe('observers', () => {
     await userEvent.click(await screen.findByRole('checkbox', { name: /Keys work in the room/ }));
     await waitFor(async () => expect((await keys())?.on).toBe(false));
   });
+
+  it('like the room their own way, which can be taken back; eyes-up begins with prompts recalled', async () => {
+    const { services, observer } = await withQuill();
+    const manner = async () => must(await services.store.observer(observer.id))?.manner;
+    await userEvent.click(screen.getByRole('button', { name: 'Layout and hand of Quill' }));
+    await userEvent.click(await screen.findByRole('radio', { name: /^eyes-up/ }));
+    await waitFor(async () =>
+      expect(await manner()).toEqual({ layout: 'eyes-up', hand: 'right', confirm: true, remind: true }),
+    );
+    await userEvent.click(await screen.findByRole('button', { name: 'Undo' }));
+    await waitFor(async () =>
+      expect(await manner()).toEqual({ layout: 'plan', hand: 'right', confirm: true, remind: false }),
+    );
+    await userEvent.click(screen.getByRole('radio', { name: /^left-handed/ }));
+    await waitFor(async () => expect((await manner())?.hand).toBe('left'));
+    await userEvent.click(screen.getByRole('checkbox', { name: /^Answer each touch/ }));
+    await waitFor(async () => expect((await manner())?.confirm).toBe(false));
+  });
+
+  it('get a key for the cover like any other', async () => {
+    const { keys } = await withQuill();
+    await userEvent.click(screen.getByRole('button', { name: 'Keys of Quill' }));
+    await userEvent.click(await screen.findByRole('button', { name: 'Add a key for cover the glass' }));
+    await userEvent.keyboard('c');
+    expect(await screen.findByText(/^C already means cover the glass\./)).toBeTruthy();
+    await userEvent.keyboard('x');
+    await waitFor(async () => expect((await keys())?.keys.x).toBe('cover'));
+  });
 });
