@@ -30,6 +30,7 @@ export interface PaperDraft {
   readonly observer: string | null;
   readonly role: Role | null;
   readonly practice: boolean;
+  readonly familiarisation?: boolean;
   /** ISO date and clock time of the beginning; empty = not typed yet. */
   readonly date: string;
   readonly start: string;

@@ -123,6 +123,7 @@ export async function keepPaperSession(deps: Deps, draft: PaperDraft): Promise<R
     observer: draft.observer,
     role: draft.role,
     practice: draft.practice,
+    familiarisation: draft.familiarisation,
     date: draft.date,
     fromPaper: true,
   });

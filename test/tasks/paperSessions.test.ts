@@ -288,6 +288,13 @@ describe('A sheet that was typed in', () => {
     expect(sessionDetails(await stored(on, stopped.id)).phases[0]?.row.percentOnTask).toBe(75);
   });
 
+  it('keeps what the sitting was for: a familiarisation visit stays out of results', async () => {
+    const on = await bench();
+    const made = await school(on);
+    const kept = given(await typed(on, made, planOf(made), { familiarisation: true }));
+    expect(kept).toMatchObject({ familiarisation: true, practice: false, fromPaper: true });
+  });
+
   it('is refused with one sentence for what cannot be, and nothing is kept of it', async () => {
     const on = await bench();
     const made = await school(on);

@@ -9,6 +9,7 @@ import { TextField } from '../../ui/Field.tsx';
 import { say } from '../../words/say.ts';
 import { useServices } from '../services.ts';
 import { CheckRow } from './CheckRow.tsx';
+import { type Purpose, PurposeChoice } from './PurposeChoice.tsx';
 
 /** Who records, beside whom, and whether it counts. */
 export interface Who {
@@ -16,9 +17,6 @@ export interface Who {
   readonly role: Role | null;
   readonly purpose: Purpose;
 }
-
-/** A session counts, or is practice, or lets the class get used to the observer. */
-export type Purpose = 'record' | 'practice' | 'familiarisation';
 
 interface Props {
   readonly study: string;
@@ -107,20 +105,7 @@ function WhoDialog({ study, observers, who, onChange, onClose }: Props & { reado
           { value: 'second', label: words.before.roleSecond, hint: words.before.roleSecondHint },
         ]}
       />
-      <Choice
-        legend={words.before.purpose}
-        value={who.purpose}
-        onChange={(purpose) => onChange({ ...who, purpose })}
-        options={[
-          { value: 'record', label: words.before.purposeRecord, hint: words.before.purposeRecordHint },
-          { value: 'practice', label: words.before.purposePractice, hint: words.before.practiceHint },
-          {
-            value: 'familiarisation',
-            label: words.before.purposeFamiliarisation,
-            hint: words.before.purposeFamiliarisationHint,
-          },
-        ]}
-      />
+      <PurposeChoice purpose={who.purpose} onChange={(purpose) => onChange({ ...who, purpose })} />
     </Dialog>
   );
 }

@@ -1,8 +1,9 @@
 import { useState } from 'react';
 import { clockTime, minutesAndSeconds } from '../../kernel/typedTime.ts';
 import type { PaperPart } from '../../tasks/index.ts';
-import { Check, Choice } from '../../ui/Choice.tsx';
+import { Choice } from '../../ui/Choice.tsx';
 import { SelectField, TextField } from '../../ui/Field.tsx';
+import { PurposeChoice } from '../before/PurposeChoice.tsx';
 import { useServices } from '../services.ts';
 import type { Typing } from './useTyping.ts';
 
@@ -93,14 +94,12 @@ export function HeadFields({ typing, last }: { readonly typing: Typing; readonly
           { value: 'second', label: paper.second, hint: words.before.roleSecondHint },
         ]}
       />
-      <div>
-        <Check
-          label={paper.practice}
-          hint={paper.practiceHint}
-          checked={draft.practice}
-          onChange={(practice) => change({ practice })}
-        />
-      </div>
+      <PurposeChoice
+        purpose={draft.familiarisation === true ? 'familiarisation' : draft.practice ? 'practice' : 'record'}
+        onChange={(purpose) =>
+          change({ practice: purpose === 'practice', familiarisation: purpose === 'familiarisation' })
+        }
+      />
     </div>
   );
 }

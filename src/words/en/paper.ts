@@ -140,8 +140,6 @@ export const paper = {
   observer: 'Observer',
   observerChoose: 'Choose',
   role: 'Role',
-  practice: 'Practice',
-  practiceHint: 'Kept and marked as practice; left out of all results.',
   date: 'Date',
   start: 'Started at',
   timeHint: 'By the clock, such as 10:41 or 10:41:30.',
