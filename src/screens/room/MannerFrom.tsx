@@ -18,20 +18,21 @@ export function MannerFrom({ children }: { readonly children: ReactNode }) {
     live.behave({ confirm: manner.confirm, remind: manner.remind });
   }, [live, manner.confirm, manner.remind]);
   const observer = header.observer.id;
+  const [kept, setKept] = useState<Result<unknown> | null>(null);
   const keeping = useRef(Promise.resolve());
   const change = useCallback(
-    (next: Manner, kept?: (answer: Result<unknown>) => void) => {
+    (next: Manner) => {
       setChanged(next);
       // Rare, and so not part of what has to be loaded before a lesson can be recorded.
       const keep = async (): Promise<void> => {
         const { saveObserver } = await import('../../tasks/observers.ts');
-        kept?.(await saveObserver(deps, observer, { manner: next }));
+        setKept(await saveObserver(deps, observer, { manner: next }));
       };
       // One after the other: each is an edit of what the one before has kept.
       keeping.current = keeping.current.then(keep, keep);
     },
     [deps, observer],
   );
-  const value = useMemo(() => ({ manner, change }), [manner, change]);
+  const value = useMemo(() => ({ manner, change, kept, seen: () => setKept(null) }), [manner, change, kept]);
   return <MannerContext value={value}>{children}</MannerContext>;
 }

@@ -1,4 +1,3 @@
-import { useState } from 'react';
 import { say } from '../../words/say.ts';
 import { useCoreServices } from '../coreServices.ts';
 import { MannerFields } from '../manner/MannerFields.tsx';
@@ -11,21 +10,21 @@ export function MannerPanel({ onClose }: { readonly onClose: () => void }) {
   const { words } = useCoreServices();
   const { room, common } = words;
   const { method, zones } = useFacts();
-  const { manner, change } = useManner();
-  const [said, setSaid] = useState('');
+  const { manner, change, kept, seen } = useManner();
   const noEyesUp = method === 'headcount' ? room.eyesUpNotCount : zones === null ? room.eyesUpNot : null;
   return (
-    <Panel title={room.mannerTitle} closeLabel={common.close} onClose={onClose}>
-      <MannerFields
-        manner={manner}
-        noEyesUp={noEyesUp}
-        onChange={(next) =>
-          change(next, (kept) => setSaid(kept.ok ? room.mannerKept : say(words.problems, kept.problem)))
-        }
-      />
+    <Panel
+      title={room.mannerTitle}
+      closeLabel={common.close}
+      onClose={() => {
+        seen();
+        onClose();
+      }}
+    >
+      <MannerFields manner={manner} noEyesUp={noEyesUp} onChange={change} />
       <p className="second small">{room.coverAbout({ places: zones !== null })}</p>
       <p className="second small" role="status">
-        {said}
+        {kept !== null && (kept.ok ? room.mannerKept : say(words.problems, kept.problem))}
       </p>
     </Panel>
   );

@@ -7,13 +7,20 @@ import { useFacts } from './RoomFacts.tsx';
 
 interface MannerOfObserver {
   readonly manner: Manner;
-  /** Changes it at once and keeps it for the observer; says how the keeping went. */
-  readonly change: (manner: Manner, kept?: (answer: Result<unknown>) => void) => void;
+  /** Changes it at once and keeps it for the observer. */
+  readonly change: (manner: Manner) => void;
+  /** How the last keeping went; null before it, and once that was seen. */
+  readonly kept: Result<unknown> | null;
+  readonly seen: () => void;
 }
+
+const nothing = (): void => undefined;
 
 export const MannerContext = createContext<MannerOfObserver>({
   manner: usualManner,
-  change: () => undefined,
+  change: nothing,
+  kept: null,
+  seen: nothing,
 });
 
 /** How the observer of this session likes the room to be. */

@@ -18,8 +18,8 @@ export function MannerEditor({ observer }: { readonly observer: Observer }) {
   };
   return (
     <section className="keys stack-tight" aria-label={study.mannerOf({ name: observer.name })}>
-      {notice}
       <MannerFields manner={manner} onChange={put} />
+      {notice}
     </section>
   );
 }
