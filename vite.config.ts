@@ -14,10 +14,6 @@ const ownModule = /[\\/]src[\\/](?!app[\\/]main\.tsx$|worker[\\/]worker\.ts$).*\
 export default defineConfig({
   // Relative, so that the built files work under any folder of any host.
   base: './',
-  resolve: {
-    // The same program without the detour for browsers that have neither promises nor classes.
-    alias: [{ find: /^dexie$/, replacement: 'dexie/dist/modern/dexie.mjs' }],
-  },
   define: { __APP_VERSION__: JSON.stringify(version) },
   build: {
     target: ['chrome111', 'firefox115', 'safari16.4'],

@@ -1,4 +1,4 @@
-import { useLiveQuery } from 'dexie-react-hooks';
+import { useEffect, useState } from 'react';
 import type { Result } from '../kernel/result.ts';
 import { useCoreServices } from '../screens/coreServices.ts';
 import type { StoreReader } from '../tasks/ports.ts';
@@ -9,6 +9,8 @@ export function useStored<T>(
   dependencies: readonly unknown[],
 ): Result<T> | undefined {
   const { store } = useCoreServices();
-  // Dexie follows awaits only in a function that it can see to be asynchronous.
-  return useLiveQuery(async () => await query(store), [store, ...dependencies]);
+  const [answer, setAnswer] = useState<Result<T>>();
+  // biome-ignore lint/correctness/useExhaustiveDependencies: the caller names what the query depends on
+  useEffect(() => store.watch(query, setAnswer), [store, ...dependencies]);
+  return answer;
 }

@@ -44,8 +44,9 @@ export function memoryRows(options: { readonly refuse?: () => string | null } = 
     return turn;
   };
 
+  const read: RowStore['read'] = (_tables, work) => inTurn(() => work(reader(kept)));
   return {
-    read: (_tables, work) => inTurn(() => work(reader(kept))),
+    read,
     write: (_tables, work) =>
       inTurn(async () => {
         const refused = options.refuse?.() ?? null;
@@ -71,7 +72,7 @@ export function memoryRows(options: { readonly refuse?: () => string | null } = 
       const ask = (): void => {
         asked += 1;
         const turn = asked;
-        void query().then((result) => {
+        void query(read).then((result) => {
           if (live && turn === asked) callback(result);
         });
       };

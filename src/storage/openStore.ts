@@ -1,6 +1,6 @@
 import type { Result } from '../kernel/result.ts';
 import type { Store } from '../tasks/ports.ts';
-import { type DexieOptions, openDexieRows } from './dexieRows.ts';
+import { type IndexedOptions, openIndexedRows } from './indexedRows.ts';
 import { answer } from './problems.ts';
 import type { Seal } from './seal.ts';
 import { storeOver } from './storeOver.ts';
@@ -13,7 +13,9 @@ export const databaseName = 'lookbell';
  * blocked storage), `store.full`.
  */
 export function openStore(
-  options: Partial<DexieOptions> & { readonly seal?: Seal } = {},
+  options: Partial<IndexedOptions> & { readonly seal?: Seal } = {},
 ): Promise<Result<Store>> {
-  return answer(async () => storeOver(await openDexieRows({ name: databaseName, ...options }), options.seal));
+  return answer(async () =>
+    storeOver(await openIndexedRows({ name: databaseName, ...options }), options.seal),
+  );
 }

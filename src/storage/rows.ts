@@ -101,7 +101,8 @@ export interface RowWriter extends RowReader {
 export interface RowStore {
   read<R>(tables: readonly TableName[], work: (rows: RowReader) => Promise<R>): Promise<R>;
   write<R>(tables: readonly TableName[], work: (rows: RowWriter) => Promise<R>): Promise<R>;
-  watch<R>(query: () => Promise<R>, callback: (answer: R) => void): () => void;
+  /** Asks now, and again whenever something was written into a table that the query has read through its `read`. */
+  watch<R>(query: (read: RowStore['read']) => Promise<R>, callback: (answer: R) => void): () => void;
   close(): void;
 }
 

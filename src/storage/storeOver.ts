@@ -32,10 +32,9 @@ const studyWrites = () => import('./studyWrites.ts');
 
 const done = (work: () => Promise<void>) => answer(async () => work().then(() => null));
 
-/** The store of the use cases over any rows: real ones or those in memory. */
-export function storeOver(rows: RowStore, seal: Seal = identitySeal): Store {
-  const core: Core = { rows, seal, inTurn: queue() };
-  const reader: StoreReader = {
+/** What is asked of the store, over the rows of a core. */
+function readerOver(core: Core): StoreReader {
+  return {
     study: (id) => answer(() => readRecord(core, 'study', id)),
     studies: () => answer(() => listStudies(core)),
     classroom: (id) => answer(() => readRecord(core, 'classroom', id)),
@@ -56,8 +55,13 @@ export function storeOver(rows: RowStore, seal: Seal = identitySeal): Store {
     bundle: (study) => answer(() => readBundle(core, study)),
     settings: () => answer(() => readSettings(core)),
   };
+}
+
+/** The store of the use cases over any rows: real ones or those in memory. */
+export function storeOver(rows: RowStore, seal: Seal = identitySeal): Store {
+  const core: Core = { rows, seal, inTurn: queue() };
   return {
-    ...reader,
+    ...readerOver(core),
     put: (edits) => done(async () => (await studyWrites()).putEdits(core, edits)),
     createSession: (header) => done(() => createSession(core, header)),
     appendEntries: (session, entries) => done(() => appendEntries(core, session, entries)),
@@ -67,7 +71,8 @@ export function storeOver(rows: RowStore, seal: Seal = identitySeal): Store {
     removeStudy: (tombstone) => done(async () => (await studyWrites()).removeStudy(core, tombstone)),
     markHandedOver: (covers) => done(() => markHandedOver(core, covers)),
     saveSettings: (changes) => done(() => saveSettings(core, changes)),
-    watch: (query, callback) => rows.watch(() => query(reader), callback),
+    watch: (query, callback) =>
+      rows.watch((read) => query(readerOver({ ...core, rows: { ...rows, read } })), callback),
     close: () => rows.close(),
   };
 }

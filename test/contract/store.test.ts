@@ -1,5 +1,5 @@
 import type { Seal } from '../../src/storage/seal.ts';
-import { openedDexie, openedMemory } from '../storage/opened.ts';
+import { openedIndexed, openedMemory } from '../storage/opened.ts';
 import { storeContract } from './store.contract.ts';
 
 /** A seal that takes its time and leaves nothing readable, as the vault's will. */
@@ -15,5 +15,5 @@ const slowSeal: Seal = {
 };
 
 storeContract('The store in memory', () => openedMemory());
-storeContract('The store in IndexedDB', () => openedDexie());
-storeContract('The store in IndexedDB under a seal', () => openedDexie(slowSeal));
+storeContract('The store in IndexedDB', () => openedIndexed());
+storeContract('The store in IndexedDB under a seal', () => openedIndexed(slowSeal));

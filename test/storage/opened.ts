@@ -1,8 +1,6 @@
-// Live queries of Dexie want a global database; it is looked for when Dexie is loaded.
-import 'fake-indexeddb/auto';
-import { IDBFactory, IDBKeyRange } from 'fake-indexeddb';
+import { IDBFactory } from 'fake-indexeddb';
 import { canonicalJson } from '../../src/kernel/canonicalJson.ts';
-import { openDexieRows } from '../../src/storage/dexieRows.ts';
+import { openIndexedRows } from '../../src/storage/indexedRows.ts';
 import { memoryRows } from '../../src/storage/memoryRows.ts';
 import { type RowStore, tableNames } from '../../src/storage/rows.ts';
 import type { Seal } from '../../src/storage/seal.ts';
@@ -27,8 +25,8 @@ export const openedMemory = async (seal?: Seal): Promise<Opened> => {
 };
 
 let databases = 0;
-export const openedDexie = async (seal?: Seal): Promise<Opened> => {
+export const openedIndexed = async (seal?: Seal): Promise<Opened> => {
   databases += 1;
-  const rows = await openDexieRows({ name: `store-${databases}`, indexedDB: new IDBFactory(), IDBKeyRange });
+  const rows = await openIndexedRows({ name: `store-${databases}`, indexedDB: new IDBFactory() });
   return { store: storeOver(rows, seal), dump: () => dumpOf(rows) };
 };

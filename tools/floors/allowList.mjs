@@ -68,8 +68,6 @@ export const packages = {
   'd3-scale': ['charts'],
   'd3-shape': ['charts'],
   'date-fns': ['analysis', 'batch', 'exchange', 'screens', 'words'],
-  dexie: ['storage'],
-  'dexie-react-hooks': ['app'],
   fflate: ['exchange'],
   jsqr: ['exchange'],
   qrcode: ['exchange'],

@@ -1,8 +1,9 @@
 import 'fake-indexeddb/auto';
-import { IDBFactory, IDBKeyRange } from 'fake-indexeddb';
+import { IDBFactory } from 'fake-indexeddb';
 import { afterEach, beforeEach, expect, it, vi } from 'vitest';
-import { declareDatabase, openDexieRows, schemaVersion } from '../../src/storage/dexieRows.ts';
 import { openStore } from '../../src/storage/index.ts';
+import { openIndexedRows } from '../../src/storage/indexedRows.ts';
+import { nativeVersion, schemaVersion } from '../../src/storage/openDatabase.ts';
 import { storeOver } from '../../src/storage/storeOver.ts';
 import type { Store, StoreNotice } from '../../src/tasks/ports.ts';
 import { headerOf } from '../support/session.ts';
@@ -41,7 +42,16 @@ afterEach(() => {
 });
 
 const open = async (onNotice?: (notice: StoreNotice) => void): Promise<Store> =>
-  given(await openStore({ name: 'x', indexedDB: factory, IDBKeyRange, ...(onNotice && { onNotice }) }));
+  given(await openStore({ name: 'x', indexedDB: factory, ...(onNotice && { onNotice }) }));
+
+/** The database as a later build opens it. */
+const newerBuild = (): Promise<IDBDatabase> =>
+  new Promise((resolve, reject) => {
+    const request = factory.open('x', nativeVersion(schemaVersion + 1));
+    request.onupgradeneeded = () => void request.result.createObjectStore('later', { keyPath: 'key' });
+    request.onsuccess = () => resolve(request.result);
+    request.onerror = () => reject(request.error);
+  });
 
 it('asks for strict durability in every transaction that writes', async () => {
   const store = await open();
@@ -120,11 +130,8 @@ it('says that the disk is full, keeps nothing of that call, and takes the same e
 });
 
 it('refuses a database that a newer build has written, and leaves it as it is', async () => {
-  const newer = declareDatabase({ name: 'x', indexedDB: factory, IDBKeyRange });
-  newer.version(schemaVersion + 1).stores({ later: 'key' });
-  await newer.open();
-  newer.close();
-  const opened = await openStore({ name: 'x', indexedDB: factory, IDBKeyRange });
+  (await newerBuild()).close();
+  const opened = await openStore({ name: 'x', indexedDB: factory });
   expect(opened).toMatchObject({
     ok: false,
     problem: { code: 'store.newer', values: { found: schemaVersion + 1, expected: schemaVersion } },
@@ -139,17 +146,19 @@ it('makes way for a newer build: it finishes, closes, tells, and writes no more'
   given(await store.createSession(headerOf()));
   const entries = journalOf('session-1', 30, false);
   const writing = store.appendEntries('session-1', entries);
-  const newer = declareDatabase({ name: 'x', indexedDB: factory, IDBKeyRange });
-  newer.version(schemaVersion + 1).stores({ later: 'key' });
-  const opening = newer.open();
+  const opening = newerBuild();
   const written = await writing;
-  await opening;
+  const newer = await opening;
   expect(notices).toEqual(['newerVersionWaits']);
   expect(['ok', 'store.closed']).toContain(codeOf(written));
-  expect(await newer.table('entries').count()).toBe(written.ok ? entries.length : 0);
+  const count = await new Promise((done) => {
+    const request = newer.transaction('entries').objectStore('entries').count();
+    request.onsuccess = () => done(request.result);
+  });
+  expect(count).toBe(written.ok ? entries.length : 0);
   expect(codeOf(await store.appendEntries('session-1', entries))).toBe('store.closed');
   expect(codeOf(await store.readSession('session-1'))).toBe('store.closed');
-  expect(newer.verno).toBe(schemaVersion + 1);
+  expect(newer.version).toBe(nativeVersion(schemaVersion + 1));
   newer.close();
 });
 
@@ -159,7 +168,7 @@ it('says that storage is refused where there is none', async () => {
       throw new DOMException('The operation is insecure.', 'SecurityError');
     },
   };
-  const opened = await openStore({ name: 'x', indexedDB: none as unknown as IDBFactory, IDBKeyRange });
+  const opened = await openStore({ name: 'x', indexedDB: none as unknown as IDBFactory });
   expect(codeOf(opened)).toBe('store.refused');
 });
 
@@ -187,10 +196,9 @@ it('lets a second tab see what the first has kept, and refuses its stale edit', 
 
 it('tells of its own closing', async () => {
   const notices: StoreNotice[] = [];
-  const rows = await openDexieRows({
+  const rows = await openIndexedRows({
     name: 'y',
     indexedDB: factory,
-    IDBKeyRange,
     onNotice: (notice) => notices.push(notice),
   });
   storeOver(rows).close();
