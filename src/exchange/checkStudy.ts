@@ -1,5 +1,6 @@
-import { isKnown, type KnownEntry } from '../journal/entry.ts';
+import type { KnownEntry } from '../journal/entry.ts';
 import { recordingFacts } from '../journal/headerFacts.ts';
+import { isKnown } from '../journal/known.ts';
 import type { StoredSession } from '../journal/stored.ts';
 import type { SessionHeader } from '../model/session.ts';
 import { intervalsInPart } from '../schedule/layOut.ts';

@@ -1,5 +1,6 @@
 import * as z from 'zod/mini';
-import { entryKinds, type JournalEntry, knownEntry } from '../journal/entry.ts';
+import { type JournalEntry, knownEntry } from '../journal/entry.ts';
+import { isKnownKind } from '../journal/known.ts';
 import { checkStudy } from './checkStudy.ts';
 import { studyFrame, unknownEntry } from './envelope.ts';
 import type { Envelope } from './migrations.ts';
@@ -27,7 +28,7 @@ export function readStudyEnvelope(envelope: Envelope, intact: boolean): ReadEnve
   for (const [s, { journal }] of content.sessions.entries()) {
     for (const [e, entry] of journal.entries()) {
       const kind = (entry as Partial<JournalEntry> | null)?.kind;
-      const known = typeof kind !== 'string' || entryKinds.includes(kind);
+      const known = typeof kind !== 'string' || isKnownKind(kind);
       if (!known) kinds.set(kind, (kinds.get(kind) ?? 0) + 1);
       const wrong = z.safeParse(known ? knownEntry : unknownEntry, entry).error?.issues[0];
       if (wrong !== undefined)

@@ -29,7 +29,7 @@ const ofChild = z.optional(id);
 const counts = z.object({ on: whole, present: whole });
 
 /** What each kind of entry says beside who wrote it and when. */
-const bodies = {
+export const bodies = {
   /** Recording began; `checks` are those that stood on hold, `anyway` says that the observer started all the same. */
   started: z.object({
     kind: z.literal('started'),
@@ -175,8 +175,6 @@ const body = z.discriminatedUnion('kind', [
   bodies.settled,
 ]);
 
-export const entryKinds: readonly string[] = Object.keys(bodies);
-
 /** What an entry says. */
 export type EntryBody = z.infer<typeof body>;
 export type EntryKind = EntryBody['kind'];
@@ -195,8 +193,3 @@ export type KnownEntry = EntryStamp & EntryBody;
 export type UnknownEntry = EntryStamp & { readonly kind: string } & Readonly<Record<string, unknown>>;
 
 export type JournalEntry = KnownEntry | UnknownEntry;
-
-/** True for kinds that this version understands. */
-export function isKnown(entry: JournalEntry): entry is KnownEntry {
-  return entryKinds.includes(entry.kind);
-}

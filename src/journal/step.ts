@@ -1,5 +1,6 @@
 import type { SessionHeader } from '../model/session.ts';
-import { isKnown, type JournalEntry, type KnownEntry } from './entry.ts';
+import type { JournalEntry, KnownEntry } from './entry.ts';
+import { isKnown } from './known.ts';
 import { inOrder } from './order.ts';
 import { type Cover, emptyState, type JournalState, type Saying } from './state.ts';
 

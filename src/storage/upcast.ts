@@ -1,10 +1,9 @@
-import { entryKinds, entryStamp, type JournalEntry, knownEntry } from '../journal/entry.ts';
-import { classroom } from '../model/classroom.ts';
-import { observer } from '../model/observer.ts';
-import { protocol } from '../model/protocol.ts';
-import { sessionHeader } from '../model/session.ts';
-import { study } from '../model/study.ts';
+import type { JournalEntry } from '../journal/entry.ts';
+import { isKnownKind } from '../journal/known.ts';
 import { StoreFailure } from './problems.ts';
+import { entryShapes, misshapen, recordShapes, type Shapes, stampShapes } from './shapes.ts';
+
+const shapesOf: Partial<Record<Form, Shapes>> = recordShapes;
 
 /** Forms of sealed values. */
 export type Form = 'study' | 'classroom' | 'observer' | 'protocol' | 'header' | 'entry' | 'facts' | 'journal';
@@ -30,11 +29,6 @@ export const steps: Readonly<Record<Form, readonly Step[]>> = {
 /** The version in which this build writes a form. */
 export const versionOf = (form: Form, all = steps): number => all[form].length + 1;
 
-interface Check {
-  safeParse(value: unknown): { success: boolean; error?: { issues: readonly { path: PropertyKey[] }[] } };
-}
-const checks: Partial<Record<Form, Check>> = { study, classroom, observer, protocol, header: sessionHeader };
-
 /**
  * Reads a row's value whatever version wrote it. Members that this build does not know stay where they are.
  * @throws StoreFailure `store.newerRow` when a newer build wrote it, `store.unreadable` when it is not what it says
@@ -50,21 +44,21 @@ export function upcast<T>(form: Form, v: number, value: unknown, key: string, al
   }
   if (form === 'entry') checkEntry(result, key);
   else if (form === 'journal') for (const entry of asArray(result, key)) checkEntry(entry, key);
-  else check(checks[form], result, form, key);
+  else check(shapesOf[form], result, form, key);
   return result as T;
 }
 
-function check(schema: Check | undefined, value: unknown, form: Form, key: string): void {
-  if (schema === undefined) return;
-  const parsed = schema.safeParse(value);
-  if (parsed.success) return;
-  const where = (parsed.error?.issues[0]?.path ?? []).map(String).join('.');
-  throw new StoreFailure('store.unreadable', { form, key, where });
+function check(shapes: Shapes | undefined, value: unknown, form: Form, key: string): void {
+  const where = shapes === undefined ? null : misshapen(value, shapes);
+  if (where !== null) throw new StoreFailure('store.unreadable', { form, key, where });
 }
 
 function checkEntry(value: unknown, key: string): void {
-  const kind = (value as JournalEntry | null)?.kind;
-  check(entryKinds.includes(kind ?? '') ? knownEntry : entryStamp, value, 'entry', key);
+  check(stampShapes, value, 'entry', key);
+  const { kind } = value as JournalEntry;
+  if (typeof kind !== 'string')
+    throw new StoreFailure('store.unreadable', { form: 'entry', key, where: 'kind' });
+  if (isKnownKind(kind)) check(entryShapes[kind], value, 'entry', key);
 }
 
 function asArray(value: unknown, key: string): readonly unknown[] {

@@ -1,5 +1,3 @@
-import { isValid, parseISO } from 'date-fns';
-
 /** Numbers, dates and plurals as people read them. Every figure on a screen or in a text goes through here. */
 export interface Format {
   readonly locale: string;
@@ -42,6 +40,7 @@ export function formatFor(locale: string): Format {
     weekday: 'long',
     day: 'numeric',
     month: 'long',
+    timeZone: 'UTC',
   });
   const trueMinus = (text: string): string => text.replace('-', minus);
   const fixed = (n: number, digits: number): string =>
@@ -67,9 +66,9 @@ export function formatFor(locale: string): Format {
       return `${Math.floor(seconds / 60)}:${String(seconds % 60).padStart(2, '0')}`;
     },
     day: (isoDate) => {
-      // The date alone, read in the reader's own zone: the day as it was where it was written.
-      const day = parseISO(isoDate.slice(0, 10));
-      return isValid(day) ? days.format(day) : isoDate;
+      // The date alone, read as a day of UTC and written as one: the day as it was where it was written.
+      const day = new Date(`${isoDate.slice(0, 10)}T00:00:00Z`);
+      return Number.isNaN(day.getTime()) ? isoDate : days.format(day);
     },
     time: (wall) => wall.slice(11, 16),
     plural: (n, forms) => (rules.select(n) === 'one' ? forms.one : forms.other),

@@ -1,6 +1,7 @@
 import { useState } from 'react';
-import { isKnown, type KnownEntry } from '../../journal/entry.ts';
+import type { KnownEntry } from '../../journal/entry.ts';
 import { recordingFacts } from '../../journal/headerFacts.ts';
+import { isKnown } from '../../journal/known.ts';
 import type { StoredSession } from '../../journal/stored.ts';
 import { addNote, type NoteWish } from '../../tasks/index.ts';
 import { Button } from '../../ui/Button.tsx';

@@ -5,10 +5,11 @@ import { Cover } from './eyesUp/Cover.tsx';
 import { EyesUpGlass } from './eyesUp/EyesUpGlass.tsx';
 import { Recalled } from './eyesUp/Recalled.tsx';
 import { Flash } from './Flash.tsx';
+import { LaterPanel } from './LaterPanel.tsx';
 import { Over } from './Over.tsx';
 import { PlanGlass } from './PlanGlass.tsx';
+import type { PanelName } from './panelName.ts';
 import { useFacts } from './RoomFacts.tsx';
-import { type PanelName, RoomPanel } from './RoomPanel.tsx';
 import { Standstill } from './Standstill.tsx';
 import { useDimGlass } from './useDimGlass.ts';
 import { useKeyAct } from './useKeyAct.ts';
@@ -70,7 +71,7 @@ function OnTheGlass({ leaving, covered, onCover }: GlassProps) {
   const eyesUp = useEyesUp();
   const middle =
     panel !== null ? (
-      <RoomPanel name={panel} onPanel={setPanel} onClose={close} />
+      <LaterPanel name={panel} onPanel={setPanel} onClose={close} />
     ) : still ? (
       <Standstill />
     ) : null;

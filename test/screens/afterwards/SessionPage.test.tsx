@@ -2,7 +2,8 @@
 import { cleanup, screen } from '@testing-library/react';
 import userEvent from '@testing-library/user-event';
 import { afterEach, expect, test } from 'vitest';
-import { type EntryBody, isKnown } from '../../../src/journal/entry.ts';
+import type { EntryBody } from '../../../src/journal/entry.ts';
+import { isKnown } from '../../../src/journal/known.ts';
 import { Afterwards } from '../../../src/screens/afterwards/Afterwards.tsx';
 import type { Row } from '../../analysis/sessionsFrom.ts';
 import { headerOf, journalOf } from '../../support/session.ts';

@@ -1,10 +1,14 @@
 import { act, screen } from '@testing-library/react';
 import type { SessionHeader } from '../../../src/model/session.ts';
+import { loadPanels } from '../../../src/screens/room/LaterPanel.tsx';
 import { Room } from '../../../src/screens/room/Room.tsx';
 import { ServicesContext } from '../../../src/screens/services.ts';
 import { Lesson } from '../../recorder/fakes/lesson.ts';
 import { fakeServices, renderScreen } from '../support/renderScreen.tsx';
 import { deskWith } from './renderRoom.tsx';
+
+// Panels are brought when they are asked for first; here they are there from the start.
+await loadPanels();
 
 /** A real session on a clock that the test turns, with the room around it. */
 export async function renderLesson(header: SessionHeader) {

@@ -1,12 +1,16 @@
 import { act } from '@testing-library/react';
 import type { Manner } from '../../../src/model/observer.ts';
 import type { RoomSnapshot } from '../../../src/recorder/roomSnapshot.ts';
+import { loadPanels } from '../../../src/screens/room/LaterPanel.tsx';
 import { Room } from '../../../src/screens/room/Room.tsx';
 import { ServicesContext } from '../../../src/screens/services.ts';
 import { fakeDevice, fakeServices, renderScreen } from '../support/renderScreen.tsx';
 import { must } from '../support/studyOf.ts';
 import { FakeLive } from './fakeLive.ts';
 import { deskWith } from './renderRoom.tsx';
+
+// Panels are brought when they are asked for first; here they are there from the start.
+await loadPanels();
 
 /** The room of an observer who likes it so; `wakeUp` lets everything that waits come to its end. */
 export async function renderLiked(manner: Partial<Manner>, snapshot: RoomSnapshot) {

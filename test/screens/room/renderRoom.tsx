@@ -1,10 +1,14 @@
 import { problem } from '../../../src/kernel/result.ts';
 import type { LiveSession } from '../../../src/recorder/liveSession.ts';
 import type { RoomSnapshot } from '../../../src/recorder/roomSnapshot.ts';
+import { loadPanels } from '../../../src/screens/room/LaterPanel.tsx';
 import { Room } from '../../../src/screens/room/Room.tsx';
 import { type RecorderDesk, type Services, ServicesContext } from '../../../src/screens/services.ts';
 import { fakeServices, renderScreen } from '../support/renderScreen.tsx';
 import { FakeLive } from './fakeLive.ts';
+
+// Panels are brought when they are asked for first; here they are there from the start.
+await loadPanels();
 
 /** A desk on which one session lies. */
 export function deskWith(live: LiveSession, id = 'session-1'): RecorderDesk {
