@@ -1,4 +1,4 @@
-import { type MouseEvent, type SyntheticEvent, useCallback, useState } from 'react';
+import { type MouseEvent, type SyntheticEvent, useCallback, useRef, useState } from 'react';
 import { BeforeStart } from './BeforeStart.tsx';
 import { BottomRow } from './BottomRow.tsx';
 import { Cover } from './eyesUp/Cover.tsx';
@@ -6,6 +6,7 @@ import { EyesUpGlass } from './eyesUp/EyesUpGlass.tsx';
 import { Recalled } from './eyesUp/Recalled.tsx';
 import { Flash } from './Flash.tsx';
 import { LaterPanel } from './LaterPanel.tsx';
+import { NoteDraft } from './noteDraft.ts';
 import { Over } from './Over.tsx';
 import { PlanGlass } from './PlanGlass.tsx';
 import type { PanelName } from './panelName.ts';
@@ -27,10 +28,15 @@ export function Lesson() {
   const settled = useRoom((s) => s.phase === 'ready' || (s.phase === 'ended' && s.kept.kept === s.kept.of));
   const leaving = useLeaveGuard(!settled);
   const [covered, setCovered] = useState(false);
+  const draft = useRef('');
   if (phase === 'ready') return <BeforeStart />;
   // What was covered stays covered, also when the session is over.
   if (phase === 'ended' && !covered) return <Over />;
-  return <OnTheGlass leaving={leaving} covered={covered} onCover={setCovered} />;
+  return (
+    <NoteDraft value={draft}>
+      <OnTheGlass leaving={leaving} covered={covered} onCover={setCovered} />
+    </NoteDraft>
+  );
 }
 
 const inPanel = (target: EventTarget | null): boolean =>

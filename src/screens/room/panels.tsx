@@ -1,9 +1,10 @@
-import { type FormEvent, useId, useState } from 'react';
+import { type FormEvent, use, useId, useState } from 'react';
 import { Button } from '../../ui/Button.tsx';
 import { Check } from '../../ui/Choice.tsx';
 import { TextArea, TextField } from '../../ui/Field.tsx';
 import { useCoreWords } from '../coreServices.ts';
 import { aheadOf } from './amounts.ts';
+import { NoteDraft } from './noteDraft.ts';
 import { Panel } from './Panel.tsx';
 import { useFacts } from './RoomFacts.tsx';
 import { useLive, useRoom } from './useRoom.ts';
@@ -18,17 +19,22 @@ export function NotePanel({ onClose }: Props) {
   const { room } = useCoreWords();
   const form = useId();
   const flag = useRoom((s) => s.lastFlag);
-  const [text, setText] = useState('');
+  const draft = use(NoteDraft);
+  const [text, setText] = useState(draft.current);
   const [aboutFlag, setAboutFlag] = useState(false);
+  const leave = (): void => {
+    draft.current = '';
+    onClose();
+  };
   const keep = (event: FormEvent): void => {
     event.preventDefault();
     if (text.trim() !== '') live.note(text.trim(), aboutFlag && flag !== null ? flag : undefined);
-    onClose();
+    leave();
   };
   return (
     <Panel
       title={room.noteTitle}
-      onClose={onClose}
+      onClose={leave}
       actions={
         <Button look="main" type="submit" form={form} disabled={text.trim() === ''}>
           {room.noteKeep}
@@ -41,7 +47,10 @@ export function NotePanel({ onClose }: Props) {
           rows={3}
           maxLength={2000}
           value={text}
-          onChange={(event) => setText(event.target.value)}
+          onChange={(event) => {
+            draft.current = event.target.value;
+            setText(event.target.value);
+          }}
         />
         {flag !== null && <Check label={room.noteAboutFlag} checked={aboutFlag} onChange={setAboutFlag} />}
       </form>

@@ -94,6 +94,19 @@ describe('the cover', () => {
     expect(live.calls.map(([name, on]) => [name, on])).toEqual([['count', 1]]);
   });
 
+  test('a note that is being typed outlives the cover', async () => {
+    await renderLiked({}, now());
+    fireEvent.click(button('note …'));
+    const typed = 'the class next door came';
+    fireEvent.change(screen.getByRole('textbox'), { target: { value: typed } });
+    fireEvent.click(button('cover'));
+    fireEvent.click(corner());
+    expect((screen.getByRole('textbox') as HTMLTextAreaElement).value).toBe(typed);
+    fireEvent.click(button('Cancel'));
+    fireEvent.click(button('note …'));
+    expect((screen.getByRole('textbox') as HTMLTextAreaElement).value).toBe('');
+  });
+
   test('what is covered stays covered through an interruption and past the end', async () => {
     const { container, live } = await covered();
     act(() => live.show({ phase: 'interrupted' }));
