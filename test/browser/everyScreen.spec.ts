@@ -31,7 +31,7 @@ test('a newcomer gets from nothing to the change of the demo classes in three ta
 }) => {
   const page = await tablet.visitOnce();
   await tablet.goOffline();
-  await expect(page.getByRole('heading', { level: 1 })).toBeVisible();
+  await expect(page.getByRole('heading', { level: 1, name: 'First, a study.' })).toBeVisible();
   await picture(page, 'first-start');
   await expectAccessible(page);
   await openDemo(page);
