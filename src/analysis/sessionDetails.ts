@@ -105,7 +105,14 @@ export function phaseDetails(record: SessionRecord): PhaseDetails {
     offTask: offTask.map((code) => ({ ...code, percent: allOff === 0 ? null : (100 * code.n) / allOff })),
     late: record.looks.filter((look) => look.late).length,
     amended: record.looks.filter((look) => look.amended).length,
-    warnings: shareWarnings(row),
+    // A headcount's row counts children; what is missing are scans.
+    warnings: shareWarnings({
+      ...row,
+      ...(record.method === 'headcount' && {
+        scored: record.looks.filter(isScored).length,
+        missing: record.looks.filter((look) => !isScored(look)).length,
+      }),
+    }),
   };
 }
 

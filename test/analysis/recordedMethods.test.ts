@@ -1,5 +1,5 @@
 import { describe, expect, it } from 'vitest';
-import { onTaskReport, recordsOf } from '../../src/analysis/index.ts';
+import { onTaskReport, recordsOf, sessionDetails } from '../../src/analysis/index.ts';
 import { readIncoming } from '../../src/exchange/readIncoming.ts';
 import { writeIntervalTable } from '../../src/exchange/writeIntervalTable.ts';
 import type { EntryBody } from '../../src/journal/entry.ts';
@@ -80,6 +80,11 @@ describe('figures of sessions that were recorded here', () => {
     expect(rowOf(headcount)).toMatchObject({ scored: 47, missing: 2, onTask: 38, classPercent: null });
     expect(rowOf(headcount)?.percentOnTask).toBeCloseTo(80.851, 3);
     expect(figuresOf(await throughTable(headcount))).toEqual(figuresOf(headcount));
+    // Two of four scans are missing, however many children the others counted.
+    expect(sessionDetails(headcount).phases[0]?.warnings).toContainEqual({
+      code: 'manyMissing',
+      values: { percent: 50, missing: 2 },
+    });
   });
 
   it('duration: seconds on-task of the seconds that were seen, one child', async () => {

@@ -5,7 +5,7 @@ import { fold } from '../../src/journal/step.ts';
 import { listen, listenSource, type Sound, soundsOf } from './support/hearing.ts';
 import { HideablePage } from './support/hideable.ts';
 import { headerOnDisk, journalOnDisk, sessionOf } from './support/kept.ts';
-import { goIn, lookingAt, start, touch } from './support/observing.ts';
+import { goIn, lookingAt, start } from './support/observing.ts';
 import { shortVisitFile } from './support/shortVisit.ts';
 import {
   contextsMade,
@@ -161,7 +161,6 @@ test.describe('in full view', () => {
   }) => {
     const page = await tablet.visitOnce();
     const session = await recording(page, 'wall clock');
-    await touch(page, 'on-task');
     const noticed = (count: number) =>
       expect
         .poll(async () => gapsOf(await journalOnDisk(page, session)).length, {

@@ -75,6 +75,18 @@ function OnTheGlass({ leaving, covered, onCover }: GlassProps) {
   });
   useKeys(keys, panel !== null && !covered, act);
   const eyesUp = useEyesUp();
+  // The finger that held the cover's corner lifts over what lies there now: its click is nobody's.
+  const uncovering = useRef(false);
+  const strayClick = (event: MouseEvent): void => {
+    if (!uncovering.current || event.detail === 0) return;
+    uncovering.current = false;
+    event.preventDefault();
+    event.stopPropagation();
+  };
+  const uncover = (): void => {
+    uncovering.current = true;
+    onCover(false);
+  };
   const middle =
     panel !== null ? (
       <LaterPanel name={panel} onPanel={setPanel} onClose={close} />
@@ -90,9 +102,13 @@ function OnTheGlass({ leaving, covered, onCover }: GlassProps) {
       data-hand={manner.hand}
       onContextMenu={noMenu}
       onMouseDown={keepFocus}
+      onPointerDownCapture={() => {
+        uncovering.current = false;
+      }}
+      onClickCapture={strayClick}
     >
       {covered ? (
-        <Cover zones={marking ? zones : null} still={still} onUncover={() => onCover(false)} />
+        <Cover zones={marking ? zones : null} still={still} onUncover={uncover} />
       ) : eyesUp ? (
         <EyesUpGlass
           zones={marking ? zones : null}

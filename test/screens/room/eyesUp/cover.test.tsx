@@ -94,6 +94,18 @@ describe('the cover', () => {
     expect(live.calls.map(([name, on]) => [name, on])).toEqual([['count', 1]]);
   });
 
+  test('the finger that uncovered lifts over another button, and works nothing there', async () => {
+    const { live, wakeUp } = await covered();
+    fireEvent.pointerDown(corner());
+    wakeUp();
+    expect(isCovered()).toBe(false);
+    fireEvent.click(button('silence'), { detail: 1 });
+    expect(live.calls).toEqual([]);
+    fireEvent.pointerDown(button('silence'));
+    fireEvent.click(button('silence'), { detail: 1 });
+    expect(live.calls.map(([name]) => name)).toEqual(['silence']);
+  });
+
   test('a note that is being typed outlives the cover', async () => {
     await renderLiked({}, now());
     fireEvent.click(button('note …'));
