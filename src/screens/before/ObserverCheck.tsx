@@ -60,18 +60,28 @@ function WhoDialog({ study, observers, who, onChange, onClose }: Props & { reado
   const { words, deps } = useServices();
   const [name, setName] = useState('');
   const [problem, setProblem] = useState<string | null>(null);
-  const add = async () => {
-    const added = await addObserver(deps, study, name.trim());
-    if (!added.ok) return setProblem(say(words.problems, added.problem));
+  const add = async (): Promise<boolean> => {
+    // Out of the field at once, so that a quick "Done" after "Add" does not add it twice.
     setName('');
+    const added = await addObserver(deps, study, name.trim());
+    if (!added.ok) {
+      setName(name);
+      setProblem(say(words.problems, added.problem));
+      return false;
+    }
     setProblem(null);
     onChange({ ...who, observer: added.value.id });
+    return true;
+  };
+  // A name that stands in the field is meant, whether "Add" was tapped or not.
+  const done = async (): Promise<void> => {
+    if (name.trim() === '' || (await add())) onClose();
   };
   return (
     <Dialog
       title={words.before.observerDialog}
       onClose={onClose}
-      actions={<Button onClick={onClose}>{words.common.done}</Button>}
+      actions={<Button onClick={done}>{words.common.done}</Button>}
     >
       {observers.length > 0 && (
         <Choice

@@ -59,6 +59,17 @@ async function hear() {
 }
 
 describe('Before the visit: the checks', () => {
+  it('takes a name that stands in the field on "Done", though nobody tapped "Add"', async () => {
+    const { services } = await atTheDoor();
+    await userEvent.click(screen.getByRole('button', { name: 'Choose' }));
+    await userEvent.type(await screen.findByLabelText(/Name of the observer/), 'Marsh');
+    await userEvent.click(screen.getByRole('button', { name: 'Done' }));
+    await screen.findByText(/^Marsh, /);
+    const [study] = must(await services.store.studies());
+    const names = must(await services.store.observers(study?.id ?? '')).map(({ name }) => name);
+    expect(names).toEqual(['Marsh', 'Quill']);
+  });
+
   it('counts what stands in the way, and lets in quietly when nothing does', async () => {
     const { opened, view } = await atTheDoor();
     expect(screen.getByRole('heading', { level: 1 }).textContent).toBe('Three things before you go in.');
