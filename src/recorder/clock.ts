@@ -13,8 +13,10 @@ export type Reading =
   | 'steady'
   /** One strange reading: waited for a second one. */
   | 'doubtful'
-  /** The audio clock was set to where the session stands (first reading, new context, jump): lay cues anew. */
+  /** The audio clock was set to where the session stands (first reading, new context): lay cues anew. */
   | 'anchored'
+  /** The same in the middle of a run: the audio clock slipped, as under a machine that stood still for a moment. */
+  | 'slipped'
   /** The audio clock does not run: the page clock goes on alone. */
   | 'lost';
 
@@ -36,6 +38,7 @@ export class SessionClock {
   private generation = -1;
   private raw: number[] = [];
   private doubtful: number | null = null;
+  private behind = 0;
   private lastSample: ClockSample | null = null;
   private origin: number | null = null;
   private pausedFor = 0;
@@ -61,6 +64,14 @@ export class SessionClock {
     return this.audioShift !== null;
   }
 
+  /**
+   * So many milliseconds later than planned came what sounded until the last reading: 0 except between a slip of the
+   * audio clock and the moment when cues lie anew. Negative when the audio clock ran ahead.
+   */
+  get late(): number {
+    return this.behind;
+  }
+
   pause(page: PageMs): void {
     if (this.pausedSince === null) this.pausedSince = page + this.pageShift;
   }
@@ -78,6 +89,7 @@ export class SessionClock {
 
   /** Reads the audio clock against the page clock; null while it does not run. Call it at each wake-up. */
   read(sample: ClockSample | null, generation: number): Reading {
+    this.behind = 0;
     if (sample === null) {
       // It said itself that it stopped: when it says that it runs again, it need not prove it against old readings.
       this.lastSample = null;
@@ -96,10 +108,14 @@ export class SessionClock {
     }
     this.lastSample = sample;
     const raw = 1000 * sample.audio - sample.page;
-    if (Math.abs(raw - median(this.raw)) > jumpMs) {
+    const behind = median(this.raw) - raw;
+    if (Math.abs(behind) > jumpMs) {
       const again = this.doubtful !== null && Math.abs(raw - this.doubtful) <= jumpMs;
+      this.behind = behind;
       this.doubtful = raw;
-      return again ? this.anchor(sample) : 'doubtful';
+      if (!again) return 'doubtful';
+      this.anchor(sample);
+      return 'slipped';
     }
     this.doubtful = null;
     this.raw = [...this.raw, raw].slice(-readings);

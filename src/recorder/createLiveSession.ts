@@ -15,5 +15,7 @@ export function createLiveSession(
   if (plan === null || header.schedule.kind !== 'laid') {
     throw new Error('A schedule from a table cannot be recorded.');
   }
-  return new RunningSession(new SessionRun(header, header.schedule.protocol, plan, ports, options));
+  return new RunningSession(
+    new SessionRun({ header, protocol: header.schedule.protocol, plan, ports, options }),
+  );
 }

@@ -1,4 +1,4 @@
-import { sessionMs } from '../kernel/units.ts';
+import { type AudioSeconds, sessionMs } from '../kernel/units.ts';
 import type { SessionClock } from './clock.ts';
 import { type CuePattern, countInTick, cuePattern, headsUpPattern, withLeadIn } from './cuePatterns.ts';
 import { dueIn, type GridCue } from './grid.ts';
@@ -48,7 +48,7 @@ export function soundsOf(
 
 /** Lays sounds well ahead on the audio clock, and takes them back when silence is asked for. */
 export class CuePlayer {
-  private laid: { readonly at: number; readonly stop: Stop }[] = [];
+  private laid: { readonly at: number; readonly audio: AudioSeconds; readonly stop: Stop }[] = [];
   private until = Number.NEGATIVE_INFINITY;
   private generation = -1;
 
@@ -72,7 +72,7 @@ export class CuePlayer {
       const at = this.clock.audioAt(sessionMs(sound.at));
       // Too late for its moment: it is not played at all, since a late cue bends the grid.
       if (at === null || at < present + tooClose) continue;
-      this.laid.push({ at: sound.at, stop: this.audio.lay(sound.pattern, at) });
+      this.laid.push({ at: sound.at, audio: at, stop: this.audio.lay(sound.pattern, at) });
     }
     this.until = Math.max(this.until, now + aheadMs);
   }
@@ -88,9 +88,8 @@ export class CuePlayer {
   heard(at: number): boolean {
     // What lay on a context that is gone is gone with it.
     if (this.generation !== this.audio.generation()) return false;
-    if (!this.laid.some((sound) => sound.at === at)) return false;
+    const sound = this.laid.find((one) => one.at === at);
     const present = this.audio.now();
-    const planned = this.clock.audioAt(sessionMs(at));
-    return present !== null && planned !== null && present >= planned - step;
+    return sound !== undefined && present !== null && present >= sound.audio - step;
   }
 }

@@ -18,6 +18,8 @@ interface Parts {
   readonly leadIn: () => boolean;
   /** So long before each look a soft tone; null for none. */
   readonly headsUpMs: () => number | null;
+  /** What was just heard came so many milliseconds late. */
+  readonly late: () => number;
   /** Nobody can touch a hidden page, which a record of onsets and offsets cannot do without. */
   readonly continuous: boolean;
   readonly ports: Pick<RecorderPorts, 'visibility' | 'vibration'>;
@@ -82,6 +84,7 @@ export class CueRound {
       if (!cuesGiven(standing(plan, book.state, cue.at))) continue;
       const body = delivered(cue, now, {
         heard: player.heard(cue.at),
+        late: this.parts.late(),
         seen: !ports.visibility.hidden() && this.hidden === null,
         vibrate: () => settings.vibration && ports.vibration.vibrate(cueRhythm(cue.cue)),
       });
@@ -107,7 +110,8 @@ export class CueRound {
   /** Follows hidden pages and stuck sound from their beginning to their end, and lays cues anew where clocks jumped. */
   disruption(now: number, reading: Reading, clockRuns: boolean): void {
     const isHidden = this.parts.ports.visibility.hidden();
-    if (reading === 'lost' || reading === 'anchored') this.takeBack();
+    if (reading === 'lost' || reading === 'anchored' || reading === 'slipped') this.takeBack();
+    if (reading === 'slipped' && now >= 0) this.over({ cause: 'sound', from: now, cues: [] }, now);
     if (isHidden) this.hidden ??= { cause: 'hidden', from: now, cues: [] };
     else if (this.hidden !== null) this.hidden = this.over(this.hidden, now);
     if (reading === 'lost') this.stuck ??= { cause: 'sound', from: now, cues: [] };

@@ -7,6 +7,8 @@ export const shownWithinMs = 1000;
 export interface Carriers {
   /** The sound lay on the audio clock and that clock has run past it. */
   readonly heard: boolean;
+  /** By so many milliseconds what was heard came later than planned: a slip of the audio clock that was just found. */
+  readonly late: number;
   /** The page is seen, and nothing hid it since the cue. */
   readonly seen: boolean;
   /** Makes the tablet vibrate; false when it cannot or is not asked to. */
@@ -14,8 +16,8 @@ export interface Carriers {
 }
 
 /**
- * What the journal says of a cue at the first wake-up after it. Sound comes at the planned moment, exactly; screen and
- * vibration come with the wake-up, and only when that is soon enough.
+ * What the journal says of a cue at the first wake-up after it. Sound comes at the planned moment, exactly, but
+ * for a slip of the audio clock; screen and vibration come with the wake-up, and only when that is soon enough.
  */
 export function delivered(
   cue: GridCue,
@@ -32,7 +34,7 @@ export function delivered(
     interval: cue.interval,
     cue: cue.cue,
     planned: cue.at,
-    delivered: carriers.heard ? cue.at : soon ? Math.round(now) : null,
+    delivered: carriers.heard ? Math.round(cue.at + carriers.late) : soon ? Math.round(now) : null,
     by,
   };
 }

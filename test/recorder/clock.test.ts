@@ -37,10 +37,15 @@ describe('SessionClock', () => {
     expect(clock.read(sample(22, 13_000), 1)).toBe('steady');
     expect(clock.read(sample(23.2, 14_000), 1)).toBe('doubtful');
     expect(clock.audioAt(sessionMs(20_000))).toBe(30);
-    expect(clock.read(sample(23.25, 14_050), 1)).toBe('anchored');
+    expect(clock.late).toBeCloseTo(-200, 9);
+    expect(clock.read(sample(23.25, 14_050), 1)).toBe('slipped');
+    // What sounded until now lay on the clock as it was before.
+    expect(clock.late).toBeCloseTo(-200, 9);
     expect(clock.at(pageMs(14_050))).toBe(13_050);
     // Session time 20 s now lies at the audio time that will be read then.
     expect(clock.audioAt(sessionMs(20_000))).toBeCloseTo(23.25 + 6.95, 9);
+    expect(clock.read(sample(24.2, 15_000), 1)).toBe('steady');
+    expect(clock.late).toBe(0);
   });
 
   it('goes on by the page clock when the audio clock is gone, and puts a new one onto the same grid', () => {

@@ -76,6 +76,52 @@ describe('the sound stops and comes back', () => {
   });
 });
 
+describe('the audio clock slips, as on a machine that stood still for a moment', () => {
+  /** The audio clock alone stands still for so long from this session time on. */
+  const slip = async (lesson: Lesson, from: number, ms: number) => {
+    await lesson.until(from);
+    lesson.audio.frozen = true;
+    await lesson.until(from + ms);
+    lesson.audio.frozen = false;
+  };
+  const told = (lesson: Lesson) =>
+    lesson.store
+      .journal()
+      .flatMap((e) => (e.kind === 'cued' ? [[e.planned, e.delivered, e.by.join('+')]] : []));
+
+  it('between two cues: noticed within two seconds, written down once, and no cue is late for it', async () => {
+    const lesson = await begun();
+    await slip(lesson, 100_000, 112);
+    await lesson.until(700_000);
+    expect(heardTimes(lesson)).toEqual(grid);
+    expect(gaps(lesson)).toEqual([['sound', 101_050, 101_050, false]]);
+    expect(told(lesson)).toEqual(grid.map((at) => [at, at, 'sound+screen']));
+  });
+
+  it('just before a cue: the cue is shown and never heard late', async () => {
+    const lesson = await begun();
+    await slip(lesson, 104_700, 112);
+    await lesson.until(700_000);
+    expect(heardTimes(lesson)).toEqual(grid.filter((at) => at !== 105_000));
+    expect(gaps(lesson)).toEqual([['sound', 105_050, 105_050, false]]);
+    expect(told(lesson)).toEqual(grid.map((at) => [at, at, at === 105_000 ? 'screen' : 'sound+screen']));
+  });
+
+  it('and the page is busy meanwhile: a cue that came late is said to be as late as it was', async () => {
+    const lesson = await begun();
+    await lesson.until(104_500);
+    lesson.audio.frozen = true;
+    lesson.clock.block(112);
+    lesson.audio.frozen = false;
+    lesson.clock.block(1000);
+    await lesson.until(700_000);
+    expect(heardTimes(lesson)).toEqual(grid.map((at) => (at === 105_000 ? 105_112 : at)));
+    expect(told(lesson)[6]).toEqual([105_000, 105_112, 'sound+screen']);
+    expect(told(lesson).filter(([planned, delivered]) => planned !== delivered)).toHaveLength(1);
+    expect(gaps(lesson)).toEqual([['sound', 105_662, 105_662, false]]);
+  });
+});
+
 describe('the page is hidden', () => {
   it('cues sound on time though timers come once a minute, and are known to have been heard', async () => {
     const lesson = await begun();

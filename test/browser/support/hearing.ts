@@ -41,13 +41,14 @@ function tapSpeakers({ ms, code }: { ms: number; code: string }): void {
       channelCountMode: 'explicit',
       processorOptions: { silence: Math.round((ms / 1000) * audio.sampleRate) },
     });
+    // How the clocks stand is read when a sound begins: at its end the audio clock may have slipped.
+    let page = 0;
     node.port.onmessage = ({ data: { kind, ...sound } }) => {
       if (kind === 'listening') heard.listening[context] = true;
-      else {
+      else if (kind === 'begun') {
         const { contextTime = 0, performanceTime = 0 } = audio.getOutputTimestamp();
-        const page = performanceTime + 1000 * (sound.onset / audio.sampleRate - contextTime);
-        heard.sounds.push({ ...sound, sampleRate: audio.sampleRate, context, page });
-      }
+        page = performanceTime + 1000 * (sound.onset / audio.sampleRate - contextTime);
+      } else heard.sounds.push({ ...sound, sampleRate: audio.sampleRate, context, page });
     };
     // The listener itself is silent; a node is run only when it leads to the speakers.
     Reflect.apply(connect, hub, [node]);

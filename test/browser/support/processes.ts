@@ -22,6 +22,27 @@ export function browserPid(profile: string): number | undefined {
     });
 }
 
+/** The process that started another one; nothing when it is gone. */
+function parentOf(pid: number): number | undefined {
+  try {
+    // The name, in brackets, may hold anything; state and parent come after it.
+    return Number(readFileSync(`/proc/${pid}/stat`, 'utf8').split(') ').at(-1)?.split(' ')[1]);
+  } catch {
+    return undefined;
+  }
+}
+
+/** A process and all that came of it. */
+export function familyOf(pid: number): number[] {
+  const all = readdirSync('/proc').map(Number).filter(Number.isInteger);
+  const family = new Set([pid]);
+  for (let before = 0; before < family.size; ) {
+    before = family.size;
+    for (const one of all) if (family.has(parentOf(one) ?? -1)) family.add(one);
+  }
+  return [...family];
+}
+
 /** Whether a process is there and not merely waiting to be collected. */
 export function isAlive(pid: number): boolean {
   try {

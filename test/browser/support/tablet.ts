@@ -3,7 +3,7 @@ import { tmpdir } from 'node:os';
 import { join } from 'node:path';
 import { type BrowserContext, chromium, type Page } from '@playwright/test';
 import { chromiumFlags, findChromium } from '../../../tools/find-chromium.mjs';
-import { browserPid } from './processes.ts';
+import { browserPid, familyOf } from './processes.ts';
 import type { Site } from './site.ts';
 
 export interface TabletOptions {
@@ -110,6 +110,16 @@ export class Tablet {
   async goOnline(): Promise<void> {
     await this.site.start();
     await this.context.setOffline(false);
+  }
+
+  /** Nothing of the browser runs for so long, as on a machine that has too much to do. Blocks the test as well. */
+  standStill(ms: number): void {
+    const pid = browserPid(this.profile);
+    if (pid === undefined) throw new Error('the browser is not running');
+    const family = familyOf(pid);
+    for (const one of family) process.kill(one, 'SIGSTOP');
+    Atomics.wait(new Int32Array(new SharedArrayBuffer(4)), 0, 0, ms);
+    for (const one of family) process.kill(one, 'SIGCONT');
   }
 
   /** Ends the browser as a crash would: no handler runs, nothing is flushed. The profile stays. */

@@ -36,7 +36,10 @@ class Capture extends AudioWorkletProcessor {
       this.port.postMessage({ kind: 'sound', ...this.sound, end: this.lastHeard + 1 });
       this.sound = null;
     }
-    this.sound ??= { onset: frame, left: 0, right: 0 };
+    if (!this.sound) {
+      this.sound = { onset: frame, left: 0, right: 0 };
+      this.port.postMessage({ kind: 'begun', onset: frame });
+    }
     this.sound.left = Math.max(this.sound.left, left);
     this.sound.right = Math.max(this.sound.right, right);
     this.lastHeard = frame;
