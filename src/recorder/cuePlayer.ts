@@ -14,6 +14,12 @@ const step = 0.05;
 /** A sound cannot be laid closer to the audio clock's present than this (seconds). */
 const tooClose = 0.004;
 
+/**
+ * A due sound that a slip of the audio clock makes later than this (ms) is taken back: the screen has cued meanwhile. One
+ * that is less late is of more use to an ear than none, and is said to be late.
+ */
+const lateAtMost = 250;
+
 /** One sound on the session's clock. */
 export interface LaidSound {
   readonly at: number;
@@ -69,6 +75,7 @@ export class CuePlayer {
     this.laid = this.laid.filter((sound) => sound.at > now - aheadMs);
     const from = Math.max(this.until, now - 1);
     for (const sound of dueIn(sounds, from, now + aheadMs)) {
+      if (this.laid.some((one) => one.at === sound.at)) continue;
       const at = this.clock.audioAt(sessionMs(sound.at));
       // Too late for its moment: it is not played at all, since a late cue bends the grid.
       if (at === null || at < present + tooClose) continue;
@@ -84,12 +91,24 @@ export class CuePlayer {
     this.until = Number.NEGATIVE_INFINITY;
   }
 
-  /** True when a sound lay at this session time and the audio clock has come to it. */
+  /** The audio clock slipped: takes back what is not due yet and has not begun, since it lies at a wrong moment now. */
+  takeBackAhead(now: number): void {
+    const present = this.audio.now() ?? 0;
+    const stays = (sound: { readonly at: number; readonly audio: AudioSeconds }): boolean =>
+      sound.audio <= present || (sound.at <= now && this.clock.late <= lateAtMost);
+    for (const sound of this.laid) if (!stays(sound)) sound.stop();
+    this.laid = this.laid.filter(stays);
+    this.until = Number.NEGATIVE_INFINITY;
+  }
+
+  /** True when a sound lay at this session time and the audio clock has come to it, or is about to, being late. */
   heard(at: number): boolean {
     // What lay on a context that is gone is gone with it.
     if (this.generation !== this.audio.generation()) return false;
     const sound = this.laid.find((one) => one.at === at);
     const present = this.audio.now();
-    return sound !== undefined && present !== null && present >= sound.audio - step;
+    const { late } = this.clock;
+    const wait = late > 0 && late <= lateAtMost ? late / 1000 : 0;
+    return sound !== undefined && present !== null && present >= sound.audio - wait - step;
   }
 }

@@ -110,8 +110,11 @@ export class CueRound {
   /** Follows hidden pages and stuck sound from their beginning to their end, and lays cues anew where clocks jumped. */
   disruption(now: number, reading: Reading, clockRuns: boolean): void {
     const isHidden = this.parts.ports.visibility.hidden();
-    if (reading === 'lost' || reading === 'anchored' || reading === 'slipped') this.takeBack();
-    if (reading === 'slipped' && now >= 0) this.over({ cause: 'sound', from: now, cues: [] }, now);
+    if (reading === 'lost' || reading === 'anchored') this.takeBack();
+    if (reading === 'slipped') {
+      this.parts.player.takeBackAhead(now);
+      if (now >= 0) this.over({ cause: 'sound', from: now, cues: [] }, now);
+    }
     if (isHidden) this.hidden ??= { cause: 'hidden', from: now, cues: [] };
     else if (this.hidden !== null) this.hidden = this.over(this.hidden, now);
     if (reading === 'lost') this.stuck ??= { cause: 'sound', from: now, cues: [] };

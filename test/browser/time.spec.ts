@@ -102,10 +102,8 @@ test.describe('in full view', () => {
     expect(cuedOf(journal).every(({ by }) => by.includes('screen'))).toBe(true);
     expect(cuedOf(journal).at(-1)?.by).toEqual(['sound', 'screen']);
     // It was noticed and is over within two seconds, and no cue was lost to it.
-    const [gap, ...others] = gapsOf(journal);
-    expect(others).toEqual([]);
-    expect(gap).toMatchObject({ cause: 'sound', estimated: false });
-    expect((gap?.to ?? 0) - (gap?.from ?? 0)).toBe(0);
+    expect(gapsOf(journal)).toContainEqual(expect.objectContaining({ cause: 'sound', estimated: false }));
+    expect(gapsOf(journal).filter(({ cause, from, to }) => cause !== 'sound' || to > from)).toEqual([]);
     expect(await page.evaluate(contextsMade)).toBe(contexts);
     const marked = readOut(fold(await headerOnDisk(page, session), journal));
     expect(marked.filter(({ missing }) => missing === 'prompt failed')).toEqual([]);
@@ -116,6 +114,7 @@ test.describe('in full view', () => {
     const session = await recording(page, 'held down');
     const before = await page.evaluate(contextsMade);
     await page.evaluate(holdSoundDown);
+    const held = (await journalOnDisk(page, session)).length;
     await page.waitForFunction(
       (count) => (window as unknown as { contexts: unknown[] }).contexts.length > count,
       before,
@@ -124,13 +123,13 @@ test.describe('in full view', () => {
     await cues(page, session, told + 4);
     const journal = await journalOnDisk(page, session);
     expectOnGrid(journal);
-    expect(gapsOf(journal).map(({ cause }) => cause)).toEqual(['sound']);
+    expect(new Set(gapsOf(journal).map(({ cause }) => cause))).toEqual(new Set(['sound']));
     expect(cuedOf(journal).at(-1)?.by).toEqual(['sound', 'screen']);
     expect(await page.evaluate(contextsMade)).toBe(before + 1);
     // The new context is heard, prompt by prompt.
     const fresh = prompts(await soundsOf(page), before, false);
     expect(fresh.length).toBeGreaterThanOrEqual(2);
-    expectHeardAsTold(fresh, journal.slice(journal.findIndex(({ kind }) => kind === 'gap')));
+    expectHeardAsTold(fresh, journal.slice(held));
   });
 
   test('a processor twenty times slower bends no prompt', async ({ tablet }) => {
@@ -292,6 +291,7 @@ test.describe('hidden', () => {
       const at = await page.evaluate(() => performance.now());
       await page.until((end: number) => performance.now() > end, at + 3 * interval);
       const silent = (await heardIn(page)).length;
+      const written = (await journalOnDisk(page, session)).length;
       await page.show();
       await gapTold(page, session, 'hidden');
       await gapTold(page, session, 'sound');
@@ -307,7 +307,7 @@ test.describe('hidden', () => {
       // On return one prompt at a time, on the grid: nothing is made up for.
       const after = (await heardIn(page)).slice(silent);
       expect(after.length).toBeGreaterThanOrEqual(2);
-      expectHeardAsTold(after, journal.slice(journal.findLastIndex(({ kind }) => kind === 'gap')));
+      expectHeardAsTold(after, journal.slice(written));
       expect(cuedOf(journal).at(-1)?.by).toEqual(['sound', 'screen']);
     } finally {
       await page.close();

@@ -98,13 +98,36 @@ describe('the audio clock slips, as on a machine that stood still for a moment',
     expect(told(lesson)).toEqual(grid.map((at) => [at, at, 'sound+screen']));
   });
 
-  it('just before a cue: the cue is shown and never heard late', async () => {
+  it('just before a cue: the cue is shown in time, heard a little late, and said to be so', async () => {
     const lesson = await begun();
     await slip(lesson, 104_700, 112);
+    await lesson.until(700_000);
+    const late = grid.map((at) => (at === 105_000 ? 105_112 : at));
+    expect(heardTimes(lesson)).toEqual(late);
+    expect(gaps(lesson)).toEqual([['sound', 105_050, 105_050, false]]);
+    expect(told(lesson)).toEqual(grid.map((at, i) => [at, late[i], 'sound+screen']));
+  });
+
+  it('by more than a quarter of a second: the cue is shown, and not heard so late', async () => {
+    const lesson = await begun();
+    await slip(lesson, 104_650, 300);
     await lesson.until(700_000);
     expect(heardTimes(lesson)).toEqual(grid.filter((at) => at !== 105_000));
     expect(gaps(lesson)).toEqual([['sound', 105_050, 105_050, false]]);
     expect(told(lesson)).toEqual(grid.map((at) => [at, at, at === 105_000 ? 'screen' : 'sound+screen']));
+  });
+
+  it('forth: a cue that has sounded already is not given a second time', async () => {
+    const lesson = await begun();
+    await lesson.until(104_850);
+    lesson.audio.speed = 5;
+    await lesson.until(104_900);
+    lesson.audio.speed = 1;
+    await lesson.until(700_000);
+    // 200 ms ahead: what lay at 105 s came out at 104.8 s and something.
+    expect(heardTimes(lesson).map((at) => Math.round(at / 15_000))).toEqual(grid.map((at) => at / 15_000));
+    expect(told(lesson)[6]).toEqual([105_000, 104_800, 'sound+screen']);
+    expect(heardTimes(lesson).filter((at) => at % 15_000 !== 0)).toHaveLength(1);
   });
 
   it('and the page is busy meanwhile: a cue that came late is said to be as late as it was', async () => {
