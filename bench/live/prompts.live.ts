@@ -112,6 +112,17 @@ test.describe('Prompts, how far off their plan', () => {
       sayDeviations('wall clock moved three times', offBySamples(heard.slice(before)));
     });
 
+    test('standstill', async ({ tablet }) => {
+      const page = await tablet.visitOnce();
+      const before = await recording(page, 'standstill');
+      for (const count of [5, 8, 11]) {
+        await soundsOf(page, before + count);
+        tablet.standStill(400);
+      }
+      const heard = await soundsOf(page, before + 14);
+      sayDeviations('machine stood still three times, by the page clock', offByPage(heard.slice(before), 5));
+    });
+
     test('sound stopped', async ({ tablet }) => {
       const page = await tablet.visitOnce();
       const before = await recording(page, 'sound stopped');
