@@ -9,7 +9,6 @@ test('the other observer’s record stays closed until one’s own of the visit 
   tablet,
   anotherTablet,
 }) => {
-  test.setTimeout(120_000);
   const second = await anotherTablet();
   const [one, two] = [await tablet.openApp(), await second.openApp()];
   const file = await shortVisitFile({

@@ -82,7 +82,6 @@ test('no screen breaks a rule of axe, and each is pictured at three sizes in two
 });
 
 test('nothing on a page runs over its edge at any size', async ({ tablet }) => {
-  test.setTimeout(120_000);
   const page = await tablet.visitOnce();
   await openDemo(page);
   const over: string[] = [];

@@ -5,7 +5,6 @@ import { expect, test } from './support/test.ts';
 test('from nothing to the classroom door: study, class, children, seats, draw, protocol, visit', async ({
   tablet,
 }) => {
-  test.setTimeout(60_000);
   const page = await tablet.visitOnce();
   await tablet.goOffline();
 

@@ -72,7 +72,6 @@ test('a visit goes to a second tablet by pictures alone, with no network, and bo
   tablet,
   anotherTablet,
 }) => {
-  test.setTimeout(120_000);
   const second = await anotherTablet({ viewport: { width: 800, height: 1280 } });
   const [one, two] = [await tablet.visitOnce(), await second.visitOnce()];
   await tablet.goOffline();

@@ -80,7 +80,6 @@ async function expectPrinted(page: Page, intervals: number): Promise<number[]> {
 test('a prepared visit prints in both sizes, is typed in offline from pencil, and its figure is there', async ({
   tablet,
 }) => {
-  test.setTimeout(120_000);
   const page = await tablet.visitOnce();
   await tablet.goOffline();
   await prepared(page, {

@@ -59,7 +59,6 @@ test.describe('in the built app', () => {
   test('prompts lie within one render quantum of their schedule, also while the page is blocked', async ({
     tablet,
   }) => {
-    test.setTimeout(120_000);
     const page = await tablet.visitOnce();
     await tablet.goOffline();
     const file = await shortVisitFile({

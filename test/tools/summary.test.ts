@@ -1,5 +1,5 @@
 import { describe, expect, it } from 'vitest';
-import { fromPlaywright, fromVitest } from '../../tools/run/reports.mjs';
+import { fromPlaywright, fromVitest, sum } from '../../tools/run/reports.mjs';
 import { addUp, summaryText } from '../../tools/run/summary.mjs';
 
 describe('the closing line', () => {
@@ -59,5 +59,16 @@ describe('what Playwright wrote down', () => {
   it('is counted, a test that passed at the second try as failed', () => {
     const stats = { expected: 6, unexpected: 1, flaky: 1, skipped: 1 };
     expect(fromPlaywright({ stats }, 1, 'browser')).toMatchObject({ passed: 6, failed: 3 });
+  });
+
+  it('adds up over several runs, and one without a report fails the whole', () => {
+    const stats = { expected: 6, unexpected: 1, flaky: 0, skipped: 0 };
+    const runs = [fromPlaywright({ stats }, 1, 'app'), fromPlaywright(undefined, 1, 'time')];
+    expect(sum('browser', runs)).toEqual({
+      name: 'browser',
+      passed: 6,
+      failed: 2,
+      note: 'no report written',
+    });
   });
 });

@@ -41,3 +41,15 @@ function judged(name, passed, failed, skipped, code) {
     return { name, passed, failed: 1, note: `ended with code ${code}` };
   return { name, passed, failed };
 }
+
+/** Several runs as one. @param {string} name @param {Result[]} runs @returns {Result} */
+export function sum(name, runs) {
+  const count = (/** @type {'passed' | 'failed'} */ what) => runs.reduce((all, run) => all + run[what], 0);
+  const notes = runs.flatMap(({ note }) => (note === undefined ? [] : [note]));
+  return {
+    name,
+    passed: count('passed'),
+    failed: count('failed'),
+    ...(notes.length > 0 ? { note: notes.join('; ') } : {}),
+  };
+}

@@ -2,7 +2,7 @@ import { mkdirSync, rmSync } from 'node:fs';
 import { checkFloors } from '../floors/check.mjs';
 import { checkGlobals } from '../globals/check.mjs';
 import { readReport, runNode } from './process.mjs';
-import { fromPlaywright, fromVitest } from './reports.mjs';
+import { fromPlaywright, fromVitest, sum } from './reports.mjs';
 
 /** @typedef {import('./summary.mjs').Result} Result */
 
@@ -61,14 +61,26 @@ export async function unit() {
   return fromVitest(readReport(file), code, 'unit');
 }
 
-/** @param {string[]} [args] handed on to Playwright @returns {Promise<Result>} */
-export async function browser(args = []) {
-  head('browser tests');
+/** @param {string[]} args handed on to Playwright @returns {Promise<Result>} */
+async function playwright(args) {
   const file = '.cache/playwright.json';
   mkdirSync('.cache', { recursive: true });
   rmSync(file, { force: true });
   const { code } = await runNode(['node_modules/@playwright/test/cli.js', 'test', ...args], { show: true });
   return fromPlaywright(readReport(file), code, 'browser');
+}
+
+/**
+ * All of them: first what may run side by side, then what has the machine for itself. With arguments, whatever they
+ * choose.
+ *
+ * @param {string[]} [args] handed on to Playwright @returns {Promise<Result>}
+ */
+export async function browser(args = []) {
+  head('browser tests');
+  if (args.length > 0) return playwright(args);
+  const together = await playwright(['--project=app']);
+  return sum('browser', [together, await playwright(['--project=time'])]);
 }
 
 /** The fast part: everything that needs no build and no browser. @returns {Promise<Result[]>} */
