@@ -19,7 +19,9 @@ test('partial interval by keyboard: codes add up, nothing of it is an answer too
   // A second key within 80 ms counts as the same hand: pressed as a person would, until it is taken.
   await expect(async () => {
     await page.keyboard.press('1');
-    await expect(page.getByRole('button', { name: /^on-task/, pressed: true })).toBeVisible({ timeout: 1500 });
+    await expect(page.getByRole('button', { name: /^on-task/, pressed: true })).toBeVisible({
+      timeout: 1500,
+    });
   }).toPass();
   await watching('Otter-02');
   await page.keyboard.press('n');
