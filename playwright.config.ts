@@ -3,7 +3,7 @@ import { defineConfig } from '@playwright/test';
 process.env.TZ = process.env.TEST_TZ ?? 'Europe/London';
 
 /** What measures time on a machine has it for itself: `npm run browser` runs these after all the others. */
-const timed = ['**/prompts.spec.ts', '**/time.spec.ts', '**/startTogether.spec.ts'];
+const timed = ['**/prompts.spec.ts', '**/time.spec.ts', '**/hidden.spec.ts', '**/startTogether.spec.ts'];
 
 // The built app in a real Chromium. `npm run browser` builds before it runs these.
 export default defineConfig({

@@ -1,5 +1,4 @@
 import type { Page } from '@playwright/test';
-import type { CodeSet } from '../../src/model/codeSet.ts';
 import type { Protocol } from '../../src/model/protocol.ts';
 import { expectAccessible } from './support/accessible.ts';
 import { journalOnDisk, sessionOf } from './support/kept.ts';
@@ -7,6 +6,7 @@ import { goIn, start, touch } from './support/observing.ts';
 import { picture } from './support/picture.ts';
 import { shortVisitFile } from './support/shortVisit.ts';
 import { expect, test } from './support/test.ts';
+import { threeCodes } from './support/threeCodes.ts';
 
 /** The sizes of the room's pictures: tablets across and upright, phones upright and across, the smallest there is. */
 const glasses = [
@@ -16,23 +16,6 @@ const glasses = [
   { width: 844, height: 390 },
   { width: 320, height: 640 },
 ];
-
-const code = (id: string, label: string, role: 'on-task' | 'off-task') => ({
-  id,
-  label,
-  role,
-  definition: '',
-  examples: '',
-  nonExamples: '',
-});
-const three: CodeSet = {
-  name: 'Three',
-  codes: [
-    code('on', 'on-task', 'on-task'),
-    code('alone', 'off-task, by oneself', 'off-task'),
-    code('others', 'off-task, with others', 'off-task'),
-  ],
-};
 
 /** Into the room, through the count-in, to a look that stays open for two minutes. */
 async function begin(page: Page, key: string, protocol: Partial<Protocol> = {}): Promise<string> {
@@ -137,7 +120,7 @@ test('everyScreen: eyes-up with corners, left-handed; keys work, and a panel lea
 }) => {
   test.setTimeout(180_000);
   const page = await tablet.visitOnce();
-  const session = await begin(page, 'corners', { codeSet: three, method: 'partial', observeMs: 60_000 });
+  const session = await begin(page, 'corners', { codeSet: threeCodes, method: 'partial', observeMs: 60_000 });
   await like(page, /^left-handed/);
   await expectFits(page, 'plan, left-handed');
   await expectAccessible(page);

@@ -1,5 +1,4 @@
 import type { Page } from '@playwright/test';
-import type { CodeSet } from '../../src/model/codeSet.ts';
 import type { Protocol } from '../../src/model/protocol.ts';
 import { expectAccessible } from './support/accessible.ts';
 import { journalOnDisk, sessionOf } from './support/kept.ts';
@@ -7,27 +6,11 @@ import { goIn, start, touch } from './support/observing.ts';
 import { picture } from './support/picture.ts';
 import { shortVisitFile } from './support/shortVisit.ts';
 import { expect, test } from './support/test.ts';
-
-const code = (id: string, label: string, role: 'on-task' | 'off-task') => ({
-  id,
-  label,
-  role,
-  definition: '',
-  examples: '',
-  nonExamples: '',
-});
-const codeSet: CodeSet = {
-  name: 'Three',
-  codes: [
-    code('on', 'on-task', 'on-task'),
-    code('alone', 'off-task, by oneself', 'off-task'),
-    code('others', 'off-task, with others', 'off-task'),
-  ],
-};
+import { threeCodes } from './support/threeCodes.ts';
 
 /** Into the room with this protocol, and through the count-in. */
 async function begin(page: Page, key: string, protocol: Partial<Protocol>, children = 15): Promise<string> {
-  await goIn(page, await shortVisitFile({ key, children, protocol: { codeSet, ...protocol } }));
+  await goIn(page, await shortVisitFile({ key, children, protocol: { codeSet: threeCodes, ...protocol } }));
   const session = sessionOf(page);
   await start(page);
   await expect(page.locator('.look-count')).toHaveCount(0, { timeout: 20_000 });

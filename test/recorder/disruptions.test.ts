@@ -1,26 +1,9 @@
 import { describe, expect, it } from 'vitest';
 import { headerOf } from '../support/session.ts';
 import { Lesson, outcomeOf } from './fakes/lesson.ts';
+import { begun, heardTimes, mark } from './fakes/quarters.ts';
 
-/*
- * Momentary looks each 15 seconds, at 15, 30 … 90, of c1, c2, c3, c1, c2, c3. What each test expects is written down by
- * hand beside it, in the order of the intervals.
- */
-const begun = (header = headerOf()) => new Lesson({ header }).begin();
-
-/** Marks "on" two seconds after each cue whose interval is named. */
-async function mark(lesson: Lesson, ...intervals: number[]): Promise<void> {
-  for (const interval of intervals) {
-    await lesson.until(interval * 15_000 + 2000);
-    lesson.touch('on');
-  }
-}
-
-const heardTimes = (lesson: Lesson) =>
-  lesson.audio
-    .heard()
-    .map(({ heardAt }) => Math.round((heardAt ?? 0) - lesson.zero))
-    .filter((at) => at > 0);
+// What each test expects is written down by hand beside it, in the order of the intervals.
 
 describe('the class is interrupted', () => {
   it('runs the schedule on in silence; looks that fell into it are missing and take no mark', async () => {

@@ -2,23 +2,7 @@ import { describe, expect, it } from 'vitest';
 import { leadIn } from '../../src/recorder/cuePatterns.ts';
 import { headerOf } from '../support/session.ts';
 import { Lesson } from './fakes/lesson.ts';
-
-/** Momentary looks each 15 seconds, at 15, 30 … 90. */
-const begun = (header = headerOf()) => new Lesson({ header }).begin();
-
-/** Marks "on" two seconds after each cue whose interval is named. */
-async function mark(lesson: Lesson, ...intervals: number[]): Promise<void> {
-  for (const interval of intervals) {
-    await lesson.until(interval * 15_000 + 2000);
-    lesson.touch('on');
-  }
-}
-
-const heardTimes = (lesson: Lesson) =>
-  lesson.audio
-    .heard()
-    .map(({ heardAt }) => Math.round((heardAt ?? 0) - lesson.zero))
-    .filter((at) => at > 0);
+import { begun, heardTimes, mark } from './fakes/quarters.ts';
 
 describe('silence and the output', () => {
   it('by hand: no sound from that moment on, also of what lay ahead; the screen goes on; sound comes back on the grid', async () => {
