@@ -73,11 +73,12 @@ test('a tablet that refuses to write says how much is kept, and catches up', asy
   // What the screen promises and what it knows to be missing are two numbers now.
   await expect
     .poll(async () => {
-      const [, kept, of] = (await page.locator('body').textContent())?.match(/kept (\d+) of (\d+)/) ?? [];
+      const [, of, kept] =
+        (await page.locator('body').textContent())?.match(/(\d+) entries, (\d+) kept/) ?? [];
       return Number(of) - Number(kept);
     })
     .toBeGreaterThan(0);
-  await expect(page.getByText(/^Kept \d+ of \d+\./)).toBeVisible();
+  await expect(page.getByText(/^Kept \d+ of \d+ entries\./)).toBeVisible();
   await page.evaluate(() => (window as unknown as { writeAgain(): void }).writeAgain());
   await expect(page.getByRole('heading', { name: 'The session is over.' })).toBeVisible({ timeout: 30_000 });
   await expect(page.getByText(/^All kept/)).toBeVisible({ timeout: 20_000 });

@@ -17,7 +17,9 @@ async function shownAsKept(page: Page): Promise<{ most: number }> {
   });
   await page.evaluate(() => {
     const tell = () => {
-      const text = document.body.textContent?.match(/kept ([\d,]+) of/)?.[1];
+      const [, of, kept] =
+        document.body.textContent?.match(/([\d,]+) entr(?:y|ies), (all|[\d,]+) kept/) ?? [];
+      const text = kept === 'all' ? of : kept;
       if (text !== undefined)
         (window as unknown as { keptShown(n: number): void }).keptShown(Number(text.replace(',', '')));
     };

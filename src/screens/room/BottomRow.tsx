@@ -15,7 +15,7 @@ interface RowProps extends Props {
   readonly onCover: () => void;
 }
 
-/** The rare things, in one row: undo says what it would undo; silence stands at its end. */
+/** The rare things, each always in its place: undo says what it would undo; silence stands at the end. */
 export function BottomRow({ onPanel, onCover }: RowProps) {
   const { room } = useCoreWords();
   return (
@@ -106,13 +106,13 @@ function RareThings({ onPanel, onDone }: Props & { readonly onDone?: () => void 
   const live = useLive();
   const { room } = useCoreWords();
   const { lessonParts } = useFacts();
-  const { phase, mayPause, part, last } = useRoom((s) => ({
-    phase: s.phase,
-    mayPause: s.mayPause,
-    part: s.lessonPart,
-    last: s.state.origins.length - 1 <= s.part,
+  const s = useRoom(({ phase, mayPause, lessonPart, part, state }) => ({
+    running: phase === 'running',
+    mayPause,
+    lessonPart,
+    parts: state.origins.length,
+    last: state.origins.length - 1 <= part,
   }));
-  const running = phase === 'running';
   const now = (act: () => void) => (): void => {
     act();
     onDone?.();
@@ -125,26 +125,14 @@ function RareThings({ onPanel, onDone }: Props & { readonly onDone?: () => void 
       <Button className="rare" onClick={() => onPanel('correct')}>
         {room.correct}
       </Button>
-      {running && (
-        <>
-          <Button className="rare" onClick={now(() => live.interruptClass())}>
-            {room.interrupt}
-          </Button>
-          {mayPause && (
-            <Button className="rare" onClick={now(() => live.pause())}>
-              {room.pause}
-            </Button>
-          )}
-          {!last && (
-            <Button className="rare" onClick={now(() => live.breakStarted())}>
-              {room.breakStarted}
-            </Button>
-          )}
-        </>
+      <AtTimes may={s.running} label={room.interrupt} act={now(() => live.interruptClass())} />
+      {s.mayPause && <AtTimes may={s.running} label={room.pause} act={now(() => live.pause())} />}
+      {s.parts > 1 && (
+        <AtTimes may={s.running && !s.last} label={room.breakStarted} act={now(() => live.breakStarted())} />
       )}
       {lessonParts.length > 0 && (
-        <Button className="rare" onClick={() => onPanel('part')}>
-          {part === null ? room.lessonPart : room.lessonPartNow({ part })}
+        <Button className="rare rare-part" onClick={() => onPanel('part')}>
+          <span>{s.lessonPart === null ? room.lessonPart : room.lessonPartNow({ part: s.lessonPart })}</span>
         </Button>
       )}
       <Button className="rare" onClick={() => onPanel('note')}>
@@ -157,6 +145,22 @@ function RareThings({ onPanel, onDone }: Props & { readonly onDone?: () => void 
         {room.end}
       </Button>
     </>
+  );
+}
+
+interface AtTimesProps {
+  /** It makes sense now. */
+  readonly may: boolean;
+  readonly label: string;
+  readonly act: () => void;
+}
+
+/** A deed that is not always possible: its button stays where it is, since thumbs learn places. */
+function AtTimes({ may, label, act }: AtTimesProps) {
+  return (
+    <Button className="rare" aria-disabled={!may} onClick={may ? act : undefined}>
+      {label}
+    </Button>
   );
 }
 

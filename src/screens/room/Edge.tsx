@@ -141,6 +141,7 @@ function ChildBefore() {
       }
       chosen={armed}
       action="child before"
+      ofBefore
       onTouch={() => live.childBefore()}
     >
       {armed ? room.childBeforeArmed : room.childBefore}

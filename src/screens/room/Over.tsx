@@ -39,7 +39,7 @@ export function Over() {
       <p className="over-kept" role="status">
         {allKept ? <Tick size={30} /> : <Hold size={30} />}
         <strong>
-          {allKept ? room.overKept({ kept: s.kept, of: s.of }) : room.overNotKept({ kept: s.kept, of: s.of })}
+          {allKept ? room.overKept({ of: s.of }) : room.overNotKept({ kept: s.kept, of: s.of })}
         </strong>
       </p>
       {!allKept && s.refused !== null && <p>{say(problems, s.refused)}</p>}

@@ -18,17 +18,23 @@ interface Props {
   readonly action?: KeyAction;
   /** Whether a touch that was taken was this target's. */
   readonly wasFelt?: (felt: Felt) => boolean;
+  /** It is about the look before this one, so it waits until there is one. */
+  readonly ofBefore?: boolean;
   readonly onTouch: (at: PageMs) => void;
 }
 
 /** One very large target: it acts when the finger goes down, and answers in the same frame. */
-export function Target({ className = '', sign, children, chosen, action, wasFelt, onTouch }: Props) {
+export function Target(props: Props) {
+  const { className = '', sign, children, chosen, action, wasFelt, ofBefore = false, onTouch } = props;
   const ref = useTouchDown(onTouch);
+  // Nothing can be marked before the first prompt: it must not look ready. A touch is still answered, by a sentence.
+  const waits = useRoom((s) => (ofBefore ? s.previous : s.current) === null);
   return (
     <button
       ref={ref}
       type="button"
-      className={`target ${chosen ? 'target-chosen' : ''} ${className}`}
+      className={`target ${chosen ? 'target-chosen' : ''} ${waits ? 'target-waits' : ''} ${className}`}
+      aria-disabled={waits}
       aria-pressed={chosen}
     >
       {wasFelt !== undefined && <FeltMark wasFelt={wasFelt} />}

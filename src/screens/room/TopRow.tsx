@@ -46,14 +46,22 @@ function Round() {
   );
 }
 
-/** What is on the disk, of what was entered. */
+/**
+ * What is on the disk, of what was written down. Prompts are written down, too: before the first mark a number would be
+ * read as looks, so it is said only when something is not kept yet.
+ */
 export function KeptSign() {
   const { room } = useCoreWords();
-  const { kept, of } = useRoom((s) => ({ kept: s.kept.kept, of: s.kept.of }));
+  const { kept, of, marked } = useRoom((s) => ({
+    kept: s.kept.kept,
+    of: s.kept.of,
+    marked: s.state.sayings.size > 0,
+  }));
+  const all = kept === of;
   return (
     <p className="room-kept">
-      <span className="room-kept-sign">{kept === of && <Tick size={14} />}</span>
-      {room.kept({ kept, of })}
+      <span className="room-kept-sign">{all && marked && <Tick size={14} />}</span>
+      {all && !marked ? room.nothingMarked : room.kept({ kept, of })}
     </p>
   );
 }

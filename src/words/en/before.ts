@@ -203,7 +203,8 @@ export const before = {
 
   goIn: 'Go in',
   goInAnyway: 'Go in anyway',
-  anywayNote: 'The journal will say what was on hold.',
+  anywayNote:
+    'On hold means not checked, or not well. What was on hold when you went in is written into the record of the session.',
   secondTablet: 'Second tablet',
   secondTabletText:
     'Hand the visit file over, so that both tablets watch the same children at the same prompts.',

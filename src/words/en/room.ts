@@ -5,6 +5,8 @@ import type { Format } from '../format.ts';
 type F = Pick<Format, 'whole' | 'plural' | 'clock' | 'list'>;
 
 const looks = (n: number, f: F) => `${f.whole(n)} ${f.plural(n, { one: 'look', other: 'looks' })}`;
+/** All that was written down: prompts, touches, notes, pauses. */
+const entries = (n: number, f: F) => `${f.whole(n)} ${f.plural(n, { one: 'entry', other: 'entries' })}`;
 const missingLooks = (n: number, f: F) =>
   `${looks(n, f)} ${f.plural(n, { one: 'is', other: 'are' })} missing`;
 
@@ -166,7 +168,9 @@ export const room = {
   more: 'more …',
   silence: 'silence',
   soundOn: 'sound on',
-  kept: ({ kept, of }: { kept: number; of: number }, f: F) => `kept ${f.whole(kept)} of ${f.whole(of)}`,
+  nothingMarked: 'nothing marked yet',
+  kept: ({ kept, of }: { kept: number; of: number }, f: F) =>
+    `${entries(of, f)}, ${kept === of ? 'all' : f.whole(kept)} kept`,
   dismiss: 'Seen',
 
   // panels
@@ -209,16 +213,15 @@ export const room = {
   firstTaskDo: 'First task given',
   overTitle: 'The session is over.',
   overEarlyTitle: 'The session was ended early.',
-  overKept: ({ kept, of }: { kept: number; of: number }, f: F) =>
-    `All kept (${f.whole(kept)} of ${f.whole(of)}).`,
+  overKept: ({ of }: { of: number }, f: F) => `All kept: ${entries(of, f)} (prompts, touches and notes).`,
   overNotKept: ({ kept, of }: { kept: number; of: number }, f: F) =>
-    `Kept ${f.whole(kept)} of ${f.whole(of)}. Stay here: the tablet is asked again.`,
+    `Kept ${f.whole(kept)} of ${entries(of, f)}. Stay here: the tablet is asked again.`,
   overAgain: 'Try again',
   overDo: 'Go to its figures',
 
   // holds: one calm sentence each
   holdRefused: ({ kept, of, why }: { kept: number; of: number; why: string }, f: F) =>
-    `Kept ${f.whole(kept)} of ${f.whole(of)}. ${why}`,
+    `Kept ${f.whole(kept)} of ${entries(of, f)}. ${why}`,
   holdSoundStuck: 'The tablet gives no sound. Go on with the brass frame at each cue, or try the sound.',
   holdOutput: 'The output changed: cues are silent, the brass frame shows them. Sound again?',
   holdSoundTry: 'Try the sound',

@@ -75,11 +75,12 @@ export const roomLayout = {
   coveredKeys: 'This session has too many codes to be touched without words: mark by keys, or uncover.',
   coveredStill: 'Nobody is to be looked at now.',
   uncover: 'Uncover: hold',
-  uncoverHold: 'hold',
+  uncoverHow: 'hold the corner',
+  uncoverLonger: 'hold it longer',
   coverAbout: ({ places }: { places: boolean }) =>
     places
-      ? 'Under the cover nothing can be read, prompts go on, and each code lies where eyes-up has it. Hold the folded corner to uncover.'
-      : 'Under the cover nothing can be read and prompts go on. Here it has no places to touch: mark by keys, or uncover. Hold the folded corner to uncover.',
+      ? 'Under the cover nothing of the lesson can be read, prompts go on, and each code lies where eyes-up has it. Hold the folded corner to uncover.'
+      : 'Under the cover nothing of the lesson can be read, and prompts go on. Here it has no places to touch: mark by keys, or uncover. Hold the folded corner to uncover.',
 
   // spoken ahead of a look
   spokenChild: ({ child }: { child: string }) =>

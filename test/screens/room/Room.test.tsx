@@ -189,6 +189,54 @@ test('undo says what it would undo', () => {
   expect(live.calls).toEqual([['undo']]);
 });
 
+test('before the first mark no number is shown that could be read as looks; then it is entries, and whether all are kept', () => {
+  const kept = { kept: 4, of: 4, refused: null };
+  const { live, container } = renderRoom(snapshotOf(header, [], 16_000, { kept }));
+  const sign = () => container.querySelector('.room-kept')?.textContent;
+  expect(sign()).toBe('nothing marked yet');
+  act(() => live.show({ kept: { ...kept, kept: 3 } }));
+  expect(sign()).toBe('4 entries, 3 kept');
+  act(() => live.show(atSecond({ kept })));
+  expect(sign()).toBe('4 entries, all kept');
+});
+
+test('targets are calm until the first prompt, and a touch is answered all the same', () => {
+  const { live } = renderRoom(snapshotOf(header, [], 3000));
+  const waits = (name: RegExp) => button(name).getAttribute('aria-disabled');
+  const names = [/^on-task/, /^off-task/, /^cannot see/, /^child before/];
+  expect(names.map(waits)).toEqual(['true', 'true', 'true', 'true']);
+  touchDown(button(/^on-task/));
+  expect(live.calls.map(([name]) => name)).toEqual(['touch']);
+  act(() => live.show(snapshotOf(header, [], 16_000)));
+  expect(names.map(waits)).toEqual(['false', 'false', 'false', 'true']);
+  act(() => live.show(atSecond()));
+  expect(waits(/^child before/)).toBe('false');
+});
+
+test('the bottom row holds the same buttons in the same order, whatever goes on', () => {
+  const { live } = renderRoom(atSecond({ mayPause: true }));
+  const row = () =>
+    within(screen.getByRole('group', { name: /now and then/ }))
+      .getAllByRole('button')
+      .map((one) => (one.className.includes('rare-silence') ? 'silence' : one.textContent));
+  const running = row();
+  expect(running).toEqual(expect.arrayContaining(['class interrupted', 'pause', 'break started']));
+  for (const changes of [
+    { phase: 'counting in' },
+    { phase: 'interrupted' },
+    { phase: 'paused' },
+    { phase: 'between parts', current: null, breakStarted: true },
+    { phase: 'running', part: 1 },
+  ] as const) {
+    act(() => live.show(changes));
+    expect(row()).toEqual(running);
+    fireEvent.click(button('break started'));
+  }
+  expect(live.calls).toEqual([]);
+  expect(button('break started').getAttribute('aria-disabled')).toBe('true');
+  expect(button('pause').getAttribute('aria-disabled')).toBe('false');
+});
+
 test('only an observer who records alone may pause', () => {
   const { live } = renderRoom(atSecond());
   expect(screen.queryByRole('button', { name: 'pause' })).toBeNull();
@@ -247,7 +295,7 @@ test('each hold is one sentence at its place, the worst first', () => {
   act(() => live.show({ sound: { ...sound, on: false, cause: 'device' } }));
   expect(line()).toMatch(/output changed/);
   act(() => live.show({ kept: { kept: 41, of: 43, refused } }));
-  expect(line()).toMatch(/^Kept 41 of 43\./);
+  expect(line()).toMatch(/^Kept 41 of 43 entries\./);
   act(() => live.show({ kept: { kept: 43, of: 43, refused: null }, sound }));
   fireEvent.click(button('Seen'));
   expect(line()).toBe('');
@@ -320,7 +368,7 @@ test('at the end it says what is kept, and leaves only when all of it is', async
   await user.click(button('Try again'));
   expect(live.calls).toEqual([['flush']]);
   act(() => live.show({ kept: { kept: 43, of: 43, refused: null } }));
-  screen.getByText('All kept (43 of 43).');
+  screen.getByText('All kept: 43 entries (prompts, touches and notes).');
   await user.click(button('Go to its figures'));
   expect(visited.at(-1)).toBe('/afterwards/session/session-1');
   expect(recorder.currentId()).toBeNull();

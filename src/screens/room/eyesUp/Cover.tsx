@@ -17,7 +17,7 @@ interface Props {
 }
 
 /**
- * An empty page of an exercise book in place of the lesson: nothing on it can be read by a child who passes. Prompts go
+ * An empty page of an exercise book in place of the lesson: a child who passes reads nothing on it but how to turn it. Prompts go
  * on, and marks are still possible at the places of the eyes-up layout. Only screen readers are told names.
  */
 export function Cover({ zones, still, onUncover }: Props) {
@@ -79,7 +79,9 @@ function Corner({ onUncover }: { readonly onUncover: () => void }) {
   return (
     <div className="cover-foot">
       {trouble && <Hold />}
-      <span className="cover-hint">{held === 'too short' && words.room.uncoverHold}</span>
+      <span className={`cover-hint ${held === 'too short' ? 'cover-hint-loud' : ''}`}>
+        {held === 'too short' ? words.room.uncoverLonger : words.room.uncoverHow}
+      </span>
       <button
         type="button"
         className={`cover-corner ${held === 'holding' ? 'cover-corner-held' : ''}`}

@@ -50,7 +50,7 @@ describe('eyes-up', () => {
     expect(button(/^off-task/).textContent).toContain('two short pulses');
     expect(screen.getByRole('heading', { level: 1 }).textContent).toBe('Otter-02');
     screen.getByText('then Otter-03');
-    screen.getByText(/^kept 1 of 1$/);
+    screen.getByText(/^1 entry, all kept$/);
     expect(screen.queryByRole('figure')).toBeNull();
     expect(container.querySelector('main')?.className).toContain('glass-dim');
     const at = touchDown(button(/^off-task/));
