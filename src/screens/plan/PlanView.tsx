@@ -23,8 +23,8 @@ interface Props {
   readonly current?: string | null;
   /** Child to look at next: the dashed seat. */
   readonly next?: string | null;
-  /** Seat chosen by a first tap. */
-  readonly chosen?: string | null;
+  /** Seats that are meant at present: chosen by a first tap, or spoken of beside the plan. */
+  readonly chosen?: string | ReadonlySet<string> | null;
   /** CSS length that the picture's height keeps within, for example `50dvh`. */
   readonly fitHeight?: string;
   /** Makes every seat a button. */
@@ -50,6 +50,8 @@ export function PlanView(props: Props) {
     onPlace,
   } = props;
   const { plan: said } = useCoreWords();
+  const isChosen = (seat: string): boolean =>
+    chosen !== null && (typeof chosen === 'string' ? seat === chosen : chosen.has(seat));
   const view = turned(plan);
   const open = onPlace !== undefined;
   // While seats are put up, one more place on each side can be tapped, and aisles are as wide as seats.
@@ -102,7 +104,7 @@ export function PlanView(props: Props) {
             const soon = !now && name !== undefined && seat.child === next;
             const state = now ? 'seat-now' : soon ? 'seat-next' : name === undefined ? 'seat-free' : '';
             const common = {
-              className: `seat ${state} ${seat.id === chosen ? 'seat-chosen' : ''}`,
+              className: `seat ${state} ${isChosen(seat.id) ? 'seat-chosen' : ''}`,
               style: at(seat.x, seat.y),
               'data-joined': seat.joined.join(' '),
             };
@@ -123,7 +125,7 @@ export function PlanView(props: Props) {
                 {...common}
                 data-place={`${seat.column} ${seat.row}`}
                 aria-label={name === undefined ? said.seatFree(place) : said.seatOf({ name, ...place })}
-                aria-pressed={seat.id === chosen}
+                aria-pressed={isChosen(seat.id)}
                 onClick={() => onSeat(seat)}
               >
                 {inside}

@@ -125,10 +125,15 @@ function RareThings({ onPanel, onDone }: Props & { readonly onDone?: () => void 
       <Button className="rare" onClick={() => onPanel('correct')}>
         {room.correct}
       </Button>
-      <AtTimes may={s.running} label={room.interrupt} act={now(() => live.interruptClass())} />
+      <AtTimes may={s.running} long label={room.interrupt} act={now(() => live.interruptClass())} />
       {s.mayPause && <AtTimes may={s.running} label={room.pause} act={now(() => live.pause())} />}
       {s.parts > 1 && (
-        <AtTimes may={s.running && !s.last} label={room.breakStarted} act={now(() => live.breakStarted())} />
+        <AtTimes
+          may={s.running && !s.last}
+          long
+          label={room.breakStarted}
+          act={now(() => live.breakStarted())}
+        />
       )}
       {lessonParts.length > 0 && (
         <Button className="rare rare-part" onClick={() => onPanel('part')}>
@@ -152,14 +157,16 @@ interface AtTimesProps {
   /** It makes sense now. */
   readonly may: boolean;
   readonly label: string;
+  /** Of two words, which take two lines where the row is short. */
+  readonly long?: boolean;
   readonly act: () => void;
 }
 
 /** A deed that is not always possible: its button stays where it is, since thumbs learn places. */
-function AtTimes({ may, label, act }: AtTimesProps) {
+function AtTimes({ may, label, long = false, act }: AtTimesProps) {
   return (
     <Button className="rare" aria-disabled={!may} onClick={may ? act : undefined}>
-      {label}
+      <span className={long ? 'rare-two' : ''}>{label}</span>
     </Button>
   );
 }

@@ -5,6 +5,7 @@ import { freeReserve } from '../../recorder/freeReserve.ts';
 import { Button } from '../../ui/Button.tsx';
 import { useCoreWords } from '../coreServices.ts';
 import { PlanView } from '../plan/PlanView.tsx';
+import { useIsAbout } from './aboutChildren.ts';
 import { usePlanNow } from './LessonPlan.tsx';
 import { Panel } from './Panel.tsx';
 import { useFacts } from './RoomFacts.tsx';
@@ -51,6 +52,7 @@ function AboutChild({ child, onClose }: { readonly child: SessionChild; readonly
   const { room } = useCoreWords();
   const { pseudonyms } = useFacts();
   const plan = usePlanNow();
+  useIsAbout(child.id);
   const isAway = useRoom((s) => s.away.has(child.id));
   const [moving, setMoving] = useState(false);
   const left = (reason: AwayReason) => (): void => {

@@ -3,6 +3,7 @@ import type { IntervalRecord } from '../../journal/readOut.ts';
 import type { Correction } from '../../recorder/liveSession.ts';
 import { Button } from '../../ui/Button.tsx';
 import { useCoreWords } from '../coreServices.ts';
+import { useIsAbout } from './aboutChildren.ts';
 import { LookList } from './LookList.tsx';
 import { Panel } from './Panel.tsx';
 import { useFacts } from './RoomFacts.tsx';
@@ -38,6 +39,7 @@ function AboutLook({ look, onClose }: { readonly look: IntervalRecord; readonly 
   const { room } = useCoreWords();
   const { pseudonyms } = useFacts();
   const held = useHeld();
+  useIsAbout(look.child);
   const [to, setTo] = useState<Correction | null>(null);
   const from = held(look);
   const then = to === null ? null : held(heldAfter(to));

@@ -1,4 +1,5 @@
-import { type MouseEvent, type SyntheticEvent, useCallback, useRef, useState } from 'react';
+import { type MouseEvent, type SyntheticEvent, useCallback, useMemo, useRef, useState } from 'react';
+import { AboutChildren } from './aboutChildren.ts';
 import { BeforeStart } from './BeforeStart.tsx';
 import { BottomRow } from './BottomRow.tsx';
 import { Cover } from './eyesUp/Cover.tsx';
@@ -21,6 +22,7 @@ import { useRoom } from './useRoom.ts';
 import './room.css';
 import './targets.css';
 import './bottomRow.css';
+import './panelPlace.css';
 
 /** The recording, from the tap that begins it to the sign that all is kept. */
 export function Lesson() {
@@ -87,17 +89,14 @@ function OnTheGlass({ leaving, covered, onCover }: GlassProps) {
     uncovering.current = true;
     onCover(false);
   };
-  const middle =
-    panel !== null ? (
-      <LaterPanel name={panel} onPanel={setPanel} onClose={close} />
-    ) : still ? (
-      <Standstill />
-    ) : null;
+  const [about, setAbout] = useState<readonly string[]>([]);
+  const aboutNow = useMemo(() => ({ children: about, say: setAbout }), [about]);
+  const open = panel === null ? null : <LaterPanel name={panel} onPanel={setPanel} onClose={close} />;
   const row = <BottomRow onPanel={setPanel} onCover={() => onCover(true)} />;
   const look = covered ? `room-covered ${dim}` : eyesUp ? `room-eyes-up ${dim}` : marking ? '' : 'room-still';
   return (
     <main
-      className={`room ${look}`}
+      className={`room ${look} ${open === null ? '' : 'room-with-panel'}`}
       data-keys={keysChosen || keysSeen}
       data-hand={manner.hand}
       onContextMenu={noMenu}
@@ -113,12 +112,14 @@ function OnTheGlass({ leaving, covered, onCover }: GlassProps) {
         <EyesUpGlass
           zones={marking ? zones : null}
           still={still}
-          middle={middle}
+          middle={open ?? (still ? <Standstill /> : null)}
           leaving={leaving}
           onLeave={() => change({ ...manner, layout: 'plan' })}
         />
       ) : (
-        <PlanGlass marking={marking} still={still} middle={middle} leaving={leaving} />
+        <AboutChildren value={aboutNow}>
+          <PlanGlass marking={marking} still={still} panel={open} leaving={leaving} />
+        </AboutChildren>
       )}
       {!covered && row}
       <Recalled />

@@ -1,7 +1,8 @@
-import { useMemo } from 'react';
+import { use, useMemo } from 'react';
 import type { SeatingPlan } from '../../model/seatingPlan.ts';
 import { useCoreWords } from '../coreServices.ts';
 import { PlanView } from '../plan/PlanView.tsx';
+import { AboutChildren } from './aboutChildren.ts';
 import { CountSeat } from './CountSeat.tsx';
 import { useFacts } from './RoomFacts.tsx';
 import { useRoom } from './useRoom.ts';
@@ -27,7 +28,7 @@ export function usePlanNow(): SeatingPlan | null {
   }, [plan, seats]);
 }
 
-/** The seats as the observer sees them: brass = now, dashed = next. Who is away is said below. */
+/** The seats as the observer sees them: brass = now, dashed = next, ink = whom the open panel is about. Who is away is said below. */
 export function LessonPlan() {
   const { room } = useCoreWords();
   const { header, method } = useFacts();
@@ -36,6 +37,9 @@ export function LessonPlan() {
   const current = useRoom((s) => (resting ? null : (s.current?.child ?? null)));
   const next = useRoom((s) => s.upcoming?.child ?? null);
   const labels = useLabels(current);
+  const about = use(AboutChildren).children;
+  const seats = useRoom((s) => s.seats);
+  const chosen = useMemo(() => new Set(about.map((child) => seats.get(child) ?? '')), [about, seats]);
   const counts = method === 'headcount';
   return (
     <div className="lesson-plan">
@@ -47,6 +51,7 @@ export function LessonPlan() {
             label={counts ? room.planCount : room.plan}
             current={current}
             next={next}
+            chosen={chosen}
             fitHeight="100cqh - var(--you)"
             {...(counts
               ? {

@@ -21,7 +21,7 @@ export function LookList({ looks, onChoose }: Props) {
         <li key={look.number}>
           <Button className="look-choice" onClick={() => onChoose(look)}>
             <HeldSign look={look} />
-            <span>
+            <span className="look-whose">
               {room.lookNumber({
                 number: look.number,
                 name: look.child === null ? '' : (pseudonyms.get(look.child) ?? ''),

@@ -11,8 +11,8 @@ interface Props {
 }
 
 /**
- * Takes the place of the seating plan. It is no modal dialog: prompts, the child to look at and the targets at both
- * edges go on while it is open.
+ * Stands beside the seating plan, below it on upright glass. It is no modal dialog: prompts, the child to look at and
+ * the targets at both edges go on while it is open.
  */
 export function Panel({ title, children, actions, closeLabel, onClose }: Props) {
   const { common } = useCoreWords();

@@ -2,6 +2,7 @@ import type { ReactNode } from 'react';
 import { HoldLine } from './HoldLine.tsx';
 import { LessonPlan } from './LessonPlan.tsx';
 import { LookAt } from './LookAt.tsx';
+import { Standstill } from './Standstill.tsx';
 import { Targets } from './Targets.tsx';
 import { TopRow } from './TopRow.tsx';
 
@@ -10,20 +11,21 @@ interface Props {
   readonly marking: boolean;
   /** Nobody is to be looked at now. */
   readonly still: boolean;
-  /** What takes the place of the seating plan; null for the plan. */
-  readonly middle: ReactNode;
+  /** What stands beside the seating plan (below it on upright glass); null for nothing. */
+  readonly panel: ReactNode;
   readonly leaving: number;
 }
 
 /** The ordinary layout: the seating plan in the middle, the targets at both edges. */
-export function PlanGlass({ marking, still, middle, leaving }: Props) {
+export function PlanGlass({ marking, still, panel, leaving }: Props) {
   return (
     <>
       <TopRow />
       {marking && <Targets side="left" />}
       <div className="room-centre">
         {!still && <LookAt />}
-        <div className="room-middle">{middle ?? <LessonPlan />}</div>
+        <div className="room-middle">{still && panel === null ? <Standstill /> : <LessonPlan />}</div>
+        {panel}
         <HoldLine leaving={leaving} />
       </div>
       {marking && <Targets side="right" />}

@@ -2,6 +2,7 @@ import { useMemo, useState } from 'react';
 import { swapPairs } from '../../recorder/swapPairs.ts';
 import { Button } from '../../ui/Button.tsx';
 import { useCoreWords } from '../coreServices.ts';
+import { useIsAbout } from './aboutChildren.ts';
 import { Panel } from './Panel.tsx';
 import { useFacts } from './RoomFacts.tsx';
 import { useHeld } from './useHeld.ts';
@@ -25,6 +26,7 @@ export function SwapChildren({ onClose }: Props) {
     [intervals],
   );
   const [one, other] = chosen;
+  useIsAbout(one ?? null, other ?? null);
   if (one !== undefined && other !== undefined) return <Pairs one={one} other={other} onClose={onClose} />;
   const nameOf = (child: string): string => pseudonyms.get(child) ?? child;
   return (
