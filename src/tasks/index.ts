@@ -15,6 +15,7 @@ export {
   importFiles,
 } from './imports.ts';
 export { ensureInstallation } from './installation.ts';
+export { type LastTime, type LikelyObserver, lastTime, likelyObserver } from './lastTime.ts';
 export { addNote, type NoteWish } from './notes.ts';
 export { addObserver, removeObserver, saveObserver } from './observers.ts';
 export type { PaperAnswer, PaperDraft, PaperOnset, PaperPart } from './paperDraft.ts';

@@ -2,6 +2,7 @@ import { lazy, Suspense, useEffect, useState } from 'react';
 import type { VisitPlan } from '../../model/visitPlan.ts';
 import { type ExportedFile, exportVisit } from '../../tasks/index.ts';
 import { Button } from '../../ui/Button.tsx';
+import { HeldButton } from '../../ui/HeldButton.tsx';
 import { say } from '../../words/say.ts';
 import { useServices } from '../services.ts';
 import { CheckRow } from './CheckRow.tsx';
@@ -38,9 +39,9 @@ export function HandVisit({ plan }: { readonly plan: VisitPlan }) {
       actions={
         <>
           <Button onClick={() => show(true)}>{words.pairing.show}</Button>
-          <Button disabled={file === null} onClick={hand}>
+          <HeldButton why={file === null ? words.before.handMaking : null} onClick={hand}>
             {words.before.handVisit}
-          </Button>
+          </HeldButton>
         </>
       }
     >

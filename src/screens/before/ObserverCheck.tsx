@@ -1,15 +1,13 @@
-import { useState } from 'react';
 import type { Observer } from '../../model/observer.ts';
 import type { Role } from '../../model/session.ts';
-import { addObserver } from '../../tasks/index.ts';
+import type { LikelyObserver } from '../../tasks/index.ts';
 import { Button } from '../../ui/Button.tsx';
 import { Choice } from '../../ui/Choice.tsx';
 import { Dialog } from '../../ui/Dialog.tsx';
-import { TextField } from '../../ui/Field.tsx';
-import { say } from '../../words/say.ts';
 import { useServices } from '../services.ts';
 import { CheckRow } from './CheckRow.tsx';
 import { type Purpose, PurposeChoice } from './PurposeChoice.tsx';
+import { useNewObserver } from './useNewObserver.tsx';
 
 /** Who records, beside whom, and whether it counts. */
 export interface Who {
@@ -25,9 +23,15 @@ interface Props {
   readonly onChange: (who: Who) => void;
 }
 
-export function ObserverCheck({ study, observers, who, onChange }: Props) {
+interface CheckProps extends Props {
+  /** Why somebody stands there whom nobody has chosen yet; null where the choice was made. */
+  readonly why: LikelyObserver['why'] | null;
+  readonly open: boolean;
+  readonly onOpen: (open: boolean) => void;
+}
+
+export function ObserverCheck({ study, observers, who, why, open, onOpen, onChange }: CheckProps) {
   const { words } = useServices();
-  const [open, setOpen] = useState(false);
   const observer = observers.find((o) => o.id === who.observer);
   const role = {
     alone: words.before.roleShortAlone,
@@ -38,18 +42,19 @@ export function ObserverCheck({ study, observers, who, onChange }: Props) {
     <CheckRow
       name={words.before.observer}
       state={observer === undefined ? 'hold' : 'ready'}
-      actions={<Button onClick={() => setOpen(true)}>{words.before.observerChoose}</Button>}
+      actions={<Button onClick={() => onOpen(true)}>{words.before.observerChoose}</Button>}
     >
       {observer === undefined
         ? words.before.observerNobody
         : words.before.observerWho({ name: observer.name, role, purpose: who.purpose })}
+      {observer !== undefined && why !== null && ` ${words.before.observerWhy({ why })}`}
       {open && (
         <WhoDialog
           study={study}
           observers={observers}
           who={who}
           onChange={onChange}
-          onClose={() => setOpen(false)}
+          onClose={() => onOpen(false)}
         />
       )}
     </CheckRow>
@@ -57,25 +62,11 @@ export function ObserverCheck({ study, observers, who, onChange }: Props) {
 }
 
 function WhoDialog({ study, observers, who, onChange, onClose }: Props & { readonly onClose: () => void }) {
-  const { words, deps } = useServices();
-  const [name, setName] = useState('');
-  const [problem, setProblem] = useState<string | null>(null);
-  const add = async (): Promise<boolean> => {
-    // Out of the field at once, so that a quick "Done" after "Add" does not add it twice.
-    setName('');
-    const added = await addObserver(deps, study, name.trim());
-    if (!added.ok) {
-      setName(name);
-      setProblem(say(words.problems, added.problem));
-      return false;
-    }
-    setProblem(null);
-    onChange({ ...who, observer: added.value.id });
-    return true;
-  };
+  const { words } = useServices();
+  const { field, take } = useNewObserver(study, ({ id }) => onChange({ ...who, observer: id }));
   // A name that stands in the field is meant, whether "Add" was tapped or not.
   const done = async (): Promise<void> => {
-    if (name.trim() === '' || (await add())) onClose();
+    if (await take()) onClose();
   };
   return (
     <Dialog
@@ -91,20 +82,7 @@ function WhoDialog({ study, observers, who, onChange, onClose }: Props & { reado
           options={observers.map((o) => ({ value: o.id, label: o.name }))}
         />
       )}
-      <div className="row">
-        <div className="grow">
-          <TextField
-            label={words.before.addObserver}
-            hint={words.before.addObserverHint}
-            value={name}
-            problem={problem}
-            onChange={(event) => setName(event.target.value)}
-          />
-        </div>
-        <Button disabled={name.trim() === ''} onClick={add}>
-          {words.common.add}
-        </Button>
-      </div>
+      {field}
       <Choice
         legend={words.before.role}
         value={who.role ?? 'alone'}

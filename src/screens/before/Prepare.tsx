@@ -1,13 +1,14 @@
-import { useMemo, useState } from 'react';
+import { useMemo, useRef, useState } from 'react';
 import { useLocation } from 'wouter';
 import type { Classroom } from '../../model/classroom.ts';
 import type { Protocol } from '../../model/protocol.ts';
 import type { Study } from '../../model/study.ts';
-import { hasTarget, looksAtEverybody, watchesOne } from '../../schedule/orderOfDay.ts';
-import { newSeed, prepareVisit } from '../../tasks/index.ts';
-import { Button } from '../../ui/Button.tsx';
+import { hasTarget } from '../../schedule/orderOfDay.ts';
+import { lastTime, newSeed, prepareVisit, type SessionSummary } from '../../tasks/index.ts';
 import { Choice } from '../../ui/Choice.tsx';
 import { TextField } from '../../ui/Field.tsx';
+import { HeldButton } from '../../ui/HeldButton.tsx';
+import { leadTo } from '../../ui/leadTo.ts';
 import { Notice } from '../../ui/Notice.tsx';
 import { PageHead } from '../../ui/PageHead.tsx';
 import { Sheet } from '../../ui/Sheet.tsx';
@@ -17,7 +18,11 @@ import { methodSentence } from '../study/methodSentence.ts';
 import { useCurrentStudy } from '../useCurrentStudy.ts';
 import { DaySheet } from './DaySheet.tsx';
 import { PreparedNotice, UnfinishedNotice } from './notices.tsx';
+import { PhaseChoice } from './PhaseChoice.tsx';
 import { TakeVisitFile } from './TakeVisitFile.tsx';
+import { placeOf, whatIsMissing } from './whatIsMissing.ts';
+
+const none: readonly string[] = [];
 
 /** Before the visit: which class, how, and who is there today. */
 export function Prepare() {
@@ -53,27 +58,30 @@ function Choosing({ study }: { readonly study: Study }) {
   const { words, useStored } = useServices();
   const classes = useStored((store) => store.classes(study.id), [study.id]);
   const protocols = useStored((store) => store.protocols(study.id), [study.id]);
-  if (classes === undefined || protocols === undefined)
+  const sessions = useStored((store) => store.listSessions(study.id), [study.id]);
+  if (classes === undefined || protocols === undefined || sessions === undefined)
     return <p className="second">{words.common.loading}</p>;
   if (!classes.ok) return <Notice kind="hold">{say(words.problems, classes.problem)}</Notice>;
   if (!protocols.ok) return <Notice kind="hold">{say(words.problems, protocols.problem)}</Notice>;
-  return <Form study={study} classes={classes.value} protocols={protocols.value} />;
+  if (!sessions.ok) return <Notice kind="hold">{say(words.problems, sessions.problem)}</Notice>;
+  return <Form study={study} classes={classes.value} protocols={protocols.value} sessions={sessions.value} />;
 }
 
 interface FormProps {
   readonly study: Study;
   readonly classes: readonly Classroom[];
   readonly protocols: readonly Protocol[];
+  readonly sessions: readonly SessionSummary[];
 }
 
-function Form({ study, classes, protocols }: FormProps) {
+function Form({ study, classes, protocols, sessions }: FormProps) {
   const { words, deps, store, device } = useServices();
   const [, go] = useLocation();
   const [classId, chooseClass] = useState<string | null>(
     classes.length === 1 ? (classes[0]?.id ?? null) : null,
   );
-  const [protocolId, chooseProtocol] = useState<string | null>(protocols[0]?.id ?? null);
-  const [phaseChoice, choosePhases] = useState<string>('all');
+  const [protocolChoice, chooseProtocol] = useState<string | null>(null);
+  const [phaseChoice, choosePhases] = useState<string | null>(null);
   const [absent, setAbsent] = useState<ReadonlySet<string>>(new Set());
   const [chosen, choose] = useState<string | null>(null);
   // Tossed before the visit is frozen, so that the order can be looked at; it is kept with the schedule.
@@ -81,20 +89,23 @@ function Form({ study, classes, protocols }: FormProps) {
   const [start, setStart] = useState('');
   const [problem, setProblem] = useState<string | null>(null);
   const classroom = classes.find((c) => c.id === classId) ?? null;
-  const protocol = protocols.find((p) => p.id === protocolId) ?? null;
+  const last = useMemo(() => lastTime(sessions, classId), [sessions, classId]);
+  const protocol = protocols.find((p) => p.id === (protocolChoice ?? last?.protocol)) ?? protocols[0] ?? null;
+  const asLast = protocolChoice === null && last !== null && protocol?.id === last.protocol;
+  // A class that was last seen in one phase alone may be in another today: a wrong phase would be a wrong record.
+  const onePhase = last?.ofClass === true && last.phases.length < study.phases.length;
+  const phase = phaseChoice ?? (onePhase ? null : 'all');
   const phases = useMemo(
-    () => (phaseChoice === 'all' ? study.phases : [phaseChoice]),
-    [phaseChoice, study.phases],
+    () => (phase === null ? none : phase === 'all' ? study.phases : [phase]),
+    [phase, study.phases],
   );
   const there = classroom?.children.some((child) => child.id === chosen && !child.removed) === true;
   const first =
     protocol !== null && hasTarget(protocol) && there && chosen !== null && !absent.has(chosen)
       ? chosen
       : null;
-  const undecided =
-    classroom === null ||
-    protocol === null ||
-    (classroom.draw === null && !looksAtEverybody(protocol) && !(watchesOne(protocol) && first !== null));
+  const places = useRef<HTMLDivElement>(null);
+  const missing = whatIsMissing({ classroom, protocol, phases, first });
 
   const prepare = async () => {
     if (classroom === null || protocol === null) return;
@@ -130,57 +141,57 @@ function Form({ study, classes, protocols }: FormProps) {
         </Notice>
       ) : (
         <Sheet>
-          <div className="stack">
-            <Choice
-              legend={words.before.klass}
-              value={classId}
-              onChange={(id) => {
-                chooseClass(id);
-                setAbsent(new Set());
-                choose(null);
-              }}
-              options={classes.map((c) => ({
-                value: c.id,
-                label: c.name,
-                hint: words.before.klassHint({ n: c.children.filter((child) => !child.removed).length }),
-              }))}
-            />
-            <Choice
-              legend={words.before.protocol}
-              value={protocolId}
-              onChange={chooseProtocol}
-              options={protocols.map((p) => ({
-                value: p.id,
-                label: p.name,
-                hint: methodSentence(words, p),
-              }))}
-            />
-            <Choice
-              legend={words.before.phases}
-              value={phaseChoice}
-              onChange={choosePhases}
-              options={[
-                ...(study.phases.length > 1
-                  ? [
-                      {
-                        value: 'all',
-                        label: words.before.phasesAll({ phases: study.phases }),
-                        hint: words.before.phasesAllHint,
-                      },
-                    ]
-                  : []),
-                ...study.phases.map((phase) => ({
-                  value: study.phases.length === 1 ? 'all' : phase,
-                  label: words.before.phasesOne({ phase }),
-                })),
-              ]}
-            />
-            {classroom !== null && protocol !== null && (
-              <DaySheet
-                {...{ classroom, protocol, phases, orderSeed, absent, first }}
-                onAbsent={setAbsent}
-                onFirst={choose}
+          <div className="stack" ref={places}>
+            <div data-place="class">
+              <Choice
+                legend={words.before.klass}
+                value={classId}
+                onChange={(id) => {
+                  chooseClass(id);
+                  setAbsent(new Set());
+                  choose(null);
+                }}
+                options={classes.map((c) => ({
+                  value: c.id,
+                  label: c.name,
+                  hint: words.before.klassHint({ n: c.children.filter((child) => !child.removed).length }),
+                }))}
               />
+            </div>
+            <div className="stack-tight" data-place="protocol">
+              <Choice
+                legend={words.before.protocol}
+                value={protocol?.id ?? null}
+                onChange={chooseProtocol}
+                options={protocols.map((p) => ({
+                  value: p.id,
+                  label: p.name,
+                  hint: methodSentence(words, p),
+                }))}
+              />
+              {asLast && (
+                <p className="second small">{words.before.protocolAsLast({ ofClass: last.ofClass })}</p>
+              )}
+              {protocols.length === 0 && (
+                <p>
+                  <a className="button" href="#/study/protocols/new">
+                    {words.before.toProtocol}
+                  </a>
+                </p>
+              )}
+            </div>
+            <div className="stack-tight" data-place="phases">
+              <PhaseChoice phases={study.phases} value={phase} onChange={choosePhases} />
+              {onePhase && <p className="second small">{words.before.phasesLast({ phases: last.phases })}</p>}
+            </div>
+            {classroom !== null && protocol !== null && phases.length > 0 && (
+              <div data-place="day">
+                <DaySheet
+                  {...{ classroom, protocol, phases, orderSeed, absent, first }}
+                  onAbsent={setAbsent}
+                  onFirst={choose}
+                />
+              </div>
             )}
             <TextField
               label={words.before.start}
@@ -191,9 +202,16 @@ function Form({ study, classes, protocols }: FormProps) {
             />
             {problem !== null && <Notice kind="hold">{problem}</Notice>}
             <div className="row">
-              <Button look="main" disabled={undecided} onClick={prepare}>
+              <HeldButton
+                look="main"
+                why={missing === null ? null : words.before.firstOf({ missing })}
+                onWhy={() =>
+                  leadTo(places.current?.querySelector<HTMLElement>(`[data-place="${placeOf(missing)}"]`))
+                }
+                onClick={prepare}
+              >
                 {words.before.prepare}
-              </Button>
+              </HeldButton>
             </div>
           </div>
         </Sheet>

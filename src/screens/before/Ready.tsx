@@ -2,8 +2,9 @@ import { useState } from 'react';
 import { useLocation } from 'wouter';
 import type { Role } from '../../model/session.ts';
 import type { VisitPlan } from '../../model/visitPlan.ts';
-import { startSession } from '../../tasks/index.ts';
+import { likelyObserver, startSession } from '../../tasks/index.ts';
 import { Button } from '../../ui/Button.tsx';
+import { HeldButton } from '../../ui/HeldButton.tsx';
 import { Notice } from '../../ui/Notice.tsx';
 import { PageHead } from '../../ui/PageHead.tsx';
 import { Sheet } from '../../ui/Sheet.tsx';
@@ -42,8 +43,15 @@ function Checks({ plan, as }: { readonly plan: VisitPlan; readonly as: Role | nu
   const { words, deps, store, recorder, useStored } = useServices();
   const [, go] = useLocation();
   const answer = useStored((reader) => reader.observers(plan.study.id), [plan.study.id]);
+  const recorded = useStored((reader) => reader.listSessions(plan.study.id), [plan.study.id]);
   const observers = answer?.ok ? answer.value : [];
-  const [who, setWho] = useState<Who>({ observer: null, role: as, purpose: 'record' });
+  const likely = likelyObserver(observers, recorded?.ok ? recorded.value : [], {
+    visit: plan.visit,
+    second: as === 'second',
+  });
+  const [chosen, choose] = useState<Who>({ observer: null, role: as, purpose: 'record' });
+  const who: Who = { ...chosen, observer: chosen.observer ?? likely?.id ?? null };
+  const [choosing, setChoosing] = useState(false);
   const [heard, setHeard] = useState<Heard>('not asked');
   const [present, setPresent] = useState(false);
   const [problem, setProblem] = useState<string | null>(null);
@@ -57,6 +65,8 @@ function Checks({ plan, as }: { readonly plan: VisitPlan; readonly as: Role | nu
     ...(present ? [] : ['children']),
     ...lines.filter((line) => line.state === 'hold').map((line) => line.check),
   ];
+
+  if (answer === undefined || recorded === undefined) return <p className="second">{words.common.loading}</p>;
 
   const goIn = async () => {
     if (who.observer === null) return;
@@ -88,7 +98,19 @@ function Checks({ plan, as }: { readonly plan: VisitPlan; readonly as: Role | nu
       </PageHead>
       <Sheet flush>
         <ul>
-          <ObserverCheck study={plan.study.id} observers={observers} who={who} onChange={setWho} />
+          <ObserverCheck
+            study={plan.study.id}
+            observers={observers}
+            who={who}
+            why={chosen.observer === null ? (likely?.why ?? null) : null}
+            open={choosing}
+            onOpen={(open) => {
+              setChoosing(open);
+              // Who closes the dialog has seen who stands there.
+              if (!open) choose((standing) => ({ ...standing, observer: standing.observer ?? who.observer }));
+            }}
+            onChange={choose}
+          />
           <SoundCheck
             cues={protocol.cues}
             heard={heard}
@@ -118,9 +140,14 @@ function Checks({ plan, as }: { readonly plan: VisitPlan; readonly as: Role | nu
       </Sheet>
       {problem !== null && <Notice kind="hold">{problem}</Notice>}
       <div className="row">
-        <Button look="main" disabled={who.observer === null} onClick={goIn}>
+        <HeldButton
+          look="main"
+          why={who.observer === null ? words.before.goInNobody : null}
+          onWhy={() => setChoosing(true)}
+          onClick={goIn}
+        >
           {onHold.length === 0 ? words.before.goIn : words.before.goInAnyway}
-        </Button>
+        </HeldButton>
         <Button look="quiet" onClick={again}>
           {words.before.again}
         </Button>

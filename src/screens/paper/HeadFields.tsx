@@ -1,9 +1,11 @@
 import { useState } from 'react';
 import { clockTime, minutesAndSeconds } from '../../kernel/typedTime.ts';
 import type { PaperPart } from '../../tasks/index.ts';
+import { Button } from '../../ui/Button.tsx';
 import { Choice } from '../../ui/Choice.tsx';
 import { SelectField, TextField } from '../../ui/Field.tsx';
 import { PurposeChoice } from '../before/PurposeChoice.tsx';
+import { useNewObserver } from '../before/useNewObserver.tsx';
 import { useServices } from '../services.ts';
 import type { Typing } from './useTyping.ts';
 
@@ -15,28 +17,38 @@ export function HeadFields({ typing, last }: { readonly typing: Typing; readonly
   const { plan } = draft;
   const answer = useStored((store) => store.observers(plan.study.id), [plan.study.id]);
   const observers = answer?.ok ? answer.value : [];
+  const [adding, setAdding] = useState(false);
+  const { field } = useNewObserver(plan.study.id, ({ id }) => {
+    setAdding(false);
+    change({ observer: id });
+  });
   const part = (k: number, changes: Partial<PaperPart>) =>
     change({ parts: draft.parts.map((one, at) => (at === k ? { ...one, ...changes } : one)) });
   return (
     <div className="stack">
+      <div className="stack-tight">
+        <div className="typing-fields">
+          <SelectField
+            label={paper.observer}
+            value={draft.observer ?? ''}
+            onChange={(event) => change({ observer: event.target.value === '' ? null : event.target.value })}
+          >
+            <option value="">{paper.observerChoose}</option>
+            {observers.map(({ id, name }) => (
+              <option key={id} value={id}>
+                {name}
+              </option>
+            ))}
+          </SelectField>
+          {observers.length > 0 && (
+            <Button look="quiet" aria-expanded={adding} onClick={() => setAdding(!adding)}>
+              {paper.addObserver}
+            </Button>
+          )}
+        </div>
+        {(adding || observers.length === 0) && answer !== undefined && field}
+      </div>
       <div className="typing-fields">
-        <SelectField
-          label={paper.observer}
-          value={draft.observer ?? ''}
-          onChange={(event) => change({ observer: event.target.value === '' ? null : event.target.value })}
-        >
-          <option value="">{paper.observerChoose}</option>
-          {observers.map(({ id, name }) => (
-            <option key={id} value={id}>
-              {name}
-            </option>
-          ))}
-        </SelectField>
-        {observers.length === 0 && answer !== undefined && (
-          <a className="button" href="#/study/observers">
-            {paper.addObserver}
-          </a>
-        )}
         <TextField
           label={paper.date}
           type="date"

@@ -4,6 +4,7 @@ import type { ScheduledInterval } from '../../schedule/layOut.ts';
 import { type PaperMeaning, paperNumbers, severalCodes } from '../../schedule/paperNumbers.ts';
 import type { PaperAnswer } from '../../tasks/index.ts';
 import { Button } from '../../ui/Button.tsx';
+import { HeldButton } from '../../ui/HeldButton.tsx';
 import { Notice } from '../../ui/Notice.tsx';
 import { say } from '../../words/say.ts';
 import type { Words } from '../../words/words.ts';
@@ -46,8 +47,9 @@ export function Lines({ typing, intervals }: Props) {
     setProblem(null);
     if (given !== undefined || answer !== undefined) typing.answer(line.number, given);
   };
+  const pastEnd = () => setProblem(words.problems['paper.pastEnd']({ last: intervals.length }));
   const mean = (means: PaperMeaning) => {
-    if (line === undefined) return setProblem(words.problems['paper.pastEnd']({ last: intervals.length }));
+    if (line === undefined) return pastEnd();
     put(answerOf(protocol, means, answer));
     if (!severalCodes(protocol)) setAt(at + 1);
   };
@@ -93,7 +95,6 @@ export function Lines({ typing, intervals }: Props) {
           {numbers.map(({ number, means }) => (
             <Button
               key={number}
-              disabled={line === undefined}
               aria-pressed={says(answer, means)}
               className={says(answer, means) ? 'typing-said' : ''}
               onClick={() => mean(means)}
@@ -104,18 +105,21 @@ export function Lines({ typing, intervals }: Props) {
         </div>
         {problem !== null && <Notice kind="hold">{problem}</Notice>}
         <div className="row">
-          <Button look="quiet" disabled={at === 0} onClick={() => go(at - 1)}>
+          <Button look="quiet" onClick={() => (at === 0 ? setProblem(paper.firstLine) : go(at - 1))}>
             {paper.back}
           </Button>
-          <Button look="quiet" disabled={line === undefined} onClick={() => go(at + 1)}>
+          <Button look="quiet" onClick={() => (line === undefined ? pastEnd() : go(at + 1))}>
             {paper.next}
           </Button>
-          <Button look="quiet" disabled={answer === undefined} onClick={() => put(undefined)}>
+          <Button
+            look="quiet"
+            onClick={() => (answer === undefined ? setProblem(paper.emptyAlready) : put(undefined))}
+          >
             {paper.emptyLine}
           </Button>
-          <Button look="quiet" disabled={typing.undo === null} onClick={back}>
+          <HeldButton look="quiet" why={typing.undo === null ? paper.undoNothing : null} onClick={back}>
             {paper.undo}
-          </Button>
+          </HeldButton>
           <span className="second small grow" role="status">
             {paper.progress({ done: Object.keys(answers).length, of: intervals.length })},{' '}
             {typing.kept === 'kept'

@@ -6,6 +6,7 @@ import type { PaperOnset } from '../../tasks/index.ts';
 import { Button } from '../../ui/Button.tsx';
 import { Choice } from '../../ui/Choice.tsx';
 import { SelectField, TextField } from '../../ui/Field.tsx';
+import { HeldButton } from '../../ui/HeldButton.tsx';
 import { Notice } from '../../ui/Notice.tsx';
 import { say } from '../../words/say.ts';
 import { useServices } from '../services.ts';
@@ -117,9 +118,13 @@ export function Onsets({ typing, intervals }: Props) {
         })}
       </ul>
       <div className="row">
-        <Button look="quiet" disabled={typing.undo === null} onClick={() => typing.undo?.()}>
+        <HeldButton
+          look="quiet"
+          why={typing.undo === null ? paper.undoNothing : null}
+          onClick={() => typing.undo?.()}
+        >
           {paper.undo}
-        </Button>
+        </HeldButton>
         <span className="second small grow" role="status">
           {paper.onsetsTyped({ n: draft.onsets.length })},{' '}
           {typing.kept === 'kept'

@@ -1,12 +1,19 @@
 import type { Format } from '../format.ts';
 import { peerLooks, short } from './study/short.ts';
 
+/** What a visit cannot be prepared without. */
+type Missing = 'class' | 'protocol' | 'phases' | 'children' | 'draw' | 'child';
+
 type Purpose = 'record' | 'practice' | 'familiarisation';
 
 type F = Format;
 
 const inMinutes = (minutes: number, f: F): string =>
   `${short(Math.round(minutes * 10) / 10, f)} ${f.plural(minutes, { one: 'minute', other: 'minutes' })}`;
+
+/** How many lessons the storage would hold; beyond a thousand nobody wants to know. */
+const lessonsIn = (lessons: number, f: F): string =>
+  lessons > 1000 ? `more than ${f.whole(1000)} lessons` : `about ${f.whole(lessons)} lessons`;
 
 /** Before the visit: choosing class, protocol and children, and the checks at the classroom door. */
 export const before = {
@@ -31,7 +38,12 @@ export const before = {
   klassHint: ({ n }: { n: number }, f: F) =>
     `${f.whole(n)} ${f.plural(n, { one: 'child', other: 'children' })}`,
   protocol: 'Protocol',
+  protocolAsLast: ({ ofClass }: { ofClass: boolean }) =>
+    ofClass ? 'As last time in this class.' : 'As last time in this study.',
+  toProtocol: 'Make a protocol',
   phases: 'Phases of this lesson',
+  phasesLast: ({ phases }: { phases: readonly string[] }, f: F) =>
+    `Last time this class was seen in ${f.list(phases)} alone.`,
   phasesAll: ({ phases }: { phases: readonly string[] }) => phases.join(', break, '),
   phasesAllHint: 'One sitting: the break lies between, the children stay the same.',
   phasesOne: ({ phase }: { phase: string }) => `only ${phase}`,
@@ -49,6 +61,15 @@ export const before = {
   start: 'Agreed start (may stay empty)',
   startHint: 'Two observers may begin at this second by themselves; alone it is only written down.',
   prepare: 'Prepare the visit',
+  firstOf: ({ missing }: { missing: Missing }) =>
+    ({
+      class: 'First choose the class.',
+      protocol: 'First make a protocol: the study has none.',
+      phases: 'First say which phases this lesson has.',
+      children: 'First add the children of this class.',
+      draw: 'First draw the children to watch.',
+      child: 'First choose the child to watch, or draw one.',
+    })[missing],
   everybody: 'Children of the class today',
   everybodyHint:
     'A headcount looks at everybody: nobody is drawn. Take the tick away from a child who is not there.',
@@ -128,6 +149,8 @@ export const before = {
   observer: 'Observer',
   observerWho: ({ name, role, purpose }: { name: string; role: string; purpose: Purpose }) =>
     `${name}, ${role}${purpose === 'practice' ? '; this one is practice' : purpose === 'familiarisation' ? '; a familiarisation visit' : ''}.`,
+  observerWhy: ({ why }: { why: 'as last time' | 'the only one' }) =>
+    why === 'as last time' ? 'As last time on this tablet.' : 'The only observer of the study.',
   observerNobody: 'Say who records.',
   observerChoose: 'Choose',
   observerDialog: 'Who records on this tablet?',
@@ -179,12 +202,13 @@ export const before = {
   awakeRefused:
     'The tablet refuses to keep the screen on. Switch battery saving off, or touch the screen now and then.',
   awakeMissing: 'This browser cannot keep the screen on. Set the tablet’s own screen time to the longest.',
-  room: 'Room',
-  roomFree: ({ lessons }: { lessons: number }, f: F) => `Space for about ${f.whole(lessons)} lessons.`,
+  room: 'Tablet storage',
+  roomFree: ({ lessons }: { lessons: number }, f: F) =>
+    `It has room for the records of ${lessonsIn(lessons, f)}.`,
   roomNotKept: ({ lessons }: { lessons: number }, f: F) =>
-    `Space for about ${f.whole(lessons)} lessons. The browser does not promise to keep it: install the app, and hand over the same day.`,
-  roomLow: 'The disk is nearly full. Make room before you record.',
-  roomUnknown: 'The browser does not tell how much room is left.',
+    `It has room for the records of ${lessonsIn(lessons, f)}, but the browser does not promise to keep them: install the app, and hand over the same day.`,
+  roomLow: 'It is nearly full. Delete something else from the tablet before you record.',
+  roomUnknown: 'The browser does not tell how much of it is free.',
   battery: 'Battery',
   batteryFull: ({ percent, charging }: { percent: number; charging: boolean }, f: F) =>
     `${f.percent(percent)}${charging ? ', charging' : ''}.`,
@@ -203,12 +227,14 @@ export const before = {
 
   goIn: 'Go in',
   goInAnyway: 'Go in anyway',
+  goInNobody: 'First say who records: the record carries the observer’s name.',
   anywayNote:
     'On hold means not checked, or not well. What was on hold when you went in is written into the record of the session.',
   secondTablet: 'Second tablet',
   secondTabletText:
     'Hand the visit file over, so that both tablets watch the same children at the same prompts.',
   handVisit: 'Hand over the visit file',
+  handMaking: 'The file is being made …',
   handAgain: 'The tablet asks for a second tap. Tap once more.',
   handed: 'The visit file has left this tablet.',
   again: 'Look again',

@@ -60,6 +60,7 @@ export const pairing = {
   textTitle: 'From the text',
   textLabel: 'Text of the card',
   textHint: 'Spaces, line breaks and small letters do no harm. A line that is wrong is told.',
+  textFirst: 'First paste or type the text of the card.',
   textRead: 'Read the text',
   reading: 'Reading …',
   progress: ({ read, of }: { read: number; of: number }, f: F) =>

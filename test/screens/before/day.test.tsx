@@ -75,7 +75,8 @@ describe('the day of a visit', () => {
 
   it('needs no draw for a duration once the child is chosen', async () => {
     const { view, prepared } = await choosing((draft) => switchMethod(draft, 'duration'), false);
-    expect(prepare().disabled).toBe(true);
+    expect(prepare().getAttribute('aria-disabled')).toBe('true');
+    expect(screen.getByText('First choose the child to watch, or draw one.')).toBeTruthy();
     expect(screen.getByRole('button', { name: /^Draw 1 at random/ })).toBeTruthy();
     await userEvent.selectOptions(screen.getByRole('combobox', { name: 'The child to watch' }), 'Otter-05');
     expect(screen.getByText('One child, watched for all of 15 minutes in each phase.')).toBeTruthy();

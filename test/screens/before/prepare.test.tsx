@@ -2,13 +2,42 @@
 import { cleanup, screen, waitFor } from '@testing-library/react';
 import userEvent from '@testing-library/user-event';
 import { afterEach, describe, expect, it } from 'vitest';
+import type { CodeSet } from '../../../src/model/codeSet.ts';
 import { Prepare } from '../../../src/screens/before/Prepare.tsx';
-import { exportVisit, prepareVisit } from '../../../src/tasks/index.ts';
+import type { Services } from '../../../src/screens/services.ts';
+import { starterSets } from '../../../src/screens/study/starterTexts.ts';
+import {
+  addClass,
+  addObserver,
+  exportVisit,
+  prepareVisit,
+  saveProtocol,
+  starterDraft,
+  startSession,
+  undoDraw,
+} from '../../../src/tasks/index.ts';
 import { fakeServices, renderScreen } from '../support/renderScreen.tsx';
 import { studyWithClass } from '../support/study.ts';
 import { must } from '../support/studyOf.ts';
 
 afterEach(cleanup);
+
+/** A study with one class, the protocols that it begins with, and one more whose name comes last. */
+async function twoProtocols() {
+  const services = fakeServices();
+  const { study, classroom } = await studyWithClass(services);
+  const [set] = starterSets(services.words);
+  const draft = starterDraft('momentary', study.id, 'Zeal', set as CodeSet);
+  return { services, classroom, second: must(await saveProtocol(services.deps, draft)) };
+}
+
+/** A session of the class on this tablet. */
+async function recorded({ deps }: Services, classroom: string, protocol: string, phases: string[]) {
+  const wish = { classroom, protocol: { id: protocol }, phases, absent: [], plannedStart: null };
+  const { plan } = must(await prepareVisit(deps, wish));
+  const observer = must(await addObserver(deps, plan.study.id, 'Quill'));
+  return startSession(deps, plan, { observer: observer.id, role: null, practice: false });
+}
 
 describe('Before the visit: choosing', () => {
   it('points to The study where there is none yet', async () => {
@@ -43,6 +72,66 @@ describe('Before the visit: choosing', () => {
     expect(
       await screen.findByText(/^10 looks a child in 15 minutes in each phase, 6 children\.$/),
     ).toBeTruthy();
+  });
+
+  it('offers the protocol that this class was last recorded with, else the study’s, and says so', async () => {
+    const { services, classroom, second } = await twoProtocols();
+    must(await recorded(services, classroom.id, second.id, ['before', 'after']));
+    renderScreen(<Prepare />, services);
+    const radio = await screen.findByRole<HTMLInputElement>('radio', { name: /^Zeal/ });
+    expect(radio.checked).toBe(true);
+    expect(screen.getByText('As last time in this class.')).toBeTruthy();
+    expect(screen.getByRole<HTMLInputElement>('radio', { name: /^before, break, after/ }).checked).toBe(true);
+    const other = screen
+      .getAllByRole<HTMLInputElement>('radio')
+      .find((one) => one.name === radio.name && one !== radio);
+    await userEvent.click(other as HTMLInputElement);
+    expect(screen.queryByText('As last time in this class.')).toBeNull();
+    expect(other?.checked).toBe(true);
+    cleanup();
+    must(await addClass(services.deps, classroom.study, { name: 'Wren', condition: null }));
+    renderScreen(<Prepare />, services);
+    await userEvent.click(await screen.findByRole('radio', { name: /^Wren/ }));
+    expect(screen.getByText('As last time in this study.')).toBeTruthy();
+  });
+
+  it('asks for the phase where the class was last seen in one alone, and leads there', async () => {
+    const { services, classroom, second } = await twoProtocols();
+    must(await recorded(services, classroom.id, second.id, ['before']));
+    renderScreen(<Prepare />, services);
+    expect(await screen.findByText('Last time this class was seen in before alone.')).toBeTruthy();
+    const prepare = screen.getByRole('button', { name: 'Prepare the visit' });
+    expect(screen.getByText('First say which phases this lesson has.')).toBeTruthy();
+    await userEvent.click(prepare);
+    expect((document.activeElement as HTMLInputElement).closest('fieldset')?.textContent).toMatch(
+      /^Phases of this lesson/,
+    );
+    await userEvent.click(screen.getByRole('radio', { name: 'only after' }));
+    await userEvent.click(screen.getByRole('button', { name: 'Prepare the visit' }));
+    await waitFor(async () =>
+      expect(must(await services.store.settings()).prepared?.schedule.phases).toEqual(['after']),
+    );
+  });
+
+  it('says what is missing, one thing after the other, and leads to it', async () => {
+    const services = fakeServices();
+    const { study, classroom } = await studyWithClass(services);
+    const hare = must(await addClass(services.deps, study.id, { name: 'Hare', condition: null }));
+    renderScreen(<Prepare />, services);
+    const prepare = async () =>
+      userEvent.click(await screen.findByRole('button', { name: 'Prepare the visit' }));
+    expect(await screen.findByText('First choose the class.')).toBeTruthy();
+    await prepare();
+    expect((document.activeElement as HTMLInputElement).closest('fieldset')?.textContent).toMatch(/^Class/);
+    await userEvent.click(screen.getByRole('radio', { name: /^Hare/ }));
+    expect(screen.getByText('First add the children of this class.')).toBeTruthy();
+    await prepare();
+    expect(document.activeElement?.getAttribute('href')).toBe(`#/study/class/${hare.id}`);
+    must(await undoDraw(services.deps, classroom.id));
+    await userEvent.click(screen.getByRole('radio', { name: /^Otter/ }));
+    expect(await screen.findByText('First draw the children to watch.')).toBeTruthy();
+    await prepare();
+    expect(document.activeElement?.textContent).toBe('Draw 6 at random');
   });
 
   it('takes over the schedule of the first tablet from its visit file', async () => {

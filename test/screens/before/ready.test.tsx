@@ -7,15 +7,25 @@ import type { SessionHeader } from '../../../src/model/session.ts';
 import type { LiveSession } from '../../../src/recorder/liveSession.ts';
 import { Ready } from '../../../src/screens/before/Ready.tsx';
 import type { Device, OpenOptions, Services } from '../../../src/screens/services.ts';
-import { addObserver, prepareVisit } from '../../../src/tasks/index.ts';
+import { addObserver, prepareVisit, startSession } from '../../../src/tasks/index.ts';
 import { fakeDevice, fakeServices, renderScreen } from '../support/renderScreen.tsx';
 import { studyWithClass } from '../support/study.ts';
 import { must } from '../support/studyOf.ts';
 
 afterEach(cleanup);
 
+interface Arrival {
+  readonly names?: readonly string[];
+  readonly as?: 'second' | null;
+  /** Who recorded on this tablet before. */
+  readonly before?: { readonly by: string; readonly sameVisit?: boolean };
+}
+
 /** A prepared visit, an observer, and a recorder that only writes down with what it was opened. */
-async function atTheDoor(device: Partial<Device> = {}) {
+async function atTheDoor(
+  device: Partial<Device> = {},
+  { names = ['Quill', 'Marsh'], as = null, before }: Arrival = {},
+) {
   const opened: { header: SessionHeader; options: OpenOptions }[] = [];
   const base = fakeServices();
   const services: Services = {
@@ -30,7 +40,7 @@ async function atTheDoor(device: Partial<Device> = {}) {
     },
   };
   const { study, classroom, protocol } = await studyWithClass(services);
-  must(await addObserver(services.deps, study.id, 'Quill'));
+  for (const name of names) must(await addObserver(services.deps, study.id, name));
   const wish = {
     classroom: classroom.id,
     protocol: { id: protocol.id },
@@ -40,7 +50,15 @@ async function atTheDoor(device: Partial<Device> = {}) {
   };
   const { plan } = must(await prepareVisit(services.deps, wish));
   must(await services.store.saveSettings({ prepared: plan }));
-  const view = renderScreen(<Ready />, services, '/before/ready');
+  if (before !== undefined) {
+    const observers = must(await services.store.observers(study.id));
+    const { id } = observers.find(({ name }) => name === before.by) ?? { id: '' };
+    const visit = before.sameVisit === true ? plan.visit : 'the visit before';
+    must(
+      await startSession(services.deps, { ...plan, visit }, { observer: id, role: null, practice: false }),
+    );
+  }
+  const view = renderScreen(<Ready as={as} />, services, '/before/ready');
   await screen.findByText('Only here');
   return { services, opened, view };
 }
@@ -62,12 +80,53 @@ describe('Before the visit: the checks', () => {
   it('takes a name that stands in the field on "Done", though nobody tapped "Add"', async () => {
     const { services } = await atTheDoor();
     await userEvent.click(screen.getByRole('button', { name: 'Choose' }));
-    await userEvent.type(await screen.findByLabelText(/Name of the observer/), 'Marsh');
+    await userEvent.type(await screen.findByLabelText(/Name of the observer/), 'Reed');
     await userEvent.click(screen.getByRole('button', { name: 'Done' }));
-    await screen.findByText(/^Marsh, /);
+    await screen.findByText(/^Reed, /);
     const [study] = must(await services.store.studies());
     const names = must(await services.store.observers(study?.id ?? '')).map(({ name }) => name);
-    expect(names).toEqual(['Marsh', 'Quill']);
+    expect(names).toEqual(['Marsh', 'Quill', 'Reed']);
+  });
+
+  it('takes the only observer of the study without a question, says so, and lets it be changed', async () => {
+    await atTheDoor({}, { names: ['Quill'] });
+    expect(screen.getByText('Quill, alone. The only observer of the study.')).toBeTruthy();
+    expect(screen.getByRole('heading', { level: 1 }).textContent).toBe('Two things before you go in.');
+    await choose(/nobody/);
+    expect(screen.getByText('Quill, alone.')).toBeTruthy();
+  });
+
+  it('takes the one of several who recorded last on this tablet, and nobody where nobody has', async () => {
+    await atTheDoor({}, { before: { by: 'Marsh' } });
+    expect(screen.getByText('Marsh, alone. As last time on this tablet.')).toBeTruthy();
+    cleanup();
+    await atTheDoor();
+    expect(screen.getByText('Say who records.')).toBeTruthy();
+  });
+
+  it('takes nobody for granted who has a record of this visit, or whose name came with the first tablet', async () => {
+    await atTheDoor({}, { before: { by: 'Marsh', sameVisit: true } });
+    expect(screen.getByText('Say who records.')).toBeTruthy();
+    cleanup();
+    await atTheDoor({}, { names: ['Quill'], as: 'second' });
+    expect(screen.getByText('Say who records.')).toBeTruthy();
+  });
+
+  it('says why nobody can go in yet, and a touch leads to the observer', async () => {
+    const { opened } = await atTheDoor();
+    const goIn = screen.getByRole('button', { name: 'Go in anyway' });
+    const why = document.getElementById(goIn.getAttribute('aria-describedby') ?? '');
+    expect(why?.textContent).toBe('First say who records: the record carries the observer’s name.');
+    await userEvent.click(goIn);
+    expect(screen.getByRole('dialog', { name: 'Who records on this tablet?' })).toBeTruthy();
+    expect(opened).toHaveLength(0);
+  });
+
+  it('asks for a name where “Add” was tapped without one', async () => {
+    await atTheDoor();
+    await userEvent.click(screen.getByRole('button', { name: 'Choose' }));
+    await userEvent.click(await screen.findByRole('button', { name: 'Add' }));
+    expect((await screen.findByRole('alert')).textContent).toBe('Write a name for the observer first.');
   });
 
   it('counts what stands in the way, and lets in quietly when nothing does', async () => {

@@ -115,6 +115,34 @@ describe('Typing in a sheet', () => {
     expect(must(await on.services.store.settings())).toMatchObject({ paper: null, prepared: null });
   });
 
+  it('adds an observer who is not on the list yet, as it is done before the visit', async () => {
+    const on = await bench();
+    await begin(on);
+    await on.user.click(screen.getByRole('button', { name: 'Somebody else …' }));
+    await on.user.type(screen.getByLabelText('Name of the observer'), 'quill{Enter}');
+    expect((await screen.findByRole('alert')).textContent).toMatch(/quill/i);
+    await on.user.clear(screen.getByLabelText('Name of the observer'));
+    await on.user.type(screen.getByLabelText('Name of the observer'), 'Reed{Enter}');
+    await waitFor(() => {
+      const observer = screen.getByLabelText<HTMLSelectElement>('Observer');
+      expect(observer.selectedOptions[0]?.textContent).toBe('Reed');
+    });
+    expect(screen.queryByLabelText('Name of the observer')).toBeNull();
+    await on.user.click(numberField());
+    await on.user.keyboard('1');
+    expect((await keep(on)).header.observer.name).toBe('Reed');
+  });
+
+  it('says what a button of a line would do where there is nothing for it to do', async () => {
+    const on = await bench();
+    await begin(on);
+    await on.user.click(screen.getByRole('button', { name: 'Line before' }));
+    expect(screen.getByRole('alert').textContent).toBe('This is the first line.');
+    await on.user.click(screen.getByRole('button', { name: 'Empty this line' }));
+    expect(screen.getByRole('alert').textContent).toBe('This line is empty.');
+    expect(screen.getByText('nothing to undo yet')).toBeTruthy();
+  });
+
   it('loses nothing in a reload, and goes on at the line after the last one typed', async () => {
     const on = await bench();
     await begin(on);

@@ -3,6 +3,8 @@ import { missingParts } from '../../../tasks/readCard.ts';
 import { Button } from '../../../ui/Button.tsx';
 import { TextArea } from '../../../ui/Field.tsx';
 import { FileButton } from '../../../ui/FileButton.tsx';
+import { HeldButton } from '../../../ui/HeldButton.tsx';
+import { leadTo } from '../../../ui/leadTo.ts';
 import { Notice } from '../../../ui/Notice.tsx';
 import { PageHead } from '../../../ui/PageHead.tsx';
 import { Sheet } from '../../../ui/Sheet.tsx';
@@ -70,9 +72,10 @@ function Progress({ reading: { parts, busy, beginAgain } }: { readonly reading: 
 function TextWay({ onText }: { readonly onText: Reading['takeText'] }) {
   const { words } = useServices();
   const [text, setText] = useState('');
+  const field = useRef<HTMLDivElement>(null);
   return (
     <Sheet title={words.pairing.textTitle}>
-      <div className="stack-tight">
+      <div className="stack-tight" ref={field}>
         <TextArea
           label={words.pairing.textLabel}
           hint={words.pairing.textHint}
@@ -82,10 +85,14 @@ function TextWay({ onText }: { readonly onText: Reading['takeText'] }) {
           spellCheck={false}
           onChange={(event) => setText(event.target.value)}
         />
-        <div>
-          <Button disabled={text.trim() === ''} onClick={() => onText(text)}>
+        <div className="row">
+          <HeldButton
+            why={text.trim() === '' ? words.pairing.textFirst : null}
+            onWhy={() => leadTo(field.current)}
+            onClick={() => onText(text)}
+          >
             {words.pairing.textRead}
-          </Button>
+          </HeldButton>
         </div>
       </div>
     </Sheet>

@@ -4,6 +4,7 @@ import type { KeyAction, KeyMap, Observer } from '../../../model/observer.ts';
 import { saveObserver } from '../../../tasks/index.ts';
 import { Button } from '../../../ui/Button.tsx';
 import { Check } from '../../../ui/Choice.tsx';
+import { HeldButton } from '../../../ui/HeldButton.tsx';
 import { useServices } from '../../services.ts';
 import { useDoing } from '../useDoing.tsx';
 import { actionLabel, keyActions } from './keyActions.ts';
@@ -64,9 +65,9 @@ export function KeyMapEditor({ observer }: { readonly observer: Observer }) {
         })}
       </ul>
       <div className="row">
-        <Button disabled={observer.keyMap === null} onClick={() => put(null)}>
+        <HeldButton why={observer.keyMap === null ? study.usualKeysNow : null} onClick={() => put(null)}>
           {study.usualKeys}
-        </Button>
+        </HeldButton>
       </div>
       {asking !== null && (
         <PressKey

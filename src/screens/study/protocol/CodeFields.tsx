@@ -1,7 +1,7 @@
 import type { Code, CodeRole } from '../../../model/codeSet.ts';
-import { Button } from '../../../ui/Button.tsx';
 import { Choice } from '../../../ui/Choice.tsx';
 import { TextArea, TextField } from '../../../ui/Field.tsx';
+import { HeldButton } from '../../../ui/HeldButton.tsx';
 import { CodeSign } from '../../../ui/Sign.tsx';
 import { useWords } from '../../services.ts';
 
@@ -64,20 +64,28 @@ export function CodeFields({ code, number, name, kind, onChange, onUp, onDown, o
           </div>
         </details>
         <div className="row">
-          <Button disabled={onUp === null} aria-label={study.moveUp({ name })} onClick={() => onUp?.()}>
+          <HeldButton
+            why={onUp === null ? study.upmost : null}
+            aria-label={study.moveUp({ name })}
+            onClick={() => onUp?.()}
+          >
             {study.up}
-          </Button>
-          <Button disabled={onDown === null} aria-label={study.moveDown({ name })} onClick={() => onDown?.()}>
+          </HeldButton>
+          <HeldButton
+            why={onDown === null ? study.downmost : null}
+            aria-label={study.moveDown({ name })}
+            onClick={() => onDown?.()}
+          >
             {study.down}
-          </Button>
-          <Button
+          </HeldButton>
+          <HeldButton
             look="quiet"
-            disabled={onTakeAway === null}
+            why={onTakeAway === null ? study.codesFewest : null}
             aria-label={study.takeCodeAway({ name })}
             onClick={() => onTakeAway?.()}
           >
             {study.takeAway}
-          </Button>
+          </HeldButton>
         </div>
       </div>
     </fieldset>

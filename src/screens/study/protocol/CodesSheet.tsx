@@ -3,6 +3,7 @@ import { ok } from '../../../kernel/result.ts';
 import type { Code, CodeSet } from '../../../model/codeSet.ts';
 import { Button } from '../../../ui/Button.tsx';
 import { TextField } from '../../../ui/Field.tsx';
+import { HeldButton } from '../../../ui/HeldButton.tsx';
 import { Sheet } from '../../../ui/Sheet.tsx';
 import { useServices } from '../../services.ts';
 import { starterSets } from '../starterTexts.ts';
@@ -81,8 +82,8 @@ export function CodesSheet({ set, onChange }: Props) {
           ))}
         </ol>
         <div className="row">
-          <Button
-            disabled={set.codes.length >= 6}
+          <HeldButton
+            why={set.codes.length >= 6 ? study.codesMost : null}
             onClick={() =>
               put([
                 ...set.codes,
@@ -98,7 +99,7 @@ export function CodesSheet({ set, onChange }: Props) {
             }
           >
             {study.addCode}
-          </Button>
+          </HeldButton>
         </div>
       </div>
     </Sheet>

@@ -1,10 +1,12 @@
-import { useState } from 'react';
+import { useRef, useState } from 'react';
 import { useLocation } from 'wouter';
 import type { Study } from '../../../model/study.ts';
 import { askRemoveStudy, type RemovalQuestion, removeStudy } from '../../../tasks/index.ts';
 import { Button } from '../../../ui/Button.tsx';
 import { Dialog } from '../../../ui/Dialog.tsx';
 import { TextField } from '../../../ui/Field.tsx';
+import { HeldButton } from '../../../ui/HeldButton.tsx';
+import { leadTo } from '../../../ui/leadTo.ts';
 import { Sheet } from '../../../ui/Sheet.tsx';
 import { useServices } from '../../services.ts';
 import { useDoing } from '../useDoing.tsx';
@@ -15,6 +17,7 @@ export function RemoveStudy({ study }: { readonly study: Study }) {
   const [, go] = useLocation();
   const [question, setQuestion] = useState<RemovalQuestion | null>(null);
   const [typed, setTyped] = useState('');
+  const field = useRef<HTMLDivElement>(null);
   const { run, notice, busy } = useDoing();
   const ask = async () => {
     const asked = await run(askRemoveStudy(deps, study.id));
@@ -48,9 +51,14 @@ export function RemoveStudy({ study }: { readonly study: Study }) {
           actions={
             <>
               <Button onClick={close}>{words.study.removeKeep}</Button>
-              <Button disabled={!same || busy} onClick={() => remove(question)}>
+              <HeldButton
+                disabled={busy}
+                why={same ? null : words.study.removeFirst}
+                onWhy={() => leadTo(field.current)}
+                onClick={() => remove(question)}
+              >
                 {words.study.removeNow}
-              </Button>
+              </HeldButton>
             </>
           }
         >
@@ -61,11 +69,13 @@ export function RemoveStudy({ study }: { readonly study: Study }) {
               left: question.notHandedOver,
             })}
           </p>
-          <TextField
-            label={words.study.removeType({ name: question.name })}
-            value={typed}
-            onChange={(event) => setTyped(event.target.value)}
-          />
+          <div ref={field}>
+            <TextField
+              label={words.study.removeType({ name: question.name })}
+              value={typed}
+              onChange={(event) => setTyped(event.target.value)}
+            />
+          </div>
         </Dialog>
       )}
     </Sheet>

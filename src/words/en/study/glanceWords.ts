@@ -129,4 +129,5 @@ export const glanceWords = {
   notHere: 'This page belongs to something that is not on this tablet, or no more.',
   taken: 'Kept.',
   undone: 'Taken back.',
+  undoNothing: 'nothing to undo yet',
 } as const;

@@ -62,5 +62,6 @@ export const observerWords = {
     `${key} already means ${action}. Take it away there first, or press another key.`,
   keyKept: ({ key }: { key: string }) => `The page itself needs ${key}. Press another key.`,
   usualKeys: 'Back to the usual keys',
+  usualKeysNow: 'these are the usual keys',
   keysChanged: 'The keys are changed.',
 } as const;

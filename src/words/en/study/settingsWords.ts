@@ -39,6 +39,7 @@ export const settingsWords = {
   removeWhat: ({ classes, sessions, left }: { classes: number; sessions: number; left: number }, f: F) =>
     `${f.whole(classes)} ${f.plural(classes, { one: 'class', other: 'classes' })} and ${f.whole(sessions)} ${f.plural(sessions, { one: 'session', other: 'sessions' })} go with it.${left === 0 ? '' : ` ${f.whole(left)} ${f.plural(left, { one: 'session has', other: 'sessions have' })} not been handed over and would be lost.`} This cannot be taken back.`,
   removeType: ({ name }: { name: string }) => `Type the name of the study: ${name}`,
+  removeFirst: 'First type the name as it stands above.',
   removeKeep: 'Keep the study',
   removeNow: 'Remove the study for good',
 } as const;

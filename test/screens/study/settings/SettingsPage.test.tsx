@@ -25,7 +25,9 @@ describe('settings', () => {
     await userEvent.click(await screen.findByRole('button', { name: 'Remove the study …' }));
     expect(await screen.findByText(/1 class and 0 sessions go with it/)).toBeTruthy();
     const remove = screen.getByRole('button', { name: 'Remove the study for good' });
-    expect((remove as HTMLButtonElement).disabled).toBe(true);
+    expect(remove.getAttribute('aria-disabled')).toBe('true');
+    await userEvent.click(remove);
+    expect(document.activeElement).toBe(screen.getByLabelText(/^Type the name of the study/));
     await userEvent.type(screen.getByLabelText(/Type the name of the study/), study.name);
     await userEvent.click(remove);
     await waitFor(async () => expect(must(await services.store.studies())).toEqual([]));
