@@ -65,7 +65,7 @@ export function sessionRecords(session: StoredSession): SessionRecord[] {
   const began = (look: Look): boolean =>
     !laid || state.origins[look.part] !== null || look.status === 'scored';
   const phases = [...new Set(looks.filter(began).map((look) => look.phase))];
-  const started = session.journal.find((entry) => entry.kind === 'started')?.wall ?? null;
+  const started = state.entries.find((entry) => entry.kind === 'started')?.wall ?? null;
   // A table's wall times may be made up; only what it says of the start counts.
   const start =
     header.plannedStart !== null && !laid

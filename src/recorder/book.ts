@@ -11,6 +11,8 @@ import type { RecorderPorts } from './ports.ts';
 /** The journal of the running session: what is written goes at once into the state and into the write queue. */
 export class Book {
   private folded: JournalState;
+  /** All that was written, what was withdrawn included. */
+  readonly journal: JournalEntry[];
   private readonly writer: JournalWriter;
   readonly keeper: Keeper;
 
@@ -22,6 +24,7 @@ export class Book {
     before: readonly JournalEntry[],
     elsewhere: boolean,
   ) {
+    this.journal = [...before];
     this.folded = before.length === 0 ? emptyState(header) : fold(header, before);
     const { writer, seq } = nextIdentity(before, elsewhere) ?? { writer: newId(ports.random), seq: 0 };
     this.writer = new JournalWriter(header.id, writer, seq, ports.wall);
@@ -34,6 +37,7 @@ export class Book {
 
   write(at: number, body: EntryBody): KnownEntry {
     const entry = this.writer.entry(at, body);
+    this.journal.push(entry);
     this.folded = step(this.folded, entry);
     this.keeper.add(entry);
     return entry;

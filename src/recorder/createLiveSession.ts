@@ -1,4 +1,7 @@
+import type { JournalEntry } from '../journal/entry.ts';
+import { fold } from '../journal/step.ts';
 import type { SessionHeader } from '../model/session.ts';
+import { isCalledOff, lastStart } from './calledOff.ts';
 import { planOf } from './grid.ts';
 import type { LiveOptions, LiveSession } from './liveSession.ts';
 import type { RecorderPorts } from './ports.ts';
@@ -15,7 +18,12 @@ export function createLiveSession(
   if (plan === null || header.schedule.kind !== 'laid') {
     throw new Error('A schedule from a table cannot be recorded.');
   }
-  return new RunningSession(
-    new SessionRun({ header, protocol: header.schedule.protocol, plan, ports, options }),
-  );
+  const inputs = { header, protocol: header.schedule.protocol, plan, ports };
+  const { resumeFrom = [], ...others } = options;
+  const again = (calledOff: readonly JournalEntry[]): SessionRun =>
+    new SessionRun({ ...inputs, options: { ...others, ...lastStart(calledOff) }, calledOff });
+  const first = isCalledOff(fold(header, resumeFrom), resumeFrom)
+    ? again(resumeFrom)
+    : new SessionRun({ ...inputs, options });
+  return new RunningSession(first, again);
 }

@@ -19,6 +19,8 @@ export interface LiveSession {
    * browser gives none (`sound` false). Fails when another tab records.
    */
   begin(how?: Beginning): Promise<Result<{ readonly sound: boolean }>>;
+  /** Takes the start back before session time 0, while nothing could be marked: the session waits to be begun anew. */
+  callOff(): void;
   /** A code; null = observed, none of the codes occurred. */
   touch(code: string | null, at: PageMs): void;
   /** Headcount: children on-task and children present. */

@@ -3,6 +3,7 @@ import { inOrder } from '../journal/order.ts';
 import { isCovered, type JournalState } from '../journal/state.ts';
 import type { EpochMs } from '../kernel/units.ts';
 import { epochOf } from '../kernel/wallTime.ts';
+import { isCalledOff } from './calledOff.ts';
 
 export interface Resumption {
   /** Session time of the last sign of life. */
@@ -19,7 +20,8 @@ const breaks: ReadonlySet<string> = new Set<EntryKind>(['started', 'paused', 're
 
 /**
  * Where a session that was cut off stands: its grid has gone on since its last entry, by the wall clock, which is all
- * that outlives a dead battery (so it is an estimate). A paused schedule has stood still. null without entries.
+ * that outlives a dead battery (so it is an estimate). A paused schedule has stood still. null without entries, and where
+ * the start was called off.
  */
 export function resumption(
   state: JournalState,
@@ -28,7 +30,7 @@ export function resumption(
 ): Resumption | null {
   const ordered = inOrder(journal);
   const last = ordered.at(-1);
-  if (last === undefined) return null;
+  if (last === undefined || isCalledOff(state, journal)) return null;
   // While both observers wait for their second, session time is still below 0, and the journal has spoken of no later one.
   const from = state.at > 0 ? Math.max(state.at, last.at) : last.at;
   if (isCovered(state, 'paused')) return { from, now: from };

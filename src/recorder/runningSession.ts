@@ -1,29 +1,63 @@
-import type { AwayReason, EntryRef } from '../journal/entry.ts';
+import type { AwayReason, EntryRef, JournalEntry } from '../journal/entry.ts';
 import type { Id } from '../kernel/ids.ts';
-import type { Result } from '../kernel/result.ts';
+import { problem, type Result } from '../kernel/result.ts';
 import type { PageMs } from '../kernel/units.ts';
 import type { MissingReason } from '../model/missing.ts';
 import type { Manner } from '../model/observer.ts';
+import { callOff } from './calledOff.ts';
 import * as deeds from './deeds.ts';
 import type { Beginning, Correction, LiveSession } from './liveSession.ts';
 import type { Stop } from './ports.ts';
 import type { RoomSnapshot } from './roomSnapshot.ts';
 import type { SessionRun } from './sessionRun.ts';
+import { Telling } from './telling.ts';
 
 /** What the observer can do, said to the session that runs. */
 export class RunningSession implements LiveSession {
-  constructor(private readonly run: SessionRun) {}
+  private readonly telling = new Telling();
+  private manner: Pick<Manner, 'confirm' | 'remind'> | null = null;
+  /** The run whose start was called off, until all of it is kept. */
+  private before: SessionRun | null = null;
+
+  /** @param again makes a run that has not begun yet, over the journal of one whose start was called off */
+  constructor(
+    private run: SessionRun,
+    private readonly again: (calledOff: readonly JournalEntry[]) => SessionRun,
+  ) {
+    this.listen();
+  }
+
+  private listen(): void {
+    this.run.subscribe(() => this.telling.tell());
+  }
 
   subscribe(listener: () => void): Stop {
-    return this.run.subscribe(listener);
+    return this.telling.subscribe(listener);
   }
 
   snapshot(): RoomSnapshot {
     return this.run.snapshot();
   }
 
-  begin(how: Beginning = {}): Promise<Result<{ readonly sound: boolean }>> {
+  async begin(how: Beginning = {}): Promise<Result<{ readonly sound: boolean }>> {
+    // One after the other: the store and the right to record are handed on.
+    if (this.before !== null && !(await this.before.flush())) return problem('recorder.storeSlow');
+    this.before = null;
     return this.run.begin(how);
+  }
+
+  callOff(): void {
+    const called: { journal: readonly JournalEntry[] | null } = { journal: null };
+    this.run.deed((desk, present) => {
+      if (callOff(desk, present)) called.journal = desk.book.journal;
+    });
+    if (called.journal === null) return;
+    this.before = this.run;
+    this.before.dispose();
+    this.run = this.again(called.journal);
+    if (this.manner !== null) this.run.behave(this.manner);
+    this.listen();
+    this.telling.tell();
   }
 
   touch(code: string | null, at: PageMs): void {
@@ -51,6 +85,7 @@ export class RunningSession implements LiveSession {
   }
 
   behave(manner: Pick<Manner, 'confirm' | 'remind'>): void {
+    this.manner = manner;
     this.run.behave(manner);
   }
 
@@ -123,6 +158,7 @@ export class RunningSession implements LiveSession {
   }
 
   dispose(): void {
+    this.telling.forget();
     this.run.dispose();
   }
 }

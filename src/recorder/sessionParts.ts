@@ -1,3 +1,4 @@
+import type { JournalEntry } from '../journal/entry.ts';
 import type { Protocol } from '../model/protocol.ts';
 import type { SessionHeader } from '../model/session.ts';
 import { Book } from './book.ts';
@@ -25,14 +26,18 @@ export interface SessionInputs {
   readonly plan: Plan;
   readonly ports: RecorderPorts;
   readonly options: LiveOptions;
+  /** The journal so far of a session whose start was called off: it is gone on with, and the session begins anew. */
+  readonly calledOff?: readonly JournalEntry[];
 }
 
 /** What a session run is put together from; each part knows its own matter alone. */
 export type SessionParts = ReturnType<typeof sessionParts>;
 
 /** @param kept called when the store has taken or refused what was written */
-export function sessionParts({ header, protocol, plan, ports, options }: SessionInputs, kept: () => void) {
-  const book = new Book(header, ports, kept, options.resumeFrom ?? [], options.elsewhere ?? false);
+export function sessionParts(inputs: SessionInputs, kept: () => void) {
+  const { header, protocol, plan, ports, options } = inputs;
+  const before = options.resumeFrom ?? inputs.calledOff ?? [];
+  const book = new Book(header, ports, kept, before, options.elsewhere ?? false);
   const time = new Timekeeper(ports);
   const sound = new SoundDesk(ports.audio, book.state);
   const view = new RoomView(header, plan);

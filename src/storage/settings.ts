@@ -7,6 +7,7 @@ export const noSettings: Settings = {
   installation: null,
   lastBackup: null,
   prepared: null,
+  tickChecked: null,
   frozenProtocols: [],
   sheets: [],
   paper: null,

@@ -98,6 +98,15 @@ export interface ExportedFile {
   readonly covers: readonly HandOver[];
 }
 
+/** What the tick check of a visit found, and when: clocks drift apart, and may be set. */
+export interface TickChecked {
+  readonly visit: string;
+  /** How many milliseconds later than it shows this tablet's wall clock is to be read. */
+  readonly nudgeMs: number;
+  /** This tablet's wall time then, as it showed. */
+  readonly wall: WallTime;
+}
+
 export interface Settings {
   readonly theme: 'light' | 'dim' | 'system';
   /** The study that the screens show. */
@@ -108,6 +117,8 @@ export interface Settings {
   readonly lastBackup: string | null;
   /** The visit that was prepared (or taken over from a file) and has not been recorded yet. */
   readonly prepared: VisitPlan | null;
+  /** The last tick check of this tablet. */
+  readonly tickChecked: TickChecked | null;
   /** Protocol versions (`id version`) that were prepared for a visit or have left the tablet: they stand. */
   readonly frozenProtocols: readonly string[];
   /** Schedules that were printed as sheets, newest first. */

@@ -16,6 +16,16 @@ async function openCheck(page: Page): Promise<void> {
   await expect(page.getByRole('button', { name: 'Stop the ticks' })).toBeVisible();
 }
 
+/** Types the second that lies so far ahead, and starts; returns it as it is said. */
+async function startIn(page: Page, seconds: number): Promise<string> {
+  const agreed = Math.ceil(Date.now() / 1000 + seconds) * 1000;
+  const time = new Date(agreed).toLocaleTimeString('en-GB', { timeZone: 'Europe/London' });
+  await page.getByRole('textbox', { name: 'Agreed second' }).fill(time);
+  await page.getByRole('button', { name: `Start at ${time}` }).click();
+  await expect(page.getByText(`The schedule begins at ${time}, in`)).toBeVisible();
+  return time;
+}
+
 /** When each interval's cue came by this tablet's clock, moved by its nudge. */
 async function cueMoments(page: Page): Promise<number[]> {
   const journal = await journalOnDisk(page, sessionOf(page));
@@ -87,4 +97,39 @@ test('two tablets whose clocks are apart are nudged into one and begin at the ag
     { kind: 'started', agreedStart: expect.stringContaining(`T${time}.000`) },
     { kind: 'clockNudged', by: slowMs },
   ]);
+});
+
+test('a start that is called off leaves the nudge and the session as they were, also on a page that is loaded again', async ({
+  tablet,
+}) => {
+  test.setTimeout(120_000);
+  const page = await tablet.openApp();
+  const protocol = { partLength: { kind: 'rounds', rounds: 1 } } as const;
+  await goIn(page, await shortVisitFile({ key: 'called off', protocol }), {
+    beside: /a second observer checks mine/,
+  });
+  await openCheck(page);
+  await page.keyboard.press('ArrowRight');
+  await page.getByRole('button', { name: 'The ticks are one' }).click();
+  const nudged = page.getByText('This tablet’s clock is read 0.02 s later than it shows.');
+  await expect(nudged).toBeVisible();
+  await startIn(page, 300);
+  await picture(page, 'waits-and-may-be-called-off');
+  await page.getByRole('button', { name: 'Call this start off' }).click();
+  await expect(page.getByRole('heading', { name: 'Agree on a second.' })).toBeVisible();
+  await expect(nudged).toBeVisible();
+  await page.reload();
+  await expect(nudged).toBeVisible();
+  const time = await startIn(page, 10);
+  await expect(page.getByRole('heading', { name: 'The session is over.' })).toBeVisible({ timeout: 60_000 });
+  const journal = await journalOnDisk(page, sessionOf(page));
+  expect(journal.slice(0, 6)).toMatchObject([
+    { kind: 'started' },
+    { kind: 'clockNudged', by: 20 },
+    { kind: 'withdrawn' },
+    { kind: 'withdrawn' },
+    { kind: 'started', agreedStart: expect.stringContaining(`T${time}.000`) },
+    { kind: 'clockNudged', by: 20 },
+  ]);
+  expect(journal.filter(({ kind }) => kind === 'cued').length).toBe(3);
 });

@@ -1,7 +1,8 @@
-import { lazy, Suspense } from 'react';
+import { lazy, type RefObject, Suspense } from 'react';
 import { useCoreWords } from '../coreServices.ts';
 import { useFacts } from './RoomFacts.tsx';
 import { StartPage } from './StartPage.tsx';
+import type { StartsBy } from './together/useTogether.ts';
 import { useRoom } from './useRoom.ts';
 
 // One observer alone, and a session that is taken up again, do without it.
@@ -10,7 +11,7 @@ const BeforeTogether = lazy(() =>
 );
 
 /** Before the tap that begins (or goes on with) a session: alone, taken up again, or with a second observer. */
-export function BeforeStart() {
+export function BeforeStart({ startsBy }: { readonly startsBy: RefObject<StartsBy | null> }) {
   const { room } = useCoreWords();
   const { header, unit } = useFacts();
   const resuming = useRoom((s) => s.resuming);
@@ -26,7 +27,7 @@ export function BeforeStart() {
     return <StartPage title={room.readyTitle} text={room.readyAlone} start={room.start} />;
   return (
     <Suspense fallback={<main className="room-page">{room.opening}</main>}>
-      <BeforeTogether />
+      <BeforeTogether startsBy={startsBy} />
     </Suspense>
   );
 }

@@ -17,6 +17,7 @@ function holdsOf(s: RoomSnapshot) {
     of: s.kept.refused === null ? 0 : s.kept.of,
     output: here && !s.sound.on && s.sound.cause === 'device',
     stuck: here && s.sound.on && !s.sound.heard,
+    waits: s.startsIn !== null,
     awake: s.phase !== 'ended' && (s.wakeLock === 'refused' || s.wakeLock === 'missing'),
     gap,
     gaps: s.state.gaps.length,
@@ -73,8 +74,17 @@ export function HoldLine({ leaving }: { readonly leaving: number }) {
       dismiss({ gaps: s.gaps }),
     );
   else if (s.awake && !seen.awake) content = line(room.holdAwake, dismiss({ awake: true }));
+  else if (s.waits)
+    content = (
+      <>
+        <p className="hold-text second">{room.waitsOther}</p>
+        <Button className="rare" onClick={() => live.callOff()}>
+          {room.callOff}
+        </Button>
+      </>
+    );
   return (
-    <div className="hold-line" role="status">
+    <div className={`hold-line ${s.waits ? 'hold-line-waits' : ''}`} role="status">
       {content}
     </div>
   );

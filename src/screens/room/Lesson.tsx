@@ -13,6 +13,7 @@ import { PlanGlass } from './PlanGlass.tsx';
 import type { PanelName } from './panelName.ts';
 import { useFacts } from './RoomFacts.tsx';
 import { Standstill } from './Standstill.tsx';
+import type { StartsBy } from './together/useTogether.ts';
 import { useDimGlass } from './useDimGlass.ts';
 import { useKeyAct } from './useKeyAct.ts';
 import { useKeys } from './useKeys.ts';
@@ -31,7 +32,8 @@ export function Lesson() {
   const leaving = useLeaveGuard(!settled);
   const [covered, setCovered] = useState(false);
   const draft = useRef('');
-  if (phase === 'ready') return <BeforeStart />;
+  const startsBy = useRef<StartsBy | null>(null);
+  if (phase === 'ready') return <BeforeStart startsBy={startsBy} />;
   // What was covered stays covered, also when the session is over.
   if (phase === 'ended' && !covered) return <Over />;
   return (

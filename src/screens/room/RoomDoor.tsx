@@ -95,11 +95,12 @@ function CutOff({ summary, first }: { readonly summary: SessionSummary; readonly
     if (!closed.ok) setProblem(say(words.problems, closed.problem));
   };
   const over = ahead?.goesOn.kind === 'nothing';
+  const notBegun = summary.firstWall === null || ahead?.goesOn.kind === 'start';
   return (
     <Sheet title={summary.classroom.name}>
       <div className="stack-tight">
         <p>
-          {summary.firstWall === null
+          {notBegun || summary.firstWall === null
             ? room.doorNotBegun({ observer })
             : room.doorBegan({ observer, day: f.day(summary.firstWall), time: f.time(summary.firstWall) })}
         </p>
@@ -108,7 +109,7 @@ function CutOff({ summary, first }: { readonly summary: SessionSummary; readonly
         <div className="row">
           {!over && (
             <Button look={first ? 'main' : 'plain'} onClick={() => go(`/room/${summary.id}`)}>
-              {summary.firstWall === null ? room.doorGoIn : room.doorTakeUp}
+              {notBegun ? room.doorGoIn : room.doorTakeUp}
             </Button>
           )}
           <Button look={over && first ? 'main' : 'plain'} onClick={() => setClosing(true)}>

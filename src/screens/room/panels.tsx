@@ -84,8 +84,37 @@ export function LessonPartPanel({ onClose }: Props) {
   );
 }
 
-/** Ending cannot be taken back, so it is asked once, with what it costs. */
+/** Before session time 0 there is nothing to end, only a start to call off. */
 export function EndPanel({ onClose }: Props) {
+  const notBegun = useRoom((s) => s.phase === 'counting in' && s.part === 0);
+  return notBegun ? <CallOff onClose={onClose} /> : <End onClose={onClose} />;
+}
+
+function CallOff({ onClose }: Props) {
+  const live = useLive();
+  const { room } = useCoreWords();
+  const callOff = (): void => {
+    live.callOff();
+    onClose();
+  };
+  return (
+    <Panel
+      title={room.notBegunTitle}
+      closeLabel={room.notBegunStay}
+      onClose={onClose}
+      actions={
+        <Button look="main" onClick={callOff}>
+          {room.callOff}
+        </Button>
+      }
+    >
+      <p>{room.notBegunText}</p>
+    </Panel>
+  );
+}
+
+/** Ending cannot be taken back, so it is asked once, with what it costs. */
+function End({ onClose }: Props) {
   const live = useLive();
   const { room } = useCoreWords();
   const form = useId();

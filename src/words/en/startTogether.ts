@@ -1,6 +1,6 @@
 import type { Format } from '../format.ts';
 
-type F = Pick<Format, 'fixed' | 'clock' | 'whole'>;
+type F = Pick<Format, 'fixed' | 'clock' | 'whole' | 'plural'>;
 
 /** Words for two observers who begin together: read on both tablets side by side, before the lesson. */
 export const startTogether = {
@@ -26,12 +26,19 @@ export const startTogether = {
 
   // while it is awaited
   waitsFor: ({ time }: { time: string }) => `The schedule begins at ${time}, in`,
+  waitsOther: 'Agreed on another second?',
+  callOff: 'Call this start off',
+  notBegunTitle: 'The session has not begun yet.',
+  notBegunText:
+    'Call this start off, and it waits to be begun anew. No look is missing, and what you wrote down stays kept.',
+  notBegunStay: 'Go on waiting',
 
   // tick check
   tickCheck: 'Tick check with the other tablet',
   tickOpen: 'Tick check …',
   tickNone: 'The clocks of the two tablets have not been compared.',
-  tickKept: ({ ms }: { ms: number }, f: F) => `Tick check kept. ${readAs(ms, f)}`,
+  tickKept: ({ ms, ago }: { ms: number; ago: number }, f: F) => `${checkedAgo(ago, f)} ${readAs(ms, f)}`,
+  tickAgain: 'Check anew …',
   tickHow:
     'Start the ticks on both tablets and hold them, or the earpieces, together. Nudge one of them, and only one, until the ticks are one.',
   tickTenth: 'Each tenth second has a lower tone after its tick: these have to fall together, too.',
@@ -50,6 +57,16 @@ export const startTogether = {
   tickKeep: 'The ticks are one',
   tickLeave: 'Leave as it was',
 } as const;
+
+/** How old the tick check is; after an hour two clocks may be some hundredths of a second further apart. From memory, no source. */
+function checkedAgo(ms: number, f: F): string {
+  const minutes = Math.floor(ms / 60_000);
+  if (minutes < 1) return 'Tick check kept.';
+  const hours = Math.floor(minutes / 60);
+  return hours < 1
+    ? `Checked ${f.whole(minutes)} ${f.plural(minutes, { one: 'minute', other: 'minutes' })} ago.`
+    : `Checked ${f.whole(hours)} ${f.plural(hours, { one: 'hour', other: 'hours' })} ago, and clocks drift: better check anew.`;
+}
 
 /** How this tablet's clock is read after a nudge. */
 function readAs(ms: number, f: F): string {

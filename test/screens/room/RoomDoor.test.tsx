@@ -45,6 +45,23 @@ test('a session that was cut off says what is kept, where it goes on and what is
   expect(visited.at(-1)).toBe('/room/session-1');
 });
 
+test('a session whose start was called off has not begun, whatever its journal tells of it', async () => {
+  const store = memoryStore();
+  const header = headerOf({}, ['before']);
+  await store.createSession(header);
+  await store.appendEntries(
+    header.id,
+    journalOf(
+      [-60_000, { kind: 'started', checks: [], anyway: false }],
+      [-50_000, { kind: 'withdrawn', target: { writer: 'writer-1', seq: 0 } }],
+    ),
+  );
+  renderScreen(<RoomDoor />, fakeServices({ store }), '/room');
+  await screen.findByText('It begins with Otter-01.');
+  screen.getByText('Quill went in, and it has not begun yet.');
+  screen.getByRole('button', { name: 'Go in' });
+});
+
 test('it is closed for good only after the consequence was read', async () => {
   const services = await cutOff();
   const user = userEvent.setup();

@@ -129,6 +129,7 @@ export class FakeLive implements LiveSession {
     else this.told('begin', how);
     return this.begun;
   };
+  callOff = () => this.told('callOff');
   touch = (code: string | null, at: number) => this.told('touch', code, at);
   count = (on: number, present: number, at: number) => this.told('count', on, present, at);
   cannotSee = (at: number) => this.told('cannotSee', at);

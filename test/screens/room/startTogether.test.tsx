@@ -1,12 +1,14 @@
 // @vitest-environment happy-dom
-import { cleanup, fireEvent, screen } from '@testing-library/react';
+import { act, cleanup, fireEvent, screen } from '@testing-library/react';
 import userEvent from '@testing-library/user-event';
 import { afterEach, expect, test } from 'vitest';
 import type { EntryBody } from '../../../src/journal/entry.ts';
 import { problem } from '../../../src/kernel/result.ts';
 import type { WallTime } from '../../../src/kernel/units.ts';
+import { shiftedWall } from '../../../src/kernel/wallTime.ts';
 import type { SessionHeader } from '../../../src/model/session.ts';
 import { likelySecond, secondOfDay, typedSecond } from '../../../src/screens/room/together/agreedSecond.ts';
+import { memoryStore } from '../../../src/storage/index.ts';
 import { FakeAudio } from '../../recorder/fakes/fakeAudio.ts';
 import { HandClock } from '../../recorder/fakes/handClock.ts';
 import { headerOf } from '../../support/session.ts';
@@ -22,10 +24,18 @@ const press = (name: string | RegExp) => userEvent.setup().click(button(name));
 const clock = (time: string) => Date.parse(`2026-11-03T${time}+00:00`);
 
 /** Before the tap that begins, with a tick check whose clock the test turns. */
-async function before(more: Partial<SessionHeader> = {}, resuming = false) {
+async function before(
+  more: Partial<SessionHeader> = {},
+  resuming = false,
+  { store = memoryStore(), later = 0 }: { store?: ReturnType<typeof memoryStore>; later?: number } = {},
+) {
   const hand = new HandClock();
   const audio = new FakeAudio(hand);
   const device = fakeDevice({
+    now: () => ({
+      wall: shiftedWall('2026-11-03T10:41:00.000+00:00', later * 60_000) as WallTime,
+      timeZone: null,
+    }),
     tickPorts: () => ({
       audio,
       page: hand.pageClock,
@@ -35,7 +45,7 @@ async function before(more: Partial<SessionHeader> = {}, resuming = false) {
     }),
   });
   const header = headerOf({}, ['before'], { plan, ...more });
-  const view = renderRoom(snapshotOf(header, [], -1, { phase: 'ready', resuming }), { device });
+  const view = renderRoom(snapshotOf(header, [], -1, { phase: 'ready', resuming }), { device, store });
   // What two observers need is loaded when it is needed.
   await screen.findByRole('button', { name: /^(Start|Go on)/ });
   return { ...view, hand, audio };
@@ -134,6 +144,41 @@ test('tick check: back to 0, and left as it was', async () => {
   expect(live.calls).toEqual([['begin']]);
 });
 
+/** A tick check that found 0.02 s, kept at 10:41. */
+async function checkedOnce() {
+  const store = memoryStore();
+  await before({}, false, { store });
+  await press(/Tick check/);
+  await press('20 ms earlier');
+  await press('The ticks are one');
+  screen.getByText(/^Tick check kept\. .* 0\.02 s later/);
+  cleanup();
+  return store;
+}
+
+test.each([
+  [12, /^Checked 12 minutes ago\. .* 0\.02 s later/],
+  [61, /^Checked 1 hour ago, and clocks drift: better check anew\. .* 0\.02 s later/],
+])('tick check: it outlives the page, and is offered %i minutes later with its age', async (later, said) => {
+  const { live } = await before({}, false, { store: await checkedOnce(), later });
+  await screen.findByText(said);
+  await press(/^Start at/);
+  expect(live.calls).toEqual([['begin', { at: expect.any(Number), nudgeMs: 20 }]]);
+  await press('Check anew …');
+  screen.getByText('This tablet’s clock is read 0.02 s later than it shows.');
+});
+
+test.each([
+  ['of another visit', { visit: 'another' }, 1],
+  ['from the future: the clock was set back since', {}, -1],
+])('tick check: one %s says nothing', async (_, more, later) => {
+  const { store } = { store: await checkedOnce() };
+  await before(more as Partial<SessionHeader>, false, { store, later });
+  await act(async () => void (await store.settings()));
+  screen.getByText('The clocks of the two tablets have not been compared.');
+  button('Start');
+});
+
 test('tick check: sound that stays locked is said', async () => {
   const { audio } = await before();
   audio.unlocks = false;
@@ -155,6 +200,29 @@ test('while the second is awaited, its time and the time left are the largest wo
   expect(screen.getByRole('heading', { level: 1 }).textContent).toBe('1:12');
   screen.getByText('The schedule begins at 10:42:00, in');
   screen.getByText('First: Otter-01');
+});
+
+test('while the second is awaited the start can be called off, and how they wanted to begin is remembered', async () => {
+  const user = userEvent.setup();
+  const { live } = await before();
+  await user.click(screen.getByRole('radio', { name: /agreed second/ }));
+  act(() => live.show({ phase: 'counting in', startsIn: 60_000 }));
+  await press('Call this start off');
+  expect(live.calls).toEqual([['callOff']]);
+  act(() => live.show({ phase: 'ready', startsIn: null }));
+  await screen.findByRole('button', { name: 'Start at 10:42:00' });
+});
+
+test('before session time 0 there is nothing to end, only a start to call off', async () => {
+  const { live } = await before({ role: null });
+  act(() => live.show({ phase: 'counting in', countIn: 3 }));
+  await press('end …');
+  screen.getByRole('heading', { name: 'The session has not begun yet.' });
+  await press('Call this start off');
+  act(() => live.show({ phase: 'running', countIn: null }));
+  await press('end …');
+  screen.getByRole('heading', { name: 'End the session now?' });
+  expect(live.calls).toEqual([['callOff']]);
 });
 
 test.each([

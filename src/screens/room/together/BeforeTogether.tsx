@@ -1,16 +1,17 @@
+import type { RefObject } from 'react';
 import { useCoreWords } from '../../coreServices.ts';
 import { useFacts } from '../RoomFacts.tsx';
 import { StartPage } from '../StartPage.tsx';
 import { secondOfDay } from './agreedSecond.ts';
 import { StartTogether } from './StartTogether.tsx';
 import { TickCheckPage } from './TickCheckPage.tsx';
-import { useTogether } from './useTogether.ts';
+import { type StartsBy, useTogether } from './useTogether.ts';
 
 /** Two observers before they begin: the tick check, then a shared count or an agreed second. */
-export function BeforeTogether() {
+export function BeforeTogether({ startsBy }: { readonly startsBy: RefObject<StartsBy | null> }) {
   const { room } = useCoreWords();
   const { header } = useFacts();
-  const together = useTogether(header.plannedStart);
+  const together = useTogether(header, startsBy);
   const { by, at, now, nudgeMs, keep, leave } = together;
   const { schedule } = header;
   if (together.checking && schedule.kind === 'laid')

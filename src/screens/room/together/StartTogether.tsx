@@ -8,12 +8,13 @@ import './together.css';
 /** How two observers begin: what the tick check found, and by a count or by a second. */
 export function StartTogether({ together }: { readonly together: Together }) {
   const { room } = useCoreServices().words;
-  const { by, now, at, checked, nudgeMs } = together;
+  const { by, now, at, checkedAgo, nudgeMs } = together;
+  const checked = checkedAgo !== null;
   return (
     <div className="together">
       <div className="together-check">
-        <p className="second">{checked ? room.tickKept({ ms: nudgeMs }) : room.tickNone}</p>
-        <Button onClick={together.openCheck}>{room.tickOpen}</Button>
+        <p className="second">{checked ? room.tickKept({ ms: nudgeMs, ago: checkedAgo }) : room.tickNone}</p>
+        <Button onClick={together.openCheck}>{checked ? room.tickAgain : room.tickOpen}</Button>
       </div>
       <Choice
         legend={room.howToStart}
