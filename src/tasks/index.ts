@@ -18,7 +18,7 @@ export { ensureInstallation } from './installation.ts';
 export { type LastTime, type LikelyObserver, lastTime, likelyObserver } from './lastTime.ts';
 export { addNote, type NoteWish } from './notes.ts';
 export { addObserver, removeObserver, saveObserver } from './observers.ts';
-export type { PaperAnswer, PaperDraft, PaperOnset, PaperPart } from './paperDraft.ts';
+export type { PaperAnswer, PaperDraft, PaperOnset, PaperPart, PaperStandIn } from './paperDraft.ts';
 export {
   beginPaper,
   findSheet,
@@ -28,6 +28,7 @@ export {
   savePaper,
   visitOfSession,
 } from './paperSessions.ts';
+export { awayReasons, hasStandIns, standInsFault, watchedOnPaper } from './paperStandIns.ts';
 export type { PlanPreset } from './planPresets.ts';
 export type * from './ports.ts';
 export { recipeProblem } from './protocolChecks.ts';

@@ -1,9 +1,8 @@
-import { type Problem, problem } from '../kernel/result.ts';
+import { problem } from '../kernel/result.ts';
 import type { ScheduledInterval } from '../schedule/layOut.ts';
 import { severalCodes } from '../schedule/paperNumbers.ts';
-import type { PaperAnswer, PaperDraft } from './paperDraft.ts';
-
-type Fault = { readonly ok: false; readonly problem: Problem };
+import type { Fault, PaperAnswer, PaperDraft } from './paperDraft.ts';
+import { standInsFault } from './paperStandIns.ts';
 
 /** More children than a class can have: somebody typed two numbers as one. */
 const mostPresent = 200;
@@ -25,7 +24,7 @@ export function answersFault(draft: PaperDraft, intervals: readonly ScheduledInt
     const fault = answerFault(draft, answer, interval);
     if (fault !== null) return fault;
   }
-  if (protocol.method !== 'duration') return null;
+  if (protocol.method !== 'duration') return standInsFault(draft, intervals);
   const seen = new Set<string>();
   for (const { part, atMs, answer } of draft.onsets) {
     const line = intervals.find((one) => one.part === part);

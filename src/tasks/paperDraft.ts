@@ -1,3 +1,5 @@
+import type { AwayReason } from '../journal/entry.ts';
+import type { Problem } from '../kernel/result.ts';
 import type { MissingReason } from '../model/missing.ts';
 import type { Role } from '../model/session.ts';
 import type { VisitPlan } from '../model/visitPlan.ts';
@@ -19,6 +21,21 @@ export interface PaperOnset {
 export interface PaperPart {
   readonly breakStarted: string;
   readonly firstTask: string;
+}
+
+/** From line `from` on the reserve `by` was watched instead of `child`, until the child was back at line `until`; null = to the end. */
+export interface PaperStandIn {
+  readonly child: string;
+  readonly reason: AwayReason;
+  readonly by: string;
+  readonly from: number;
+  readonly until: number | null;
+}
+
+/** What about a sheet cannot be. */
+export interface Fault {
+  readonly ok: false;
+  readonly problem: Problem;
 }
 
 /** A sheet that is being typed in. It is kept at every line, and becomes a session at the end. */
@@ -43,4 +60,6 @@ export interface PaperDraft {
   /** By interval number. */
   readonly answers: Readonly<Record<number, PaperAnswer>>;
   readonly onsets: readonly PaperOnset[];
+  /** Who stepped in for whom, where the protocol has that. */
+  readonly standIns?: readonly PaperStandIn[];
 }

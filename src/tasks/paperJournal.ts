@@ -6,6 +6,7 @@ import type { VisitPlan } from '../model/visitPlan.ts';
 import { layOutSchedule, partDuration, type ScheduledInterval } from '../schedule/layOut.ts';
 import { answersFault } from './paperAnswers.ts';
 import type { PaperAnswer, PaperDraft } from './paperDraft.ts';
+import { standInBodies } from './paperStandIns.ts';
 
 /** An entry before it is stamped: session time and what it says. */
 export interface Said {
@@ -53,28 +54,21 @@ export function paperJournal(draft: PaperDraft, clock: PaperClock): Result<Paper
   if (!parts.ok) return parts;
   const said: Said[] = [{ at: 0, body: { kind: 'started', checks: [], anyway: false } }];
   const { phases } = plan.schedule;
-  for (const { part, origin, breakAt } of parts.value) {
+  const closed = lastClosedAt(draft, intervals, parts.value, start, clock);
+  if (!closed.ok) return closed;
+  for (const [k, { part, origin, breakAt }] of parts.value.entries()) {
     if (part > 0 && breakAt !== null) {
       said.push({ at: breakAt, body: { kind: 'breakStarted' } });
       said.push({ at: origin, body: { kind: 'breakEnded' } });
     }
     said.push({ at: origin, body: { kind: 'phaseStarted', phase: phases[part] ?? '', part, origin } });
-    said.push(...spokenIn(draft, intervals, part, origin));
+    const next = parts.value[k + 1];
+    const until = next === undefined ? closed.value : (next.breakAt ?? next.origin);
+    said.push(...spokenIn(draft, intervals, part, origin, until ?? Number.POSITIVE_INFINITY));
   }
-  // A break after which nobody came back to observe still closed its part.
-  const next = draft.parts[parts.value.length - 1];
   const last = parts.value.at(-1) as Part;
   let at = last.origin + partDuration(intervals, last.part);
-  if (next !== undefined && next.breakStarted !== '') {
-    const written = instantOf(draft.date, next.breakStarted, clock.timeZone, clock.offset);
-    const closed = closedAt(
-      draft,
-      intervals,
-      last,
-      written === null ? Number.NaN : written - start,
-      next.breakStarted,
-    );
-    if (!closed.ok) return closed;
+  if (closed.value !== null) {
     said.push({ at: closed.value, body: { kind: 'breakStarted' } });
     at = Math.max(at, closed.value);
   }
@@ -117,8 +111,9 @@ function partsOf(
     if (firstTask === '') {
       const later = intervals.find(({ part, number }) => part > k && draft.answers[number] !== undefined);
       const onset = draft.onsets.some(({ part }) => part > k);
+      const stood = draft.standIns?.some(({ from }) => (intervals[from - 1]?.part ?? 0) > k) === true;
       const begun = draft.parts.slice(k + 1).some((one) => one.firstTask !== '');
-      if (later !== undefined || onset || begun) return problem('paper.noFirstTask', { phase });
+      if (later !== undefined || onset || stood || begun) return problem('paper.noFirstTask', { phase });
       return ok(parts);
     }
     const began = timeOf(firstTask);
@@ -139,6 +134,21 @@ function partsOf(
     parts.push({ part: k + 1, origin: Math.max(began, breakAt ?? 0, lastSaid?.at ?? 0), breakAt });
   }
   return ok(parts);
+}
+
+/** A break after which nobody came back to observe still closed its part: when, or null where there was none. */
+function lastClosedAt(
+  draft: PaperDraft,
+  intervals: readonly ScheduledInterval[],
+  parts: readonly Part[],
+  start: EpochMs,
+  clock: PaperClock,
+): Result<number | null> {
+  const { breakStarted = '' } = draft.parts[parts.length - 1] ?? {};
+  if (breakStarted === '') return ok(null);
+  const written = instantOf(draft.date, breakStarted, clock.timeZone, clock.offset);
+  const since = written === null ? Number.NaN : written - start;
+  return closedAt(draft, intervals, parts.at(-1) as Part, since, breakStarted);
 }
 
 /** When "break started" closed a part: as written, but after everything that was marked, or due, within that minute. */
@@ -175,15 +185,21 @@ function latestSaid(
 }
 
 function spokenIn(
-  { answers, onsets }: PaperDraft,
+  { answers, onsets, standIns = [] }: PaperDraft,
   intervals: readonly ScheduledInterval[],
   part: number,
   origin: number,
+  closed: number,
 ): Said[] {
   const own = intervals.filter((line) => line.part === part);
   const lines = own.flatMap(({ number, cueMs }) => {
     const answer = answers[number];
-    return answer === undefined ? [] : bodiesOf(number, answer).map((body) => ({ at: origin + cueMs, body }));
+    const at = origin + cueMs;
+    return [
+      // Who is watched stands before what was seen; a line that the break cut off says so when the break began.
+      ...standInBodies(standIns, number).map((body) => ({ at: Math.min(at, closed), body })),
+      ...(answer === undefined ? [] : bodiesOf(number, answer).map((body) => ({ at, body }))),
+    ];
   });
   const number = own[0]?.number ?? 1;
   const touches = onsets

@@ -170,3 +170,35 @@ test('seven hundred and twenty lines go over many pages, and no row is cut', asy
   const [rounds] = await expectPrinted(page, 720);
   expect(rounds).toBeLessThan(6);
 });
+
+test('where reserves step in, a sheet has lines for it with room to write, and nothing of them is cut', async ({
+  tablet,
+}) => {
+  const page = await tablet.openApp({ hash: '/before' });
+  for (const reserves of [2, 24]) {
+    await prepared(page, {
+      key: `reserves ${reserves}`,
+      reserves,
+      protocol: {
+        intervalMs: 15_000,
+        observeMs: 15_000,
+        partLength: { kind: 'rounds', rounds: 3 },
+        reservesStepIn: true,
+      },
+    });
+    await expectPrinted(page, 9);
+    const lines = page.locator('.paper-stand-ins');
+    await expect(lines).toContainText(`Otter-${3 + reserves}`);
+    const cut = await lines.locator('p').evaluate((text) => text.scrollHeight - text.clientHeight);
+    expect(cut).toBeLessThanOrEqual(1);
+    const head = await page
+      .locator('.paper-head')
+      .first()
+      .evaluate((one) => one.scrollHeight - one.clientHeight);
+    expect(head).toBeLessThanOrEqual(1);
+    await expect(lines.locator('tbody tr')).toHaveCount(Math.min(4, reserves + 1));
+    const box = await lines.locator('td').first().boundingBox();
+    expect(((box?.height ?? 0) / 96) * 25.4).toBeGreaterThan(6.5);
+    await picture(page, `sheet-reserves-${reserves}`);
+  }
+});

@@ -8,6 +8,8 @@ import {
   visits,
 } from '../../src/analysis/index.ts';
 import type { EntryBody, KnownEntry } from '../../src/journal/entry.ts';
+import { readOut } from '../../src/journal/readOut.ts';
+import { fold } from '../../src/journal/step.ts';
 import type { StoredSession } from '../../src/journal/stored.ts';
 import type { Protocol } from '../../src/model/protocol.ts';
 import type { VisitPlan } from '../../src/model/visitPlan.ts';
@@ -16,6 +18,7 @@ import {
   addObserver,
   beginPaper,
   findSheet,
+  hasStandIns,
   keepPaperSession,
   keepSheet,
   type PaperAnswer,
@@ -426,4 +429,110 @@ it('has a sentence for every problem of a sheet, and none besides', () => {
   );
   const codes = texts.flatMap((text) => [...text.matchAll(/'(paper\.\w+)'/g)].map(([, code]) => code ?? ''));
   expect(Object.keys(paperProblems).sort()).toEqual([...new Set(codes)].sort());
+});
+
+describe('A reserve who stepped in on paper', () => {
+  /** Otter-02 leaves before its second look and is back for its third; two reserves wait. */
+  const withReserves = (made: School, protocol: Partial<Protocol> = {}): VisitPlan => ({
+    ...planOf(made, { reservesStepIn: true, ...protocol }),
+    reserves: ['r1', 'r2'].map((id) => ({ id, pseudonym: `Otter-1${id.slice(1)}`, stratum: null })),
+  });
+  const standIn = { child: 'c2', reason: 'left the room' as const, by: 'r1', from: 4, until: 11 };
+
+  it('stands in the record as on a tablet: who left, why, who stood in, and who was watched at each look', async () => {
+    const on = await bench();
+    const made = await school(on);
+    const marsh = given(await addObserver(on.deps, made.study.id, 'Marsh'));
+    const plan = withReserves(made);
+    const paper = await stored(on, given(await typed(on, made, plan, { standIns: [standIn] })).id);
+    const left = paper.journal.find(({ kind }) => kind === 'left');
+    expect(left).toMatchObject({ kind: 'left', child: 'c2', reason: 'left the room', by: 'r1', at: 60_000 });
+    // On a tablet somebody touches it between two looks, not at a line.
+    const whole = await stored(on, await onTablet(on, plan, marsh.id, answers));
+    const touched: [number, EntryBody][] = [
+      [52_000, { kind: 'left', child: 'c2', reason: 'left the room', by: 'r1' }],
+      [758_000, { kind: 'returned', child: 'c2' }],
+    ];
+    const extra = touched.map(([at, body], k) => ({ ...whole.journal[0], ...body, at, seq: 0.25 + k }));
+    const journal = [...whole.journal, ...(extra as KnownEntry[])]
+      .sort((a, b) => a.at - b.at)
+      .map((entry, seq) => ({ ...entry, seq }));
+    const read = (one: StoredSession) =>
+      readOut(fold(one.header, one.journal)).map(({ child, status, codes, missing }) => ({
+        child,
+        status,
+        codes,
+        missing,
+      }));
+    expect(read(paper)).toEqual(read({ ...whole, journal }));
+    // c1 c2 c3, twice before and twice after: c2's looks are 2, 5, 8 and 11.
+    expect(read(paper).map(({ child }) => child)).toEqual('c1 c2 c3 c1 r1 c3 c1 r1 c3 c1 c2 c3'.split(' '));
+    const figures = (one: StoredSession) =>
+      sessionDetails(one).phases.map(({ row }) => [row.scored, row.onTask, row.missing]);
+    expect(figures(paper)).toEqual(figures({ ...whole, journal }));
+  });
+
+  it('may leave in its turn, or make room for the next one', async () => {
+    const on = await bench();
+    const made = await school(on);
+    const watched = async (standIns: PaperDraft['standIns']) => {
+      const header = given(await typed(on, made, withReserves(made), { standIns: standIns ?? [] }));
+      const { journal } = await stored(on, header.id);
+      return readOut(fold(header, journal))
+        .filter(({ number }) => number % 3 === 2)
+        .map(({ child }) => child);
+    };
+    const open = { ...standIn, until: null };
+    expect(await watched([open])).toEqual(['c2', 'r1', 'r1', 'r1']);
+    expect(await watched([open, { ...open, child: 'r1', by: 'r2', from: 7 }])).toEqual([
+      'c2',
+      'r1',
+      'r2',
+      'r2',
+    ]);
+    expect(await watched([{ ...open, by: 'r2', from: 9 }, open])).toEqual(['c2', 'r1', 'r1', 'r2']);
+  });
+
+  it('is cut short by the break as the looks are, and needs the part in which it stands', async () => {
+    const on = await bench();
+    const made = await school(on);
+    const few = { answers: { 1: code('on') } };
+    const early = given(
+      await typed(on, made, withReserves(made), {
+        ...few,
+        standIns: [{ ...standIn, from: 6, until: null }],
+        parts: [{ breakStarted: '10:41:40', firstTask: '10:52' }],
+      }),
+    );
+    const { journal } = await stored(on, early.id);
+    const at = journal.map((entry) => entry.at);
+    expect(at).toEqual([...at].sort((a, b) => a - b));
+    expect(journal.find(({ kind }) => kind === 'left')?.at).toBe(40_000);
+    const noPart = { ...few, parts: [{ breakStarted: '', firstTask: '' }] };
+    const later = { ...noPart, standIns: [{ ...standIn, from: 8 }] };
+    expect(codeOf(await typed(on, made, withReserves(made), later))).toBe('paper.noFirstTask');
+  });
+
+  it('is refused with one sentence for what cannot be', async () => {
+    const on = await bench();
+    const made = await school(on);
+    const refused = async (...standIns: NonNullable<PaperDraft['standIns']>) =>
+      codeOf(await typed(on, made, withReserves(made), { standIns }));
+    expect(await refused({ ...standIn, by: 'c3' })).toBe('paper.standInWho');
+    expect(await refused({ ...standIn, child: 'c9' })).toBe('paper.standInWho');
+    expect(await refused({ ...standIn, child: 'r2' })).toBe('paper.standInWho');
+    expect(await refused({ ...standIn, from: 13 })).toBe('paper.standInNowhere');
+    expect(await refused({ ...standIn, until: 4 })).toBe('paper.standInBack');
+    expect(await refused(standIn, { ...standIn, by: 'r2', from: 7 })).toBe('paper.standInAway');
+    expect(await refused(standIn, { ...standIn, child: 'c3', from: 9 })).toBe('paper.standInBusy');
+  });
+
+  it('is no question of a sheet whose protocol has no stepping in, or where nobody is in reserve', async () => {
+    const on = await bench();
+    const made = await school(on);
+    expect(hasStandIns(withReserves(made))).toBe(true);
+    expect(hasStandIns(withReserves(made, { reservesStepIn: false }))).toBe(false);
+    expect(hasStandIns(withReserves(made, { method: 'headcount' }))).toBe(false);
+    expect(hasStandIns(planOf(made, { reservesStepIn: true }))).toBe(false);
+  });
 });

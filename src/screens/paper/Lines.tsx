@@ -2,7 +2,7 @@ import { memo, useEffect, useMemo, useRef, useState } from 'react';
 import type { Protocol } from '../../model/protocol.ts';
 import type { ScheduledInterval } from '../../schedule/layOut.ts';
 import { type PaperMeaning, paperNumbers, severalCodes } from '../../schedule/paperNumbers.ts';
-import type { PaperAnswer } from '../../tasks/index.ts';
+import { type PaperAnswer, watchedOnPaper } from '../../tasks/index.ts';
 import { Button } from '../../ui/Button.tsx';
 import { HeldButton } from '../../ui/HeldButton.tsx';
 import { Notice } from '../../ui/Notice.tsx';
@@ -31,13 +31,20 @@ export function Lines({ typing, intervals }: Props) {
   );
   const [problem, setProblem] = useState<string | null>(null);
   const pseudonyms = useMemo(
-    () => new Map(draft.plan.children.map(({ id, pseudonym }) => [id, pseudonym])),
-    [draft.plan.children],
+    () =>
+      new Map(
+        [...draft.plan.children, ...(draft.plan.reserves ?? [])].map(({ id, pseudonym }) => [id, pseudonym]),
+      ),
+    [draft.plan.children, draft.plan.reserves],
   );
   const line = intervals[at];
   const answer = line === undefined ? undefined : answers[line.number];
-  const childOf = ({ child }: ScheduledInterval): string =>
-    child === null ? paper.everybody : (pseudonyms.get(child) ?? '');
+  const nameOf = (id: string): string => pseudonyms.get(id) ?? '';
+  const childOf = ({ child, number }: ScheduledInterval): string => {
+    if (child === null) return paper.everybody;
+    const watched = watchedOnPaper(draft.standIns ?? [], child, number);
+    return watched === child ? nameOf(child) : paper.standsFor({ by: nameOf(watched), child: nameOf(child) });
+  };
   const go = (to: number) => {
     setProblem(null);
     setAt(Math.max(0, Math.min(intervals.length, to)));
@@ -200,7 +207,7 @@ function List({ intervals, answers, at, protocol, childOf, onGo }: ListProps) {
     list.scrollTop = current.offsetTop - (list.clientHeight - current.offsetHeight) / 2;
   }, [at]);
   return (
-    <ol className="typing-list" ref={here}>
+    <ol className="typing-list" aria-label={words.paper.linesTitle} ref={here}>
       {intervals.map((line, k) => {
         const answer = answers[line.number];
         return (

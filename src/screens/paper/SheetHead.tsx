@@ -3,6 +3,7 @@ import { useWords } from '../services.ts';
 import { methodSentence } from '../study/methodSentence.ts';
 import type { PaperSheet } from './paperLayout.ts';
 import { howTo } from './paperTexts.ts';
+import { StandInLines } from './StandInLines.tsx';
 
 interface Props {
   readonly plan: VisitPlan;
@@ -45,6 +46,7 @@ export function SheetHead({ plan, label, page, of, sheet }: Props & { readonly s
           <Blank label={paper.stoppedField} wide={1} />
         )}
       </div>
+      {sheet.standIns !== null && <StandInLines plan={plan} {...sheet.standIns} />}
       <p className="paper-caution">{paper.cautions}</p>
     </header>
   );

@@ -2,7 +2,7 @@ import { useMemo, useState } from 'react';
 import { useLocation } from 'wouter';
 import { layOutSchedule } from '../../schedule/layOut.ts';
 import { sheetLabel } from '../../schedule/sheetLabel.ts';
-import { keepPaperSession, type PaperDraft, savePaper } from '../../tasks/index.ts';
+import { hasStandIns, keepPaperSession, type PaperDraft, savePaper } from '../../tasks/index.ts';
 import { Button } from '../../ui/Button.tsx';
 import { Notice } from '../../ui/Notice.tsx';
 import { PageHead } from '../../ui/PageHead.tsx';
@@ -13,6 +13,7 @@ import { methodSentence } from '../study/methodSentence.ts';
 import { HeadFields } from './HeadFields.tsx';
 import { Lines } from './Lines.tsx';
 import { Onsets } from './Onsets.tsx';
+import { StandIns } from './StandIns.tsx';
 import { useTyping } from './useTyping.ts';
 
 interface Props {
@@ -73,6 +74,11 @@ export function TypeIn({ first, onAway }: Props) {
       <Sheet title={paper.headTitle}>
         <HeadFields typing={typing} last={intervals.length} />
       </Sheet>
+      {hasStandIns(plan) && (
+        <Sheet title={paper.standInTitle}>
+          <StandIns typing={typing} intervals={intervals} />
+        </Sheet>
+      )}
       <Sheet title={paper.linesTitle}>
         {duration ? (
           <Onsets typing={typing} intervals={intervals} />

@@ -1,6 +1,7 @@
 import type { VisitPlan } from '../../model/visitPlan.ts';
 import { layOutSchedule, type ScheduledInterval } from '../../schedule/layOut.ts';
 import { intervalsInRound } from '../../schedule/turns.ts';
+import { hasStandIns } from '../../tasks/index.ts';
 
 export type PaperSize = 'A4' | 'Letter';
 /** `rows`: one row an interval; `rounds`: one row a child, one column a round. */
@@ -63,6 +64,8 @@ export interface PaperSheet {
   readonly form: PaperForm;
   readonly pages: readonly PaperPage[];
   readonly headHeight: number;
+  /** Where it is written who stepped in for whom, as part of the head: how many lines, how high the text over them and all of it; null where nobody can. */
+  readonly standIns: { readonly lines: number; readonly text: number; readonly height: number } | null;
   /** Tick boxes for the codes; false = one box for their numbers. */
   readonly boxes: boolean;
   readonly columnWidth: number;
@@ -72,7 +75,7 @@ export interface PaperSheet {
 
 const lineHeight = 4.1;
 /** Characters that surely fit on one line: of a label, of a definition, of the whole width. */
-const fits = { label: 24, text: 84 };
+const fits = { label: 24, text: 84, across: 104 };
 const mostLines = 14;
 
 /** How high a legend entry is, estimated from its length so that a page can be filled without measuring it. */
@@ -117,7 +120,8 @@ export function paperLayout(
     schedule,
     children.map(({ id }) => id),
   );
-  const headHeight = headFirst + headPart * (schedule.phases.length - 1);
+  const standIns = standInsOf(plan);
+  const headHeight = headFirst + headPart * (schedule.phases.length - 1) + (standIns?.height ?? 0);
   const boxes = boxesPerRow <= mostBoxes;
   const duration = schedule.protocol.method === 'duration';
   const fixed =
@@ -191,10 +195,27 @@ export function paperLayout(
     form,
     pages: pages.map((one, k) => ({ ...one, number: k + 1 })),
     headHeight,
+    standIns,
     boxes,
     columnWidth,
     legendPage,
   };
+}
+
+/** Of the lines for stand-ins: their heads, one line, and what the sentences over them have beside the reserves' names. */
+const standInHead = 5;
+const standInChars = 190;
+const standInLine = 7.2;
+const standInGap = 3;
+
+/** An absence for each reserve and one to spare, since a child may leave again. */
+function standInsOf(plan: VisitPlan): PaperSheet['standIns'] {
+  if (!hasStandIns(plan)) return null;
+  const reserves = plan.reserves ?? [];
+  const lines = Math.min(4, reserves.length + 1);
+  const chars = reserves.reduce((sum, { pseudonym }) => sum + pseudonym.length + 2, standInChars);
+  const text = Math.min(mostLines, Math.ceil(chars / fits.across)) * lineHeight + 1;
+  return { lines, text, height: text + standInHead + lines * standInLine + standInGap };
 }
 
 interface Draft {

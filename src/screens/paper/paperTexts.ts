@@ -1,8 +1,14 @@
+import type { AwayReason } from '../../journal/entry.ts';
 import type { Protocol } from '../../model/protocol.ts';
 import type { VisitPlan } from '../../model/visitPlan.ts';
 import { type PaperMeaning, type PaperNumber, paperNumbers } from '../../schedule/paperNumbers.ts';
 import type { Words } from '../../words/words.ts';
 import { type LegendEntry, legendEntry, type PaperForm } from './paperLayout.ts';
+
+/** The number that stands on a sheet for why a child is away. */
+export const awayNumber = (protocol: Protocol, reason: AwayReason): number =>
+  paperNumbers(protocol).find(({ means }) => means.kind === 'missing' && means.reason === reason)?.number ??
+  0;
 
 /** What a number on a sheet means, in words. */
 export function meaningText({ paper, missing }: Words, protocol: Protocol, means: PaperMeaning): string {

@@ -107,6 +107,35 @@ export const paper = {
   }) => `No. ${number}, ${phase}: ${child}, for ${length}${part === 0 ? '' : ' from the first task given'}`,
   stopHere: 'End of the schedule.',
 
+  // reserves, on the sheet and typed in
+  standInHow: 'If a child leaves, watch the next reserve on its lines, and write it here.',
+  standInReserves: ({ reserves, reasons }: { reserves: readonly string[]; reasons: readonly string[] }) =>
+    `Reserves, in order: ${reserves.join(', ')}. Why: ${reasons.join(' · ')}.`,
+  standInTitle: 'Who stepped in',
+  standInNote:
+    'One line for each child who left and whom a reserve stood in for. From that line on the record is the reserve’s.',
+  standInChild: 'Who was away',
+  standInReason: 'Why',
+  standInReasonNo: 'Why (number)',
+  standInFrom: 'From no.',
+  standInBy: 'Who stepped in',
+  standInUntil: 'Back from no.',
+  standInWhole: 'Who was away, why, from which line, and who stepped in: all four are needed.',
+  standInSaid: (
+    {
+      by,
+      child,
+      reason,
+      from,
+      until,
+    }: { by: string; child: string; reason: string; from: number; until: number | null },
+    f: F,
+  ) =>
+    `${by} for ${child} (${reason}) from no. ${f.whole(from)} ${until === null ? 'to the end' : `until no. ${f.whole(until)}, where ${child} is back`}`,
+  standInRemove: ({ by, from }: { by: string; from: number }, f: F) =>
+    `Remove ${by} from no. ${f.whole(from)}`,
+  standsFor: ({ by, child }: { by: string; child: string }) => `${by} for ${child}`,
+
   // choosing what to type in
   chooseTitle: 'Which sheet will you type in?',
   chooseNote:
@@ -236,5 +265,15 @@ export const paperProblems = {
   'paper.noOnset': (v: { found: string }) => `“${v.found}” is no time from the start. Give it as 3:20.`,
   'paper.onsetOutside': (v: { at: number; length: number }) =>
     `${clock(v.at)} is outside of the part, which lasts until ${clock(v.length)}.`,
+  'paper.standInWho': (v: { name: string; reserve: string }) =>
+    `${v.reserve} cannot have stepped in for ${v.name}: a reserve of this sheet steps in for a child on it, or for a reserve who stands in.`,
+  'paper.standInNowhere': (v: { reserve: string; found: number; last: number }, f: F) =>
+    `Line ${f.whole(v.found)} is not on this sheet, whose lines go from 1 to ${f.whole(v.last)}. Look at the absence in which ${v.reserve} stepped in.`,
+  'paper.standInBack': (v: { name: string; from: number; until: number }, f: F) =>
+    `${v.name} cannot be back at line ${f.whole(v.until)}: it was away from line ${f.whole(v.from)} on. Give a later line, or leave it empty.`,
+  'paper.standInAway': (v: { name: string }) =>
+    `${v.name} is away twice at the same time. Look at the lines of the first absence.`,
+  'paper.standInBusy': (v: { reserve: string }) =>
+    `${v.reserve} stands in for two children at the same time. Say at which line the first was back, or choose another reserve.`,
   'paper.onsetTwice': (v: { at: number }) => `Two lines begin at ${clock(v.at)}. Remove one of them.`,
 } as const;

@@ -10,10 +10,17 @@ interface Wish {
   readonly protocol?: Partial<Protocol>;
   readonly phases?: readonly string[];
   readonly children?: number;
+  readonly reserves?: number;
 }
 
 /** A visit that is over in a minute: three-second intervals, the shortest there are, seats in rows of five. */
-export function shortVisit({ key, protocol = {}, phases = ['before'], children = 3 }: Wish): VisitPlan {
+export function shortVisit({
+  key,
+  protocol = {},
+  phases = ['before'],
+  children = 3,
+  reserves = 0,
+}: Wish): VisitPlan {
   const id = (...parts: string[]) => idFromContent('browser test', key, ...parts);
   const names = Array.from({ length: children }, (_, i) => `Otter-${String(i + 1).padStart(2, '0')}`);
   return {
@@ -29,6 +36,14 @@ export function shortVisit({ key, protocol = {}, phases = ['before'], children =
     condition: 'break',
     plannedStart: null,
     children: names.map((pseudonym) => ({ id: id(pseudonym), pseudonym, stratum: null })),
+    ...(reserves === 0
+      ? {}
+      : {
+          reserves: Array.from({ length: reserves }, (_, i) => {
+            const pseudonym = `Otter-${children + i + 1}`;
+            return { id: id(pseudonym), pseudonym, stratum: null };
+          }),
+        }),
     plan: {
       columns: Math.min(Math.max(children, 2), 5),
       rows: Math.ceil(children / 5),

@@ -64,6 +64,30 @@ it('prints the schedule of a session again, also of one that was cut off', async
   );
 });
 
+it('asks who stepped in for whom where the protocol has stepping in, and nowhere else', async () => {
+  const { services, plan } = await prepared();
+  const reserves = plan.reserves ?? [];
+  expect(reserves.length).toBe(2);
+  must(await services.store.saveSettings({ prepared: plan }));
+  const { container } = renderScreen(<SheetPage session={null} />, services);
+  await screen.findByRole('heading', { name: 'The schedule on paper.' });
+  expect(container.querySelector('.paper-stand-ins')).toBeNull();
+  expect(screen.queryByText(/^Reserves, in order/)).toBeNull();
+  cleanup();
+  const protocol = { ...plan.schedule.protocol, reservesStepIn: true };
+  must(
+    await services.store.saveSettings({ prepared: { ...plan, schedule: { ...plan.schedule, protocol } } }),
+  );
+  renderScreen(<SheetPage session={null} />, services);
+  await screen.findByRole('heading', { name: 'The schedule on paper.' });
+  const names = reserves.map(({ pseudonym }) => pseudonym).join(', ');
+  const why = '5 left the room · 6 with another adult · 7 not taking part';
+  expect(screen.getByText(new RegExp(`Reserves, in order: ${names}\\. Why: ${why}\\.`))).toBeTruthy();
+  const heads = screen.getByRole('columnheader', { name: 'Who stepped in' }).closest('table');
+  // One line a reserve and one to spare.
+  expect(heads?.querySelectorAll('tbody tr')).toHaveLength(3);
+});
+
 it('says why there is nothing to print', async () => {
   const services = fakeServices();
   renderScreen(<SheetPage session={null} />, services);

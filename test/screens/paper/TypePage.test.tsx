@@ -5,6 +5,8 @@ import { afterEach, describe, expect, it } from 'vitest';
 import { sessionDetails } from '../../../src/analysis/index.ts';
 import type { KnownEntry } from '../../../src/journal/entry.ts';
 import { isKnown } from '../../../src/journal/known.ts';
+import { readOut } from '../../../src/journal/readOut.ts';
+import { fold } from '../../../src/journal/step.ts';
 import { problem } from '../../../src/kernel/result.ts';
 import type { Protocol } from '../../../src/model/protocol.ts';
 import type { VisitPlan } from '../../../src/model/visitPlan.ts';
@@ -141,6 +143,53 @@ describe('Typing in a sheet', () => {
     await on.user.click(screen.getByRole('button', { name: 'Empty this line' }));
     expect(screen.getByRole('alert').textContent).toBe('This line is empty.');
     expect(screen.getByText('nothing to undo yet')).toBeTruthy();
+  });
+
+  it('takes over which reserve stepped in for whom, shows it on the lines, and keeps it in the record', async () => {
+    const on = await bench({ reservesStepIn: true });
+    await begin(on);
+    const [first, second] = on.plan.children.map(({ pseudonym }) => pseudonym);
+    const [reserve] = on.plan.reserves ?? [];
+    const add = () => on.user.click(screen.getByRole('button', { name: 'Add the line' }));
+    await on.user.selectOptions(screen.getByLabelText('Who was away'), first ?? '');
+    await add();
+    expect(screen.getByRole('alert').textContent).toMatch(/all four are needed/);
+    await on.user.selectOptions(screen.getByLabelText('Why'), '6 with another adult');
+    await on.user.selectOptions(screen.getByLabelText('Who stepped in'), reserve?.pseudonym ?? '');
+    await on.user.type(screen.getByLabelText('From no.'), '9');
+    await add();
+    expect(screen.getByRole('alert').textContent).toMatch(
+      /^Line 9 is not on this sheet, whose lines go from 1 to 4/,
+    );
+    await on.user.clear(screen.getByLabelText('From no.'));
+    await on.user.type(screen.getByLabelText('From no.'), '3');
+    await add();
+    expect(
+      screen.getByText(`${reserve?.pseudonym} for ${first} (with another adult) from no. 3 to the end`),
+    ).toBeTruthy();
+    const lines = within(screen.getByRole('list', { name: 'Lines' })).getAllByRole('listitem');
+    expect(lines.map((line) => line.textContent?.replace(/^\d+\D?[\d:]+/, ''))).toEqual([
+      first,
+      second,
+      `${reserve?.pseudonym} for ${first}`,
+      second,
+    ]);
+    await on.user.click(numberField());
+    await on.user.keyboard('1111');
+    const stored = await keep(on);
+    expect(stored.journal.find(({ kind }) => kind === 'left')).toMatchObject({
+      child: on.plan.children[0]?.id,
+      reason: 'with another adult',
+      by: reserve?.id,
+    });
+    const children = readOut(fold(stored.header, stored.journal)).map(({ child }) => child);
+    expect(children[2]).toBe(reserve?.id);
+  });
+
+  it('asks nothing of stepping in where the protocol has none', async () => {
+    const on = await bench();
+    await begin(on);
+    expect(screen.queryByLabelText('Who stepped in')).toBeNull();
   });
 
   it('loses nothing in a reload, and goes on at the line after the last one typed', async () => {

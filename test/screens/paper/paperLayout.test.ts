@@ -32,6 +32,9 @@ const visit = (
     protocol: { intervalMs: 15_000, observeMs: 15_000, partLength: { kind: 'rounds', rounds }, ...more },
   });
 
+const waiting = (n: number) =>
+  Array.from({ length: n }, (_, k) => ({ id: `r${k}`, pseudonym: `Heron-${k}`, stratum: null }));
+
 const intervalsOf = (plan: VisitPlan) =>
   layOutSchedule(
     plan.schedule,
@@ -65,8 +68,12 @@ it('puts every interval of any schedule on the sheets once, in both forms, and n
       fc.constantFrom<PaperForm>('rows', 'rounds'),
       fc.integer({ min: 1, max: 14 }),
       fc.array(fc.string({ maxLength: 900 }), { maxLength: 9 }),
-      (children, rounds, parts, size, form, boxesPerRow, definitions) => {
-        const plan = visit(children, rounds, ['before', 'after', 'later'].slice(0, parts));
+      fc.integer({ min: 0, max: 30 }),
+      (children, rounds, parts, size, form, boxesPerRow, definitions, reserves) => {
+        const bare = visit(children, rounds, ['before', 'after', 'later'].slice(0, parts), {
+          reservesStepIn: true,
+        });
+        const plan = reserves === 0 ? bare : { ...bare, reserves: waiting(reserves) };
         if (form === 'rounds' && !hasRounds(plan, size)) return;
         const legend = definitions.map((text, k) => legendEntry(k + 1, 'off-task, by oneself', text));
         const sheet = paperLayout(plan, { size, form, legend, boxesPerRow });
