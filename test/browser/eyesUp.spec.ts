@@ -159,7 +159,8 @@ test('everyScreen: eyes-up with corners, left-handed; keys work, and a panel lea
   await expect
     .poll(async () => {
       const kinds = (await journalOnDisk(page, session)).map((entry) => entry.kind);
-      return kinds.filter((kind) => kind !== 'cued');
+      // A loaded machine may let the sound stand still for a moment, which is written down, too.
+      return kinds.filter((kind) => kind !== 'cued' && kind !== 'gap');
     })
     .toEqual(['started', 'marked', 'marked', 'withdrawn']);
 });
