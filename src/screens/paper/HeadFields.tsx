@@ -6,7 +6,8 @@ import { Choice } from '../../ui/Choice.tsx';
 import { SelectField, TextField } from '../../ui/Field.tsx';
 import { PurposeChoice } from '../before/PurposeChoice.tsx';
 import { useNewObserver } from '../before/useNewObserver.tsx';
-import { useServices } from '../services.ts';
+import { useServices, useWords } from '../services.ts';
+import { TimeField } from './TimeField.tsx';
 import type { Typing } from './useTyping.ts';
 
 /** Who wrote the sheet, when it began, and when its parts did. */
@@ -123,28 +124,16 @@ interface ClockProps {
   readonly onValue: (value: string) => void;
 }
 
-/** A time of the clock, typed as it stands on the sheet; what is no time is kept as it is and told. */
-function ClockField({ label, hint, value, onValue }: ClockProps) {
-  const { words } = useServices();
-  const [text, setText] = useState(value);
-  const [left, setLeft] = useState(true);
-  const wrong = left && text !== '' && clockTime(text) === null;
+/** A time of the clock. */
+function ClockField({ value, onValue, ...rest }: ClockProps) {
+  const { problems } = useWords();
   return (
-    <TextField
-      label={label}
-      hint={hint}
-      inputMode="numeric"
-      value={text}
-      problem={wrong ? words.problems['paper.badTime']({ found: text }) : undefined}
-      onChange={(event) => {
-        setText(event.target.value);
-        setLeft(false);
-        onValue(clockTime(event.target.value) ?? event.target.value.trim());
-      }}
-      onBlur={() => {
-        setLeft(true);
-        setText(clockTime(text) ?? text);
-      }}
+    <TimeField
+      {...rest}
+      text={value}
+      tidy={clockTime}
+      wrong={(found) => problems['paper.badTime']({ found })}
+      onText={(text) => onValue(clockTime(text) ?? text.trim())}
     />
   );
 }
@@ -157,24 +146,15 @@ interface MinutesProps {
 }
 
 /** Minutes and seconds from the beginning of a part. */
-function MinutesField({ label, hint, value, onValue }: MinutesProps) {
-  const { words } = useServices();
-  const [text, setText] = useState(value === null ? '' : words.paper.clock({ ms: value }));
-  const [left, setLeft] = useState(true);
-  const wrong = left && text !== '' && minutesAndSeconds(text) === null;
+function MinutesField({ value, onValue, ...rest }: MinutesProps) {
+  const { paper, problems } = useWords();
   return (
-    <TextField
-      label={label}
-      hint={hint}
-      inputMode="numeric"
-      value={text}
-      problem={wrong ? words.problems['paper.noOnset']({ found: text }) : undefined}
-      onChange={(event) => {
-        setText(event.target.value);
-        setLeft(false);
-        onValue(minutesAndSeconds(event.target.value));
-      }}
-      onBlur={() => setLeft(true)}
+    <TimeField
+      {...rest}
+      text={value === null ? '' : paper.clock({ ms: value })}
+      tidy={(text) => (minutesAndSeconds(text) === null ? null : text)}
+      wrong={(found) => problems['paper.noOnset']({ found })}
+      onText={(text) => onValue(minutesAndSeconds(text))}
     />
   );
 }

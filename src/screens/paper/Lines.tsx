@@ -4,14 +4,13 @@ import type { ScheduledInterval } from '../../schedule/layOut.ts';
 import { type PaperMeaning, paperNumbers, severalCodes } from '../../schedule/paperNumbers.ts';
 import { type PaperAnswer, watchedOnPaper } from '../../tasks/index.ts';
 import { Button } from '../../ui/Button.tsx';
-import { HeldButton } from '../../ui/HeldButton.tsx';
 import { Notice } from '../../ui/Notice.tsx';
-import { say } from '../../words/say.ts';
 import type { Words } from '../../words/words.ts';
 import { useServices } from '../services.ts';
 import { CountEntry } from './CountEntry.tsx';
 import { NumberEntry } from './NumberEntry.tsx';
 import { meaningText } from './paperTexts.ts';
+import { TypedSoFar } from './TypedSoFar.tsx';
 import type { Typing } from './useTyping.ts';
 
 interface Props {
@@ -124,17 +123,11 @@ export function Lines({ typing, intervals }: Props) {
           >
             {paper.emptyLine}
           </Button>
-          <HeldButton look="quiet" why={typing.undo === null ? paper.undoNothing : null} onClick={back}>
-            {paper.undo}
-          </HeldButton>
-          <span className="second small grow" role="status">
-            {paper.progress({ done: Object.keys(answers).length, of: intervals.length })},{' '}
-            {typing.kept === 'kept'
-              ? paper.keptSoFar
-              : typing.kept === 'keeping'
-                ? paper.keeping
-                : say(words.problems, typing.kept)}
-          </span>
+          <TypedSoFar
+            typing={typing}
+            onUndo={back}
+            progress={paper.progress({ done: Object.keys(answers).length, of: intervals.length })}
+          />
         </div>
       </div>
       <List {...{ intervals, answers, at, protocol }} childOf={childOf} onGo={go} />

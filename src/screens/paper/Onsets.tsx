@@ -6,12 +6,11 @@ import type { PaperOnset } from '../../tasks/index.ts';
 import { Button } from '../../ui/Button.tsx';
 import { Choice } from '../../ui/Choice.tsx';
 import { SelectField, TextField } from '../../ui/Field.tsx';
-import { HeldButton } from '../../ui/HeldButton.tsx';
 import { Notice } from '../../ui/Notice.tsx';
-import { say } from '../../words/say.ts';
 import { useServices } from '../services.ts';
 import { answerText } from './Lines.tsx';
 import { meaningText } from './paperTexts.ts';
+import { TypedSoFar } from './TypedSoFar.tsx';
 import type { Typing } from './useTyping.ts';
 
 interface Props {
@@ -118,21 +117,11 @@ export function Onsets({ typing, intervals }: Props) {
         })}
       </ul>
       <div className="row">
-        <HeldButton
-          look="quiet"
-          why={typing.undo === null ? paper.undoNothing : null}
-          onClick={() => typing.undo?.()}
-        >
-          {paper.undo}
-        </HeldButton>
-        <span className="second small grow" role="status">
-          {paper.onsetsTyped({ n: draft.onsets.length })},{' '}
-          {typing.kept === 'kept'
-            ? paper.keptSoFar
-            : typing.kept === 'keeping'
-              ? paper.keeping
-              : say(words.problems, typing.kept)}
-        </span>
+        <TypedSoFar
+          typing={typing}
+          onUndo={() => typing.undo?.()}
+          progress={paper.onsetsTyped({ n: draft.onsets.length })}
+        />
       </div>
     </div>
   );

@@ -1,28 +1,27 @@
 import { useState } from 'react';
 import { useLocation } from 'wouter';
-import { addClass } from '../../../tasks/index.ts';
+import { addClass, type ClassWish } from '../../../tasks/index.ts';
 import { Button } from '../../../ui/Button.tsx';
-import { TextField } from '../../../ui/Field.tsx';
+import { Form } from '../../../ui/Form.tsx';
 import { PageHead } from '../../../ui/PageHead.tsx';
 import { Sheet } from '../../../ui/Sheet.tsx';
 import { useServices } from '../../services.ts';
 import { useCurrentStudy } from '../../useCurrentStudy.ts';
 import { NotHere } from '../Stored.tsx';
 import { useDoing } from '../useDoing.tsx';
-import { ConditionChoice } from './ConditionChoice.tsx';
+import { ClassFields } from './ClassFields.tsx';
 
 /** /study/class/new: a name and a condition, then straight to its children. */
 export function AddClass() {
   const { words, deps } = useServices();
   const [, go] = useLocation();
   const study = useCurrentStudy();
-  const [name, setName] = useState('');
-  const [condition, setCondition] = useState<string | null>(null);
+  const [wish, setWish] = useState<ClassWish>({ name: '', condition: null });
   const { run, notice, busy } = useDoing();
   if (study === undefined) return <p className="second">{words.common.loading}</p>;
   if (study === null) return <NotHere />;
   const add = async () => {
-    const made = await run(addClass(deps, study.id, { name, condition }));
+    const made = await run(addClass(deps, study.id, wish));
     if (made.ok) go(`/study/class/${made.value.id}`);
   };
   return (
@@ -31,20 +30,8 @@ export function AddClass() {
         {words.study.newClassTitle}
       </PageHead>
       <Sheet>
-        <form
-          className="stack"
-          onSubmit={(event) => {
-            event.preventDefault();
-            void add();
-          }}
-        >
-          <TextField
-            label={words.study.className}
-            maxLength={200}
-            value={name}
-            onChange={(event) => setName(event.target.value)}
-          />
-          <ConditionChoice study={study} value={condition} onChange={setCondition} />
+        <Form className="stack" onSubmit={add}>
+          <ClassFields study={study} value={wish} onChange={setWish} />
           {notice}
           <div className="row">
             <Button type="submit" look="main" disabled={busy}>
@@ -54,7 +41,7 @@ export function AddClass() {
               {words.common.cancel}
             </a>
           </div>
-        </form>
+        </Form>
       </Sheet>
     </>
   );

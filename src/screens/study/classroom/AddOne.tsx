@@ -3,10 +3,11 @@ import type { Classroom } from '../../../model/classroom.ts';
 import { addChild, removeChild } from '../../../tasks/index.ts';
 import { Button } from '../../../ui/Button.tsx';
 import { Check } from '../../../ui/Choice.tsx';
-import { TextField } from '../../../ui/Field.tsx';
+import { Form } from '../../../ui/Form.tsx';
 import { useServices } from '../../services.ts';
 import { suggestPseudonym } from '../suggestPseudonym.ts';
 import { useDoing } from '../useDoing.tsx';
+import { ChildFields, childOf } from './ChildFields.tsx';
 
 /** One child at a time; the next free pseudonym stands there already. */
 export function AddOne({ classroom }: { readonly classroom: Classroom }) {
@@ -18,13 +19,7 @@ export function AddOne({ classroom }: { readonly classroom: Classroom }) {
   const taken = classroom.children.map((child) => child.pseudonym);
   const pseudonym = typed ?? suggestPseudonym(classroom.name, taken, words.study.animals.split(', '));
   const add = async () => {
-    const added = await run(
-      addChild(deps, classroom.id, {
-        pseudonym,
-        stratum: stratum.trim() === '' ? null : stratum,
-        consent,
-      }),
-    );
+    const added = await run(addChild(deps, classroom.id, { ...childOf({ pseudonym, stratum }), consent }));
     if (!added.ok) return;
     setTyped(null);
     const child = added.value.children.at(-1);
@@ -33,26 +28,13 @@ export function AddOne({ classroom }: { readonly classroom: Classroom }) {
     );
   };
   return (
-    <form
-      className="stack-tight"
-      onSubmit={(event) => {
-        event.preventDefault();
-        void add();
-      }}
-    >
-      <TextField
-        label={words.study.pseudonym}
-        hint={words.study.pseudonymHint}
-        maxLength={200}
-        value={pseudonym}
-        onChange={(event) => setTyped(event.target.value)}
-      />
-      <TextField
-        label={words.study.stratum}
-        hint={words.study.stratumHint}
-        maxLength={200}
-        value={stratum}
-        onChange={(event) => setStratum(event.target.value)}
+    <Form className="stack-tight" onSubmit={add}>
+      <ChildFields
+        value={{ pseudonym, stratum }}
+        onChange={(next) => {
+          if (next.pseudonym !== pseudonym) setTyped(next.pseudonym);
+          setStratum(next.stratum);
+        }}
       />
       <Check label={words.study.consent} checked={consent} onChange={setConsent} />
       {notice}
@@ -61,6 +43,6 @@ export function AddOne({ classroom }: { readonly classroom: Classroom }) {
           {words.study.addChild}
         </Button>
       </div>
-    </form>
+    </Form>
   );
 }

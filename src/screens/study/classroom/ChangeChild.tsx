@@ -2,9 +2,10 @@ import { useState } from 'react';
 import type { Child } from '../../../model/classroom.ts';
 import { renameChild } from '../../../tasks/index.ts';
 import { Button } from '../../../ui/Button.tsx';
-import { TextField } from '../../../ui/Field.tsx';
+import { Form } from '../../../ui/Form.tsx';
 import { useServices } from '../../services.ts';
 import { useDoing } from '../useDoing.tsx';
+import { ChildFields, childOf, type TypedChild } from './ChildFields.tsx';
 
 interface Props {
   readonly classroom: string;
@@ -18,43 +19,24 @@ interface Props {
 export function ChangeChild({ classroom, child, onWithdraw, onDone }: Props) {
   const { words, deps } = useServices();
   const { run, notice, busy } = useDoing();
-  const [pseudonym, setPseudonym] = useState(child.pseudonym);
-  const [stratum, setStratum] = useState(child.stratum ?? '');
+  const [typed, setTyped] = useState<TypedChild>({
+    pseudonym: child.pseudonym,
+    stratum: child.stratum ?? '',
+  });
   const save = async () => {
-    const kept = await run(
-      renameChild(deps, classroom, child.id, {
-        pseudonym,
-        stratum: stratum.trim() === '' ? null : stratum,
-      }),
-    );
+    const kept = await run(renameChild(deps, classroom, child.id, childOf(typed)));
     if (kept.ok) onDone();
   };
   return (
-    <form
+    <Form
       className="child-change stack-tight"
       aria-label={words.study.changeOf({ name: child.pseudonym })}
-      onSubmit={(event) => {
-        event.preventDefault();
-        void save();
-      }}
+      onSubmit={save}
       onKeyDown={(event) => {
         if (event.key === 'Escape') onDone();
       }}
     >
-      <TextField
-        label={words.study.pseudonym}
-        maxLength={200}
-        autoFocus
-        value={pseudonym}
-        onChange={(event) => setPseudonym(event.target.value)}
-      />
-      <TextField
-        label={words.study.stratum}
-        hint={words.study.stratumHint}
-        maxLength={200}
-        value={stratum}
-        onChange={(event) => setStratum(event.target.value)}
-      />
+      <ChildFields value={typed} onChange={setTyped} autoFocus />
       {notice}
       <div className="row">
         <Button type="submit" disabled={busy}>
@@ -67,6 +49,6 @@ export function ChangeChild({ classroom, child, onWithdraw, onDone }: Props) {
           {words.common.cancel}
         </Button>
       </div>
-    </form>
+    </Form>
   );
 }

@@ -2,35 +2,33 @@ import { useState } from 'react';
 import { useLocation } from 'wouter';
 import type { Classroom } from '../../../model/classroom.ts';
 import type { Study } from '../../../model/study.ts';
-import { removeClass, saveClass } from '../../../tasks/index.ts';
+import { type ClassWish, removeClass, saveClass } from '../../../tasks/index.ts';
 import { restoreClass } from '../../../tasks/restore.ts';
 import { Button } from '../../../ui/Button.tsx';
-import { TextField } from '../../../ui/Field.tsx';
+import { Form } from '../../../ui/Form.tsx';
 import { Sheet } from '../../../ui/Sheet.tsx';
 import { useServices } from '../../services.ts';
 import { useFarewell } from '../farewell.ts';
 import { useDoing } from '../useDoing.tsx';
-import { ConditionChoice } from './ConditionChoice.tsx';
+import { ClassFields } from './ClassFields.tsx';
+
+const factsOf = ({ name, condition }: Classroom): ClassWish => ({ name, condition });
 
 /** Name and condition of the class, and its way off the list. */
 export function ClassFacts({ classroom, study }: { readonly classroom: Classroom; readonly study: Study }) {
   const { words, deps } = useServices();
   const [, go] = useLocation();
   const farewell = useFarewell();
-  const [name, setName] = useState(classroom.name);
-  const [condition, setCondition] = useState(classroom.condition);
+  const [wish, setWish] = useState<ClassWish>(factsOf(classroom));
   const { run, tell, notice, busy } = useDoing();
   const save = async () => {
-    const [oldName, oldCondition] = [classroom.name, classroom.condition];
-    const kept = await run(saveClass(deps, classroom.id, { name, condition }));
+    const standing = factsOf(classroom);
+    const kept = await run(saveClass(deps, classroom.id, wish));
     if (!kept.ok) return;
-    setName(kept.value.name);
+    setWish(factsOf(kept.value));
     tell(words.study.taken, async () => {
-      const back = await saveClass(deps, classroom.id, { name: oldName, condition: oldCondition });
-      if (back.ok) {
-        setName(oldName);
-        setCondition(oldCondition);
-      }
+      const back = await saveClass(deps, classroom.id, standing);
+      if (back.ok) setWish(standing);
       return back;
     });
   };
@@ -42,20 +40,8 @@ export function ClassFacts({ classroom, study }: { readonly classroom: Classroom
   };
   return (
     <Sheet title={words.study.aClass}>
-      <form
-        className="stack-tight"
-        onSubmit={(event) => {
-          event.preventDefault();
-          void save();
-        }}
-      >
-        <TextField
-          label={words.study.className}
-          maxLength={200}
-          value={name}
-          onChange={(event) => setName(event.target.value)}
-        />
-        <ConditionChoice study={study} value={condition} onChange={setCondition} />
+      <Form className="stack-tight" onSubmit={save}>
+        <ClassFields study={study} value={wish} onChange={setWish} />
         {notice}
         <div className="row">
           <Button type="submit" disabled={busy}>
@@ -65,7 +51,7 @@ export function ClassFacts({ classroom, study }: { readonly classroom: Classroom
             {words.study.removeClass}
           </Button>
         </div>
-      </form>
+      </Form>
     </Sheet>
   );
 }

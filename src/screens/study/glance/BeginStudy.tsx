@@ -3,6 +3,7 @@ import { useLocation } from 'wouter';
 import { createStudy } from '../../../tasks/index.ts';
 import { Button } from '../../../ui/Button.tsx';
 import { TextField } from '../../../ui/Field.tsx';
+import { Form } from '../../../ui/Form.tsx';
 import { useServices } from '../../services.ts';
 import { newStudyTexts } from '../starterTexts.ts';
 import { useDoing } from '../useDoing.tsx';
@@ -18,13 +19,7 @@ export function BeginStudy() {
     if (made.ok) go('/study/class/new');
   };
   return (
-    <form
-      className="stack-tight"
-      onSubmit={(event) => {
-        event.preventDefault();
-        void begin();
-      }}
-    >
+    <Form className="stack-tight" onSubmit={begin}>
       <TextField
         label={words.study.ownName}
         hint={words.study.ownHint}
@@ -38,6 +33,6 @@ export function BeginStudy() {
           {words.study.ownBegin}
         </Button>
       </div>
-    </form>
+    </Form>
   );
 }

@@ -3,6 +3,7 @@ import type { Observer } from '../../../model/observer.ts';
 import { saveObserver } from '../../../tasks/index.ts';
 import { Button } from '../../../ui/Button.tsx';
 import { TextField } from '../../../ui/Field.tsx';
+import { Form } from '../../../ui/Form.tsx';
 import { useServices } from '../../services.ts';
 import { useDoing } from '../useDoing.tsx';
 import { KeyMapEditor } from './KeyMapEditor.tsx';
@@ -63,13 +64,7 @@ function Rename({ observer, onDone }: { readonly observer: Observer; readonly on
     if (kept.ok) onDone();
   };
   return (
-    <form
-      className="stack-tight grow"
-      onSubmit={(event) => {
-        event.preventDefault();
-        void save();
-      }}
-    >
+    <Form className="stack-tight grow" onSubmit={save}>
       <TextField
         label={words.study.observerName}
         maxLength={200}
@@ -84,6 +79,6 @@ function Rename({ observer, onDone }: { readonly observer: Observer; readonly on
           {words.common.cancel}
         </Button>
       </div>
-    </form>
+    </Form>
   );
 }

@@ -5,6 +5,7 @@ import { addObserver, removeObserver } from '../../../tasks/index.ts';
 import { restoreObserver } from '../../../tasks/restore.ts';
 import { Button } from '../../../ui/Button.tsx';
 import { TextField } from '../../../ui/Field.tsx';
+import { Form } from '../../../ui/Form.tsx';
 import { PageHead } from '../../../ui/PageHead.tsx';
 import { Sheet } from '../../../ui/Sheet.tsx';
 import { useServices } from '../../services.ts';
@@ -49,13 +50,7 @@ function Observers({ study }: { readonly study: Study }) {
                 <ObserverRow key={observer.id} observer={observer} onRemove={() => remove(observer)} />
               ))}
             </ul>
-            <form
-              className="line-foot row row-end"
-              onSubmit={(event) => {
-                event.preventDefault();
-                void add();
-              }}
-            >
+            <Form className="line-foot row row-end" onSubmit={add}>
               <TextField
                 label={words.study.observerName}
                 maxLength={200}
@@ -65,7 +60,7 @@ function Observers({ study }: { readonly study: Study }) {
               <Button type="submit" disabled={busy}>
                 {words.study.addObserver}
               </Button>
-            </form>
+            </Form>
           </Sheet>
         </div>
       )}
