@@ -27,6 +27,8 @@ interface Props {
   readonly chosen?: string | ReadonlySet<string> | null;
   /** CSS length that the picture's height keeps within, for example `50dvh`. */
   readonly fitHeight?: string;
+  /** No seat is wider than this (px). */
+  readonly seatAtMost?: number;
   /** Makes every seat a button. */
   readonly onSeat?: (seat: Seat) => void;
   /** Draws a seat that has a child its own way; null leaves it as it is. */
@@ -45,6 +47,7 @@ export function PlanView(props: Props) {
     next = null,
     chosen = null,
     fitHeight,
+    seatAtMost = 108,
     onSeat,
     seatAs,
     onPlace,
@@ -60,7 +63,7 @@ export function PlanView(props: Props) {
   const heights = tracks(view.rows + 2 * rim, new Set(view.seats.map((s) => s.y + rim)), open ? 1 : 0.4);
   const sum = (all: readonly number[]) => all.reduce((total, one) => total + one, 0);
   const [across, down] = [sum(widths), sum(heights)];
-  const widest = `${across * 108}px`;
+  const widest = `${across * seatAtMost}px`;
   const style: CSSProperties & Record<`--${string}`, number> = {
     '--plan-across': across,
     '--plan-down': down,

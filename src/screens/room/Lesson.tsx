@@ -98,7 +98,7 @@ function OnTheGlass({ leaving, covered, onCover }: GlassProps) {
   const look = covered ? `room-covered ${dim}` : eyesUp ? `room-eyes-up ${dim}` : marking ? '' : 'room-still';
   return (
     <main
-      className={`room ${look} ${open === null ? '' : 'room-with-panel'}`}
+      className={`room ${look} ${open === null || covered || eyesUp ? '' : 'room-with-panel'}`}
       data-keys={keysChosen || keysSeen}
       data-hand={manner.hand}
       onContextMenu={noMenu}

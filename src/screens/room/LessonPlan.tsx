@@ -53,6 +53,7 @@ export function LessonPlan() {
             next={next}
             chosen={chosen}
             fitHeight="100cqh - var(--you)"
+            seatAtMost={148}
             {...(counts
               ? {
                   seatAs: (seat, look) =>
