@@ -69,7 +69,8 @@ export function readClassList(text: string): Result<ClassList> {
     if (firstLine !== undefined)
       return stop(line, 'classList.twice', { pseudonym: excerpt(pseudonym), firstLine, line });
     lines.set(pseudonym, line);
-    children.push({ pseudonym, consent: true, stratum: cell('stratum') || null, seat: cell('seat') || null });
+    const [stratum, seat] = [cell('stratum') || null, cell('seat') || null];
+    children.push({ pseudonym, consent: true, stratum, seat, line });
     return null;
   });
   if (wrong !== null) return { ok: false, problem: wrong };

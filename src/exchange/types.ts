@@ -126,6 +126,8 @@ export interface ListedChild {
   readonly consent: true;
   readonly stratum: string | null;
   readonly seat: string | null;
+  /** Where the list says so. */
+  readonly line: number;
 }
 
 export interface ClassList {

@@ -6,7 +6,7 @@ import { ok, problem, type Result } from '../kernel/result.ts';
 import type { Child, Classroom } from '../model/classroom.ts';
 import { checkedChild } from './children.ts';
 import { editClassroom } from './edits.ts';
-import { placeOnSeats } from './listedSeats.ts';
+import { placeOnSeats, type SeatLeftOpen } from './listedSeats.ts';
 import type { Deps } from './ports.ts';
 import { sameName } from './text.ts';
 
@@ -25,8 +25,8 @@ export interface ClassListDone {
   readonly changed: number;
   /** Children without consent: counted, never written down. */
   readonly withoutConsent: number;
-  /** Seats of the list that could not be understood or were taken. */
-  readonly seatsLeftOpen: number;
+  /** Seats of the list that nobody was put on, line by line. */
+  readonly seatsLeftOpen: readonly SeatLeftOpen[];
 }
 
 /** Adds the children of a list to a class; a pseudonym that is there already keeps its child. */
@@ -41,7 +41,8 @@ export async function importClassList(
   if (!list.ok) return list;
   const { children: listed, leftOut, consentStated } = list.value;
   if (!consentStated && source.consent !== true) return problem('task.consentNotStated');
-  let [added, changed, seatsLeftOpen] = [0, 0, 0];
+  let [added, changed] = [0, 0];
+  let seatsLeftOpen: readonly SeatLeftOpen[] = [];
   const edited = await editClassroom(deps, classroom, (before) => {
     let state: Classroom = before;
     const ids = new Map<ListedChild, string>();
@@ -67,7 +68,7 @@ export async function importClassList(
     }
     const wishes = listed.flatMap((one) => {
       const child = ids.get(one);
-      return one.seat === null || child === undefined ? [] : [{ child, seat: one.seat }];
+      return one.seat === null || child === undefined ? [] : [{ child, seat: one.seat, line: one.line }];
     });
     const seated = placeOnSeats(state.plan, wishes, deps.random);
     seatsLeftOpen = seated.leftOpen;

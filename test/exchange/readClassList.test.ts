@@ -15,8 +15,8 @@ test('columns in any order; children without consent are counted and go no furth
     ok: true,
     value: {
       children: [
-        { pseudonym: 'Otter-07', consent: true, stratum: 'b', seat: 'A1' },
-        { pseudonym: 'Heron-02', consent: true, stratum: null, seat: null },
+        { pseudonym: 'Otter-07', consent: true, stratum: 'b', seat: 'A1', line: 2 },
+        { pseudonym: 'Heron-02', consent: true, stratum: null, seat: null, line: 5 },
       ],
       leftOut: 2,
       consentStated: true,

@@ -107,7 +107,15 @@ it('reads a class list with seats, and the same one again adds nobody', async ()
     'seat;child;stratum;consent\nA1;Otter-01;a;yes\n1-2;Otter-02;b;yes\nB3;Otter-03;a;yes\nby the door;Otter-04;b;yes\nA1;Otter-05;b;yes\n',
   );
   const done = given(await importClassList(deps, classroom.id, { content }));
-  expect(done).toMatchObject({ added: 5, changed: 0, withoutConsent: 0, seatsLeftOpen: 2 });
+  expect(done).toMatchObject({
+    added: 5,
+    changed: 0,
+    withoutConsent: 0,
+    seatsLeftOpen: [
+      { line: 5, seat: 'by the door', why: 'not understood' },
+      { line: 6, seat: 'A1', why: 'taken' },
+    ],
+  });
   const name = new Map(done.classroom.children.map((child) => [child.id, child.pseudonym]));
   const seats = done.classroom.plan?.seats.map(({ row, column, child }) => [
     row,

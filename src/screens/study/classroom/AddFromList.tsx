@@ -4,7 +4,7 @@ import { Button } from '../../../ui/Button.tsx';
 import { Check } from '../../../ui/Choice.tsx';
 import { TextArea } from '../../../ui/Field.tsx';
 import { FileButton } from '../../../ui/FileButton.tsx';
-import { useServices } from '../../services.ts';
+import { useServices, useWords } from '../../services.ts';
 import { useListImport } from './useListImport.ts';
 
 /** Lines that were typed or pasted. */
@@ -21,6 +21,7 @@ export function AddFromList({ classroom }: { readonly classroom: Classroom }) {
         value={lines}
         onChange={(event) => setLines(event.target.value)}
       />
+      <Columns />
       <Check label={words.study.consentFromList} checked={consent} onChange={setConsent} />
       {notice}
       <div className="row">
@@ -46,6 +47,7 @@ export function AddFromFile({ classroom }: { readonly classroom: Classroom }) {
   return (
     <div className="stack-tight">
       <p className="second small">{words.study.fileHint}</p>
+      <Columns />
       <Check label={words.study.consentFromList} checked={consent} onChange={setConsent} />
       {notice}
       <div className="row">
@@ -60,5 +62,25 @@ export function AddFromFile({ classroom }: { readonly classroom: Classroom }) {
         </FileButton>
       </div>
     </div>
+  );
+}
+
+/** What a list may say of a child beside its pseudonym, each with an example. */
+function Columns() {
+  const { study } = useWords();
+  const columns = [
+    [study.columnConsent, study.columnConsentText],
+    [study.columnStratum, study.columnStratumText],
+    [study.columnSeat, study.columnSeatText],
+  ];
+  return (
+    <dl className="list-columns second small">
+      {columns.map(([name, text]) => (
+        <div key={name}>
+          <dt>{name}</dt>
+          <dd>{text}</dd>
+        </div>
+      ))}
+    </dl>
   );
 }

@@ -37,7 +37,12 @@ export function CodesSheet({ set, onChange }: Props) {
   return (
     <Sheet title={study.codes}>
       <div className="stack">
-        <p className="second">{study.codesNote}</p>
+        <div className="stack-tight">
+          <p className="second">{study.codesNote}</p>
+          <p className="second small">
+            {study.codesKeys} <a href="#/study/observers">{study.codesKeysTo}</a>
+          </p>
+        </div>
         <div className="row">
           {starterSets(words).map((starter) => (
             <Button

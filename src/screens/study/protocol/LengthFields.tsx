@@ -37,7 +37,7 @@ export function LengthFields({ draft, change }: { readonly draft: ProtocolDraft;
       ) : (
         <NumberField
           label={study.rounds}
-          hint={study.partLengthHint}
+          hint={`${study.roundsHint({ kind: draft.method === 'headcount' ? 'headcount' : draft.rotation.kind })} ${study.partLengthHint}`}
           min={1}
           max={1000}
           value={partLength.rounds}

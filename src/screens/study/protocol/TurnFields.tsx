@@ -36,6 +36,7 @@ export function TurnFields({ draft, change }: { readonly draft: ProtocolDraft; r
       {rotation.kind === 'block' && (
         <NumberField
           label={study.inRow}
+          hint={study.inRowHint}
           min={1}
           max={240}
           value={rotation.intervals}

@@ -2,6 +2,22 @@ import type { Format } from '../../format.ts';
 
 type F = Format;
 
+interface OpenSeat {
+  readonly line: number;
+  readonly seat: string;
+  readonly why: 'not understood' | 'not in the plan' | 'taken';
+}
+
+/** What is wrong with many seats is seen in the first few. */
+const mostSeatsTold = 3;
+
+const openSeat = ({ line, seat, why }: OpenSeat): string =>
+  why === 'taken'
+    ? `Line ${line}: somebody else has seat “${seat}”; expected a free one.`
+    : why === 'not in the plan'
+      ? `Line ${line}: the plan has no seat “${seat}”; expected rows A to T (or 1 to 20) with 20 places each, such as B3.`
+      : `Line ${line}: seat “${seat}” is not understood; expected a row and a place, such as B3 or 2-3.`;
+
 /** A class, its children and the draw. */
 export const classWords = {
   newClassTitle: 'Which class?',
@@ -34,7 +50,8 @@ export const classWords = {
   /** One of these stands in pseudonyms where the class’s own name would tell too much. */
   animals: 'Otter, Heron, Badger, Wren, Hare, Finch, Newt, Vole',
   stratum: 'Stratum',
-  stratumHint: 'May stay empty. Children are drawn in proportion from each stratum.',
+  stratumHint:
+    'May stay empty. A group of which the draw takes its fair share: for example girls and boys, or year 3 and year 4.',
   howToAdd: 'How to add children',
   oneByOne: 'One at a time',
   numbered: 'Numbered',
@@ -47,14 +64,27 @@ export const classWords = {
   addNumbered: ({ first, last }: { first: string; last: string }) => `Write down ${first} to ${last}`,
   addNumberedOne: ({ first }: { first: string }) => `Write down ${first}`,
   list: 'Lines',
-  listHint: 'One pseudonym a line, or with commas: child, consent, stratum, seat.',
+  listHint:
+    'One pseudonym a line, such as Otter-01; or more with commas in this order: Otter-01, yes, year 3, B3.',
+  columnConsent: 'consent',
+  columnConsentText: 'yes or no. A line with no, or with nothing, is left out: nothing of it is kept.',
+  columnStratum: 'stratum',
+  columnStratumText: 'A group of which the draw takes its fair share, for example year 3. May be left out.',
+  columnSeat: 'seat',
+  columnSeatText:
+    'Row from the front, then place from the left as the children see it: B3 or 2-3 is the second row, third place. May be left out.',
   takeList: 'Take over the lines',
   fileHint:
-    'A CSV file with the columns child, consent, stratum and seat. Lines without consent are left out: nothing of them is kept.',
+    'A CSV file whose first line names its columns: child and consent, and stratum and seat if you like.',
   takeFile: 'Choose the class list',
   added: ({ name }: { name: string }) => `${name} is written down.`,
   listDone: (
-    { added, changed, left, seatsOpen }: { added: number; changed: number; left: number; seatsOpen: number },
+    {
+      added,
+      changed,
+      left,
+      seatsOpen,
+    }: { added: number; changed: number; left: number; seatsOpen: readonly OpenSeat[] },
     f: F,
   ) =>
     [
@@ -62,9 +92,10 @@ export const classWords = {
       left === 0
         ? 'No line was left out.'
         : `${f.whole(left)} ${f.plural(left, { one: 'line was', other: 'lines were' })} left out, without consent; nothing of ${f.plural(left, { one: 'it', other: 'them' })} is kept.`,
-      seatsOpen === 0
+      ...seatsOpen.slice(0, mostSeatsTold).map(openSeat),
+      seatsOpen.length <= mostSeatsTold
         ? ''
-        : `${f.whole(seatsOpen)} ${f.plural(seatsOpen, { one: 'seat is', other: 'seats are' })} open: the list’s word for it was not understood, or somebody sits there.`,
+        : `${f.whole(seatsOpen.length - mostSeatsTold)} more ${f.plural(seatsOpen.length - mostSeatsTold, { one: 'seat is', other: 'seats are' })} left open.`,
     ]
       .filter((sentence) => sentence !== '')
       .join(' '),

@@ -43,7 +43,7 @@ export const observerWords = {
   keysOf: ({ name }: { name: string }) => `Keys of ${name}`,
   keysHide: 'Close the keys',
   keysNote:
-    'For a keyboard or a page-turner. They work only while a lesson is recorded, and never while you type.',
+    'For a keyboard or a page-turner. They work only while a lesson is recorded, and never while you type. Code 1 is the first code of the protocol that you record with, code 2 the second.',
   manner: 'Layout and hand',
   mannerHide: 'Close layout and hand',
   mannerChanged: 'Layout and answers are changed.',

@@ -30,11 +30,13 @@ export const protocolWords = {
   durationHint:
     'One child all the time: you switch on and off as it happens. Gives the true time, and leaves no eyes for anybody else.',
   interval: 'Interval, in seconds',
-  intervalHint: 'Whole seconds, from 3 seconds to 10 minutes.',
+  intervalHint: 'From one prompt to the next. Whole seconds, from 3 seconds to 10 minutes.',
   observe: 'Seconds of watching',
-  observeHint: 'Whole seconds, from 3 seconds to 10 minutes.',
+  observeHint:
+    'Eyes on the child: what happens in this time counts. Whole seconds, from 3 seconds to 10 minutes.',
   record: 'Seconds for recording',
-  recordHint: 'From 3 seconds to 10 minutes; 0 for none.',
+  recordHint:
+    'Eyes on the tablet: time to touch what you saw; what happens now does not count. From 3 seconds to 10 minutes; 0 for none.',
   recordBetween: 'Either 0 or a whole number from 3 to 600 is needed.',
   lookAt: 'When to look',
   countAt: 'When to count',
@@ -45,14 +47,18 @@ export const protocolWords = {
   turnsNext: 'the next child at each interval',
   turnsNextHint: 'Each child’s looks are spread over the whole lesson.',
   turnsBlock: 'several intervals in a row for each child',
-  turnsBlockHint: 'Easier on the eyes; each child is seen in stretches.',
+  turnsBlockHint:
+    'A block of looks at one child, then a block at the next. Easier on the eyes; each child is seen in stretches.',
   turnsOne: 'one child throughout',
   turnsOneHint: 'Chance or you say which, when a visit is prepared.',
   turnsSweep: 'all children, one after the other, at each prompt',
-  turnsSweepHint: 'A sweep through the room, then a rest until the next prompt.',
+  turnsSweepHint:
+    'A sweep: your eyes go once through the room, a few seconds a child, and rest until the next prompt.',
   turnsTarget: 'a target child, now and then a peer',
   turnsTargetHint: 'One child is compared with the others of the class.',
   inRow: 'Intervals in a row',
+  inRowHint:
+    'The length of a block. At 4 intervals of 15 seconds each child is watched for a minute at a time.',
   eachSeconds: 'Seconds a child',
   eachHint: 'All children together have to fit into the interval.',
   peerEvery: 'A peer at every … look',
@@ -63,8 +69,21 @@ export const protocolWords = {
   byRounds: 'by rounds',
   minutes: 'Minutes a part',
   rounds: 'Rounds a part',
+  roundsHint: ({ kind }: { kind: string }) =>
+    kind === 'block'
+      ? 'A round is over when each child has had its block once.'
+      : kind === 'sweep'
+        ? 'A round is one sweep.'
+        : kind === 'target'
+          ? 'A round is over when each peer has had its look once.'
+          : kind === 'one'
+            ? 'A round is one look.'
+            : kind === 'headcount'
+              ? 'A round is one count.'
+              : 'A round is over when each child has had its turn once.',
   grace: 'Grace, in seconds',
-  graceHint: 'So long after a cue a touch still belongs to the interval before, if that is empty.',
+  graceHint:
+    'Fingers come late: so long after a prompt a touch still belongs to the interval before, if that is empty.',
   whom: 'Whom to watch, and how long',
   toDraw: 'Children to draw',
   reserves: 'Reserves',
@@ -115,12 +134,15 @@ export const protocolWords = {
     'One part, with an order by chance for each round as it might come. The real one comes with the visit.',
   codes: 'What can be recorded',
   codesNote:
-    'Two to six codes, in the order in which they stand in the room. “Cannot see” is always there and is no code.',
+    'A code is what one touch says of a child. Two to six of them, in the order in which they stand in the room. “Cannot see” is always there and is no code: such a look is missing.',
   codeSetName: 'Name of the code set',
   beginWith: ({ name }: { name: string }) => `Begin with ${name}`,
   starterUsed: ({ name }: { name: string }) => `The codes are those of ${name} now.`,
   codeLabel: ({ n }: { n: number }, f: F) => `Label of code ${f.whole(n)}`,
   codeGroup: ({ n }: { n: number }, f: F) => `Code ${f.whole(n)}`,
+  codesKeys:
+    'On a keyboard, 1 is the first code, 2 the second, and so on, and 0 is “cannot see”. Each observer may choose other keys.',
+  codesKeysTo: 'Observers and their keys',
   counts: 'How it counts',
   countsOn: 'as on-task',
   countsOff: 'as off-task',

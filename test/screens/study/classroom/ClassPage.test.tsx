@@ -95,6 +95,32 @@ describe('Writing children down', () => {
     expect((screen.getByLabelText('Lines') as HTMLTextAreaElement).value).toBe('');
   });
 
+  it('explains a list where it is pasted, and names the line of a seat that it cannot give', async () => {
+    const { children } = await emptyClass();
+    await userEvent.click(screen.getByRole('radio', { name: 'From a list' }));
+    expect(
+      screen.getByText(/such as Otter-01; or more with commas in this order: Otter-01, yes, year 3, B3/),
+    ).toBeTruthy();
+    expect(
+      screen.getByText(/A group of which the draw takes its fair share, for example year 3/),
+    ).toBeTruthy();
+    expect(screen.getByText(/B3 or 2-3 is the second row, third place/)).toBeTruthy();
+    await userEvent.click(screen.getByLabelText('Lines'));
+    await userEvent.paste(
+      ['B3', 'by the door', '2-3', 'Z9', '31', 'W1']
+        .map((seat, k) => `Wren-0${k + 1}, yes, year 3, ${seat}`)
+        .join('\n'),
+    );
+    await tap('Take over the lines');
+    const said = (await screen.findByText(/^6 children written down/)).textContent;
+    expect(said).toContain(
+      'Line 2: seat “by the door” is not understood; expected a row and a place, such as B3 or 2-3.',
+    );
+    expect(said).toContain('Line 3: somebody else has seat “2-3”; expected a free one.');
+    expect(said).toMatch(/2 more seats are left open\.$/);
+    expect((await children()).map(({ stratum }) => stratum)).toEqual(Array(6).fill('year 3'));
+  });
+
   it('keeps a pasted list of bare pseudonyms in the field until consent is said', async () => {
     const { children } = await emptyClass();
     await userEvent.click(screen.getByRole('radio', { name: 'From a list' }));

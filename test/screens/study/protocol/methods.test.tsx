@@ -31,6 +31,60 @@ const table = () =>
     .getAllByRole('row', { hidden: true })
     .map((row) => [...row.children].map((cell) => cell.textContent));
 
+/** What stands under a field as help. */
+const hintOf = (label: string) =>
+  document.getElementById(screen.getByLabelText(label).getAttribute('aria-describedby') ?? '')?.textContent;
+
+describe('the words of a protocol are explained where they are chosen:', () => {
+  it('watching and recording, block and sweep', async () => {
+    await newProtocol();
+    await choose(/^all children, one after the other.* A sweep: your eyes go once through the room/);
+    await choose(/^several intervals in a row.* A block of looks at one child/);
+    expect(hintOf('Intervals in a row')).toMatch(/^The length of a block\./);
+    await choose(/^partial interval/);
+    expect(hintOf('Seconds of watching')).toMatch(/what happens in this time counts/);
+    expect(hintOf('Seconds for recording')).toMatch(/what happens now does not count/);
+  });
+
+  it('a round, which is another thing in each rotation', async () => {
+    await newProtocol();
+    await choose(/^by rounds/);
+    const round = () => hintOf('Rounds a part')?.split('.')[0];
+    expect(round()).toBe('A round is over when each child has had its turn once');
+    await choose(/^several intervals in a row/);
+    expect(round()).toBe('A round is over when each child has had its block once');
+    await choose(/^all children, one after the other/);
+    expect(round()).toBe('A round is one sweep');
+    await choose(/^a target child/);
+    expect(round()).toBe('A round is over when each peer has had its look once');
+    await choose(/^one child throughout/);
+    expect(round()).toBe('A round is one look');
+    await choose(/^headcount/);
+    expect(round()).toBe('A round is one count');
+  });
+
+  it('a code, its key, and the way to other keys', async () => {
+    await newProtocol();
+    expect(screen.getByText(/^A code is what one touch says of a child/)).toBeTruthy();
+    expect(screen.getByText(/^On a keyboard, 1 is the first code/)).toBeTruthy();
+    expect(screen.getByRole('link', { name: 'Observers and their keys' }).getAttribute('href')).toBe(
+      '#/study/observers',
+    );
+  });
+
+  it('six codes are the most and two the fewest, said beside the button', async () => {
+    await newProtocol();
+    const away = screen.getByRole('button', { name: 'Take off-task away' });
+    expect(document.getElementById(away.getAttribute('aria-describedby') ?? '')?.textContent).toBe(
+      'two codes are the fewest',
+    );
+    for (let k = 0; k < 4; k++) await userEvent.click(screen.getByRole('button', { name: 'Add a code' }));
+    expect(screen.getByText('six codes are the most')).toBeTruthy();
+    await userEvent.click(screen.getByRole('button', { name: 'Add a code' }));
+    expect(screen.getAllByLabelText(/^Label of code/)).toHaveLength(6);
+  });
+});
+
 describe('the methods of a protocol', () => {
   it('headcount: a count a minute, and neither draw nor turns nor heads-up to ask for', async () => {
     const { kept } = await newProtocol();
