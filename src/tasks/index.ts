@@ -39,5 +39,6 @@ export { askRemoveStudy, type RemovalQuestion, removeStudy } from './removal.ts'
 export { addSeat, removeSeat, seatChild, setSeatingPlan, turnPlan } from './seating.ts';
 export { newSeed } from './seeds.ts';
 export { createStudy, type NewStudyTexts, renameStudy, type StudySettings, saveStudy } from './studies.ts';
+export { tryShort } from './tryShort.ts';
 export { adoptVisitFile } from './visitFiles.ts';
 export { type PreparedVisit, prepareVisit, type VisitWish } from './visits.ts';

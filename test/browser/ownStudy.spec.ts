@@ -64,3 +64,32 @@ test('from nothing to the classroom door: study, class, children, seats, draw, p
   await page.getByRole('link', { name: /A quick try/ }).click();
   await expect(page.getByText(/Version 1 was used and stays as it is/)).toBeVisible();
 });
+
+test('the first try as the readme tells it: from the demo study to a recording that is over in a minute', async ({
+  tablet,
+}) => {
+  const page = await tablet.visitOnce();
+  await tablet.goOffline();
+  await expect(page.getByText('Lookbell', { exact: true }).first()).toBeVisible();
+  await page.getByRole('button', { name: 'Open the demo study' }).click();
+  await page.getByRole('radio', { name: /Otter/ }).check();
+  await page.getByRole('button', { name: 'Try it for a minute' }).click();
+  await expect(page.getByText('2 looks a child in 1 minute, 6 children.')).toBeVisible();
+  await expectAccessible(page);
+  await picture(page, 'try-short');
+  await page.getByRole('button', { name: 'Prepare the visit' }).click();
+
+  // A touch too early leads to what is missing.
+  await page.getByRole('button', { name: 'Go in anyway' }).click();
+  const dialog = page.getByRole('dialog', { name: 'Who records on this tablet?' });
+  await dialog.getByRole('radio', { name: 'Quill' }).check();
+  await dialog.getByRole('radio', { name: /^practice/ }).check();
+  await dialog.getByRole('button', { name: 'Done' }).click();
+  await page.getByRole('button', { name: 'Play tone' }).click();
+  await page.getByRole('button', { name: 'In my ear' }).click();
+  await page.getByRole('button', { name: 'All are here' }).click();
+  await page.getByRole('button', { name: /^Go in/ }).click();
+  await page.waitForURL(/#\/room\/./);
+  await page.getByRole('button', { name: 'Start' }).click();
+  await expect(page.getByText(/^(0:[0-5]\d|1:00)$/).first()).toBeVisible({ timeout: 20_000 });
+});

@@ -14,12 +14,14 @@ import { PageHead } from '../../ui/PageHead.tsx';
 import { Sheet } from '../../ui/Sheet.tsx';
 import { say } from '../../words/say.ts';
 import { useServices } from '../services.ts';
+import { OpenDemo } from '../study/glance/OpenDemo.tsx';
 import { methodSentence } from '../study/methodSentence.ts';
 import { useCurrentStudy } from '../useCurrentStudy.ts';
 import { DaySheet } from './DaySheet.tsx';
 import { PreparedNotice, UnfinishedNotice } from './notices.tsx';
 import { PhaseChoice } from './PhaseChoice.tsx';
 import { TakeVisitFile } from './TakeVisitFile.tsx';
+import { TryShort } from './TryShort.tsx';
 import { placeOf, whatIsMissing } from './whatIsMissing.ts';
 
 const none: readonly string[] = [];
@@ -36,6 +38,7 @@ export function Prepare() {
       {study === null ? <NoStudy /> : <Choosing key={study.id} study={study} />}
       <TakeVisitFile />
       <p className="second small">{words.before.cautions}</p>
+      {study !== null && <p className="second small">{words.before.appIs}</p>}
     </div>
   );
 }
@@ -44,12 +47,18 @@ function NoStudy() {
   const { words } = useServices();
   return (
     <>
-      <PageHead note={words.before.noStudyText}>{words.before.noStudyTitle}</PageHead>
-      <p>
+      <PageHead
+        about={<strong>{words.common.appName}</strong>}
+        note={`${words.before.appIs} ${words.before.noStudyText}`}
+      >
+        {words.before.noStudyTitle}
+      </PageHead>
+      <div className="row">
         <a className="button button-main" href="#/study">
           {words.before.toStudy}
         </a>
-      </p>
+        <OpenDemo />
+      </div>
     </>
   );
 }
@@ -171,6 +180,15 @@ function Form({ study, classes, protocols, sessions }: FormProps) {
               />
               {asLast && (
                 <p className="second small">{words.before.protocolAsLast({ ofClass: last.ofClass })}</p>
+              )}
+              {(study.demo || sessions.every(({ here }) => !here)) && (
+                <TryShort
+                  study={study.id}
+                  onTake={({ id }) => {
+                    chooseProtocol(id);
+                    choosePhases(study.phases.length > 1 ? (study.phases[0] ?? 'all') : 'all');
+                  }}
+                />
               )}
               {protocols.length === 0 && (
                 <p>

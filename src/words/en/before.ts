@@ -17,6 +17,10 @@ const lessonsIn = (lessons: number, f: F): string =>
 
 /** Before the visit: choosing class, protocol and children, and the checks at the classroom door. */
 export const before = {
+  /** For somebody who opened the page by chance. */
+  appIs:
+    'Lookbell is the timer, the prompt and the record sheet of a lesson observation, and works out its figures: all on this tablet, with no network.',
+
   // choosing
   chooseTitle: 'What will you observe?',
   noStudyTitle: 'First, a study.',
@@ -41,6 +45,10 @@ export const before = {
   protocolAsLast: ({ ofClass }: { ofClass: boolean }) =>
     ofClass ? 'As last time in this class.' : 'As last time in this study.',
   toProtocol: 'Make a protocol',
+  tryShort: 'Try it for a minute',
+  tryShortHint:
+    'Five seconds a look, two rounds, one phase: enough to see how it goes, too little for a figure. Say “practice” where you say who records, and it stays out of all results.',
+  tryShortName: 'One minute, to try',
   phases: 'Phases of this lesson',
   phasesLast: ({ phases }: { phases: readonly string[] }, f: F) =>
     `Last time this class was seen in ${f.list(phases)} alone.`,

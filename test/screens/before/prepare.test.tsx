@@ -95,6 +95,37 @@ describe('Before the visit: choosing', () => {
     expect(screen.getByText('As last time in this study.')).toBeTruthy();
   });
 
+  it('makes and chooses what is over in a minute for a first try, once, until something was recorded here', async () => {
+    const services = fakeServices();
+    const { study, classroom } = await studyWithClass(services);
+    renderScreen(<Prepare />, services);
+    const tryIt = () => screen.getByRole('button', { name: 'Try it for a minute' });
+    await screen.findByRole('button', { name: 'Try it for a minute' });
+    await userEvent.click(tryIt());
+    const radio = await screen.findByRole<HTMLInputElement>('radio', { name: /^One minute, to try/ });
+    expect(radio.checked).toBe(true);
+    expect(screen.getByRole<HTMLInputElement>('radio', { name: 'only before' }).checked).toBe(true);
+    expect(screen.getByText('2 looks a child in 1 minute, 6 children.')).toBeTruthy();
+    await userEvent.click(tryIt());
+    const named = async () =>
+      must(await services.store.protocols(study.id)).filter(({ name }) => name === 'One minute, to try');
+    await waitFor(async () => expect(await named()).toHaveLength(1));
+    must(await recorded(services, classroom.id, (await named())[0]?.id ?? '', ['before']));
+    await waitFor(() => expect(screen.queryByRole('button', { name: 'Try it for a minute' })).toBeNull());
+  });
+
+  it('says what Lookbell is to somebody who opened it by chance, with a study and without', async () => {
+    const what = /Lookbell is the timer, the prompt and the record sheet of a lesson observation/;
+    renderScreen(<Prepare />, fakeServices());
+    expect(await screen.findByText(what)).toBeTruthy();
+    expect(screen.getByText('Lookbell')).toBeTruthy();
+    cleanup();
+    const services = fakeServices();
+    await studyWithClass(services);
+    renderScreen(<Prepare />, services);
+    expect(await screen.findByText(what)).toBeTruthy();
+  });
+
   it('asks for the phase where the class was last seen in one alone, and leads there', async () => {
     const { services, classroom, second } = await twoProtocols();
     must(await recorded(services, classroom.id, second.id, ['before']));

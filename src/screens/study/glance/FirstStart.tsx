@@ -6,10 +6,12 @@ import { OpenDemo } from './OpenDemo.tsx';
 
 /** Nothing is here yet: look around, or begin. */
 export function FirstStart() {
-  const { study } = useWords();
+  const { study, common, before } = useWords();
   return (
     <div className="stack">
-      <PageHead note={study.firstNote}>{study.firstTitle}</PageHead>
+      <PageHead about={<strong>{common.appName}</strong>} note={`${before.appIs} ${study.firstNote}`}>
+        {study.firstTitle}
+      </PageHead>
       <div className="columns">
         <Sheet title={study.demoTitle}>
           <div className="stack-tight">
