@@ -17,8 +17,8 @@ async function shownAsKept(page: Page): Promise<{ most: number }> {
   });
   await page.evaluate(() => {
     const tell = () => {
-      const [, of, kept] =
-        document.body.textContent?.match(/([\d,]+) entr(?:y|ies), (all|[\d,]+) kept/) ?? [];
+      const sign = document.querySelector('.room-kept')?.textContent;
+      const [, of, kept] = sign?.match(/([\d,]+) entr(?:y|ies), (all|[\d,]+) kept/) ?? [];
       const text = kept === 'all' ? of : kept;
       if (text !== undefined)
         (window as unknown as { keptShown(n: number): void }).keptShown(Number(text.replace(',', '')));
