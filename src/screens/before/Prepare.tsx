@@ -47,10 +47,7 @@ function NoStudy() {
   const { words } = useServices();
   return (
     <>
-      <PageHead
-        about={<strong>{words.common.appName}</strong>}
-        note={`${words.before.appIs} ${words.before.noStudyText}`}
-      >
+      <PageHead about={words.before.appIs} note={words.before.noStudyText}>
         {words.before.noStudyTitle}
       </PageHead>
       <div className="row">

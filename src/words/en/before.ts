@@ -19,7 +19,7 @@ const lessonsIn = (lessons: number, f: F): string =>
 export const before = {
   /** For somebody who opened the page by chance. */
   appIs:
-    'Lookbell is the timer, the prompt and the record sheet of a lesson observation, and works out its figures: all on this tablet, with no network.',
+    'Lookbell is the timer, the prompt and the record sheet of a lesson observation, on this tablet and with no network.',
 
   // choosing
   chooseTitle: 'What will you observe?',

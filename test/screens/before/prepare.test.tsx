@@ -118,7 +118,6 @@ describe('Before the visit: choosing', () => {
     const what = /Lookbell is the timer, the prompt and the record sheet of a lesson observation/;
     renderScreen(<Prepare />, fakeServices());
     expect(await screen.findByText(what)).toBeTruthy();
-    expect(screen.getByText('Lookbell')).toBeTruthy();
     cleanup();
     const services = fakeServices();
     await studyWithClass(services);

@@ -6,10 +6,10 @@ import { OpenDemo } from './OpenDemo.tsx';
 
 /** Nothing is here yet: look around, or begin. */
 export function FirstStart() {
-  const { study, common, before } = useWords();
+  const { study, before } = useWords();
   return (
     <div className="stack">
-      <PageHead about={<strong>{common.appName}</strong>} note={`${before.appIs} ${study.firstNote}`}>
+      <PageHead about={before.appIs} note={study.firstNote}>
         {study.firstTitle}
       </PageHead>
       <div className="columns">
