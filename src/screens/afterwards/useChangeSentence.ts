@@ -8,6 +8,11 @@ export interface Saying {
   readonly note: string;
 }
 
+interface Limits {
+  readonly lower: number | null;
+  readonly upper: number | null;
+}
+
 /** The sentences of change; they say no more than the design allows. */
 export function useChangeSentence(details: ChangeDetails): {
   readonly all: Saying;
@@ -21,10 +26,12 @@ export function useChangeSentence(details: ChangeDetails): {
     const klass = typeof values.class === 'string' ? { class: nameOf(values.class) } : {};
     return say(words.change, { code, values: { ...values, ...klass, before, after } });
   };
-  const range = (limits: { readonly lower: number | null; readonly upper: number | null }): string =>
-    limits.lower === null || limits.upper === null
-      ? words.change.noteNoRange
-      : words.change.noteRange({ lower: limits.lower, upper: limits.upper });
+  const range = ({ lower, upper }: Limits): string => {
+    if (lower === null || upper === null) return words.change.noteNoRange;
+    // A t interval knows nothing of 0 and 100 %; from two or three children it may promise what cannot be.
+    if (lower < -100 || upper > 100) return words.change.noteRangeTooWide;
+    return words.change.noteRange({ lower, upper });
+  };
 
   const of = ({ row, sentence }: ClassChangeDetails): Saying =>
     sentence.code === 'changeUndefined'

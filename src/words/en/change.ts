@@ -76,6 +76,8 @@ export const change = {
   noteRange: ({ lower, upper }: { lower: number; upper: number }, f: F) =>
     `Likely between ${signed(f, lower)} and ${signed(f, upper)} points.`,
   noteNoRange: 'How sure this is cannot be told from so few.',
+  noteRangeTooWide:
+    'How sure this is cannot be told from so few: the range would go beyond any change that there can be.',
   noteOneClass:
     'This describes one class on these days; without a comparison, the clock, the task or the break may have done it.',
   noteClasses: 'There is no comparison, so the clock, the task or the break may have done it.',
@@ -201,7 +203,9 @@ export const change = {
       .filter((s) => s !== '')
       .join('; '),
   how: ({ before, after, ways }: { before: string; after: string; ways: readonly Way[] }, f: F) =>
-    `${ways.length === 0 ? '' : `${upperFirst(waysText(ways), f)}. `}The unit is the child’s percentage: its sessions of “${before}” joined, and those of “${after}”; one record a visit, the primary observer’s. Paired t interval on the children’s changes; g is the mean change in standard deviations before, small-sample corrected (Becker 1988).`,
+    ways.length > 0 && ways.every(({ method }) => method === 'headcount')
+      ? `${upperFirst(waysText(ways), f)}. A headcount knows no children: the figures are shares of all that were counted in “${before}” and in “${after}”; one record a visit, the primary observer’s.`
+      : `${ways.length === 0 ? '' : `${upperFirst(waysText(ways), f)}. `}The unit is the child’s percentage: its sessions of “${before}” joined, and those of “${after}”; one record a visit, the primary observer’s. Paired t interval on the children’s changes; g is the mean change in standard deviations before, small-sample corrected (Becker 1988).`,
   caution: 'The figures describe lessons and groups. They say nothing about any one child.',
 } as const;
 

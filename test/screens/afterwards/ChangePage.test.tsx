@@ -42,6 +42,18 @@ test('one class without a comparison is described, and nothing more', async () =
   ).toBeTruthy();
 });
 
+test('two children with two looks each: no range is told that goes beyond any change', async () => {
+  const of = (phase: string, looks: Record<string, string>): Row[] =>
+    looksOf({ session: phase, observer: 'Quill', class: 'Otter', phase, condition: '' }, looks);
+  // Changes of +100 and 0 points: 50 ± 12.7 · 50, by hand.
+  await shown([
+    ...of('before', { 'Otter-1': '00', 'Otter-2': '11' }),
+    ...of('after', { 'Otter-1': '11', 'Otter-2': '11' }),
+  ]);
+  expect(screen.getByText(/^How sure this is cannot be told from so few: the range would go/)).toBeTruthy();
+  expect(document.body.textContent).not.toMatch(/Likely between/);
+});
+
 test('the figures of the worked class; the paired t only for the analyst', async () => {
   await shown(worked('Otter'));
   const row = screen.getByRole('row', { name: /Otter/ });

@@ -109,6 +109,14 @@ describe('change', () => {
     expect(change.noteRange({ lower: -3.4, upper: 25.2 })).toBe('Likely between −3 and +25 points.');
     expect(change.noteRange({ lower: -0.3, upper: 0.4 })).toBe('Likely between 0 and 0 points.');
   });
+
+  test('a headcount joins no children', () => {
+    const phases = { before: 'before', after: 'after' };
+    const way = (method: 'headcount' | 'momentary') => [{ method, lookAt: null }];
+    expect(change.how({ ...phases, ways: way('headcount') })).toContain('A headcount knows no children');
+    expect(change.how({ ...phases, ways: way('headcount') })).not.toContain('Paired t');
+    expect(change.how({ ...phases, ways: way('momentary') })).toContain('The unit is the child’s percentage');
+  });
 });
 
 describe('afterwards', () => {
