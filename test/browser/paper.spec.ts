@@ -132,7 +132,7 @@ test('a prepared visit prints in both sizes, is typed in offline from pencil, an
   // A wrong one, taken back; then off, on, left the room, on, on, off.
   for (const key of ['1', 'Control+z', '2', '1', '5', '1', '1', '2']) await page.keyboard.press(key);
   await expect(page.getByText('11 of 12 lines typed, kept as you type')).toBeVisible();
-  await expect(page.getByText('1 line is empty and will count as missed.')).toBeVisible();
+  await expect(page.getByText('1 line is empty and will count as missing.')).toBeVisible();
   await page.getByLabel('Started at').fill('10:50');
   await page.getByRole('button', { name: 'Keep as a session' }).click();
   await expect(page.getByRole('alert')).toContainText('The break cannot have started at 10:43');

@@ -10,9 +10,12 @@ type Counted = Pick<SessionDetails['phases'][number]['children'][number], 'score
 export function Completeness({
   details,
   method,
+  timed,
 }: {
   readonly details: SessionDetails;
   readonly method: Method;
+  /** Whether anybody knows when a mark was made: a sheet on paper does not say. */
+  readonly timed: boolean;
 }) {
   const words = useWords();
   const { afterwards } = words;
@@ -46,7 +49,7 @@ export function Completeness({
   return (
     <Sheet title={words.afterwards.completeness}>
       <div className="stack-tight">
-        {method !== 'duration' && <p>{words.afterwards.lateMarks({ late: details.late })}</p>}
+        {timed && method !== 'duration' && <p>{words.afterwards.lateMarks({ late: details.late })}</p>}
         <Table
           caption={words.afterwards.completeness}
           captionHidden

@@ -118,7 +118,7 @@ function Session({ session, answer }: { readonly session: StoredSession; readonl
             </Button>
           </div>
         </Sheet>
-        <Completeness details={details} method={method} />
+        <Completeness details={details} method={method} timed={header.fromPaper !== true} />
         <Timing details={details} fromPaper={header.fromPaper === true} />
         {foot}
       </div>
@@ -129,14 +129,16 @@ function Session({ session, answer }: { readonly session: StoredSession; readonl
       ? []
       : [{ phase: row.phase, percent: row.percentOnTask, lower: row.lower, upper: row.upper }],
   );
+  const missing = continuous ? time.note : words.afterwards.missingShare({ ...details, method });
   return (
     <div className="stack">
-      <PageHead about={about} note={words.afterwards.onTaskNote({ method })}>
+      <PageHead about={about} note={`${missing} ${words.afterwards.onTaskNote({ method })}`}>
         {phases.length === 0
           ? words.afterwards.nothingTitle
           : words.afterwards.onTaskTitle({ method, phases })}
       </PageHead>
       <PurposeLines header={header} />
+      <HandOverNotice study={header.study} />
       <div className="not-in-print">
         <Button onClick={() => setShown(false)}>{words.afterwards.hideFigures}</Button>
       </div>

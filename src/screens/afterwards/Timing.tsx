@@ -14,7 +14,7 @@ interface Props {
 export function Timing({ details: { timing }, fromPaper }: Props) {
   const words = useWords();
   const { afterwards } = words;
-  if (timing === null || timing.verdict === null) {
+  if (fromPaper || timing === null || timing.verdict === null) {
     return (
       <Sheet title={afterwards.timing} className="not-in-print">
         <p className="second">{fromPaper ? words.paper.timing : afterwards.timingUnknown}</p>

@@ -15,11 +15,21 @@ interface Props {
 export function VisitRow({ visit, held, byHand, onPair }: Props) {
   const words = useWords();
   const first = visit.sessions[0]?.summary.id ?? '';
+  const starts = visit.sessions.flatMap(
+    // A sheet was typed in at some other time.
+    ({ summary: { plannedStart, firstWall, fromPaper } }) =>
+      plannedStart ?? (fromPaper === true ? null : firstWall) ?? [],
+  );
+  const time = starts[0] === undefined ? '' : words.f.time(starts[0]);
+  const protocols = new Set(visit.sessions.flatMap(({ summary }) => summary.protocol?.name ?? []));
+  const facts = [time, words.f.list(visit.phases), words.f.list([...protocols])].filter(
+    (text) => text !== '',
+  );
   return (
     <li className="visit">
       <div className="visit-class">
         <strong>{visit.klass}</strong>
-        <span className="second small">{words.f.list(visit.phases)}</span>
+        <span className="second small">{facts.join(' · ')}</span>
       </div>
       <ul className="visit-records">
         {visit.sessions.map((session) => (

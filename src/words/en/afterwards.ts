@@ -115,6 +115,12 @@ export const afterwards = {
     reasons.length === 0
       ? 'Nothing is missing.'
       : `${f.whole(reasons.reduce((sum, r) => sum + r.n, 0))} missing: ${f.list(reasons.map((r) => `${r.reason} (${f.whole(r.n)})`))}.`,
+  missingShare: ({ scored, planned, method }: { scored: number; planned: number; method: Method }, f: F) => {
+    const missing = planned - scored;
+    if (missing <= 0) return 'Nothing is missing.';
+    const things = method === 'momentary' ? 'looks' : method === 'headcount' ? 'scans' : 'intervals';
+    return `${f.percent((100 * missing) / planned)} of the ${things} are missing (${f.whole(missing)} of ${f.whole(planned)}).`;
+  },
   lateMarks: ({ late }: { late: number }, f: F) =>
     late === 0
       ? 'No mark came late.'

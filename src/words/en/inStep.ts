@@ -44,7 +44,7 @@ interface SignCounts {
 
 const signs = ({ missed, late, corrected }: SignCounts, f: F): string => {
   const said = [
-    missed === 0 ? '' : `${f.whole(missed)} missed`,
+    missed === 0 ? '' : `${f.whole(missed)} without a mark`,
     late === 0 ? '' : `${f.whole(late)} late`,
     corrected === 0 ? '' : `${f.whole(corrected)} corrected`,
   ].filter((text) => text !== '');

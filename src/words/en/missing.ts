@@ -2,7 +2,7 @@ import type { MissingReason } from '../../model/missing.ts';
 
 /** Why an interval is missing, as people read it; files keep the fixed forms of `model/missing.ts`. */
 export const missing = {
-  missed: 'missed',
+  missed: 'no mark',
   'out of view': 'out of view',
   'left the room': 'left the room',
   'with another adult': 'with another adult',

@@ -70,7 +70,7 @@ export const paper = {
   legend: 'What the numbers mean',
   legendLater: ({ page }: { page: number }, f: F) => `What the numbers mean stands on page ${f.whole(page)}.`,
   reasons: ({ list }: { list: readonly string[] }) =>
-    `No mark: ${list.join(' · ')}. An empty line counts as missed.`,
+    `No mark: ${list.join(' · ')}. An empty line counts as missing.`,
   numbered: ({ number, text }: { number: number; text: string }, f: F) => `${f.whole(number)} ${text}`,
   cannotSee: 'cannot see',
   none: 'none of them',
@@ -209,7 +209,7 @@ export const paper = {
   finishText: ({ empty }: { empty: number }, f: F) =>
     empty === 0
       ? 'Every line is typed. Once it is a session, changes are corrections that say why.'
-      : `${f.whole(empty)} ${f.plural(empty, { one: 'line is', other: 'lines are' })} empty and will count as missed. Once it is a session, changes are corrections that say why.`,
+      : `${f.whole(empty)} ${f.plural(empty, { one: 'line is', other: 'lines are' })} empty and will count as missing. Once it is a session, changes are corrections that say why.`,
   finishOnsets: 'Once it is a session, changes are corrections that say why.',
   keep: 'Keep as a session',
   putAway: 'Put the sheet away',

@@ -29,7 +29,7 @@ const journal = async (services: ReturnType<typeof fakeServices>) =>
 test('completeness comes first: what is missing and why, and no figure', async () => {
   await shown({ 2: 'missed', 4: null, 5: 'off' });
   expect(screen.getByRole('heading', { level: 1 }).textContent).toBe('4 of 6 looks are scored.');
-  expect(screen.getByText('2 missing: missed (1) and out of view (1).')).toBeTruthy();
+  expect(screen.getByText('2 missing: no mark (1) and out of view (1).')).toBeTruthy();
   expect(screen.getByText(/farthest from its planned moment was 5 ms away/)).toBeTruthy();
   expect(document.body.textContent).not.toContain('%');
   expect(screen.queryByRole('img')).toBeNull();
@@ -43,6 +43,9 @@ test('one tap shows the figures, another covers them', async () => {
     'On-task at 75\u202f% of the looks, between 30 and 95\u202f%.',
   );
   expect(screen.getByRole('img', { name: /^Round sheet of Class Otter/ })).toBeTruthy();
+  // How much is missing stands beside it, and that all of it is on this tablet alone.
+  expect(screen.getByText(/^33 % of the looks are missing \(2 of 6\)\./)).toBeTruthy();
+  expect(screen.getByText('Not handed over: 1')).toBeTruthy();
   // Two looks a child are too few: said beside each child, not on top.
   expect(screen.getAllByText(/too few to speak of this child alone/)).toHaveLength(3);
   await userEvent.click(screen.getByRole('button', { name: 'Cover the figures' }));
@@ -204,7 +207,7 @@ test('a recorded duration is told in time, stretch by stretch, and says why none
     [120_000, { kind: 'ended', reason: 'complete' }],
   );
   expect(heading).toBe('1:50 of 2:00 minutes were watched.');
-  screen.getByText('0:10 minutes are missing: missed.');
+  screen.getByText('0:10 minutes are missing: no mark.');
   screen.getByText(/A recorded duration has no single looks/);
   await userEvent.click(screen.getByRole('button', { name: 'Show the figures' }));
   const table = screen.getByRole('table', { name: 'From touch to touch' });
@@ -212,7 +215,7 @@ test('a recorded duration is told in time, stretch by stretch, and says why none
     [...row.querySelectorAll('td, th')].map((cell) => cell.textContent).join(' '),
   );
   expect(rows).toEqual([
-    '0:00 0:10 0:10 missed Otter-01',
+    '0:00 0:10 0:10 no mark Otter-01',
     '0:10 1:10 1:00 on-task Otter-01',
     '1:10 2:00 0:50 off-task Otter-01',
   ]);

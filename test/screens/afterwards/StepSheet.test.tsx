@@ -77,7 +77,7 @@ test('where one record alone has signs, they are named', async () => {
     { looks: long },
     { looks: lost },
   );
-  expect(text(sheet)).toContain('Just there Quill has 2 missed, Marsh nothing of the kind.');
+  expect(text(sheet)).toContain('Just there Quill has 2 without a mark, Marsh nothing of the kind.');
 });
 
 test('simply disagreeing', async () => {

@@ -60,8 +60,8 @@ test('undefined kappa says why, nowhere a number', async () => {
 test('what only one of them scored is left out, and by whom', async () => {
   await shown('..110', '110.0');
   await screen.findByRole('heading', { level: 1 });
-  expect(screen.getByText('Marsh: missed (2).')).toBeTruthy();
-  expect(screen.getByText('Quill: missed (1).')).toBeTruthy();
+  expect(screen.getByText('Marsh: no mark (2).')).toBeTruthy();
+  expect(screen.getByText('Quill: no mark (1).')).toBeTruthy();
 });
 
 test('one observer alone cannot be compared', async () => {

@@ -38,6 +38,8 @@ describe('the visits', () => {
       'Tuesday 3 November',
     ]);
     expect(await screen.findByText(/4 scored, 2 missing/)).toBeTruthy();
+    // When, in which phase, and by which protocol: two visits of one day are told apart.
+    expect(screen.getAllByText(/^\d\d:\d\d · .+ · .+$/)).toHaveLength(2);
   });
 
   test('two observers of one visit can be compared, one alone cannot', async () => {

@@ -148,7 +148,7 @@ describe('a stretch of no use', () => {
     await room.until(90);
     fireEvent.click(button('correct …'));
     expect(panel().queryByRole('button', { name: /last looks/ })).toBeNull();
-    inPanel('a stretch is of no use …', 'the last minute', 'missed');
+    inPanel('a stretch is of no use …', 'the last minute', 'no mark');
     panel().getByText('The time from 0:30 to 1:30 will be missing.');
     inPanel('Take it out');
     await room.until(100);
