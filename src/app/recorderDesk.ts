@@ -37,6 +37,10 @@ export function recorderDesk(
       store: {
         append: (entries) => store.appendEntries(header.id, entries),
         pack: () => store.pack(header.id),
+        stored: async () => {
+          const read = await store.readSession(header.id);
+          return read.ok ? (read.value?.journal.length ?? 0) : null;
+        },
       },
     };
     const says = header.schedule.kind === 'laid' ? header.schedule.protocol.cues.headsUp?.says : undefined;

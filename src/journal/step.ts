@@ -114,7 +114,7 @@ function apply(draft: Draft, entry: KnownEntry): void {
       break;
     case 'resumed':
       if (entry.repeats === undefined) close(draft, entry.at, (cover) => cover.reason === 'paused');
-      else repeat(draft, entry.repeats);
+      else repeat(draft, entry.repeats, entry.at);
       break;
     case 'clockNudged':
       draft.nudge += entry.by;
@@ -199,10 +199,23 @@ function swap(draft: Draft, a: number, b: number): void {
   }
 }
 
-/** An interval begins anew: neither what was said of its first half stands, nor the pause that broke it. */
-function repeat(draft: Draft, interval: number): void {
+/**
+ * An interval begins anew at session time `at`: neither what was said of its first half stands, nor the pause that broke
+ * it, nor what kept from watching in that half and is over. What still holds when the pause ends holds from `at` on.
+ */
+function repeat(draft: Draft, interval: number, at: number): void {
   draft.sayings.delete(interval);
-  draft.covers = draft.covers.filter(({ reason, to }) => reason !== 'paused' || to !== null);
+  draft.covers = draft.covers
+    .filter(({ reason, to }) => reason !== 'paused' || to !== null)
+    .flatMap((cover) => upTo(cover, at));
+  draft.standIns = draft.standIns.flatMap((standIn) => upTo(standIn, at));
+}
+
+/** A stretch as it stands when session time turns back to `at`; none when it lay wholly after it and is over. */
+function upTo<T extends { readonly from: number; readonly to: number | null }>(stretch: T, at: number): T[] {
+  if (stretch.to === null) return [{ ...stretch, from: Math.min(stretch.from, at) }];
+  const to = Math.min(stretch.to, at);
+  return stretch.from < to || stretch.to <= at ? [{ ...stretch, to }] : [];
 }
 
 function endStandIn(draft: Draft, child: string, at: number): void {

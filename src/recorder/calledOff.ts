@@ -16,6 +16,8 @@ const ofTheStart: ReadonlySet<EntryKind> = new Set<EntryKind>(['started', 'clock
  */
 export function callOff({ book, cues }: Pick<Desk, 'book' | 'cues'>, { now, place }: Present): boolean {
   if (place.phase !== 'counting in' || place.part !== 0) return false;
+  // A first interval that is done again turns time back below 0: the session has begun all the same.
+  if (book.state.entries.some(({ kind }) => kind === 'cued' || kind === 'resumed')) return false;
   for (const { kind, writer, seq } of book.state.entries)
     if (ofTheStart.has(kind)) book.write(now, { kind: 'withdrawn', target: { writer, seq } });
   cues.takeBack();

@@ -74,7 +74,7 @@ export const pause: Deed = ({ book, clock, cues }, { now, place, page }) => {
 };
 
 /** A cue that is given at once would come before anybody is ready. */
-const breathMs = 1000;
+export const breathMs = 1000;
 
 export const resume: Deed = ({ book, clock, cues, headsUp, plan, protocol }, { now, place, page }) => {
   if (place.phase !== 'paused') return;

@@ -50,18 +50,20 @@ export function planOf(header: SessionHeader): Plan | null {
 /**
  * The intervals of the parts that have begun, on the session's clock, in order of their cues; of a part that was closed
  * only those whose cue came before.
+ * @param continuous a duration record: what is watched ends with its part, while a last look may still be marked
  */
 export function timedIntervals(
   plan: Plan,
   { origins, closed }: Pick<JournalState, 'origins' | 'closed'>,
+  continuous = false,
 ): TimedInterval[] {
   return plan.intervals.flatMap((line) => {
     const origin = origins[line.part] ?? null;
     if (origin === null) return [];
     const cueAt = origin + line.cueMs;
-    return cueAt < (closed[line.part] ?? Number.POSITIVE_INFINITY)
-      ? [{ number: line.number, cueAt, closeAt: origin + line.closeMs }]
-      : [];
+    const closedAt = closed[line.part] ?? Number.POSITIVE_INFINITY;
+    const closeAt = continuous ? Math.min(origin + line.closeMs, closedAt) : origin + line.closeMs;
+    return cueAt < closedAt ? [{ number: line.number, cueAt, closeAt }] : [];
   });
 }
 

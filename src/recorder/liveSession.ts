@@ -23,8 +23,8 @@ export interface LiveSession {
   callOff(): void;
   /** A code; null = observed, none of the codes occurred. */
   touch(code: string | null, at: PageMs): void;
-  /** Headcount: children on-task and children present. */
-  count(on: number, present: number, at: PageMs): void;
+  /** Headcount: children on-task and children present; `of`: the interval whose figure was stepped on from. */
+  count(on: number, present: number, at: PageMs, of?: number): void;
   cannotSee(at: PageMs): void;
   /** What stands at the other intervals of each pair changes places: the wrong child was watched. */
   swap(pairs: readonly (readonly [number, number])[]): void;

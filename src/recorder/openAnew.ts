@@ -12,9 +12,12 @@ const countInFromTap = countInMs + headStartMs;
 
 type Ports = Pick<RecorderPorts, 'page' | 'wall' | 'audio'>;
 
-/** Milliseconds from now to session time 0. The wall clock is read as the tick check says. */
-function waitMs({ wall }: Pick<Ports, 'wall'>, { at, nudgeMs = 0 }: Beginning): number {
-  return at === undefined ? countInFromTap : at - (wall.now() + nudgeMs);
+/**
+ * Milliseconds from now to session time 0. The wall clock is read as the tick check says.
+ * @param sinceTap milliseconds since the tap: two observers who tap together begin together, however long either sound takes
+ */
+function waitMs({ wall }: Pick<Ports, 'wall'>, { at, nudgeMs = 0 }: Beginning, sinceTap = 0): number {
+  return at === undefined ? Math.max(headStartMs, countInFromTap - sinceTap) : at - (wall.now() + nudgeMs);
 }
 
 /** Why it cannot begin like this: the agreed second is so near that nobody could be counted in. */
@@ -31,9 +34,10 @@ export function openAnew(
   ports: Ports,
   options: LiveOptions,
   how: Beginning,
+  sinceTap: number,
 ): void {
   const { page, wall, audio } = ports;
-  const wait = waitMs(ports, how);
+  const wait = waitMs(ports, how, sinceTap);
   clock.start(page.now(), -wait);
   const latency = audio.facts()?.latencyMs ?? null;
   book.write(-wait, {

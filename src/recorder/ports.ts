@@ -114,6 +114,8 @@ export interface LockPort {
 
 /** Where the journal of one session is kept; its header is kept before. */
 export interface SessionStore {
+  /** How many entries of the session are kept; null when it cannot be told. */
+  readonly stored?: () => Promise<number | null>;
   /** ok when the rows are durable; anything else, a rejection too, means that nothing of them is. */
   append(entries: readonly JournalEntry[]): Promise<Result<null>>;
   /** After the end: row by row becomes one record. */

@@ -65,6 +65,7 @@ export type Refusal =
   | 'after the last interval'
   | 'class interrupted'
   | 'nothing before'
+  | 'another scan'
   /** A palm or a second touch of the same finger. */
   | 'double touch';
 

@@ -77,7 +77,7 @@ export class RoomView {
   timedIn(state: JournalState): readonly TimedInterval[] {
     if (this.basis?.origins !== state.origins || this.basis.closed !== state.closed) {
       this.basis = { origins: state.origins, closed: state.closed };
-      this.timed = timedIntervals(this.plan, state);
+      this.timed = timedIntervals(this.plan, state, this.continuous);
     }
     return this.timed;
   }

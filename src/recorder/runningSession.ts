@@ -64,8 +64,8 @@ export class RunningSession implements LiveSession {
     this.run.take({ kind: 'code', code }, at);
   }
 
-  count(on: number, present: number, at: PageMs): void {
-    this.run.take({ kind: 'count', on, present }, at);
+  count(on: number, present: number, at: PageMs, of?: number): void {
+    this.run.take({ kind: 'count', on, present, ...(of === undefined ? {} : { of }) }, at);
   }
 
   cannotSee(at: PageMs): void {

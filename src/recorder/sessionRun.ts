@@ -95,6 +95,7 @@ export class SessionRun {
     if (book.state.ended !== null) return problem('recorder.ended');
     const near = tooNear(ports, how);
     if (near !== null) return { ok: false, problem: near };
+    const tapped = ports.page.now();
     const taken = await grip.take(protocol.cues, {
       wakeLock: () => this.changed(),
       visibility: () => {
@@ -107,20 +108,25 @@ export class SessionRun {
       },
     });
     if (!taken.ok) return taken;
+    // Another window may have recorded on since this journal was read: what it wrote must not be written over.
+    if (((await ports.store.stored?.()) ?? 0) > book.journal.length) {
+      this.dispose();
+      return problem('recorder.goneOn');
+    }
     time.look();
-    this.goOn(how);
+    this.goOn(how, ports.page.now() - tapped);
     this.tick();
     return taken;
   }
 
   /** Starts session time: counting in, or where the grid of a session that was cut off stands now. */
-  private goOn(how: Beginning): void {
+  private goOn(how: Beginning, sinceTap = 0): void {
     const { ports, options } = this.inputs;
     const { book, cues } = this.parts;
     const { clock } = this.parts.time;
     const stand = resumption(book.state, options.resumeFrom ?? [], ports.wall.now());
     if (stand === null) {
-      openAnew(book, clock, ports, options, how);
+      openAnew(book, clock, ports, options, how, sinceTap);
       return;
     }
     clock.start(ports.page.now(), stand.now);

@@ -3,6 +3,7 @@ import { readOut } from '../journal/readOut.ts';
 import type { JournalState } from '../journal/state.ts';
 import type { PageMs } from '../kernel/units.ts';
 import type { Method } from '../model/protocol.ts';
+import { breathMs } from './deeds.ts';
 import { isEcho, type TouchDown } from './doubleTouch.ts';
 import type { Felt, Refusal, RoomSnapshot } from './roomSnapshot.ts';
 import { intervalBefore, type TimedInterval, whoseTouch } from './whoseTouch.ts';
@@ -13,7 +14,8 @@ export const armedForMs = 5000;
 /** What a touch says of an interval. */
 export type TouchWord =
   | { readonly kind: 'code'; readonly code: string | null }
-  | { readonly kind: 'count'; readonly on: number; readonly present: number }
+  /** `of`: the interval whose figure was stepped on from, where the glass showed one. */
+  | { readonly kind: 'count'; readonly on: number; readonly present: number; readonly of?: number }
   | { readonly kind: 'cannot see' };
 
 export interface TouchAt {
@@ -67,18 +69,27 @@ export class TouchDesk {
   ): Extract<EntryBody, { kind: 'marked' | 'missing' }> | null {
     const down: TouchDown = { at: touch.page, target: targetOf(word) };
     if (isEcho(this.last, down)) return this.refuse('double touch');
+    const again = repeated(state, timed);
+    const since = again === null ? Number.NaN : touch.at - again.from;
+    // In the breath before a repeated cue the interval before is long over: nobody means it.
+    if (again?.breath === true && since >= 0 && since < breathMs && this.armedBefore(touch.at) === null)
+      return this.refuse('before the first cue');
     const answer = whoseTouch({
       intervals: timed,
       at: touch.at,
-      graceMs: this.graceMs,
+      // Nor is anything late just after time turned back.
+      graceMs: since >= 0 && since <= this.graceMs ? -1 : this.graceMs,
       isEmpty: (number) => isEmpty(state, number, touch.at),
       isBarred: (number) => isBarred(state, timed, number, this.method === 'duration' ? touch.at : null),
       before: this.armedBefore(touch.at),
     });
     if (!answer.taken) return this.refuse(answer.why);
+    const { interval, late, before } = answer;
+    // A step on the figure of one scan says nothing of another: its prompt came between glass and finger.
+    if (word.kind === 'count' && word.of !== undefined && word.of !== interval)
+      return this.refuse('another scan');
     this.last = down;
     this.armed = null;
-    const { interval, late, before } = answer;
     this.felt = {
       count: (this.felt?.count ?? 0) + 1,
       interval,
@@ -97,6 +108,8 @@ export class TouchDesk {
 
   /** The same word once more changes nothing, so it makes no entry; it is felt all the same. */
   private saysSoAlready(state: JournalState, interval: number, word: TouchWord, at: number): boolean {
+    // What a swap brought is no word of this touch: undoing the swap would take it along.
+    if (state.swapped.has(interval)) return false;
     const sayings = state.sayings.get(interval) ?? [];
     const last = sayings.at(-1);
     if (last === undefined || (last.kind !== 'marked' && last.kind !== 'missing')) return false;
@@ -110,6 +123,17 @@ export class TouchDesk {
     const wiped = sayings.findLastIndex((saying) => saying.kind !== 'marked' || saying.code === null);
     return sayings.slice(wiped + 1).some((saying) => saying.kind === 'marked' && saying.code === word.code);
   }
+}
+
+/** Where session time turned back last for an interval to be done again, and whether a breath lies before its cue. */
+function repeated(
+  { entries }: JournalState,
+  timed: readonly TimedInterval[],
+): { readonly from: number; readonly breath: boolean } | null {
+  const last = entries.findLast((entry) => entry.kind === 'resumed' && entry.repeats !== undefined);
+  if (last?.kind !== 'resumed') return null;
+  const cueAt = timed.find(({ number }) => number === last.repeats)?.cueAt ?? Number.NaN;
+  return { from: last.at, breath: cueAt - last.at === breathMs };
 }
 
 function targetOf(word: TouchWord): string {

@@ -61,7 +61,7 @@ export function CountingFrom({ children }: { readonly children: ReactNode }) {
         keep({ ...latest.current, present: next.present });
         return;
       }
-      live.count(next.on, next.present, at);
+      live.count(next.on, next.present, at, now.current?.number);
       // Before the first cue nothing is taken, nor the echo of a touch: then the seats stay as they were.
       if ((live.snapshot().felt?.count ?? 0) === (now.felt?.count ?? 0)) return;
       keep({ seats: new Map(latest.current.seats).set(markOf(live.snapshot()), next.tapped), present: null });

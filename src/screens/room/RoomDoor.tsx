@@ -91,6 +91,10 @@ function CutOff({ summary, first }: { readonly summary: SessionSummary; readonly
   const observer = summary.observer.name;
   const close = async (): Promise<void> => {
     setClosing(false);
+    if (await device.otherTabRecords()) {
+      setProblem(words.problems['recorder.otherTabRecords']);
+      return;
+    }
     const closed = await finishUnfinished(deps, summary.id);
     if (!closed.ok) setProblem(say(words.problems, closed.problem));
   };

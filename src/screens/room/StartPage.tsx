@@ -22,7 +22,7 @@ interface Props {
 /** The page of the one tap that begins (or goes on with) a session; the tap also unlocks the sound. */
 export function StartPage({ title, text, start, how = {}, children }: Props) {
   const live = useLive();
-  const { words } = useCoreServices();
+  const { words, recorder } = useCoreServices();
   const { room, problems } = words;
   const { header, pseudonyms, plan, unit } = useFacts();
   const [, go] = useLocation();
@@ -42,6 +42,12 @@ export function StartPage({ title, text, start, how = {}, children }: Props) {
     setProblem(null);
     const begun = await live.begin(how);
     if (begun.ok) return;
+    if (begun.problem.code === 'recorder.goneOn') {
+      // The door reads the session anew.
+      recorder.close();
+      go('/room');
+      return;
+    }
     setProblem(say(problems, begun.problem));
     setStarting(false);
   };

@@ -3,6 +3,7 @@ export const recording = {
   'recorder.noSound': 'The sound does not start. Touch Start again; without sound the cue is shown.',
   'recorder.ended': 'This session has ended already.',
   'recorder.otherTabRecords': 'Another window of this tablet records. Go on there, or close it first.',
+  'recorder.goneOn': 'Another window has recorded on meanwhile. Take the session up again.',
   'recorder.storeFailed': 'The tablet did not keep this. It is asked again.',
   'recorder.storeSlow': 'The tablet takes long to keep this. It is asked again.',
   'recorder.startTooNear': ({ seconds }: { seconds: number }) =>

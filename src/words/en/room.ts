@@ -247,10 +247,11 @@ export const room = {
   notTaken: ({ why }: { why: string }) =>
     (
       ({
-        'before the first cue': 'Not taken: the first cue has not come yet.',
+        'before the first cue': 'Not taken: the cue has not come yet.',
         'after the last interval': 'Not taken: the last look is closed.',
         'class interrupted': 'Not taken: the class is interrupted.',
         'nothing before': 'There is no look before this one.',
+        'another scan': 'Not taken: a new scan has just begun.',
         'not running': 'Not taken: the schedule is not running.',
       }) as Record<string, string>
     )[why] ?? why,

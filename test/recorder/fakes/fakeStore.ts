@@ -27,6 +27,10 @@ export class FakeStore implements SessionStore {
     return this.mood === 'kept, then lost' ? problem('store.full') : ok(null);
   }
 
+  async stored(): Promise<number> {
+    return this.rows.size;
+  }
+
   async pack(): Promise<Result<null>> {
     this.packed += 1;
     return ok(null);

@@ -66,6 +66,11 @@ export class Lesson {
     await this.clock.advance(this.zero + at - this.clock.page);
   }
 
+  /** Page time of this moment. */
+  get now() {
+    return pageMs(this.clock.page);
+  }
+
   /** A touch at this moment. */
   touch(code: string | null): void {
     this.session.touch(code, pageMs(this.clock.page));
