@@ -14,7 +14,7 @@ import type { Plan } from './grid.ts';
 import type { HeadsUp } from './headsUp.ts';
 import type { Correction } from './liveSession.ts';
 import type { SoundDesk } from './soundDesk.ts';
-import { countInMs, type Standing } from './standing.ts';
+import { breathMs, countInMs, type Standing } from './standing.ts';
 import type { TouchDesk } from './touchDesk.ts';
 import { timeOf, undoable } from './undoable.ts';
 
@@ -72,9 +72,6 @@ export const pause: Deed = ({ book, clock, cues }, { now, place, page }) => {
   book.write(now, { kind: 'paused' });
   cues.takeBack();
 };
-
-/** A cue that is given at once would come before anybody is ready. */
-export const breathMs = 1000;
 
 export const resume: Deed = ({ book, clock, cues, headsUp, plan, protocol }, { now, place, page }) => {
   if (place.phase !== 'paused') return;

@@ -4,6 +4,9 @@ import type { Plan } from './grid.ts';
 /** Seconds that are counted before a part begins: three, two, one. */
 export const countInMs = 3000;
 
+/** Before the cue of an interval that is done again: one that is given at once would come before anybody is ready. */
+export const breathMs = 1000;
+
 /** Where a session stands, whatever the clocks do. */
 export type Standing =
   | { readonly phase: 'counting in' | 'running' | 'paused' | 'interrupted'; readonly part: number }

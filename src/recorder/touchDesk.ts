@@ -3,9 +3,9 @@ import { readOut } from '../journal/readOut.ts';
 import type { JournalState } from '../journal/state.ts';
 import type { PageMs } from '../kernel/units.ts';
 import type { Method } from '../model/protocol.ts';
-import { breathMs } from './deeds.ts';
 import { isEcho, type TouchDown } from './doubleTouch.ts';
 import type { Felt, Refusal, RoomSnapshot } from './roomSnapshot.ts';
+import { breathMs } from './standing.ts';
 import { intervalBefore, type TimedInterval, whoseTouch } from './whoseTouch.ts';
 
 /** "Child before" waits this long for its touch, then forgets it. */
