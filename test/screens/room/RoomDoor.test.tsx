@@ -75,6 +75,18 @@ test('it is closed for good only after the consequence was read', async () => {
   expect(kept.ok && kept.value?.ended).toBe('early');
 });
 
+test('what another window records at this moment is not closed from here', async () => {
+  const services = await cutOff();
+  const device = { ...services.device, otherTabRecords: async () => true };
+  const user = userEvent.setup();
+  renderScreen(<RoomDoor />, { ...services, device }, '/room');
+  await user.click(await screen.findByRole('button', { name: 'Close it for good' }));
+  await user.click(within(screen.getByRole('dialog')).getByRole('button', { name: 'Close it' }));
+  await screen.findByText(/^Another window of this tablet records/);
+  const kept = await services.store.session('session-1');
+  expect(kept.ok && kept.value?.ended).toBe(null);
+});
+
 test('a session that runs is one touch away', async () => {
   const live = new FakeLive(snapshotOf(headerOf(), [], 20_000));
   renderScreen(<RoomDoor />, fakeServices({ recorder: deskWith(live) }), '/room');
