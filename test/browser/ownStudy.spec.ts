@@ -1,4 +1,5 @@
 import { expectAccessible } from './support/accessible.ts';
+import { throughTheDoor } from './support/observing.ts';
 import { picture } from './support/picture.ts';
 import { expect, test } from './support/test.ts';
 
@@ -85,11 +86,7 @@ test('the first try as the readme tells it: from the demo study to a recording t
   await dialog.getByRole('radio', { name: 'Quill' }).check();
   await dialog.getByRole('radio', { name: /^practice/ }).check();
   await dialog.getByRole('button', { name: 'Done' }).click();
-  await page.getByRole('button', { name: 'Play tone' }).click();
-  await page.getByRole('button', { name: 'In my ear' }).click();
-  await page.getByRole('button', { name: 'All are here' }).click();
-  await page.getByRole('button', { name: /^Go in/ }).click();
-  await page.waitForURL(/#\/room\/./);
+  await throughTheDoor(page);
   await page.getByRole('button', { name: 'Start' }).click();
   await expect(page.getByRole('img', { name: /interval \d+ of 12;/ })).toBeVisible({ timeout: 20_000 });
 });

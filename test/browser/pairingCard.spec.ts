@@ -5,32 +5,12 @@ import type { Locator, Page } from '@playwright/test';
 import type { SessionHeader } from '../../src/model/session.ts';
 import { expectAccessible } from './support/accessible.ts';
 import { sessionOf } from './support/kept.ts';
-import { lookingAt, start, touch } from './support/observing.ts';
+import { goInAs, lookingAt, start, touch } from './support/observing.ts';
 import { picture } from './support/picture.ts';
 import { shortVisitFile } from './support/shortVisit.ts';
 import { expect, test } from './support/test.ts';
 
 const address = (page: Page, hash: string) => `${page.url().split('#')[0]}#${hash}`;
-
-/** Who records, and beside whom; then all that is asked for at the door, and in. */
-async function goInAs(page: Page, observer: string, beside: RegExp | null): Promise<void> {
-  await page.getByRole('button', { name: 'Choose' }).click();
-  const dialog = page.getByRole('dialog');
-  const known = dialog.getByRole('radio', { name: observer, exact: true });
-  if ((await known.count()) > 0) await known.check();
-  else {
-    await dialog.getByLabel('Name of the observer').fill(observer);
-    await dialog.getByRole('button', { name: 'Add' }).click();
-    await expect(known).toBeChecked();
-  }
-  if (beside !== null) await dialog.getByRole('radio', { name: beside }).check();
-  await dialog.getByRole('button', { name: 'Done' }).click();
-  await page.getByRole('button', { name: 'Play tone' }).click();
-  await page.getByRole('button', { name: 'In my ear' }).click();
-  await page.getByRole('button', { name: 'All are here' }).click();
-  await page.getByRole('button', { name: /^Go in/ }).click();
-  await page.waitForURL(/#\/room\/./);
-}
 
 /** The header of a session as it lies in the tablet's database. */
 async function headerOnDisk(page: Page, session: string): Promise<SessionHeader> {
